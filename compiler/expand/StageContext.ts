@@ -1,0 +1,13 @@
+import type { FindingList } from '../findings/FindingList';
+import type { MergedDocument } from '../merge/types';
+
+/** What every stage after the shape check needs to report well. */
+export interface StageContext {
+  readonly document: MergedDocument;
+  readonly findings: FindingList;
+  /**
+   * Entries (`chains/arm`) that were refused earlier. They are left out, and what refers to them stays silent:
+   * one root cause, one finding.
+   */
+  readonly poisoned: ReadonlySet<string>;
+}

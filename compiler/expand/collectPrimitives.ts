@@ -1,0 +1,118 @@
+import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
+import { mergePatch } from '../merge/mergePatch';
+import { expandPart } from '../parts/expandPart';
+import type { Side, Vec3 } from '../rig/Rig';
+import type { JsonValue, Path } from '../syntax/types';
+import { mirrorEntry } from './mirrorEntry';
+import { COLLECTIONS, type Collection, type MadePrimitives, type PartEntry, type PrimitiveEntries, type Sided } from './primitives';
+import { mirrorId, sideOfId } from './sides';
+
+type Collected = { readonly [C in Collection]: Map<string, Sided<PrimitiveEntries[C]>> };
+type SideOption = Side | 'both';
+
+function emptyCollections(): Collected {
+  return { chains: new Map(), controls: new Map(), solvers: new Map(), constraints: new Map(), guide_lines: new Map() };
+}
+
+/** The ids under which a part or primitive appears: one for each side it stands on. */
+function sidedIds(id: string, option: SideOption): readonly { readonly id: string; readonly side: Side }[] {
+  if (option !== 'both') {
+    const needsSuffix = option !== 'centre' && sideOfId(id) === 'centre';
+    return [{ id: needsSuffix ? `${id}.${option}` : id, side: option }];
+  }
+  const left = sideOfId(id) === 'left' ? id : `${id}.left`;
+  return [
+    { id: left, side: 'left' },
+    { id: mirrorId(left), side: 'right' },
+  ];
+}
+
+function addMade(into: Collected, made: MadePrimitives, side: Side, partId: string): void {
+  for (const collection of COLLECTIONS) {
+    for (const [id, entry] of Object.entries(made[collection] ?? {})) {
+      const target = into[collection] as Map<string, Sided<unknown>>;
+      target.set(id, { id, side, entry, path: ['parts', partId], part: partId });
+    }
+  }
+}
+
+function mirrorMade(made: MadePrimitives, left: Vec3): MadePrimitives {
+  const copy: Partial<Record<Collection, Record<string, unknown>>> = {};
+  for (const collection of COLLECTIONS) {
+    const entries: Record<string, unknown> = {};
+    for (const [id, entry] of Object.entries(made[collection] ?? {})) {
+      entries[mirrorId(id)] = mirrorEntry(entry as PrimitiveEntries[Collection], left);
+    }
+    copy[collection] = entries;
+  }
+  return copy as MadePrimitives;
+}
+
+function addPart(into: Collected, id: string, part: PartEntry, left: Vec3): void {
+  const option: SideOption = ('side' in part ? part.side : undefined) ?? sideOfId(id);
+  const [first, second] = sidedIds(id, option);
+  if (!first) return;
+  const made = expandPart(first, part);
+  addMade(into, made, first.side, id);
+  if (second) addMade(into, mirrorMade(made, left), second.side, id);
+}
+
+/** Merges an author's entry onto what a part made under the same id, or adds it as new. */
+function addEntry<C extends Collection>(
+  into: Map<string, Sided<PrimitiveEntries[C]>>,
+  sided: { readonly id: string; readonly side: Side },
+  entry: PrimitiveEntries[C],
+  path: Path,
+): void {
+  if (entry.omit) {
+    into.delete(sided.id);
+    return;
+  }
+  const made = into.get(sided.id);
+  into.set(sided.id, {
+    id: sided.id,
+    side: made?.side ?? sided.side,
+    entry: made
+      ? (mergePatch(made.entry as unknown as JsonValue, entry as unknown as JsonValue) as unknown as PrimitiveEntries[C])
+      : entry,
+    path,
+    part: made?.part ?? null,
+  });
+}
+
+function addEntries<C extends Collection>(
+  into: Map<string, Sided<PrimitiveEntries[C]>>,
+  collection: C,
+  entries: Readonly<Record<string, PrimitiveEntries[C]>>,
+  left: Vec3,
+  isPoisoned: (place: string) => boolean,
+): void {
+  for (const [id, entry] of Object.entries(entries)) {
+    if (isPoisoned(`${collection}/${id}`)) continue;
+    const path = [collection, id];
+    const option: SideOption = entry.side ?? sideOfId(id);
+    const sides = into.has(id) && option !== 'both' ? [{ id, side: option }] : sidedIds(id, option);
+    sides.forEach((sided, index) => {
+      addEntry(into, sided, index === 0 ? entry : mirrorEntry<C>(entry, left), path);
+    });
+  }
+}
+
+/** Writes out every part and side and lays the author's own entries on top, by id, as RFC 7396 merge patches. */
+export function collectPrimitives(
+  recipe: EvaluatedRecipe,
+  left: Vec3,
+  poisoned: ReadonlySet<string>,
+): Collected {
+  const collected = emptyCollections();
+  const isPoisoned = (place: string): boolean => poisoned.has(place);
+  for (const [id, part] of Object.entries(recipe.parts ?? {})) {
+    if (!isPoisoned(`parts/${id}`)) addPart(collected, id, part, left);
+  }
+  addEntries(collected.chains, 'chains', recipe.chains ?? {}, left, isPoisoned);
+  addEntries(collected.controls, 'controls', recipe.controls ?? {}, left, isPoisoned);
+  addEntries(collected.solvers, 'solvers', recipe.solvers ?? {}, left, isPoisoned);
+  addEntries(collected.constraints, 'constraints', recipe.constraints ?? {}, left, isPoisoned);
+  addEntries(collected.guide_lines, 'guide_lines', recipe.guide_lines ?? {}, left, isPoisoned);
+  return collected;
+}

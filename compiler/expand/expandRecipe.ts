@@ -1,0 +1,53 @@
+import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
+import { collectPrimitives } from './collectPrimitives';
+import type { Sided } from './primitives';
+import { readSceneFrame } from './sceneFrame';
+import { mirrorPoint } from './sides';
+import { specifyChain } from './specifyChain';
+import { specifyControl } from './specifyControl';
+import { specifyConstraint, specifyGuideLine, specifySolver } from './specifyLinks';
+import type { StageContext } from './StageContext';
+import type { ExpandedRecipe, LandmarkPoints, SceneFrame } from './types';
+
+function specifyAll<E, S>(
+  entries: ReadonlyMap<string, Sided<E>>,
+  specify: (sided: Sided<E>, context: StageContext) => S | null,
+  context: StageContext,
+): readonly S[] {
+  const specified: S[] = [];
+  for (const sided of entries.values()) {
+    const specification = specify(sided, context);
+    if (specification !== null) specified.push(specification);
+  }
+  return specified;
+}
+
+function readLandmarks(
+  recipe: EvaluatedRecipe,
+  scene: SceneFrame,
+  poisoned: ReadonlySet<string>,
+): ReadonlyMap<string, LandmarkPoints> {
+  const landmarks = new Map<string, LandmarkPoints>();
+  for (const [name, landmark] of Object.entries(recipe.landmarks ?? {})) {
+    if (poisoned.has(`landmarks/${name}`)) continue;
+    const mirrored = landmark.side === 'left' ? mirrorPoint(landmark.at, scene.left) : landmark.at;
+    landmarks.set(name, { left: landmark.at, right: landmark.right ?? mirrored });
+  }
+  return landmarks;
+}
+
+/** Writes a recipe out in primitives: parts expanded, sides split, defaults filled in. */
+export function expandRecipe(recipe: EvaluatedRecipe, context: StageContext): ExpandedRecipe {
+  const scene = readSceneFrame(recipe, context);
+  const primitives = collectPrimitives(recipe, scene.left, context.poisoned);
+  return {
+    scene,
+    landmarks: readLandmarks(recipe, scene, context.poisoned),
+    chains: specifyAll(primitives.chains, specifyChain, context),
+    controls: specifyAll(primitives.controls, specifyControl, context),
+    solvers: specifyAll(primitives.solvers, specifySolver, context),
+    constraints: specifyAll(primitives.constraints, specifyConstraint, context),
+    guideLines: specifyAll(primitives.guide_lines, specifyGuideLine, context),
+    notes: Object.entries(recipe.notes ?? {}).map(([key, value]) => ({ key, value })),
+  };
+}

@@ -1,0 +1,41 @@
+import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
+import type { Side } from '../rig/Rig';
+import type { Path } from '../syntax/types';
+
+type Entry<K extends keyof EvaluatedRecipe> = NonNullable<EvaluatedRecipe[K]> extends Readonly<Record<string, infer E>>
+  ? E
+  : never;
+
+/** Primitives as the language writes them, after expressions; parts give these and authors adjust them. */
+export type ChainEntry = Entry<'chains'>;
+export type ControlEntry = Entry<'controls'>;
+export type SolverEntry = Entry<'solvers'>;
+export type ConstraintEntry = Entry<'constraints'>;
+export type GuideLineEntry = Entry<'guide_lines'>;
+export type PartEntry = Entry<'parts'>;
+
+export interface PrimitiveEntries {
+  readonly chains: ChainEntry;
+  readonly controls: ControlEntry;
+  readonly solvers: SolverEntry;
+  readonly constraints: ConstraintEntry;
+  readonly guide_lines: GuideLineEntry;
+}
+
+export type Collection = keyof PrimitiveEntries;
+
+export const COLLECTIONS = ['chains', 'controls', 'solvers', 'constraints', 'guide_lines'] as const satisfies Collection[];
+
+/** What one part makes, in the recipe's own language, keyed by id. */
+export type MadePrimitives = {
+  readonly [C in Collection]?: Readonly<Record<string, PrimitiveEntries[C]>>;
+};
+
+/** One primitive on one side, with where it came from. */
+export interface Sided<E> {
+  readonly id: string;
+  readonly side: Side;
+  readonly entry: E;
+  readonly path: Path;
+  readonly part: string | null;
+}
