@@ -1,0 +1,17 @@
+/** Below this length, relative to the vectors a result was made from, a direction is rounding noise. */
+export const DIRECTION_TOLERANCE = 1e-12;
+
+/**
+ * Below this cosine of the middle angle the first and third axes count as one line. Rounding leaves about 1e-16 in
+ * a matrix entry, so at 1e-10 the third angle still has six good digits; below it is noise and is set to zero.
+ */
+export const GIMBAL_TOLERANCE = 1e-10;
+
+/**
+ * Above this cosine between two quaternions the sine in the slerp weights loses digits, while a straight line
+ * between them is exact to 1e-13 of a turn.
+ */
+export const SLERP_LINEAR_COSINE = 1 - 1e-12;
+
+/** Relative to the rig's size: what rest must keep when solvers and constraints run over it. */
+export const REST_TOLERANCE = 1e-9;
