@@ -1,0 +1,115 @@
+import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
+import { mergePatch } from '../merge/mergePatch';
+import type { HouseRules } from '../schema/generated/houseTypes';
+import type { JsonValue } from '../syntax/types';
+import { resolveFindings } from './findings';
+import { reportUnknown, type ResolveContext, spanInRecipeOrHouse } from './Reporter';
+import type { ResolvedContainer, ResolvedRole } from './types';
+
+/** The rig's own group: the container everything lies in. */
+export const RIG_CONTAINER = 'rig';
+
+type ContainerEntry = NonNullable<HouseRules['containers']>[string];
+type RoleEntry = NonNullable<HouseRules['roles']>[string];
+
+function mergeMaps<E>(house: Readonly<Record<string, E>>, recipe: object | undefined): Readonly<Record<string, E>> {
+  return recipe === undefined
+    ? house
+    : (mergePatch(house as unknown as JsonValue, recipe as unknown as JsonValue) as unknown as Record<string, E>);
+}
+
+/**
+ * Lays the recipe's containers over the house's and settles what each inherits. Unknown parents, rings and
+ * containers that move otherwise than what they lie in are findings; the container then lies in the rig.
+ */
+export function resolveContainers(
+  recipe: EvaluatedRecipe,
+  context: ResolveContext,
+): ReadonlyMap<string, ResolvedContainer> {
+  const entries = mergeMaps<ContainerEntry>(context.house.rules.containers, recipe.containers);
+  const resolved = new Map<string, ResolvedContainer>();
+  const open: string[] = [];
+
+  const resolve = (id: string, entry: ContainerEntry): ResolvedContainer => {
+    const known = resolved.get(id);
+    if (known) return known;
+    open.push(id);
+    const parent = resolveParent(id, entry);
+    open.pop();
+    const inherited = parent?.carried ?? false;
+    let carried = entry.moves === undefined ? inherited : entry.moves === 'carried';
+    if (parent && carried !== inherited) {
+      context.findings.report(
+        resolveFindings,
+        'container-moves-conflict',
+        spanInRecipeOrHouse(context, ['containers', id, 'moves']),
+        {
+          id,
+          moves: carried ? 'carried' : 'parked',
+          parent: parent.id,
+          parentMoves: inherited ? 'carried' : 'parked',
+        },
+      );
+      carried = inherited;
+    }
+    const container: ResolvedContainer = {
+      id,
+      parent: parent?.id ?? null,
+      carried,
+      shown: (entry.shown ?? true) && (parent?.shown ?? true),
+    };
+    resolved.set(id, container);
+    return container;
+  };
+
+  const resolveParent = (id: string, entry: ContainerEntry): ResolvedContainer | null => {
+    if (entry.parent === undefined) return null;
+    const span = spanInRecipeOrHouse(context, ['containers', id, 'parent']);
+    const parentEntry = entries[entry.parent];
+    if (!parentEntry) {
+      reportUnknown(context, span, 'container', entry.parent, Object.keys(entries));
+      return null;
+    }
+    const start = open.indexOf(entry.parent);
+    if (start >= 0) {
+      const ring = [...open.slice(start), entry.parent].join(' → ');
+      context.findings.report(resolveFindings, 'container-ring', span, { ring });
+      return null;
+    }
+    return resolve(entry.parent, parentEntry);
+  };
+
+  for (const [id, entry] of Object.entries(entries)) resolve(id, entry);
+  return resolved;
+}
+
+/** Roles whose nodes are part of the structure: they lie wherever what they hold lies. */
+const STRUCTURE_ROLES: ReadonlySet<string> = new Set(['container', 'seat']);
+
+/** Lays the recipe's roles over the house's and checks that each has a container that exists. */
+export function resolveRoles(
+  recipe: EvaluatedRecipe,
+  containers: ReadonlyMap<string, ResolvedContainer>,
+  context: ResolveContext,
+): ReadonlyMap<string, ResolvedRole> {
+  const roles = new Map<string, ResolvedRole>();
+  for (const [id, entry] of Object.entries(mergeMaps<RoleEntry>(context.house.rules.roles, recipe.roles))) {
+    const { container } = entry;
+    if (container === undefined) {
+      if (!STRUCTURE_ROLES.has(id)) {
+        const span = spanInRecipeOrHouse(context, ['roles', id], 'key');
+        context.findings.report(resolveFindings, 'role-without-container', span, { role: id });
+      }
+    } else if (!containers.has(container)) {
+      const span = spanInRecipeOrHouse(context, ['roles', id, 'container']);
+      reportUnknown(context, span, 'container', container, containers.keys());
+    }
+    roles.set(id, {
+      token: entry.token ?? '',
+      container: container !== undefined && containers.has(container) ? container : null,
+      shown: entry.shown ?? true,
+      selectable: entry.selectable ?? true,
+    });
+  }
+  return roles;
+}
