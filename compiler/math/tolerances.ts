@@ -15,3 +15,13 @@ export const SLERP_LINEAR_COSINE = 1 - 1e-12;
 
 /** Relative to the rig's size: what rest must keep when solvers and constraints run over it. */
 export const REST_TOLERANCE = 1e-9;
+
+/**
+ * Relative to a chain's length: a goal this near to full reach (or to the nearest place the chain can fold to) counts
+ * as exactly there. The bend grows with the square root of what is left, so without it the rounding of 1e-16 in a
+ * straight chain's rest length would bend it by 1e-8.
+ */
+export const REACH_TOLERANCE = 1e-12;
+
+/** Relative to a chain's length: a bend or a pole nearer than this to the line start–end names no plane. */
+export const PLANE_TOLERANCE = 1e-9;
