@@ -5,7 +5,8 @@ import type { Finding, Fix, RelatedPlace } from './Finding';
 /** More findings than this help nobody; the count of those left out is said in one last finding. */
 export const MAXIMUM_FINDINGS = 500;
 
-function fill(template: string, parameters: Readonly<Record<string, string | number>>): string {
+/** Puts parameters into a message or help template; a missing one stays visible as `{name}`. */
+export function fillTemplate(template: string, parameters: Readonly<Record<string, string | number>>): string {
   return template.replace(/\{(\w+)\}/g, (whole, name: string) => String(parameters[name] ?? whole));
 }
 
@@ -35,10 +36,10 @@ export class FindingList {
     this.add({
       code,
       severity: declaration.severity,
-      message: fill(declaration.message, parameters),
+      message: fillTemplate(declaration.message, parameters),
       span,
       related: more.related ?? [],
-      help: more.help ?? fill(declaration.help, parameters),
+      help: more.help ?? fillTemplate(declaration.help, parameters),
       ...(more.fix ? { fix: more.fix } : {}),
     });
   }

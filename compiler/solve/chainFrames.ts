@@ -71,8 +71,9 @@ function mirrorFrame(frame: Quat, chain: ChainSpecification, left: Vec3): Quat {
   // A mirror image is left-handed; turning round all three axes (same rotation values, mirrored pose) or only the
   // hinge (aim and up axes as in the mirror) makes it right-handed again.
   if (chain.mirror === 'behaviour') return quatFromAxes(negate(x), negate(y), negate(z));
-  const hinge = chain.orient.aim[1] !== 'x' && chain.orient.up[1] !== 'x' ? 0 : chain.orient.aim[1] !== 'y' && chain.orient.up[1] !== 'y' ? 1 : 2;
-  return quatFromAxes(hinge === 0 ? negate(x) : x, hinge === 1 ? negate(y) : y, hinge === 2 ? negate(z) : z);
+  const { aim, up } = chain.orient;
+  const hinge = 'xyz'.replace(aim.slice(1), '').replace(up.slice(1), '');
+  return quatFromAxes(hinge === 'x' ? negate(x) : x, hinge === 'y' ? negate(y) : y, hinge === 'z' ? negate(z) : z);
 }
 
 /**

@@ -1,0 +1,46 @@
+import type {
+  ChainSpecification,
+  ConstraintSpecification,
+  ControlSpecification,
+  GuideLineSpecification,
+  SolverSpecification,
+} from '../expand/types';
+import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
+import type { FindingDeclaration } from '../findings/catalogue';
+import type { RelatedPlace } from '../findings/Finding';
+import type { ResolveContext } from '../resolve/Reporter';
+import type { ResolvedRecipe } from '../resolve/types';
+import type { Path } from '../syntax/types';
+
+/** What a rule may read and how it speaks. Rules cannot change anything. */
+export interface RuleContext {
+  readonly recipe: EvaluatedRecipe;
+  readonly resolved: ResolvedRecipe;
+  readonly stage: ResolveContext;
+  /** Reports the rule's own code at a path of the recipe. */
+  report(
+    path: Path,
+    parameters: Readonly<Record<string, string | number>>,
+    more?: { readonly part?: 'key' | 'value'; readonly related?: readonly RelatedPlace[] },
+  ): void;
+}
+
+/** Called once for each thing of its kind, in the order of the recipe; `finish` once at the end. */
+export interface RuleHandlers {
+  chain?(chain: ChainSpecification): void;
+  control?(control: ControlSpecification): void;
+  solver?(solver: SolverSpecification): void;
+  constraint?(constraint: ConstraintSpecification): void;
+  guideLine?(line: GuideLineSpecification): void;
+  finish?(): void;
+}
+
+/** What a rule is about, for the list of rules in the handbook. */
+export type RuleCategory = 'animator' | 'structure' | 'motion' | 'tidiness';
+
+/** One lint rule. Its file name is its code; its page lies beside it. */
+export interface Rule extends FindingDeclaration {
+  readonly code: string;
+  readonly category: RuleCategory;
+  create(context: RuleContext): RuleHandlers;
+}

@@ -1,0 +1,31 @@
+import type { PlaceReference } from '../../expand/types';
+import type { Rule } from '../Rule';
+import { namesInExpressions } from '../namesInExpressions';
+
+/** A landmark that nothing uses is measured for nothing, or stands for a misspelt name elsewhere. */
+export const landmarkUnused: Rule = {
+  code: 'landmark-unused',
+  severity: 'info',
+  category: 'tidiness',
+  summary: 'A landmark that nothing uses.',
+  message: 'Nothing uses the landmark "{name}".',
+  help: 'Use it as a point, or remove it.',
+  create(context) {
+    const used = new Set<string>();
+    const use = (place: PlaceReference): void => {
+      if (typeof place === 'string') used.add(place);
+    };
+    return {
+      chain: ({ points }) => points.forEach(use),
+      control: ({ place }) => {
+        if (place.kind === 'place') use(place.at);
+      },
+      finish() {
+        const inExpressions = namesInExpressions(context.stage.document.value, 'landmarks');
+        for (const name of Object.keys(context.recipe.landmarks ?? {})) {
+          if (!used.has(name) && !inExpressions.has(name)) context.report(['landmarks', name], { name }, { part: 'key' });
+        }
+      },
+    };
+  },
+};

@@ -1,0 +1,22 @@
+import { namesInExpressions } from '../namesInExpressions';
+import type { Rule } from '../Rule';
+
+/** A parameter that no expression reads changes nothing when a roster varies it. */
+export const parameterUnused: Rule = {
+  code: 'parameter-unused',
+  severity: 'warning',
+  category: 'tidiness',
+  summary: 'A parameter that no expression reads.',
+  message: 'No expression reads the parameter "{name}".',
+  help: 'Use it as params.{name} in an expression, or remove it.',
+  create(context) {
+    return {
+      finish() {
+        const read = namesInExpressions(context.stage.document.value, 'params');
+        for (const name of Object.keys(context.recipe.params ?? {})) {
+          if (!read.has(name)) context.report(['params', name], { name }, { part: 'key' });
+        }
+      },
+    };
+  },
+};

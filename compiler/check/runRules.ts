@@ -1,0 +1,32 @@
+import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
+import { fillTemplate } from '../findings/FindingList';
+import type { ResolveContext } from '../resolve/Reporter';
+import type { ResolvedRecipe } from '../resolve/types';
+import { RULES } from './rules/index';
+
+/** Runs every rule over the resolved recipe in one walk. */
+export function runRules(recipe: EvaluatedRecipe, resolved: ResolvedRecipe, stage: ResolveContext): void {
+  const handlers = RULES.map((rule) =>
+    rule.create({
+      recipe,
+      resolved,
+      stage,
+      report(path, parameters, more = {}) {
+        stage.findings.add({
+          code: rule.code,
+          severity: rule.severity,
+          message: fillTemplate(rule.message, parameters),
+          span: stage.document.spanAt(path, more.part ?? 'value'),
+          related: more.related ?? [],
+          help: fillTemplate(rule.help, parameters),
+        });
+      },
+    }),
+  );
+  for (const chain of resolved.chains) for (const handler of handlers) handler.chain?.(chain);
+  for (const control of resolved.controls) for (const handler of handlers) handler.control?.(control);
+  for (const solver of resolved.solvers) for (const handler of handlers) handler.solver?.(solver);
+  for (const constraint of resolved.constraints) for (const handler of handlers) handler.constraint?.(constraint);
+  for (const line of resolved.guideLines) for (const handler of handlers) handler.guideLine?.(line);
+  for (const handler of handlers) handler.finish?.();
+}

@@ -1,0 +1,97 @@
+import { assembleRig } from './assemble/assembleRig';
+import { runRules } from './check/runRules';
+import { checkEvaluationRing } from './check/checkEvaluationRing';
+import { characterNameOf } from './documents/characterName';
+import { readHouse } from './documents/readHouse';
+import { readRecipe } from './documents/readRecipe';
+import { emitScript } from './emit/emitScript';
+import { expandRecipe } from './expand/expandRecipe';
+import { evaluateRecipe } from './expressions/evaluateRecipe';
+import type { Finding } from './findings/Finding';
+import { FindingList } from './findings/FindingList';
+import { finishFindings } from './findings/finishFindings';
+import { canonicalJson } from './hash/canonicalJson';
+import { sha256Hex } from './hash/sha256Hex';
+import { planSteps } from './plan/planSteps';
+import { resolveRecipe } from './resolve/resolveRecipe';
+import type { Rig } from './rig/Rig';
+import { checkShape } from './schema/checkShape';
+import { solveRecipe } from './solve/solveRecipe';
+import type { SourceText } from './source/SourceText';
+import { COMPILER_VERSION } from './version';
+
+/** Everything one compile depends on; the same request always gives the same compilation. */
+export interface CompileRequest {
+  readonly recipe: SourceText;
+  /** House rules by `name@version`, beside those that come with Pintle. */
+  readonly houses?: Readonly<Record<string, SourceText>>;
+  /** Recipe versions by `name@version`, for `extends`. */
+  readonly bases?: Readonly<Record<string, SourceText>>;
+  /** The cast member to build; without one, the recipe under its own name and default parameters. */
+  readonly character?: {
+    readonly name: string;
+    readonly params?: Readonly<Record<string, number>>;
+    readonly patch?: SourceText;
+  };
+  /** Number of the saved version; left out for a draft. */
+  readonly version?: number;
+}
+
+/** What one compile gives. Rig and script are null when a finding is an error. */
+export interface Compilation {
+  readonly findings: readonly Finding[];
+  readonly character: string;
+  /** SHA-256 of the canonical merged recipe and the character's parameters; null when nothing could be read. */
+  readonly recipeHash: string | null;
+  readonly rig: Rig | null;
+  readonly script: string | null;
+}
+
+/**
+ * Turns a recipe into a rig and its build script: parse and merge the documents, check their shape, evaluate
+ * expressions, write parts out in primitives, resolve ids, containers and names, solve the geometry, check the
+ * rules, assemble the rig, plan its steps and emit them. Never throws for what a person wrote: each stage adds
+ * its findings and goes on as far as it can, so that one compile shows them all.
+ */
+export function compile(request: CompileRequest): Compilation {
+  const findings = new FindingList();
+  const { own, merged } = readRecipe(request.recipe, request.bases ?? {}, request.character?.patch, findings);
+  const character = characterNameOf(request.character?.name, merged, findings);
+  const stop = (): Compilation => {
+    const finished = finishFindings(findings.all);
+    return { findings: finished, character, recipeHash: null, rig: null, script: null };
+  };
+  if (merged.value === undefined) return stop();
+
+  const shape = checkShape(merged, 'recipe', findings);
+  const found = readHouse(merged, request.houses ?? {}, findings);
+  if (!found || !shape.recipe) return stop();
+  const { house, reference } = found;
+
+  const { recipe } = evaluateRecipe(merged, shape.recipe, request.character?.params ?? {}, findings);
+  const context = { document: merged, findings, poisoned: shape.poisoned, house };
+  const expanded = expandRecipe(recipe, context);
+  const resolved = resolveRecipe(recipe, expanded, character, context);
+  const solved = solveRecipe(resolved, context);
+  runRules(recipe, resolved, context);
+
+  const recipeHash = sha256Hex(canonicalJson({ recipe: merged.value, params: request.character?.params ?? {} }));
+  if (findings.hasErrors) return { ...stop(), recipeHash };
+
+  const scene = {
+    character,
+    recipe: `${shape.recipe.recipe}@${request.version ?? 'draft'}`,
+    house: reference,
+    up: expanded.scene.upAxis,
+    forward: expanded.scene.forwardAxis,
+    unit: expanded.scene.unit,
+    recipeHash,
+    houseHash: sha256Hex(canonicalJson(house.rules)),
+    compiler: COMPILER_VERSION,
+  };
+  const rig = assembleRig(scene, resolved, solved);
+  checkEvaluationRing(rig, resolved, context);
+  if (findings.hasErrors) return { ...stop(), recipeHash };
+  const script = emitScript(planSteps(rig));
+  return { findings: finishFindings(findings.all), character, recipeHash, rig, script };
+}

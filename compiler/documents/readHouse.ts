@@ -1,0 +1,39 @@
+import type { FindingList } from '../findings/FindingList';
+import { HOUSE_TEXTS } from '../house/generated/houseTexts';
+import { mergeDocuments } from '../merge/mergeDocuments';
+import type { MergedDocument } from '../merge/types';
+import type { HouseDocument } from '../resolve/types';
+import { checkShape } from '../schema/checkShape';
+import type { HouseRules } from '../schema/generated/houseTypes';
+import type { SourceText } from '../source/SourceText';
+import { parseDocument } from '../syntax/parseDocument';
+import { documentFindings } from './findings';
+
+/** House rules that come with Pintle; a recipe that names none follows the first. */
+export const DEFAULT_HOUSE = 'standard@1';
+
+const BUILT_IN: Readonly<Record<string, SourceText>> = Object.fromEntries(
+  Object.entries(HOUSE_TEXTS).map(([name, text]) => [`${name}@1`, { name: `${name}.house.yaml`, text }]),
+);
+
+/** Finds and checks the house rules a recipe names. Null, with findings, when there are none to work with. */
+export function readHouse(
+  recipe: MergedDocument,
+  houses: Readonly<Record<string, SourceText>>,
+  findings: FindingList,
+): { readonly reference: string; readonly house: HouseDocument } | null {
+  const { value } = recipe;
+  const named = typeof value === 'object' && value !== null && !Array.isArray(value) ? value['house'] : undefined;
+  const reference = typeof named === 'string' ? named : DEFAULT_HOUSE;
+  const known = { ...BUILT_IN, ...houses };
+  const text = Object.hasOwn(known, reference) ? known[reference] : undefined;
+  if (!text) {
+    const span = recipe.spanAt(['house']);
+    findings.report(documentFindings, 'house-not-found', span, { reference, known: Object.keys(known).join(', ') });
+    return null;
+  }
+  const document = mergeDocuments([parseDocument(text, findings)]);
+  if (document.value === undefined) return null;
+  const shape = checkShape(document, 'house', findings);
+  return shape.isSound ? { reference, house: { document, rules: document.value as unknown as HouseRules } } : null;
+}

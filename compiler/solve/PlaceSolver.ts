@@ -1,0 +1,138 @@
+import type { ChainSpecification, ControlSpecification, PlaceReference, Specification } from '../expand/types';
+import { IDENTITY_QUAT } from '../math/quat';
+import { distance } from '../math/vec3';
+import { reportUnknown, type ResolveContext } from '../resolve/Reporter';
+import type { ResolvedRecipe } from '../resolve/types';
+import type { Quat, Vec3 } from '../rig/Rig';
+import type { Path } from '../syntax/types';
+import { spreadByArcLength } from './arcLength';
+import { chainFrames } from './chainFrames';
+import { solveFindings } from './findings';
+import { polePosition } from './polePosition';
+import type { RestPlace } from './types';
+
+/**
+ * Finds where chains and controls stand, each once, whatever order they are written in. A place that depends on
+ * itself is a finding; what depends on a missing place is left out silently, since the cause was reported.
+ */
+export class PlaceSolver {
+  readonly places = new Map<string, RestPlace>();
+  readonly #chainOfJoint = new Map<string, ChainSpecification>();
+  readonly #controls: ReadonlyMap<string, ControlSpecification>;
+  readonly #settled = new Set<string>();
+  /** Ids being placed now, outermost first. */
+  readonly #open: string[] = [];
+
+  constructor(
+    private readonly recipe: ResolvedRecipe,
+    private readonly context: ResolveContext,
+  ) {
+    for (const chain of recipe.chains) for (const id of chain.jointIds) this.#chainOfJoint.set(id, chain);
+    this.#controls = new Map(recipe.controls.map((control) => [control.id, control]));
+  }
+
+  solveAll(): void {
+    for (const chain of this.recipe.chains) this.#solve(chain, () => this.#placeChain(chain));
+    for (const control of this.recipe.controls) this.#solve(control, () => this.#placeControl(control));
+  }
+
+  #spanOf(owner: Specification, keys: Path) {
+    return this.context.document.spanAt([...owner.path, ...keys]);
+  }
+
+  #solve(owner: Specification, place: () => void): void {
+    if (this.#settled.has(owner.id)) return;
+    const start = this.#open.indexOf(owner.id);
+    if (start >= 0) {
+      const ring = [...this.#open.slice(start), owner.id].map((id) => `"${id}"`).join(' → ');
+      const span = this.context.document.spanAt(owner.path, 'key');
+      this.context.findings.report(solveFindings, 'place-ring', span, { ring });
+      this.#settled.add(owner.id);
+      return;
+    }
+    this.#open.push(owner.id);
+    place();
+    this.#open.pop();
+    this.#settled.add(owner.id);
+  }
+
+  /** The rest place of a joint or control, placing it first if need be. */
+  #placeOf(id: string): RestPlace | null {
+    const chain = this.#chainOfJoint.get(id);
+    const control = this.#controls.get(id);
+    if (chain) this.#solve(chain, () => this.#placeChain(chain));
+    else if (control) this.#solve(control, () => this.#placeControl(control));
+    return this.places.get(id) ?? null;
+  }
+
+  /** The world position of a landmark (on the owner's side), a joint or a literal point. */
+  #positionOf(reference: PlaceReference, owner: Specification, keys: Path): Vec3 | null {
+    if (typeof reference !== 'string') return reference;
+    const landmark = this.recipe.landmarks.get(reference);
+    if (landmark) return owner.side === 'right' ? landmark.right : landmark.left;
+    if (this.#chainOfJoint.has(reference)) return this.#placeOf(reference)?.position ?? null;
+    const span = this.#spanOf(owner, keys);
+    const candidates = [...this.recipe.landmarks.keys(), ...this.#chainOfJoint.keys()];
+    reportUnknown(this.context, span, 'landmark or joint', reference, candidates);
+    return null;
+  }
+
+  #placeChain(chain: ChainSpecification): void {
+    const points = chain.points.map((point, index) => this.#positionOf(point, chain, ['points', index]));
+    if (points.some((point) => point === null)) return;
+    const positions = this.#jointPositions(chain, points as Vec3[]);
+    if (!positions) return;
+    const frames = chainFrames(chain, positions, this.recipe.scene);
+    chain.jointIds.forEach((id, index) => {
+      const position = positions[index];
+      if (position) this.places.set(id, { position, turn: frames[index] ?? IDENTITY_QUAT });
+    });
+  }
+
+  #jointPositions(chain: ChainSpecification, points: readonly Vec3[]): readonly Vec3[] | null {
+    if (chain.count !== null) {
+      const spread = spreadByArcLength(points, chain.count, chain.curve);
+      if (!spread) {
+        const span = this.#spanOf(chain, ['points']);
+        this.context.findings.report(solveFindings, 'chain-without-length', span, { id: chain.id, count: chain.count });
+      }
+      return spread;
+    }
+    const twin = points.findIndex((point, index) => index > 0 && distance(point, points[index - 1] as Vec3) === 0);
+    if (twin < 0) return points;
+    this.context.findings.report(solveFindings, 'zero-length-bone', this.#spanOf(chain, ['points', twin]), {
+      first: chain.jointIds[twin - 1] ?? '',
+      second: chain.jointIds[twin] ?? '',
+    });
+    return null;
+  }
+
+  #placeControl(control: ControlSpecification): void {
+    const position = this.#controlPosition(control);
+    const turn = this.#controlTurn(control);
+    if (position && turn) this.places.set(control.id, { position, turn });
+  }
+
+  #controlTurn(control: ControlSpecification): Quat | null {
+    return control.align === null ? IDENTITY_QUAT : (this.#placeOf(control.align)?.turn ?? null);
+  }
+
+  #controlPosition(control: ControlSpecification): Vec3 | null {
+    const { place } = control;
+    if (place.kind === 'place') return this.#positionOf(place.at, control, ['at']);
+    const [start, mid, end] = place.joints.map((id) => this.#placeOf(id)?.position);
+    if (!start || !mid || !end) return null;
+    const pole = polePosition(start, mid, end, place.distance, place.bend);
+    if (typeof pole !== 'string') return pole;
+    const [startId, midId, endId] = place.joints;
+    const parameters = { start: startId, mid: midId, end: endId };
+    if (pole === 'straight') {
+      const span = this.#spanOf(control, [control.part === null ? 'pole_of' : 'points']);
+      this.context.findings.report(solveFindings, 'pole-undecided', span, parameters);
+    } else {
+      const span = this.#spanOf(control, control.part === null ? ['pole_of', 'bend'] : ['bend']);
+      this.context.findings.report(solveFindings, 'bend-along-limb', span, parameters);
+    }
+    return null;
+  }
+}
