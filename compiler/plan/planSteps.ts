@@ -1,0 +1,101 @@
+import type { ControlNode, Rig, RigConstraint, RigNode, RigScene, RigSolver } from '../rig/Rig';
+import type { Step, StepOf } from '../slipway/Step';
+import { CHANNEL_NAMES } from '../slipway/verbs';
+
+function planScene(scene: RigScene): StepOf<'scene'> {
+  return {
+    verb: 'scene',
+    name: scene.character,
+    values: {
+      recipe: scene.recipe,
+      house: scene.house,
+      up: scene.up,
+      forward: scene.forward,
+      unit: scene.unit,
+      recipe_hash: scene.recipeHash,
+      house_hash: scene.houseHash,
+      compiler: scene.compiler,
+    },
+  };
+}
+
+function planNode(node: RigNode): Step {
+  const { kind, name, id, parent, container, role, side, at, turn } = node;
+  const place = { id, parent, container, role, side, at, turn };
+  switch (kind) {
+    case 'group':
+    case 'note':
+      return { verb: kind, name, values: place };
+    case 'joint':
+      return { verb: kind, name, values: { ...place, order: node.order } };
+    case 'control':
+      return {
+        verb: kind,
+        name,
+        values: { ...place, order: node.order, shape: node.shape, size: node.size },
+      };
+    case 'line':
+      return { verb: kind, name, values: { ...place, from: node.from, to: node.to, style: node.style } };
+    default:
+      return kind satisfies never;
+  }
+}
+
+function planControl({ name, attributes, channels }: ControlNode): Step[] {
+  const steps: Step[] = attributes.map((attribute) => ({
+    verb: 'attr',
+    name,
+    values: { name: attribute.name, default: attribute.default, min: attribute.min, max: attribute.max },
+  }));
+  const locked = CHANNEL_NAMES.filter((channel) => channels[channel]?.locked);
+  if (locked.length > 0) steps.push({ verb: 'lock', name, values: { channels: locked } });
+  for (const channel of CHANNEL_NAMES) {
+    const { min = null, max = null } = channels[channel] ?? {};
+    if (min !== null || max !== null) steps.push({ verb: 'limit', name, values: { channel, min, max } });
+  }
+  return steps;
+}
+
+function planDetails(node: RigNode): Step[] {
+  const { name, shown, selectable } = node;
+  const steps: Step[] = node.kind === 'control' ? planControl(node) : [];
+  if (node.kind === 'note') {
+    for (const { key, value } of node.entries) steps.push({ verb: 'entry', name, values: { key, value } });
+  }
+  if (!(shown && selectable)) steps.push({ verb: 'show', name, values: { shown, selectable } });
+  return steps;
+}
+
+function planConstraint(constraint: RigConstraint): StepOf<'constrain'> {
+  return {
+    verb: 'constrain',
+    name: constraint.name,
+    values: {
+      id: constraint.id,
+      kind: constraint.kind,
+      target: constraint.target,
+      sources: constraint.sources.map(({ node }) => node),
+      weights: constraint.sources.map(({ weight }) => weight),
+      keep_offset: constraint.keepOffset,
+      blend: constraint.blend,
+    },
+  };
+}
+
+function planSolver({ name, id, kind, start, mid, end, goal, pole, blend }: RigSolver): StepOf<'solve'> {
+  return { verb: 'solve', name, values: { id, kind, start, mid, end, goal, pole, blend } };
+}
+
+/**
+ * The steps that build a rig, in an order in which nothing refers forward: scene, then every node in the rig's own
+ * order with what belongs to it, then constraints, then solvers. Relies on the rig's order of nodes: parents before
+ * children, a line after both its ends.
+ */
+export function planSteps(rig: Rig): readonly Step[] {
+  return [
+    planScene(rig.scene),
+    ...rig.nodes.flatMap((node) => [planNode(node), ...planDetails(node)]),
+    ...rig.constraints.map(planConstraint),
+    ...rig.solvers.map(planSolver),
+  ];
+}
