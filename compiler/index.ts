@@ -1,5 +1,13 @@
 /** The compiler's only door: everything outside `compiler/` imports from here. */
-export { COMPILER_VERSION } from './version';
-export type { SourceText, Span } from './source/SourceText';
+export { type BuildFile, buildFiles, utf8Length } from './build/buildFiles';
+export { findingsToSarif } from './build/findingsToSarif';
+export { type Compilation, type CompileRequest, compile } from './compile';
+export { DEFAULT_HOUSE } from './documents/readHouse';
+export { type Explanation, explainFinding } from './findings/explainFinding';
 export type { Finding, Fix, RelatedPlace, Severity } from './findings/Finding';
+export { listFindingCodes } from './findings/registry';
+export { sha256Hex } from './hash/sha256Hex';
 export type * from './rig/Rig';
+export { type Sample, samples } from './samples/samples';
+export type { SourceText, Span } from './source/SourceText';
+export { COMPILER_VERSION } from './version';
