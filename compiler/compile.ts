@@ -1,6 +1,6 @@
 import { assembleRig } from './assemble/assembleRig';
-import { runRules } from './check/runRules';
 import { checkEvaluationRing } from './check/checkEvaluationRing';
+import { runRules } from './check/runRules';
 import { characterNameOf } from './documents/characterName';
 import { readHouse } from './documents/readHouse';
 import { readRecipe } from './documents/readRecipe';
@@ -55,7 +55,7 @@ export interface Compilation {
  */
 export function compile(request: CompileRequest): Compilation {
   const findings = new FindingList();
-  const { own, merged } = readRecipe(request.recipe, request.bases ?? {}, request.character?.patch, findings);
+  const merged = readRecipe(request.recipe, request.bases ?? {}, request.character?.patch, findings);
   const character = characterNameOf(request.character?.name, merged, findings);
   const stop = (): Compilation => {
     const finished = finishFindings(findings.all);
@@ -75,7 +75,9 @@ export function compile(request: CompileRequest): Compilation {
   const solved = solveRecipe(resolved, context);
   runRules(recipe, resolved, context);
 
-  const recipeHash = sha256Hex(canonicalJson({ recipe: merged.value, params: request.character?.params ?? {} }));
+  const recipeHash = sha256Hex(
+    canonicalJson({ recipe: merged.value, params: request.character?.params ?? {} }),
+  );
   if (findings.hasErrors) return { ...stop(), recipeHash };
 
   const scene = {

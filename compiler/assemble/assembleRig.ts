@@ -1,10 +1,26 @@
-import { canonicalQuat, conjugateQuat, IDENTITY_QUAT, multiplyQuat, normaliseQuat, rotate } from '../math/quat';
+import {
+  canonicalQuat,
+  conjugateQuat,
+  IDENTITY_QUAT,
+  multiplyQuat,
+  normaliseQuat,
+  rotate,
+} from '../math/quat';
 import { add, sub, ZERO } from '../math/vec3';
 import { seatFollowId } from '../resolve/ids';
 import type { ResolvedNode, ResolvedRecipe } from '../resolve/types';
+import type {
+  NumberOrAttribute,
+  Quat,
+  Rig,
+  RigConstraint,
+  RigNode,
+  RigScene,
+  RigSolver,
+  Vec3,
+} from '../rig/Rig';
 import { POSITION_DECIMALS, TURN_DECIMALS } from '../solve/tolerances';
 import type { RestPlace, SolvedRecipe } from '../solve/types';
-import type { NumberOrAttribute, Quat, Rig, RigConstraint, RigNode, RigScene, RigSolver, Vec3 } from '../rig/Rig';
 
 const WORLD: RestPlace = { position: ZERO, turn: IDENTITY_QUAT };
 
@@ -24,7 +40,10 @@ function roundPoint([x, y, z]: Vec3): Vec3 {
 
 /** Where a node ends up in the world by the rounded numbers, so that rounding never adds up along a chain. */
 function placeUnder(parent: RestPlace, at: Vec3, turn: Quat): RestPlace {
-  return { position: add(parent.position, rotate(parent.turn, at)), turn: normaliseQuat(multiplyQuat(parent.turn, turn)) };
+  return {
+    position: add(parent.position, rotate(parent.turn, at)),
+    turn: normaliseQuat(multiplyQuat(parent.turn, turn)),
+  };
 }
 
 /** Puts names, tree and geometry together. Call it only when no stage found an error. */

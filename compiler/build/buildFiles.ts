@@ -59,9 +59,17 @@ export function buildFiles(compilation: Compilation): readonly BuildFile[] {
       warnings: compilation.findings.filter(({ severity }) => severity === 'warning').length,
       infos: compilation.findings.filter(({ severity }) => severity === 'info').length,
     },
-    files: files.map(({ name, mediaType, text, sha256 }) => ({ name, mediaType, bytes: utf8Length(text), sha256 })),
+    files: files.map(({ name, mediaType, text, sha256 }) => ({
+      name,
+      mediaType,
+      bytes: utf8Length(text),
+      sha256,
+    })),
   };
-  return [...files, toFile(`${character}.manifest.json`, 'application/json', `${JSON.stringify(manifest, null, 2)}\n`)];
+  return [
+    ...files,
+    toFile(`${character}.manifest.json`, 'application/json', `${JSON.stringify(manifest, null, 2)}\n`),
+  ];
 }
 
 /** Bytes a text takes in UTF-8. */

@@ -1,6 +1,6 @@
 import type { Log, ReportingDescriptor, Result } from 'sarif';
-import { findDeclaration } from '../findings/registry';
 import type { Finding, Severity } from '../findings/Finding';
+import { findDeclaration } from '../findings/registry';
 import type { Span } from '../source/SourceText';
 import { COMPILER_VERSION } from '../version';
 

@@ -23,8 +23,9 @@ export function checkEvaluationRing(rig: Rig, recipe: ResolvedRecipe, context: R
   const on = new Set(ids);
   // The link an author can cut: a constraint or solver whose target lies on the ring.
   const link =
-    recipe.constraints.find(({ target, sources }) => on.has(target) && sources.some(({ node }) => on.has(node))) ??
-    recipe.solvers.find(({ joints }) => joints.some((joint) => on.has(joint)));
+    recipe.constraints.find(
+      ({ target, sources }) => on.has(target) && sources.some(({ node }) => on.has(node)),
+    ) ?? recipe.solvers.find(({ joints }) => joints.some((joint) => on.has(joint)));
   context.findings.report(
     evaluationFindings,
     'evaluation-ring',

@@ -1,7 +1,10 @@
 import type { JsonValue } from '../syntax/types';
 
 /** Names read as `<scope>.<name>` in any expression of a document. */
-export function namesInExpressions(value: JsonValue | undefined, scope: 'params' | 'landmarks'): ReadonlySet<string> {
+export function namesInExpressions(
+  value: JsonValue | undefined,
+  scope: 'params' | 'landmarks',
+): ReadonlySet<string> {
   const names = new Set<string>();
   const pattern = new RegExp(`\\b${scope}\\s*\\.\\s*([a-z][a-z0-9_]*)`, 'g');
   const pending: (JsonValue | undefined)[] = [value];

@@ -26,7 +26,8 @@ export function runRules(recipe: EvaluatedRecipe, resolved: ResolvedRecipe, stag
   for (const chain of resolved.chains) for (const handler of handlers) handler.chain?.(chain);
   for (const control of resolved.controls) for (const handler of handlers) handler.control?.(control);
   for (const solver of resolved.solvers) for (const handler of handlers) handler.solver?.(solver);
-  for (const constraint of resolved.constraints) for (const handler of handlers) handler.constraint?.(constraint);
+  for (const constraint of resolved.constraints)
+    for (const handler of handlers) handler.constraint?.(constraint);
   for (const line of resolved.guideLines) for (const handler of handlers) handler.guideLine?.(line);
   for (const handler of handlers) handler.finish?.();
 }

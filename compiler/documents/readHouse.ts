@@ -23,17 +23,23 @@ export function readHouse(
   findings: FindingList,
 ): { readonly reference: string; readonly house: HouseDocument } | null {
   const { value } = recipe;
-  const named = typeof value === 'object' && value !== null && !Array.isArray(value) ? value['house'] : undefined;
+  const named =
+    typeof value === 'object' && value !== null && !Array.isArray(value) ? value['house'] : undefined;
   const reference = typeof named === 'string' ? named : DEFAULT_HOUSE;
   const known = { ...BUILT_IN, ...houses };
   const text = Object.hasOwn(known, reference) ? known[reference] : undefined;
   if (!text) {
     const span = recipe.spanAt(['house']);
-    findings.report(documentFindings, 'house-not-found', span, { reference, known: Object.keys(known).join(', ') });
+    findings.report(documentFindings, 'house-not-found', span, {
+      reference,
+      known: Object.keys(known).join(', '),
+    });
     return null;
   }
   const document = mergeDocuments([parseDocument(text, findings)]);
   if (document.value === undefined) return null;
   const shape = checkShape(document, 'house', findings);
-  return shape.isSound ? { reference, house: { document, rules: document.value as unknown as HouseRules } } : null;
+  return shape.isSound
+    ? { reference, house: { document, rules: document.value as unknown as HouseRules } }
+    : null;
 }

@@ -49,9 +49,9 @@ export function readRecipe(
   bases: Readonly<Record<string, SourceText>>,
   patch: SourceText | undefined,
   findings: FindingList,
-): { readonly own: SourceDocument; readonly merged: MergedDocument } {
+): MergedDocument {
   const own = parseDocument(recipe, findings);
   const layers = [...readBases(own, bases, findings), own];
   if (patch) layers.push(parseDocument(patch, findings));
-  return { own, merged: mergeDocuments(layers) };
+  return mergeDocuments(layers);
 }

@@ -4,14 +4,27 @@ import { expandPart } from '../parts/expandPart';
 import type { Side, Vec3 } from '../rig/Rig';
 import type { JsonValue, Path } from '../syntax/types';
 import { mirrorEntry } from './mirrorEntry';
-import { COLLECTIONS, type Collection, type MadePrimitives, type PartEntry, type PrimitiveEntries, type Sided } from './primitives';
+import {
+  COLLECTIONS,
+  type Collection,
+  type MadePrimitives,
+  type PartEntry,
+  type PrimitiveEntries,
+  type Sided,
+} from './primitives';
 import { mirrorId, sideOfId } from './sides';
 
 type Collected = { readonly [C in Collection]: Map<string, Sided<PrimitiveEntries[C]>> };
 type SideOption = Side | 'both';
 
 function emptyCollections(): Collected {
-  return { chains: new Map(), controls: new Map(), solvers: new Map(), constraints: new Map(), guide_lines: new Map() };
+  return {
+    chains: new Map(),
+    controls: new Map(),
+    solvers: new Map(),
+    constraints: new Map(),
+    guide_lines: new Map(),
+  };
 }
 
 /** The ids under which a part or primitive appears: one for each side it stands on. */
@@ -73,7 +86,10 @@ function addEntry<C extends Collection>(
     id: sided.id,
     side: made?.side ?? sided.side,
     entry: made
-      ? (mergePatch(made.entry as unknown as JsonValue, entry as unknown as JsonValue) as unknown as PrimitiveEntries[C])
+      ? (mergePatch(
+          made.entry as unknown as JsonValue,
+          entry as unknown as JsonValue,
+        ) as unknown as PrimitiveEntries[C])
       : entry,
     path,
     part: made?.part ?? null,

@@ -1,12 +1,12 @@
 import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import { collectPrimitives } from './collectPrimitives';
 import type { Sided } from './primitives';
+import type { StageContext } from './StageContext';
 import { readSceneFrame } from './sceneFrame';
 import { mirrorPoint } from './sides';
 import { specifyChain } from './specifyChain';
 import { specifyControl } from './specifyControl';
 import { specifyConstraint, specifyGuideLine, specifySolver } from './specifyLinks';
-import type { StageContext } from './StageContext';
 import type { ExpandedRecipe, LandmarkPoints, SceneFrame } from './types';
 
 function specifyAll<E, S>(

@@ -6,7 +6,17 @@ import { mirrorId, mirrorPoint } from './sides';
 const POINT_KEYS: ReadonlySet<string> = new Set(['at', 'toward', 'bend']);
 /** Keys that hold ids, points by name, or lists of them. */
 const REFERENCE_KEYS: ReadonlySet<string> = new Set([
-  'parent', 'align', 'target', 'goal', 'pole', 'from', 'to', 'blend', 'joints', 'points', 'at',
+  'parent',
+  'align',
+  'target',
+  'goal',
+  'pole',
+  'from',
+  'to',
+  'blend',
+  'joints',
+  'points',
+  'at',
 ]);
 
 function isPoint(value: unknown): value is Vec3 {
@@ -33,6 +43,9 @@ function mirrorValue(key: string, value: unknown, left: Vec3): unknown {
  * are mirrored. Numbers that are not points (sizes, limits, weights) stay; landmarks are looked up on the right
  * side later, by the copy's own side.
  */
-export function mirrorEntry<C extends Collection>(entry: PrimitiveEntries[C], left: Vec3): PrimitiveEntries[C] {
+export function mirrorEntry<C extends Collection>(
+  entry: PrimitiveEntries[C],
+  left: Vec3,
+): PrimitiveEntries[C] {
   return mirrorValue('', entry, left) as PrimitiveEntries[C];
 }

@@ -2,9 +2,8 @@ import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import type { Side } from '../rig/Rig';
 import type { Path } from '../syntax/types';
 
-type Entry<K extends keyof EvaluatedRecipe> = NonNullable<EvaluatedRecipe[K]> extends Readonly<Record<string, infer E>>
-  ? E
-  : never;
+type Entry<K extends keyof EvaluatedRecipe> =
+  NonNullable<EvaluatedRecipe[K]> extends Readonly<Record<string, infer E>> ? E : never;
 
 /** Primitives as the language writes them, after expressions; parts give these and authors adjust them. */
 export type ChainEntry = Entry<'chains'>;
@@ -24,7 +23,13 @@ export interface PrimitiveEntries {
 
 export type Collection = keyof PrimitiveEntries;
 
-export const COLLECTIONS = ['chains', 'controls', 'solvers', 'constraints', 'guide_lines'] as const satisfies Collection[];
+export const COLLECTIONS = [
+  'chains',
+  'controls',
+  'solvers',
+  'constraints',
+  'guide_lines',
+] as const satisfies Collection[];
 
 /** What one part makes, in the recipe's own language, keyed by id. */
 export type MadePrimitives = {

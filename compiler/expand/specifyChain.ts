@@ -3,21 +3,30 @@ import type { Axis } from '../rig/Rig';
 import { expandFindings } from './findings';
 import { jointCount, jointNames } from './jointIds';
 import type { ChainEntry, Sided } from './primitives';
-import { areParallel } from './sceneFrame';
 import type { StageContext } from './StageContext';
+import { areParallel } from './sceneFrame';
 import type { ChainSpecification } from './types';
 
 type OrientEntry = NonNullable<NonNullable<EvaluatedRecipe['chains']>[string]['orient']>;
 
-function specifyOrient(orient: OrientEntry, sided: Sided<ChainEntry>, context: StageContext): ChainSpecification['orient'] {
+function specifyOrient(
+  orient: OrientEntry,
+  sided: Sided<ChainEntry>,
+  context: StageContext,
+): ChainSpecification['orient'] {
   const aim: Axis = orient.aim ?? '+x';
   let up: Axis = orient.up ?? (aim[1] === 'y' ? '+z' : '+y');
   if (areParallel(aim, up)) {
-    context.findings.report(expandFindings, 'axes-parallel', context.document.spanAt([...sided.path, 'orient']), {
-      first: aim,
-      second: up,
-      what: `the frames of "${sided.id}"`,
-    });
+    context.findings.report(
+      expandFindings,
+      'axes-parallel',
+      context.document.spanAt([...sided.path, 'orient']),
+      {
+        first: aim,
+        second: up,
+        what: `the frames of "${sided.id}"`,
+      },
+    );
     up = aim[1] === 'y' ? '+z' : '+y';
   }
   return { rule: orient.rule ?? 'chain', aim, up, toward: orient.toward ?? null };
@@ -34,11 +43,16 @@ export function specifyChain(sided: Sided<ChainEntry>, context: StageContext): C
     return null;
   }
   if (entry.names && entry.names.length !== jointCount(entry)) {
-    context.findings.report(expandFindings, 'joint-names-count', context.document.spanAt([...path, 'names']), {
-      id,
-      count: jointCount(entry),
-      given: entry.names.length,
-    });
+    context.findings.report(
+      expandFindings,
+      'joint-names-count',
+      context.document.spanAt([...path, 'names']),
+      {
+        id,
+        count: jointCount(entry),
+        given: entry.names.length,
+      },
+    );
   }
   return {
     id,

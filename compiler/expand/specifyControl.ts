@@ -52,7 +52,12 @@ function specifyPlace(sided: Sided<ControlEntry>, context: StageContext): Contro
   const { entry, id, path } = sided;
   if (entry.pole_of) {
     if (entry.at !== undefined) {
-      context.findings.report(expandFindings, 'control-place-twice', context.document.spanAt([...path, 'at']), { id });
+      context.findings.report(
+        expandFindings,
+        'control-place-twice',
+        context.document.spanAt([...path, 'at']),
+        { id },
+      );
     }
     const [start, mid, end] = entry.pole_of.joints;
     if (start === undefined || mid === undefined || end === undefined) return null;
@@ -64,14 +69,20 @@ function specifyPlace(sided: Sided<ControlEntry>, context: StageContext): Contro
     };
   }
   if (entry.at === undefined) {
-    context.findings.report(expandFindings, 'entry-incomplete', context.document.spanAt(path, 'key'), { id, key: 'at' });
+    context.findings.report(expandFindings, 'entry-incomplete', context.document.spanAt(path, 'key'), {
+      id,
+      key: 'at',
+    });
     return null;
   }
   return { kind: 'place', at: entry.at };
 }
 
 /** Fills in a control's defaults; null (with a finding) when it says nowhere to stand. */
-export function specifyControl(sided: Sided<ControlEntry>, context: StageContext): ControlSpecification | null {
+export function specifyControl(
+  sided: Sided<ControlEntry>,
+  context: StageContext,
+): ControlSpecification | null {
   const { id, entry, side, path, part } = sided;
   const place = specifyPlace(sided, context);
   if (!place) return null;

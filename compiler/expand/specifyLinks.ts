@@ -4,7 +4,11 @@ import type { StageContext } from './StageContext';
 import type { ConstraintSpecification, GuideLineSpecification, SolverSpecification } from './types';
 
 /** Reports each of `keys` that the entry lacks; true when none is missing. */
-function isComplete<E extends object>(sided: Sided<E>, keys: readonly (keyof E & string)[], context: StageContext): boolean {
+function isComplete<E extends object>(
+  sided: Sided<E>,
+  keys: readonly (keyof E & string)[],
+  context: StageContext,
+): boolean {
   const missing = keys.filter((key) => sided.entry[key] === undefined);
   for (const key of missing) {
     context.findings.report(expandFindings, 'entry-incomplete', context.document.spanAt(sided.path, 'key'), {
@@ -57,7 +61,10 @@ export function specifyConstraint(
 }
 
 /** Fills in a guide line's defaults; null (with findings) when an end is missing. */
-export function specifyGuideLine(sided: Sided<GuideLineEntry>, context: StageContext): GuideLineSpecification | null {
+export function specifyGuideLine(
+  sided: Sided<GuideLineEntry>,
+  context: StageContext,
+): GuideLineSpecification | null {
   const { id, entry, side, path, part } = sided;
   if (!isComplete(sided, ['from', 'to'], context)) return null;
   if (entry.from === undefined || entry.to === undefined) return null;

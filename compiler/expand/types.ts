@@ -1,4 +1,14 @@
-import type { LengthUnit, Axis, Channel, ChannelRule, LineStyle, RotationOrder, ShapeName, Side, Vec3 } from '../rig/Rig';
+import type {
+  Axis,
+  Channel,
+  ChannelRule,
+  LengthUnit,
+  LineStyle,
+  RotationOrder,
+  ShapeName,
+  Side,
+  Vec3,
+} from '../rig/Rig';
 import type { Path } from '../syntax/types';
 
 /** A landmark or joint by name, or a point in the scene's axes and unit. */

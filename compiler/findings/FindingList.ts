@@ -6,7 +6,10 @@ import type { Finding, Fix, RelatedPlace } from './Finding';
 export const MAXIMUM_FINDINGS = 500;
 
 /** Puts parameters into a message or help template; a missing one stays visible as `{name}`. */
-export function fillTemplate(template: string, parameters: Readonly<Record<string, string | number>>): string {
+export function fillTemplate(
+  template: string,
+  parameters: Readonly<Record<string, string | number>>,
+): string {
   return template.replace(/\{(\w+)\}/g, (whole, name: string) => String(parameters[name] ?? whole));
 }
 

@@ -22,6 +22,8 @@ export type ParametersOf<D extends FindingDeclaration> = Readonly<
 >;
 
 /** Declares the codes of one stage, keeping their literal types. */
-export function declareFindings<const T extends Readonly<Record<string, FindingDeclaration>>>(declarations: T): T {
+export function declareFindings<const T extends Readonly<Record<string, FindingDeclaration>>>(
+  declarations: T,
+): T {
   return declarations;
 }

@@ -12,7 +12,9 @@ function sameFaultKey({ code, span, message }: Finding): string {
 
 function compareFindings(a: Finding, b: Finding): number {
   if (a.span.source !== b.span.source) return a.span.source < b.span.source ? -1 : 1;
-  return a.span.start - b.span.start || a.span.end - b.span.end || (a.code < b.code ? -1 : a.code > b.code ? 1 : 0);
+  return (
+    a.span.start - b.span.start || a.span.end - b.span.end || (a.code < b.code ? -1 : a.code > b.code ? 1 : 0)
+  );
 }
 
 /**

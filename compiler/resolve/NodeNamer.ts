@@ -21,7 +21,11 @@ function readNaming(rules: HouseRules['naming']): Naming {
     separator: rules.separator ?? '_',
     digits: rules.index_digits ?? 2,
     longest: rules.longest ?? 64,
-    sides: { left: rules.sides?.left ?? 'l', right: rules.sides?.right ?? 'r', centre: rules.sides?.centre ?? '' },
+    sides: {
+      left: rules.sides?.left ?? 'l',
+      right: rules.sides?.right ?? 'r',
+      centre: rules.sides?.centre ?? '',
+    },
   };
 }
 
@@ -54,7 +58,9 @@ export class NodeNamer {
 
   #compose(thing: Nameable): string {
     const { pattern, separator, digits, sides } = this.#naming;
-    const bare = thing.id.startsWith(CONTAINER_ID_PREFIX) ? thing.id.slice(CONTAINER_ID_PREFIX.length) : thing.id;
+    const bare = thing.id.startsWith(CONTAINER_ID_PREFIX)
+      ? thing.id.slice(CONTAINER_ID_PREFIX.length)
+      : thing.id;
     const segments = withoutSide(bare).split('.');
     const last = segments[segments.length - 1] ?? '';
     const counted = segments.length > 1 && ALL_DIGITS.test(last);
@@ -96,7 +102,12 @@ export class NodeNamer {
     }
     const { longest } = this.#naming;
     if (name.length > longest) {
-      findings.report(resolveFindings, 'name-too-long', span(), { id: thing.id, name, length: name.length, longest });
+      findings.report(resolveFindings, 'name-too-long', span(), {
+        id: thing.id,
+        name,
+        length: name.length,
+        longest,
+      });
     }
     if (!LEGAL_START.test(name)) {
       findings.report(resolveFindings, 'name-not-legal', span(), { id: thing.id, name });

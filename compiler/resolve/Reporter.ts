@@ -11,7 +11,11 @@ export interface ResolveContext extends StageContext {
 }
 
 /** The place of a value that the recipe or else the house rules wrote. */
-export function spanInRecipeOrHouse(context: ResolveContext, path: Path, part: 'key' | 'value' = 'value'): Span {
+export function spanInRecipeOrHouse(
+  context: ResolveContext,
+  path: Path,
+  part: 'key' | 'value' = 'value',
+): Span {
   const inRecipe = context.document.layers.some((layer) => layer.has(path));
   return (inRecipe ? context.document : context.house.document).spanAt(path, part);
 }

@@ -2,11 +2,11 @@ import type { ControlSpecification, ExpandedRecipe } from '../expand/types';
 import type { Side } from '../rig/Rig';
 import type { Path } from '../syntax/types';
 import type { LinkedRecipe } from './checkReferences';
-import { resolveFindings } from './findings';
 import { CARRIER_ROLE } from './findCarrier';
+import { resolveFindings } from './findings';
 import { containerNodeId, NOTE_ID, seatId } from './ids';
 import type { NodeNamer } from './NodeNamer';
-import { reportUnknown, type ResolveContext } from './Reporter';
+import { type ResolveContext, reportUnknown } from './Reporter';
 import { RIG_CONTAINER } from './resolveContainers';
 import type { ResolvedContainer, ResolvedNode, ResolvedRole, Seat } from './types';
 
@@ -52,16 +52,28 @@ export function buildTree(input: TreeInput): Tree {
 
   const containerOf = (role: string, path: Path): string => {
     const resolved = roles.get(role);
-    if (!resolved) reportUnknown(context, context.document.spanAt([...path, 'role']), 'role', role, roles.keys());
+    if (!resolved)
+      reportUnknown(context, context.document.spanAt([...path, 'role']), 'role', role, roles.keys());
     return resolved?.container ?? RIG_CONTAINER;
   };
 
   const addContainers = (): void => {
     const rig = containerNodeId(RIG_CONTAINER);
-    drafts.set(rig, { id: rig, kind: 'group', role: 'container', side: null, container: RIG_CONTAINER, parent: null, path: [] });
+    drafts.set(rig, {
+      id: rig,
+      kind: 'group',
+      role: 'container',
+      side: null,
+      container: RIG_CONTAINER,
+      parent: null,
+      path: [],
+    });
     for (const { id, parent, carried } of containers.values()) {
       const beneathCarrier =
-        carrier !== null && carried && id !== carrierContainer && (parent === null || parent === carrierContainer);
+        carrier !== null &&
+        carried &&
+        id !== carrierContainer &&
+        (parent === null || parent === carrierContainer);
       drafts.set(containerNodeId(id), {
         id: containerNodeId(id),
         kind: 'group',
@@ -75,7 +87,13 @@ export function buildTree(input: TreeInput): Tree {
   };
 
   /** Where a chain's first joint or a control hangs; makes the seat when its parent lies elsewhere. */
-  const hang = (occupant: string, parent: string | null, container: string, side: Side, path: Path): string => {
+  const hang = (
+    occupant: string,
+    parent: string | null,
+    container: string,
+    side: Side,
+    path: Path,
+  ): string => {
     const group = containerNodeId(container);
     const parentDraft = parent === null ? undefined : drafts.get(parent);
     if (parent === null || !parentDraft) return group;
@@ -108,7 +126,15 @@ export function buildTree(input: TreeInput): Tree {
         let above = hang(first, parent, container, chain.side, chain.path);
         for (const id of chain.jointIds) {
           if (drafts.has(id)) continue;
-          drafts.set(id, { id, kind: 'joint', role: chain.role, side: chain.side, container, parent: above, path: chain.path });
+          drafts.set(id, {
+            id,
+            kind: 'joint',
+            role: chain.role,
+            side: chain.side,
+            container,
+            parent: above,
+            path: chain.path,
+          });
           above = id;
         }
       };
@@ -121,7 +147,10 @@ export function buildTree(input: TreeInput): Tree {
         const container = containerOf(control.role, control.path);
         if (containers.get(container)?.carried === false) {
           const span = context.document.spanAt(control.path, 'key');
-          context.findings.report(resolveFindings, 'control-in-parked-container', span, { id: control.id, container });
+          context.findings.report(resolveFindings, 'control-in-parked-container', span, {
+            id: control.id,
+            container,
+          });
         }
         const above = hang(control.id, parent, container, control.side, control.path);
         drafts.set(control.id, {
@@ -143,7 +172,15 @@ export function buildTree(input: TreeInput): Tree {
     for (const line of linked.guideLines) {
       const container = containerOf('guide_line', line.path);
       const parent = containerNodeId(container);
-      drafts.set(line.id, { id: line.id, kind: 'line', role: 'guide_line', side: line.side, container, parent, path: line.path });
+      drafts.set(line.id, {
+        id: line.id,
+        kind: 'line',
+        role: 'guide_line',
+        side: line.side,
+        container,
+        parent,
+        path: line.path,
+      });
     }
     if (notes.length > 0) {
       const container = containerOf('note', ['notes']);
@@ -161,7 +198,9 @@ export function buildTree(input: TreeInput): Tree {
 
   const resolveNode = (draft: Draft): ResolvedNode => {
     const role = roles.get(draft.role);
-    const place = containers.get(draft.kind === 'group' && draft.role === 'container' ? ownContainer(draft.id) : draft.container);
+    const place = containers.get(
+      draft.kind === 'group' && draft.role === 'container' ? ownContainer(draft.id) : draft.container,
+    );
     return {
       id: draft.id,
       name: namer.name(draft),

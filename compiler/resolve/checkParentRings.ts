@@ -15,7 +15,11 @@ function parentOwner(owner: Owner, things: Things): Owner | null {
  * Finds parents that form a ring, each ring once, and returns the ids of the owners on them, whose parents must
  * not be followed. Every owner has at most one parent, so one walk with three colours finds all rings.
  */
-export function checkParentRings(owners: readonly Owner[], things: Things, context: ResolveContext): ReadonlySet<string> {
+export function checkParentRings(
+  owners: readonly Owner[],
+  things: Things,
+  context: ResolveContext,
+): ReadonlySet<string> {
   const settled = new Set<string>();
   const onRing = new Set<string>();
   for (const first of owners) {

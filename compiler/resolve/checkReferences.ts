@@ -9,7 +9,7 @@ import type {
 } from '../expand/types';
 import type { Path } from '../syntax/types';
 import { resolveFindings } from './findings';
-import { isPoisonedReference, reportUnknown, type ResolveContext } from './Reporter';
+import { isPoisonedReference, type ResolveContext, reportUnknown } from './Reporter';
 import type { Things } from './things';
 
 /** The parts of an expanded recipe whose references all lead somewhere. */
@@ -25,11 +25,20 @@ export interface LinkedRecipe {
  * Checks every reference and leaves out links (solvers, constraints, guide lines) that lead nowhere. Chains and
  * controls stay, without the parent that is missing, so that later findings about them still show.
  */
-export function checkReferences(recipe: ExpandedRecipe, things: Things, context: ResolveContext): LinkedRecipe {
+export function checkReferences(
+  recipe: ExpandedRecipe,
+  things: Things,
+  context: ResolveContext,
+): LinkedRecipe {
   const spanOf = (specification: Specification, ...keys: Path) =>
     context.document.spanAt([...specification.path, ...keys]);
 
-  const isThing = (specification: Specification, id: string, keys: Path, what = 'joint or control'): boolean => {
+  const isThing = (
+    specification: Specification,
+    id: string,
+    keys: Path,
+    what = 'joint or control',
+  ): boolean => {
     if (things.joints.has(id) || things.controls.has(id)) return true;
     reportUnknown(context, spanOf(specification, ...keys), what, id, things.nodeIds());
     return false;
@@ -47,7 +56,11 @@ export function checkReferences(recipe: ExpandedRecipe, things: Things, context:
     return false;
   };
 
-  const isAttribute = (specification: Specification, reference: number | string | null, keys: Path): boolean => {
+  const isAttribute = (
+    specification: Specification,
+    reference: number | string | null,
+    keys: Path,
+  ): boolean => {
     if (typeof reference !== 'string') return true;
     const dot = reference.lastIndexOf('.');
     const controlId = reference.slice(0, dot);
@@ -88,7 +101,9 @@ export function checkReferences(recipe: ExpandedRecipe, things: Things, context:
     const target = isThing(constraint, constraint.target, ['target']);
     const sources = constraint.sources.map(({ node }) => {
       if (node !== constraint.target) return isThing(constraint, node, ['sources', node]);
-      context.findings.report(resolveFindings, 'follows-itself', spanOf(constraint, 'sources', node), { id: node });
+      context.findings.report(resolveFindings, 'follows-itself', spanOf(constraint, 'sources', node), {
+        id: node,
+      });
       return false;
     });
     const blend = isAttribute(constraint, constraint.blend, ['blend']);
@@ -128,8 +143,12 @@ export function checkReferences(recipe: ExpandedRecipe, things: Things, context:
 
   recipe.controls.forEach(checkPlace);
   return {
-    chains: recipe.chains.filter((chain) => things.joints.get(chain.jointIds[0] ?? '')?.chain === chain).map(withParent),
-    controls: recipe.controls.filter((control) => things.controls.get(control.id) === control).map(withParent),
+    chains: recipe.chains
+      .filter((chain) => things.joints.get(chain.jointIds[0] ?? '')?.chain === chain)
+      .map(withParent),
+    controls: recipe.controls
+      .filter((control) => things.controls.get(control.id) === control)
+      .map(withParent),
     solvers: recipe.solvers.filter(isSolverSound),
     constraints: recipe.constraints.filter(isConstraintSound),
     guideLines: recipe.guideLines.filter(isGuideLineSound),

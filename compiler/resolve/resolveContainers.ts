@@ -3,7 +3,7 @@ import { mergePatch } from '../merge/mergePatch';
 import type { HouseRules } from '../schema/generated/houseTypes';
 import type { JsonValue } from '../syntax/types';
 import { resolveFindings } from './findings';
-import { reportUnknown, type ResolveContext, spanInRecipeOrHouse } from './Reporter';
+import { type ResolveContext, reportUnknown, spanInRecipeOrHouse } from './Reporter';
 import type { ResolvedContainer, ResolvedRole } from './types';
 
 /** The rig's own group: the container everything lies in. */
@@ -12,10 +12,16 @@ export const RIG_CONTAINER = 'rig';
 type ContainerEntry = NonNullable<HouseRules['containers']>[string];
 type RoleEntry = NonNullable<HouseRules['roles']>[string];
 
-function mergeMaps<E>(house: Readonly<Record<string, E>>, recipe: object | undefined): Readonly<Record<string, E>> {
+function mergeMaps<E>(
+  house: Readonly<Record<string, E>>,
+  recipe: object | undefined,
+): Readonly<Record<string, E>> {
   return recipe === undefined
     ? house
-    : (mergePatch(house as unknown as JsonValue, recipe as unknown as JsonValue) as unknown as Record<string, E>);
+    : (mergePatch(house as unknown as JsonValue, recipe as unknown as JsonValue) as unknown as Record<
+        string,
+        E
+      >);
 }
 
 /**

@@ -37,12 +37,17 @@ export function resolveRecipe(
   });
   const nodeById = new Map(nodes.map((node) => [node.id, node]));
   const linkNames = new Map<string, string>();
-  for (const { id, side, path } of linked.constraints) linkNames.set(id, namer.name({ id, role: 'aid', side, path }));
-  for (const { id, side, path } of linked.solvers) linkNames.set(id, namer.name({ id, role: 'solver', side, path }));
+  for (const { id, side, path } of linked.constraints)
+    linkNames.set(id, namer.name({ id, role: 'aid', side, path }));
+  for (const { id, side, path } of linked.solvers)
+    linkNames.set(id, namer.name({ id, role: 'solver', side, path }));
   for (const { id, occupant } of seats) {
     const node = nodeById.get(occupant);
     const follow = seatFollowId(id);
-    linkNames.set(follow, namer.name({ id: follow, role: 'aid', side: node?.side ?? 'centre', path: node?.path ?? [] }));
+    linkNames.set(
+      follow,
+      namer.name({ id: follow, role: 'aid', side: node?.side ?? 'centre', path: node?.path ?? [] }),
+    );
   }
   return {
     ...linked,

@@ -34,7 +34,13 @@ export function collectThings(recipe: ExpandedRecipe, context: ResolveContext): 
       { span: context.document.spanAt(owner.path, 'key'), label: `the ${owner.what} "${id}"` },
     ];
     const span = context.document.spanAt(path, 'key');
-    context.findings.report(resolveFindings, 'id-taken', span, { id, first: owner.what, second: what }, { related });
+    context.findings.report(
+      resolveFindings,
+      'id-taken',
+      span,
+      { id, first: owner.what, second: what },
+      { related },
+    );
     return false;
   };
 

@@ -1,7 +1,12 @@
-import type { ChainSpecification, ControlSpecification, PlaceReference, Specification } from '../expand/types';
+import type {
+  ChainSpecification,
+  ControlSpecification,
+  PlaceReference,
+  Specification,
+} from '../expand/types';
 import { IDENTITY_QUAT } from '../math/quat';
 import { distance } from '../math/vec3';
-import { reportUnknown, type ResolveContext } from '../resolve/Reporter';
+import { type ResolveContext, reportUnknown } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
 import type { Quat, Vec3 } from '../rig/Rig';
 import type { Path } from '../syntax/types';
@@ -94,11 +99,16 @@ export class PlaceSolver {
       const spread = spreadByArcLength(points, chain.count, chain.curve);
       if (!spread) {
         const span = this.#spanOf(chain, ['points']);
-        this.context.findings.report(solveFindings, 'chain-without-length', span, { id: chain.id, count: chain.count });
+        this.context.findings.report(solveFindings, 'chain-without-length', span, {
+          id: chain.id,
+          count: chain.count,
+        });
       }
       return spread;
     }
-    const twin = points.findIndex((point, index) => index > 0 && distance(point, points[index - 1] as Vec3) === 0);
+    const twin = points.findIndex(
+      (point, index) => index > 0 && distance(point, points[index - 1] as Vec3) === 0,
+    );
     if (twin < 0) return points;
     this.context.findings.report(solveFindings, 'zero-length-bone', this.#spanOf(chain, ['points', twin]), {
       first: chain.jointIds[twin - 1] ?? '',

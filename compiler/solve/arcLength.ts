@@ -1,42 +1,6 @@
+import { distance, scale, sub } from '../math/vec3';
 import type { Vec3 } from '../rig/Rig';
-import { add, addScaled, distance, length, mix, scale, sub } from '../math/vec3';
-
-/** A curve piece over 0…1 with its first derivative, in scene units. */
-interface Piece {
-  at(t: number): Vec3;
-  speed(t: number): number;
-}
-
-function straightPiece(from: Vec3, to: Vec3): Piece {
-  const size = distance(from, to);
-  return { at: (t) => mix(from, to, t), speed: () => size };
-}
-
-/**
- * Centripetal Catmull–Rom piece from `b` to `c` (Barry and Goldman 1988; Yuksel, Schaefer and Keyser 2011: knots
- * by the square root of distance, so that no loops or cusps appear within a piece), as a cubic Hermite curve.
- */
-function smoothPiece(a: Vec3, b: Vec3, c: Vec3, d: Vec3): Piece {
-  const ab = Math.sqrt(distance(a, b));
-  const bc = Math.sqrt(distance(b, c));
-  const cd = Math.sqrt(distance(c, d));
-  const tangent = (p: Vec3, q: Vec3, r: Vec3, before: number, after: number): Vec3 => {
-    const rise = scale(sub(q, p), 1 / before);
-    const whole = scale(sub(r, p), 1 / (before + after));
-    const fall = scale(sub(r, q), 1 / after);
-    return scale(add(sub(rise, whole), fall), bc);
-  };
-  const start = tangent(a, b, c, ab, bc);
-  const end = tangent(b, c, d, bc, cd);
-  // p(t) = b + t·start + t²·k2 + t³·k3 meets both ends and both tangents.
-  const chord = sub(c, b);
-  const k2 = sub(sub(scale(chord, 3), scale(start, 2)), end);
-  const k3 = add(add(scale(chord, -2), start), end);
-  return {
-    at: (t) => (t === 1 ? c : addScaled(addScaled(addScaled(b, start, t), k2, t * t), k3, t * t * t)),
-    speed: (t) => length(addScaled(addScaled(start, k2, 2 * t), k3, 3 * t * t)),
-  };
-}
+import { type CurvePiece, smoothPiece, straightPiece } from './curvePieces';
 
 /** Nodes and weights of five-point Gauss–Legendre quadrature on 0…1 (Abramowitz and Stegun, table 25.4). */
 const GAUSS: readonly (readonly [number, number])[] = [
@@ -47,7 +11,7 @@ const GAUSS: readonly (readonly [number, number])[] = [
   [0.9530899229693319, 0.11846344252809454],
 ];
 
-function gauss(piece: Piece, from: number, to: number): number {
+function gauss(piece: CurvePiece, from: number, to: number): number {
   let sum = 0;
   for (const [node, weight] of GAUSS) sum += weight * piece.speed(from + (to - from) * node);
   return sum * (to - from);
@@ -58,11 +22,19 @@ const DEEPEST_SPLIT = 16;
 /** Relative error at which splitting stops; a hundred times tighter than positions are rounded to. */
 const ARC_TOLERANCE = 1e-12;
 
-function adaptive(piece: Piece, from: number, to: number, whole: number, scaleOfError: number, depth: number): number {
+function adaptive(
+  piece: CurvePiece,
+  from: number,
+  to: number,
+  whole: number,
+  scaleOfError: number,
+  depth: number,
+): number {
   const middle = (from + to) / 2;
   const first = gauss(piece, from, middle);
   const second = gauss(piece, middle, to);
-  if (depth >= DEEPEST_SPLIT || Math.abs(first + second - whole) <= ARC_TOLERANCE * scaleOfError) return first + second;
+  if (depth >= DEEPEST_SPLIT || Math.abs(first + second - whole) <= ARC_TOLERANCE * scaleOfError)
+    return first + second;
   return (
     adaptive(piece, from, middle, first, scaleOfError, depth + 1) +
     adaptive(piece, middle, to, second, scaleOfError, depth + 1)
@@ -70,13 +42,13 @@ function adaptive(piece: Piece, from: number, to: number, whole: number, scaleOf
 }
 
 /** Length of a piece between two of its parameters. */
-function arcLength(piece: Piece, from: number, to: number): number {
+function arcLength(piece: CurvePiece, from: number, to: number): number {
   const whole = gauss(piece, from, to);
   return adaptive(piece, from, to, whole, Math.max(whole, Number.MIN_VALUE), 0);
 }
 
 /** The parameter at which a piece has run `target` of its length, by Newton's method kept inside a bracket. */
-function parameterAt(piece: Piece, target: number, total: number): number {
+function parameterAt(piece: CurvePiece, target: number, total: number): number {
   let low = 0;
   let high = 1;
   let t = target / total;
@@ -96,15 +68,17 @@ function extrapolate(end: Vec3, inner: Vec3): Vec3 {
   return sub(scale(end, 2), inner);
 }
 
-function pieces(points: readonly Vec3[], curve: 'smooth' | 'straight'): readonly Piece[] {
-  const made: Piece[] = [];
+function pieces(points: readonly Vec3[], curve: 'smooth' | 'straight'): readonly CurvePiece[] {
+  const made: CurvePiece[] = [];
   for (let index = 0; index + 1 < points.length; index += 1) {
     const b = points[index] as Vec3;
     const c = points[index + 1] as Vec3;
     if (curve === 'straight' || points.length === 2) {
       made.push(straightPiece(b, c));
     } else {
-      made.push(smoothPiece(points[index - 1] ?? extrapolate(b, c), b, c, points[index + 2] ?? extrapolate(c, b)));
+      made.push(
+        smoothPiece(points[index - 1] ?? extrapolate(b, c), b, c, points[index + 2] ?? extrapolate(c, b)),
+      );
     }
   }
   return made;
@@ -119,7 +93,9 @@ export function spreadByArcLength(
   count: number,
   curve: 'smooth' | 'straight',
 ): readonly Vec3[] | null {
-  const apart = points.filter((point, index) => index === 0 || distance(point, points[index - 1] as Vec3) > 0);
+  const apart = points.filter(
+    (point, index) => index === 0 || distance(point, points[index - 1] as Vec3) > 0,
+  );
   const first = apart[0];
   const last = apart[apart.length - 1];
   if (apart.length < 2 || !first || !last) return null;
@@ -135,9 +111,11 @@ export function spreadByArcLength(
       before += lengths[piece] as number;
       piece += 1;
     }
-    const here = parts[piece] as Piece;
+    const here = parts[piece] as CurvePiece;
     const size = lengths[piece] as number;
-    placed.push(here.at(curve === 'straight' ? (target - before) / size : parameterAt(here, target - before, size)));
+    placed.push(
+      here.at(curve === 'straight' ? (target - before) / size : parameterAt(here, target - before, size)),
+    );
   }
   placed.push(last);
   return placed;

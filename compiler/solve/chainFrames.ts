@@ -1,8 +1,8 @@
-import type { ChainSpecification, SceneFrame } from '../expand/types';
 import { axisDirection } from '../expand/sceneFrame';
 import { mirrorPoint } from '../expand/sides';
-import { conjugateQuat, IDENTITY_QUAT, multiplyQuat, quatBetween, quatFromAxes, rotate } from '../math/quat';
+import type { ChainSpecification, SceneFrame } from '../expand/types';
 import { quatToAxes } from '../math/mat4';
+import { conjugateQuat, IDENTITY_QUAT, multiplyQuat, quatBetween, quatFromAxes, rotate } from '../math/quat';
 import { add, cross, length, negate, normalise, rejectFrom, sub } from '../math/vec3';
 import type { Quat, Vec3 } from '../rig/Rig';
 import { STRAIGHT_TOLERANCE } from './tolerances';
@@ -52,7 +52,11 @@ function frameFrom(aim: Vec3, hinge: Vec3, orient: ChainSpecification['orient'])
  * to bone by the smallest turn between them, so no frame flips along the chain; the last joint takes the frame of
  * the one before.
  */
-function leftFrames(positions: readonly Vec3[], orient: ChainSpecification['orient'], scene: SceneFrame): readonly Quat[] {
+function leftFrames(
+  positions: readonly Vec3[],
+  orient: ChainSpecification['orient'],
+  scene: SceneFrame,
+): readonly Quat[] {
   if (orient.rule === 'world' || positions.length < 2) return positions.map(() => IDENTITY_QUAT);
   const directions = positions.slice(1).map((to, index) => normalise(sub(to, positions[index] as Vec3)));
   let hinge = firstHinge(directions, orient.toward, scene);
@@ -73,14 +77,22 @@ function mirrorFrame(frame: Quat, chain: ChainSpecification, left: Vec3): Quat {
   if (chain.mirror === 'behaviour') return quatFromAxes(negate(x), negate(y), negate(z));
   const { aim, up } = chain.orient;
   const hinge = 'xyz'.replace(aim.slice(1), '').replace(up.slice(1), '');
-  return quatFromAxes(hinge === 'x' ? negate(x) : x, hinge === 'y' ? negate(y) : y, hinge === 'z' ? negate(z) : z);
+  return quatFromAxes(
+    hinge === 'x' ? negate(x) : x,
+    hinge === 'y' ? negate(y) : y,
+    hinge === 'z' ? negate(z) : z,
+  );
 }
 
 /**
  * World rest orientation of each joint of a chain. Right chains are solved as their mirror image on the left and
  * carried over by the mirror rule, so both sides match to the last digit.
  */
-export function chainFrames(chain: ChainSpecification, positions: readonly Vec3[], scene: SceneFrame): readonly Quat[] {
+export function chainFrames(
+  chain: ChainSpecification,
+  positions: readonly Vec3[],
+  scene: SceneFrame,
+): readonly Quat[] {
   if (chain.side !== 'right') return leftFrames(positions, chain.orient, scene);
   const { left } = scene;
   const orient = chain.orient.toward

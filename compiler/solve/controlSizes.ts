@@ -1,7 +1,7 @@
 import type { ControlSpecification } from '../expand/types';
 import { distance } from '../math/vec3';
-import type { ResolveContext } from '../resolve/Reporter';
 import { CARRIER_ROLE } from '../resolve/findCarrier';
+import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
 import type { Vec3 } from '../rig/Rig';
 import { solveFindings } from './findings';
@@ -45,7 +45,10 @@ export function measureExtent(positions: Iterable<Vec3>, up: Vec3): RigExtent {
 }
 
 /** The longer of the bones that meet at each joint. */
-function boneLengths(recipe: ResolvedRecipe, places: ReadonlyMap<string, RestPlace>): ReadonlyMap<string, number> {
+function boneLengths(
+  recipe: ResolvedRecipe,
+  places: ReadonlyMap<string, RestPlace>,
+): ReadonlyMap<string, number> {
   const lengths = new Map<string, number>();
   const note = (id: string, size: number): void => {
     lengths.set(id, Math.max(lengths.get(id) ?? 0, size));
@@ -79,16 +82,22 @@ export function controlSizes(
   const bones = boneLengths(recipe, places);
   const sizes = new Map<string, number>();
   const natural = (control: ControlSpecification): number => {
-    if (control.role === CARRIER_ROLE) return Math.max(extent.footprint * CARRIER_MARGIN, extent.size * SHARE_OF_RIG);
+    if (control.role === CARRIER_ROLE)
+      return Math.max(extent.footprint * CARRIER_MARGIN, extent.size * SHARE_OF_RIG);
     const stands = control.place.kind === 'place' ? control.place.at : control.place.joints[1];
     const bone = control.align ?? (typeof stands === 'string' ? stands : null);
     const size = bone === null ? undefined : bones.get(bone);
-    return size === undefined || control.place.kind === 'pole' ? extent.size * SHARE_OF_RIG : size * SHARE_OF_BONE;
+    return size === undefined || control.place.kind === 'pole'
+      ? extent.size * SHARE_OF_RIG
+      : size * SHARE_OF_BONE;
   };
   for (const control of recipe.controls) {
     if (!(control.size > 0)) {
       const span = context.document.spanAt([...control.path, 'size']);
-      context.findings.report(solveFindings, 'size-not-positive', span, { id: control.id, size: control.size });
+      context.findings.report(solveFindings, 'size-not-positive', span, {
+        id: control.id,
+        size: control.size,
+      });
     }
     sizes.set(control.id, roundToDigits(natural(control) * Math.max(control.size, 0)));
   }

@@ -1,6 +1,6 @@
 import type { PlaceReference } from '../../expand/types';
-import type { Rule } from '../Rule';
 import { namesInExpressions } from '../namesInExpressions';
+import type { Rule } from '../Rule';
 
 /** A landmark that nothing uses is measured for nothing, or stands for a misspelt name elsewhere. */
 export const landmarkUnused: Rule = {
@@ -23,7 +23,8 @@ export const landmarkUnused: Rule = {
       finish() {
         const inExpressions = namesInExpressions(context.stage.document.value, 'landmarks');
         for (const name of Object.keys(context.recipe.landmarks ?? {})) {
-          if (!used.has(name) && !inExpressions.has(name)) context.report(['landmarks', name], { name }, { part: 'key' });
+          if (!used.has(name) && !inExpressions.has(name))
+            context.report(['landmarks', name], { name }, { part: 'key' });
         }
       },
     };

@@ -15,8 +15,15 @@ export const limitInverted: Rule = {
           if (min === null || max === null || min <= max) continue;
           const group = { t: 'move', r: 'turn', s: 'scale' }[name[0] ?? ''] ?? name;
           const document = context.stage.document;
-          const written = [name, group].find((key) => document.layers.some((layer) => layer.has([...path, 'channels', key])));
-          context.report([...path, 'channels', ...(written === undefined ? [] : [written])], { id, name, min, max });
+          const written = [name, group].find((key) =>
+            document.layers.some((layer) => layer.has([...path, 'channels', key])),
+          );
+          context.report([...path, 'channels', ...(written === undefined ? [] : [written])], {
+            id,
+            name,
+            min,
+            max,
+          });
         }
         for (const { name, min, max } of attributes) {
           if (min !== null && max !== null && min > max) {

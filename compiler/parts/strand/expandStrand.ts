@@ -1,5 +1,5 @@
-import type { ConstraintEntry, ControlEntry } from '../../expand/primitives';
 import { jointNumber } from '../../expand/jointIds';
+import type { ConstraintEntry, ControlEntry } from '../../expand/primitives';
 import type { ExpandPart } from '../types';
 
 /**
