@@ -6,7 +6,6 @@
  * same rig must give the same bytes everywhere.
  */
 const UNSEEN =
-  // biome-ignore format: one range list
   /[\u007f-\u009f\u00ad\u061c\u180e\u200b-\u200f\u2028-\u202e\u2060-\u206f\ufeff\ufff9-\ufffb]|\udb40[\udc00-\udfff]/g;
 
 function escapeUnits(match: string): string {

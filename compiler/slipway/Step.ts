@@ -14,10 +14,12 @@ type KeyValue<R extends KeyRule> = R extends { readonly optional: true }
 type KeyValues<K extends Readonly<Record<string, KeyRule>>> = { readonly [Key in keyof K]: KeyValue<K[Key]> };
 
 /** One step of a script as plain data; its keys and their types follow from the table of verbs. */
-export type StepOf<V extends Verb> = {
-  readonly verb: V;
-  readonly name: string;
-  readonly values: KeyValues<(typeof VERBS)[V]['keys']>;
-};
+export type StepOf<V extends Verb> = V extends Verb
+  ? {
+      readonly verb: V;
+      readonly name: string;
+      readonly values: KeyValues<(typeof VERBS)[V]['keys']>;
+    }
+  : never;
 
-export type Step = { [V in Verb]: StepOf<V> }[Verb];
+export type Step = StepOf<Verb>;
