@@ -225,7 +225,10 @@ function ownContainer(nodeId: string): string {
   return nodeId.slice(containerNodeId('').length);
 }
 
-/** Orders drafts depth first from the rig's group, children in the order they were added. */
+/**
+ * Orders drafts depth first from the rig's group, children in the order they were added; guide lines last, so that
+ * both ends of each come before it.
+ */
 function parentsFirst(drafts: ReadonlyMap<string, Draft>): readonly Draft[] {
   const children = new Map<string | null, Draft[]>();
   for (const draft of drafts.values()) {
@@ -240,5 +243,5 @@ function parentsFirst(drafts: ReadonlyMap<string, Draft>): readonly Draft[] {
     const below = children.get(draft.id) ?? [];
     for (let index = below.length - 1; index >= 0; index -= 1) pending.push(below[index] as Draft);
   }
-  return ordered;
+  return [...ordered.filter(({ kind }) => kind !== 'line'), ...ordered.filter(({ kind }) => kind === 'line')];
 }

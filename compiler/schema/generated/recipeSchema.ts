@@ -1,0 +1,1606 @@
+// Made by bin/generate.ts from the JSON Schemas. Change those, not this.
+export const recipeSchema = {
+  "$schema": "https://json-schema.org/draft/2020-12/schema",
+  "$id": "https://pintle.invalid/schema/recipe/1",
+  "title": "Recipe",
+  "description": "A rig recipe, format 1: everything Pintle needs to make one character movable.",
+  "type": "object",
+  "required": [
+    "format",
+    "recipe"
+  ],
+  "additionalProperties": false,
+  "properties": {
+    "format": {
+      "const": 1,
+      "description": "Version of the recipe language.",
+      "examples": [
+        1
+      ]
+    },
+    "recipe": {
+      "$ref": "#/$defs/word",
+      "description": "Name of the recipe: lower-case letters, digits and underscores. Also the character's name unless one is given when compiling.",
+      "examples": [
+        "hare"
+      ]
+    },
+    "title": {
+      "$ref": "#/$defs/line",
+      "description": "What people call the rig.",
+      "examples": [
+        "Upright hare"
+      ]
+    },
+    "house": {
+      "type": "string",
+      "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$",
+      "description": "House rules to follow, as name@version.",
+      "default": "standard@1",
+      "examples": [
+        "tidewrack@1"
+      ]
+    },
+    "extends": {
+      "type": "string",
+      "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$",
+      "description": "Recipe version this one changes, as name@version. This document is merged onto it by RFC 7396: maps merge key by key, null removes, anything else replaces.",
+      "examples": [
+        "walker@4"
+      ]
+    },
+    "params": {
+      "description": "Parameters: the numbers that vary from character to character.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/word"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Parameter"
+      },
+      "default": {},
+      "examples": [
+        {
+          "stature": {
+            "unit": "cm",
+            "default": 96,
+            "min": 30,
+            "max": 260
+          }
+        }
+      ]
+    },
+    "scene": {
+      "$ref": "#/$defs/Scene"
+    },
+    "landmarks": {
+      "description": "Named measured points on the model. Those with side left have a mirrored right twin.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/word"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Landmark"
+      },
+      "default": {},
+      "examples": [
+        {
+          "hips": {
+            "at": [
+              0,
+              51,
+              0
+            ]
+          }
+        }
+      ]
+    },
+    "roles": {
+      "description": "Adds to or adjusts the roles of the house rules.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/word"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Role"
+      },
+      "default": {},
+      "examples": [
+        {
+          "skin": {
+            "token": "sk"
+          }
+        }
+      ]
+    },
+    "containers": {
+      "description": "Adds to or adjusts the containers of the house rules.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/word"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Container"
+      },
+      "default": {},
+      "examples": [
+        {
+          "whiskers": {
+            "parent": "carry"
+          }
+        }
+      ]
+    },
+    "parts": {
+      "description": "Building blocks that expand into chains, controls, solvers, constraints and guide lines. Whatever a part makes can be adjusted by id in those maps.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Part"
+      },
+      "default": {},
+      "examples": [
+        {
+          "root": {
+            "kind": "root"
+          }
+        }
+      ]
+    },
+    "chains": {
+      "description": "Joint chains.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Chain"
+      },
+      "default": {},
+      "examples": [
+        {
+          "spine": {
+            "points": [
+              "hips",
+              "chest"
+            ],
+            "joints": 4
+          }
+        }
+      ]
+    },
+    "controls": {
+      "description": "Controls: what the animator takes hold of. An entry whose id a part has made adjusts that control.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Control"
+      },
+      "default": {},
+      "examples": [
+        {
+          "hips": {
+            "at": "hips",
+            "shape": "square"
+          }
+        }
+      ]
+    },
+    "solvers": {
+      "description": "Solvers: what computes the rotation of several joints at once.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Solver"
+      },
+      "default": {},
+      "examples": [
+        {
+          "boom": {
+            "kind": "two_bone",
+            "joints": [
+              "boom.base",
+              "boom.knee",
+              "boom.tip"
+            ],
+            "goal": "hook",
+            "pole": "boom_pole"
+          }
+        }
+      ]
+    },
+    "constraints": {
+      "description": "Constraints: what makes one thing follow others.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Constraint"
+      },
+      "default": {},
+      "examples": [
+        {
+          "neck_turn": {
+            "kind": "orient",
+            "target": "spine.04",
+            "sources": {
+              "head": 1
+            }
+          }
+        }
+      ]
+    },
+    "guide_lines": {
+      "description": "Guide lines: drawn, never selectable, from a control to the thing it steers.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/GuideLine"
+      },
+      "default": {},
+      "examples": [
+        {
+          "knee_line": {
+            "from": "knee_pole",
+            "to": "leg.left.knee"
+          }
+        }
+      ]
+    },
+    "notes": {
+      "description": "Custom metadata carried on the rig's note node.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/word"
+      },
+      "additionalProperties": {
+        "type": [
+          "string",
+          "number",
+          "boolean"
+        ],
+        "maxLength": 2000
+      },
+      "default": {},
+      "examples": [
+        {
+          "sequence": "Marsh at dawn"
+        }
+      ]
+    }
+  },
+  "$defs": {
+    "word": {
+      "type": "string",
+      "pattern": "^[a-z][a-z0-9_]*$",
+      "maxLength": 60
+    },
+    "id": {
+      "type": "string",
+      "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$",
+      "maxLength": 120
+    },
+    "line": {
+      "type": "string",
+      "maxLength": 200
+    },
+    "NumberOrExpression": {
+      "title": "NumberOrExpression",
+      "description": "A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.",
+      "type": [
+        "number",
+        "string"
+      ],
+      "pattern": "^=",
+      "maxLength": 2000,
+      "examples": [
+        12.5,
+        "=params.stature * 0.53"
+      ]
+    },
+    "Point": {
+      "title": "Point",
+      "description": "Three numbers in the scene's unit and axes, or an expression that gives a point.",
+      "anyOf": [
+        {
+          "type": "array",
+          "prefixItems": [
+            {
+              "$ref": "#/$defs/NumberOrExpression"
+            },
+            {
+              "$ref": "#/$defs/NumberOrExpression"
+            },
+            {
+              "$ref": "#/$defs/NumberOrExpression"
+            }
+          ],
+          "minItems": 3,
+          "items": false
+        },
+        {
+          "type": "string",
+          "pattern": "^=",
+          "maxLength": 2000
+        }
+      ],
+      "examples": [
+        [
+          0,
+          51,
+          0
+        ],
+        "=mid(landmarks.hip, landmarks.ankle)"
+      ]
+    },
+    "Place": {
+      "title": "Place",
+      "description": "A landmark or joint by name, or a point.",
+      "anyOf": [
+        {
+          "type": "array",
+          "prefixItems": [
+            {
+              "$ref": "#/$defs/NumberOrExpression"
+            },
+            {
+              "$ref": "#/$defs/NumberOrExpression"
+            },
+            {
+              "$ref": "#/$defs/NumberOrExpression"
+            }
+          ],
+          "minItems": 3,
+          "items": false
+        },
+        {
+          "type": "string",
+          "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)",
+          "maxLength": 2000
+        }
+      ],
+      "examples": [
+        "wrist",
+        [
+          0,
+          51,
+          0
+        ]
+      ]
+    },
+    "SideOption": {
+      "title": "SideOption",
+      "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.",
+      "enum": [
+        "left",
+        "right",
+        "both",
+        "centre"
+      ],
+      "default": "centre",
+      "examples": [
+        "both"
+      ]
+    },
+    "MirrorRule": {
+      "title": "MirrorRule",
+      "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.",
+      "enum": [
+        "behaviour",
+        "orientation",
+        "world"
+      ],
+      "default": "behaviour",
+      "examples": [
+        "behaviour"
+      ]
+    },
+    "RotationOrderOption": {
+      "title": "RotationOrderOption",
+      "description": "Which axis turns first, second and third, about fixed axes.",
+      "enum": [
+        "xyz",
+        "xzy",
+        "yxz",
+        "yzx",
+        "zxy",
+        "zyx"
+      ],
+      "default": "xyz",
+      "examples": [
+        "zxy"
+      ]
+    },
+    "AxisName": {
+      "title": "AxisName",
+      "enum": [
+        "+x",
+        "-x",
+        "+y",
+        "-y",
+        "+z",
+        "-z"
+      ],
+      "description": "One of the six axis directions.",
+      "examples": [
+        "+x"
+      ]
+    },
+    "ChannelName": {
+      "enum": [
+        "move",
+        "turn",
+        "scale",
+        "tx",
+        "ty",
+        "tz",
+        "rx",
+        "ry",
+        "rz",
+        "sx",
+        "sy",
+        "sz"
+      ],
+      "description": "A channel, or move, turn or scale for all three of a kind."
+    },
+    "Parameter": {
+      "title": "Parameter",
+      "description": "A number that varies from character to character.",
+      "type": "object",
+      "required": [
+        "default"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "default": {
+          "type": "number",
+          "description": "Value when a character gives none.",
+          "examples": [
+            96
+          ]
+        },
+        "min": {
+          "type": "number",
+          "description": "Smallest value allowed.",
+          "examples": [
+            30
+          ]
+        },
+        "max": {
+          "type": "number",
+          "description": "Largest value allowed.",
+          "examples": [
+            260
+          ]
+        },
+        "unit": {
+          "$ref": "#/$defs/line",
+          "description": "Unit, for people; nothing is converted.",
+          "examples": [
+            "cm"
+          ]
+        },
+        "whole": {
+          "type": "boolean",
+          "default": false,
+          "description": "Only whole numbers are allowed.",
+          "examples": [
+            true
+          ]
+        },
+        "note": {
+          "$ref": "#/$defs/line",
+          "description": "What the number measures.",
+          "examples": [
+            "floor to crown"
+          ]
+        }
+      }
+    },
+    "Scene": {
+      "title": "Scene",
+      "description": "Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.",
+      "type": "object",
+      "additionalProperties": false,
+      "default": {
+        "up": "+y",
+        "forward": "+z",
+        "unit": "cm"
+      },
+      "properties": {
+        "up": {
+          "$ref": "#/$defs/AxisName",
+          "default": "+y",
+          "description": "Axis that points up.",
+          "examples": [
+            "+z"
+          ]
+        },
+        "forward": {
+          "$ref": "#/$defs/AxisName",
+          "default": "+z",
+          "description": "Axis the character faces along. Left is up × forward.",
+          "examples": [
+            "-y"
+          ]
+        },
+        "unit": {
+          "enum": [
+            "mm",
+            "cm",
+            "m"
+          ],
+          "default": "cm",
+          "description": "Unit of length.",
+          "examples": [
+            "m"
+          ]
+        }
+      },
+      "examples": [
+        {
+          "up": "+z",
+          "forward": "-y",
+          "unit": "m"
+        }
+      ]
+    },
+    "Landmark": {
+      "title": "Landmark",
+      "description": "A named measured point on the model.",
+      "type": "object",
+      "required": [
+        "at"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "at": {
+          "$ref": "#/$defs/Point",
+          "description": "Where it is. For side left: the left point.",
+          "x-unit": "scene unit"
+        },
+        "side": {
+          "enum": [
+            "left",
+            "centre"
+          ],
+          "default": "centre",
+          "description": "left: a mirrored right twin exists.",
+          "examples": [
+            "left"
+          ]
+        },
+        "right": {
+          "$ref": "#/$defs/Point",
+          "description": "The right point, where the model is not symmetrical.",
+          "x-unit": "scene unit"
+        },
+        "note": {
+          "$ref": "#/$defs/line",
+          "description": "How to find it on the model.",
+          "examples": [
+            "bony tip of the elbow"
+          ]
+        }
+      }
+    },
+    "Role": {
+      "title": "Role",
+      "description": "What a thing is for; decides its container, name token and visibility.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "token": {
+          "type": "string",
+          "pattern": "^[A-Za-z0-9_]*$",
+          "maxLength": 20,
+          "description": "Text that the naming pattern puts for this role; may be empty.",
+          "examples": [
+            "sk"
+          ]
+        },
+        "container": {
+          "$ref": "#/$defs/word",
+          "description": "Container that holds things of this role.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "shown": {
+          "type": "boolean",
+          "default": true,
+          "description": "Whether an animator sees things of this role.",
+          "examples": [
+            false
+          ]
+        },
+        "selectable": {
+          "type": "boolean",
+          "default": true,
+          "description": "Whether an animator can select things of this role.",
+          "examples": [
+            false
+          ]
+        },
+        "title": {
+          "$ref": "#/$defs/line",
+          "description": "What people call it.",
+          "examples": [
+            "Skin joint"
+          ]
+        }
+      }
+    },
+    "Container": {
+      "title": "Container",
+      "description": "A group that holds one class of things.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "parent": {
+          "$ref": "#/$defs/word",
+          "description": "Container it lies in; without one it lies directly in the rig.",
+          "examples": [
+            "carry"
+          ]
+        },
+        "moves": {
+          "enum": [
+            "carried",
+            "parked"
+          ],
+          "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.",
+          "examples": [
+            "parked"
+          ]
+        },
+        "shown": {
+          "type": "boolean",
+          "default": true,
+          "description": "Whether an animator sees what is inside.",
+          "examples": [
+            false
+          ]
+        },
+        "title": {
+          "$ref": "#/$defs/line",
+          "description": "What people call it.",
+          "examples": [
+            "Skin joints"
+          ]
+        }
+      }
+    },
+    "Part": {
+      "title": "Part",
+      "description": "A building block; kind decides which.",
+      "type": "object",
+      "required": [
+        "kind"
+      ],
+      "discriminator": {
+        "propertyName": "kind"
+      },
+      "oneOf": [
+        {
+          "$ref": "#/$defs/LimbPart"
+        },
+        {
+          "$ref": "#/$defs/RootPart"
+        },
+        {
+          "$ref": "#/$defs/StrandPart"
+        }
+      ]
+    },
+    "Orient": {
+      "title": "Orient",
+      "description": "How joint frames are turned.",
+      "type": "object",
+      "additionalProperties": false,
+      "default": {
+        "rule": "chain",
+        "aim": "+x",
+        "up": "+y"
+      },
+      "properties": {
+        "rule": {
+          "enum": [
+            "chain",
+            "world"
+          ],
+          "default": "chain",
+          "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.",
+          "examples": [
+            "world"
+          ]
+        },
+        "aim": {
+          "$ref": "#/$defs/AxisName",
+          "default": "+x",
+          "description": "Axis of the joint that points at the next joint.",
+          "examples": [
+            "+y"
+          ]
+        },
+        "up": {
+          "$ref": "#/$defs/AxisName",
+          "default": "+y",
+          "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.",
+          "examples": [
+            "+z"
+          ]
+        },
+        "toward": {
+          "$ref": "#/$defs/Point",
+          "description": "Direction the up axis should lean to, in place of the chain's own plane.",
+          "examples": [
+            [
+              0,
+              1,
+              0
+            ]
+          ]
+        }
+      },
+      "examples": [
+        {
+          "aim": "+y",
+          "up": "+z"
+        }
+      ]
+    },
+    "Chain": {
+      "title": "Chain",
+      "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of every joint of the chain.",
+          "examples": [
+            "helper"
+          ]
+        },
+        "points": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 1,
+          "maxItems": 500,
+          "description": "Where the chain runs, from first to last.",
+          "examples": [
+            [
+              "shoulder",
+              "elbow",
+              "wrist"
+            ]
+          ]
+        },
+        "joints": {
+          "type": "integer",
+          "minimum": 2,
+          "maximum": 500,
+          "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.",
+          "examples": [
+            5
+          ]
+        },
+        "curve": {
+          "enum": [
+            "smooth",
+            "straight"
+          ],
+          "default": "smooth",
+          "description": "How joints are spread between the points: along a smooth curve or along straight lines.",
+          "examples": [
+            "straight"
+          ]
+        },
+        "names": {
+          "type": "array",
+          "items": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.",
+          "examples": [
+            [
+              "upper",
+              "lower",
+              "end"
+            ]
+          ]
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the first joint follows.",
+          "examples": [
+            "spine.chest"
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "orient": {
+          "$ref": "#/$defs/Orient"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
+    "PolePlace": {
+      "title": "PolePlace",
+      "description": "Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.",
+      "type": "object",
+      "required": [
+        "joints"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "joints": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/id"
+          },
+          "minItems": 3,
+          "maxItems": 3,
+          "description": "Start, middle and end joint.",
+          "examples": [
+            [
+              "leg.left.hip",
+              "leg.left.knee",
+              "leg.left.ankle"
+            ]
+          ]
+        },
+        "distance": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "Distance from the line start–end, as a factor on the length of both bones.",
+          "x-unit": "limb lengths",
+          "examples": [
+            1
+          ]
+        },
+        "bend": {
+          "$ref": "#/$defs/Point",
+          "description": "Direction in which the middle joint should lead when the three joints lie on one line.",
+          "examples": [
+            [
+              0,
+              0,
+              1
+            ]
+          ]
+        }
+      },
+      "examples": [
+        {
+          "joints": [
+            "leg.left.hip",
+            "leg.left.knee",
+            "leg.left.ankle"
+          ],
+          "distance": 0.8
+        }
+      ]
+    },
+    "ChannelOption": {
+      "title": "ChannelOption",
+      "description": "What an animator may do with a channel.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "locked": {
+          "type": "boolean",
+          "default": false,
+          "description": "The channel cannot be changed.",
+          "examples": [
+            true
+          ]
+        },
+        "min": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "description": "Smallest value.",
+          "x-unit": "degrees, scene unit or factor",
+          "examples": [
+            -40
+          ]
+        },
+        "max": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "description": "Largest value.",
+          "x-unit": "degrees, scene unit or factor",
+          "examples": [
+            40
+          ]
+        }
+      }
+    },
+    "AttributeOption": {
+      "title": "AttributeOption",
+      "description": "A value of its own on a control, beside the nine channels.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "default": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0,
+          "description": "Value at rest.",
+          "examples": [
+            1
+          ]
+        },
+        "min": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "description": "Smallest value.",
+          "examples": [
+            0
+          ]
+        },
+        "max": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "description": "Largest value.",
+          "examples": [
+            1
+          ]
+        },
+        "note": {
+          "$ref": "#/$defs/line",
+          "description": "What it does, for the animator.",
+          "examples": [
+            "0 turns joint by joint, 1 follows the hand"
+          ]
+        }
+      }
+    },
+    "Control": {
+      "title": "Control",
+      "description": "What the animator takes hold of.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "control",
+          "description": "Role; decides the container.",
+          "examples": [
+            "control"
+          ]
+        },
+        "at": {
+          "$ref": "#/$defs/Place",
+          "description": "Where it stands at rest: a landmark, a joint or a point.",
+          "examples": [
+            "wrist"
+          ]
+        },
+        "pole_of": {
+          "$ref": "#/$defs/PolePlace"
+        },
+        "align": {
+          "type": "string",
+          "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$",
+          "default": "world",
+          "description": "Joint or control whose rest orientation it takes, or world.",
+          "examples": [
+            "arm.left.wrist"
+          ]
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that it follows.",
+          "examples": [
+            "hips"
+          ]
+        },
+        "shape": {
+          "enum": [
+            "ring",
+            "square",
+            "diamond",
+            "cross",
+            "arrow",
+            "ball",
+            "box",
+            "pin",
+            "compass"
+          ],
+          "default": "ring",
+          "description": "Drawn shape.",
+          "examples": [
+            "diamond"
+          ]
+        },
+        "size": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "Factor on the size that the compiler takes from what the control steers.",
+          "examples": [
+            1.2
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        },
+        "channels": {
+          "type": "object",
+          "propertyNames": {
+            "$ref": "#/$defs/ChannelName"
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/ChannelOption"
+          },
+          "default": {},
+          "description": "Locks and limits by channel; move, turn and scale stand for three channels each.",
+          "examples": [
+            {
+              "scale": {
+                "locked": true
+              },
+              "rx": {
+                "min": -40,
+                "max": 40
+              }
+            }
+          ]
+        },
+        "attributes": {
+          "type": "object",
+          "propertyNames": {
+            "$ref": "#/$defs/word"
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/AttributeOption"
+          },
+          "default": {},
+          "description": "Values of its own, by name.",
+          "examples": [
+            {
+              "reach": {
+                "default": 1,
+                "min": 0,
+                "max": 1
+              }
+            }
+          ]
+        }
+      }
+    },
+    "NumberOrAttribute": {
+      "title": "NumberOrAttribute",
+      "description": "A number, an expression, or an attribute of a control as control.attribute.",
+      "type": [
+        "number",
+        "string"
+      ],
+      "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)",
+      "maxLength": 2000,
+      "examples": [
+        1,
+        "arm.left.hand.reach"
+      ]
+    },
+    "Solver": {
+      "title": "Solver",
+      "description": "Computes the rotation of several joints at once.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "kind": {
+          "enum": [
+            "two_bone"
+          ],
+          "description": "two_bone: three joints in a row bend so that the last meets the goal.",
+          "examples": [
+            "two_bone"
+          ]
+        },
+        "joints": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/id"
+          },
+          "minItems": 3,
+          "maxItems": 3,
+          "description": "The three joints, from root to tip, each the parent of the next.",
+          "examples": [
+            [
+              "arm.left.shoulder",
+              "arm.left.elbow",
+              "arm.left.wrist"
+            ]
+          ]
+        },
+        "goal": {
+          "$ref": "#/$defs/id",
+          "description": "Control that the last joint follows.",
+          "examples": [
+            "arm.left.hand"
+          ]
+        },
+        "pole": {
+          "$ref": "#/$defs/id",
+          "description": "Control that the middle joint points at.",
+          "examples": [
+            "arm.left.pole"
+          ]
+        },
+        "blend": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 1,
+          "description": "0: joints keep their own rotation. 1: solved.",
+          "examples": [
+            "arm.left.hand.reach"
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        }
+      }
+    },
+    "Constraint": {
+      "title": "Constraint",
+      "description": "Makes one thing follow others.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "kind": {
+          "enum": [
+            "parent",
+            "point",
+            "orient",
+            "scale"
+          ],
+          "description": "What is followed: everything, position, rotation or scale.",
+          "examples": [
+            "orient"
+          ]
+        },
+        "target": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that follows.",
+          "examples": [
+            "arm.left.wrist"
+          ]
+        },
+        "sources": {
+          "type": "object",
+          "propertyNames": {
+            "$ref": "#/$defs/id"
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/NumberOrExpression"
+          },
+          "minProperties": 1,
+          "description": "What is followed, each with its weight; weights are taken as shares of their sum.",
+          "examples": [
+            {
+              "arm.left.hand": 1
+            }
+          ]
+        },
+        "blend": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "description": "Two sources only: share of the first; the second takes the rest.",
+          "examples": [
+            "arm.left.hand.reach"
+          ]
+        },
+        "keep_offset": {
+          "type": "boolean",
+          "default": true,
+          "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.",
+          "examples": [
+            true
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        }
+      }
+    },
+    "GuideLine": {
+      "title": "GuideLine",
+      "description": "A drawn, unselectable line from a control to the thing it steers.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "from": {
+          "$ref": "#/$defs/id",
+          "description": "Control at its start.",
+          "examples": [
+            "arm.left.pole"
+          ]
+        },
+        "to": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control at its end.",
+          "examples": [
+            "arm.left.elbow"
+          ]
+        },
+        "style": {
+          "enum": [
+            "dotted",
+            "dashed",
+            "solid"
+          ],
+          "default": "dotted",
+          "description": "How it is drawn.",
+          "examples": [
+            "dotted"
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        }
+      }
+    },
+    "LimbPart": {
+      "title": "LimbPart",
+      "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.",
+      "type": "object",
+      "required": [
+        "kind",
+        "points"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "limb",
+          "description": "An arm, a leg, or anything else that bends once."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the limb hangs on.",
+          "examples": [
+            "spine.chest"
+          ]
+        },
+        "points": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 3,
+          "maxItems": 3,
+          "description": "Start, bend and end.",
+          "examples": [
+            [
+              "shoulder",
+              "elbow",
+              "wrist"
+            ]
+          ]
+        },
+        "names": {
+          "type": "array",
+          "items": {
+            "type": "string",
+            "pattern": "^[a-z][a-z0-9_]*$",
+            "maxLength": 60
+          },
+          "minItems": 3,
+          "maxItems": 3,
+          "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.",
+          "examples": [
+            [
+              "upper",
+              "lower",
+              "end"
+            ]
+          ]
+        },
+        "goal": {
+          "$ref": "#/$defs/word",
+          "default": "goal",
+          "description": "Name of the goal control.",
+          "examples": [
+            "hand"
+          ]
+        },
+        "goal_parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that goal and pole follow; without it they follow the root only.",
+          "examples": [
+            "hips"
+          ]
+        },
+        "pole": {
+          "type": "object",
+          "additionalProperties": false,
+          "default": {
+            "distance": 1,
+            "guide_line": true
+          },
+          "description": "The pole vector control.",
+          "properties": {
+            "distance": {
+              "$ref": "#/$defs/NumberOrExpression",
+              "default": 1,
+              "description": "Distance from the line start–end through the bend, as a factor on the limb's length.",
+              "x-unit": "limb lengths",
+              "examples": [
+                1
+              ]
+            },
+            "guide_line": {
+              "type": "boolean",
+              "default": true,
+              "description": "Draws a guide line from the pole control to the middle joint.",
+              "examples": [
+                true
+              ]
+            }
+          },
+          "examples": [
+            {
+              "distance": 0.8
+            }
+          ]
+        },
+        "bend": {
+          "$ref": "#/$defs/Point",
+          "description": "Direction in which the middle joint should lead when the limb is straight at rest.",
+          "examples": [
+            [
+              0,
+              0,
+              -1
+            ]
+          ]
+        },
+        "blend": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "Rest value of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.",
+          "examples": [
+            1
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
+    "RootPart": {
+      "title": "RootPart",
+      "description": "The root control: it carries everything in the carried containers and lies at the origin.",
+      "type": "object",
+      "required": [
+        "kind"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "root",
+          "description": "The root control that carries the whole rig."
+        },
+        "at": {
+          "$ref": "#/$defs/Place",
+          "default": [
+            0,
+            0,
+            0
+          ],
+          "description": "Where the root control stands.",
+          "x-unit": "scene unit",
+          "examples": [
+            [
+              0,
+              0,
+              0
+            ]
+          ]
+        },
+        "shape": {
+          "enum": [
+            "ring",
+            "square",
+            "diamond",
+            "cross",
+            "arrow",
+            "ball",
+            "box",
+            "pin",
+            "compass"
+          ],
+          "default": "compass",
+          "description": "Drawn shape.",
+          "examples": [
+            "compass"
+          ]
+        },
+        "size": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "Factor on the size taken from the whole rig.",
+          "examples": [
+            1.2
+          ]
+        }
+      }
+    },
+    "StrandPart": {
+      "title": "StrandPart",
+      "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.",
+      "type": "object",
+      "required": [
+        "kind",
+        "points",
+        "joints"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "strand",
+          "description": "A row of joints, each with its own control."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the strand hangs on.",
+          "examples": [
+            "hips"
+          ]
+        },
+        "points": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 2,
+          "maxItems": 500,
+          "description": "Where the strand runs, from base to tip.",
+          "examples": [
+            [
+              "tail_base",
+              "tail_tip"
+            ]
+          ]
+        },
+        "joints": {
+          "type": "integer",
+          "minimum": 2,
+          "maximum": 500,
+          "description": "Count of joints, spread evenly by arc length.",
+          "examples": [
+            8
+          ]
+        },
+        "curve": {
+          "enum": [
+            "smooth",
+            "straight"
+          ],
+          "default": "smooth",
+          "description": "Whether joints follow a smooth curve through the points or straight lines.",
+          "examples": [
+            "smooth"
+          ]
+        },
+        "shape": {
+          "enum": [
+            "ring",
+            "square",
+            "diamond",
+            "cross",
+            "arrow",
+            "ball",
+            "box",
+            "pin",
+            "compass"
+          ],
+          "default": "ring",
+          "description": "Shape of the controls.",
+          "examples": [
+            "ring"
+          ]
+        },
+        "size": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "Factor on the controls' size.",
+          "examples": [
+            1.2
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "orient": {
+          "$ref": "#/$defs/Orient"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    }
+  }
+};

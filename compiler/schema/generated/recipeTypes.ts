@@ -1,0 +1,562 @@
+// Made by bin/generate.ts from the JSON Schemas. Change those, not this.
+
+/**
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "word".
+ */
+export type Word = string;
+/**
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "line".
+ */
+export type Line = string;
+/**
+ * One of the six axis directions.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "AxisName".
+ */
+export type AxisName = '+x' | '-x' | '+y' | '-y' | '+z' | '-z';
+/**
+ * Three numbers in the scene's unit and axes, or an expression that gives a point.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Point".
+ */
+export type Point = [NumberOrExpression, NumberOrExpression, NumberOrExpression] | string;
+/**
+ * A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "NumberOrExpression".
+ */
+export type NumberOrExpression = number | string;
+/**
+ * A building block; kind decides which.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Part".
+ */
+export type Part = LimbPart | RootPart | StrandPart;
+/**
+ * left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "SideOption".
+ */
+export type SideOption = 'left' | 'right' | 'both' | 'centre';
+/**
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "id".
+ */
+export type Id = string;
+/**
+ * A landmark or joint by name, or a point.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Place".
+ */
+export type Place = [NumberOrExpression, NumberOrExpression, NumberOrExpression] | string;
+/**
+ * How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "MirrorRule".
+ */
+export type MirrorRule = 'behaviour' | 'orientation' | 'world';
+/**
+ * Which axis turns first, second and third, about fixed axes.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "RotationOrderOption".
+ */
+export type RotationOrderOption = 'xyz' | 'xzy' | 'yxz' | 'yzx' | 'zxy' | 'zyx';
+/**
+ * A number, an expression, or an attribute of a control as control.attribute.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "NumberOrAttribute".
+ */
+export type NumberOrAttribute = number | string;
+/**
+ * A channel, or move, turn or scale for all three of a kind.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "ChannelName".
+ */
+export type ChannelName =
+  'move' | 'turn' | 'scale' | 'tx' | 'ty' | 'tz' | 'rx' | 'ry' | 'rz' | 'sx' | 'sy' | 'sz';
+
+/**
+ * A rig recipe, format 1: everything Pintle needs to make one character movable.
+ */
+export interface Recipe {
+  /**
+   * Version of the recipe language.
+   */
+  format: 1;
+  recipe: Word;
+  title?: Line;
+  /**
+   * House rules to follow, as name@version.
+   */
+  house?: string;
+  /**
+   * Recipe version this one changes, as name@version. This document is merged onto it by RFC 7396: maps merge key by key, null removes, anything else replaces.
+   */
+  extends?: string;
+  /**
+   * Parameters: the numbers that vary from character to character.
+   */
+  params?: {
+    [k: string]: Parameter;
+  };
+  scene?: Scene;
+  /**
+   * Named measured points on the model. Those with side left have a mirrored right twin.
+   */
+  landmarks?: {
+    [k: string]: Landmark;
+  };
+  /**
+   * Adds to or adjusts the roles of the house rules.
+   */
+  roles?: {
+    [k: string]: Role;
+  };
+  /**
+   * Adds to or adjusts the containers of the house rules.
+   */
+  containers?: {
+    [k: string]: Container;
+  };
+  /**
+   * Building blocks that expand into chains, controls, solvers, constraints and guide lines. Whatever a part makes can be adjusted by id in those maps.
+   */
+  parts?: {
+    [k: string]: Part;
+  };
+  /**
+   * Joint chains.
+   */
+  chains?: {
+    [k: string]: Chain;
+  };
+  /**
+   * Controls: what the animator takes hold of. An entry whose id a part has made adjusts that control.
+   */
+  controls?: {
+    [k: string]: Control;
+  };
+  /**
+   * Solvers: what computes the rotation of several joints at once.
+   */
+  solvers?: {
+    [k: string]: Solver;
+  };
+  /**
+   * Constraints: what makes one thing follow others.
+   */
+  constraints?: {
+    [k: string]: Constraint;
+  };
+  /**
+   * Guide lines: drawn, never selectable, from a control to the thing it steers.
+   */
+  guide_lines?: {
+    [k: string]: GuideLine;
+  };
+  /**
+   * Custom metadata carried on the rig's note node.
+   */
+  notes?: {
+    [k: string]: string | number | boolean;
+  };
+}
+/**
+ * A number that varies from character to character.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Parameter".
+ */
+export interface Parameter {
+  /**
+   * Value when a character gives none.
+   */
+  default: number;
+  /**
+   * Smallest value allowed.
+   */
+  min?: number;
+  /**
+   * Largest value allowed.
+   */
+  max?: number;
+  unit?: Line;
+  /**
+   * Only whole numbers are allowed.
+   */
+  whole?: boolean;
+  note?: Line;
+}
+/**
+ * Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Scene".
+ */
+export interface Scene {
+  up?: AxisName;
+  forward?: AxisName;
+  /**
+   * Unit of length.
+   */
+  unit?: 'mm' | 'cm' | 'm';
+}
+/**
+ * A named measured point on the model.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Landmark".
+ */
+export interface Landmark {
+  at: Point;
+  /**
+   * left: a mirrored right twin exists.
+   */
+  side?: 'left' | 'centre';
+  right?: Point;
+  note?: Line;
+}
+/**
+ * What a thing is for; decides its container, name token and visibility.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Role".
+ */
+export interface Role {
+  /**
+   * Text that the naming pattern puts for this role; may be empty.
+   */
+  token?: string;
+  container?: Word;
+  /**
+   * Whether an animator sees things of this role.
+   */
+  shown?: boolean;
+  /**
+   * Whether an animator can select things of this role.
+   */
+  selectable?: boolean;
+  title?: Line;
+}
+/**
+ * A group that holds one class of things.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Container".
+ */
+export interface Container {
+  parent?: Word;
+  /**
+   * carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.
+   */
+  moves?: 'carried' | 'parked';
+  /**
+   * Whether an animator sees what is inside.
+   */
+  shown?: boolean;
+  title?: Line;
+}
+/**
+ * Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "LimbPart".
+ */
+export interface LimbPart {
+  /**
+   * An arm, a leg, or anything else that bends once.
+   */
+  kind: 'limb';
+  side?: SideOption;
+  parent?: Id;
+  /**
+   * Start, bend and end.
+   */
+  points: Place[];
+  /**
+   * Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.
+   */
+  names?: string[];
+  goal?: Word;
+  goal_parent?: Id;
+  /**
+   * The pole vector control.
+   */
+  pole?: {
+    distance?: NumberOrExpression;
+    /**
+     * Draws a guide line from the pole control to the middle joint.
+     */
+    guide_line?: boolean;
+  };
+  bend?: Point;
+  blend?: NumberOrExpression;
+  role?: Word;
+  mirror?: MirrorRule;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * The root control: it carries everything in the carried containers and lies at the origin.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "RootPart".
+ */
+export interface RootPart {
+  /**
+   * The root control that carries the whole rig.
+   */
+  kind: 'root';
+  at?: Place;
+  /**
+   * Drawn shape.
+   */
+  shape?: 'ring' | 'square' | 'diamond' | 'cross' | 'arrow' | 'ball' | 'box' | 'pin' | 'compass';
+  size?: NumberOrExpression;
+}
+/**
+ * A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "StrandPart".
+ */
+export interface StrandPart {
+  /**
+   * A row of joints, each with its own control.
+   */
+  kind: 'strand';
+  side?: SideOption;
+  parent?: Id;
+  /**
+   * Where the strand runs, from base to tip.
+   */
+  points: Place[];
+  /**
+   * Count of joints, spread evenly by arc length.
+   */
+  joints: number;
+  /**
+   * Whether joints follow a smooth curve through the points or straight lines.
+   */
+  curve?: 'smooth' | 'straight';
+  /**
+   * Shape of the controls.
+   */
+  shape?: 'ring' | 'square' | 'diamond' | 'cross' | 'arrow' | 'ball' | 'box' | 'pin' | 'compass';
+  size?: NumberOrExpression;
+  role?: Word;
+  mirror?: MirrorRule;
+  orient?: Orient;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * How joint frames are turned.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Orient".
+ */
+export interface Orient {
+  /**
+   * chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.
+   */
+  rule?: 'chain' | 'world';
+  aim?: AxisName;
+  up?: AxisName;
+  toward?: Point;
+}
+/**
+ * Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Chain".
+ */
+export interface Chain {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  role?: Word;
+  /**
+   * Where the chain runs, from first to last.
+   */
+  points?: Place[];
+  /**
+   * Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.
+   */
+  joints?: number;
+  /**
+   * How joints are spread between the points: along a smooth curve or along straight lines.
+   */
+  curve?: 'smooth' | 'straight';
+  /**
+   * Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.
+   */
+  names?: string[];
+  parent?: Id;
+  side?: SideOption;
+  mirror?: MirrorRule;
+  orient?: Orient;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * What the animator takes hold of.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Control".
+ */
+export interface Control {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  role?: Word;
+  at?: Place;
+  pole_of?: PolePlace;
+  /**
+   * Joint or control whose rest orientation it takes, or world.
+   */
+  align?: string;
+  parent?: Id;
+  /**
+   * Drawn shape.
+   */
+  shape?: 'ring' | 'square' | 'diamond' | 'cross' | 'arrow' | 'ball' | 'box' | 'pin' | 'compass';
+  size?: NumberOrExpression;
+  side?: SideOption;
+  rotation_order?: RotationOrderOption;
+  /**
+   * Locks and limits by channel; move, turn and scale stand for three channels each.
+   */
+  channels?: {
+    [k: string]: ChannelOption;
+  };
+  /**
+   * Values of its own, by name.
+   */
+  attributes?: {
+    [k: string]: AttributeOption;
+  };
+}
+/**
+ * Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "PolePlace".
+ */
+export interface PolePlace {
+  /**
+   * Start, middle and end joint.
+   */
+  joints: Id[];
+  distance?: NumberOrExpression;
+  bend?: Point;
+}
+/**
+ * What an animator may do with a channel.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "ChannelOption".
+ */
+export interface ChannelOption {
+  /**
+   * The channel cannot be changed.
+   */
+  locked?: boolean;
+  min?: NumberOrExpression;
+  max?: NumberOrExpression;
+}
+/**
+ * A value of its own on a control, beside the nine channels.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "AttributeOption".
+ */
+export interface AttributeOption {
+  default?: NumberOrExpression;
+  min?: NumberOrExpression;
+  max?: NumberOrExpression;
+  note?: Line;
+}
+/**
+ * Computes the rotation of several joints at once.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Solver".
+ */
+export interface Solver {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  /**
+   * two_bone: three joints in a row bend so that the last meets the goal.
+   */
+  kind?: 'two_bone';
+  /**
+   * The three joints, from root to tip, each the parent of the next.
+   */
+  joints?: Id[];
+  goal?: Id;
+  pole?: Id;
+  blend?: NumberOrAttribute;
+  side?: SideOption;
+}
+/**
+ * Makes one thing follow others.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Constraint".
+ */
+export interface Constraint {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  /**
+   * What is followed: everything, position, rotation or scale.
+   */
+  kind?: 'parent' | 'point' | 'orient' | 'scale';
+  target?: Id;
+  /**
+   * What is followed, each with its weight; weights are taken as shares of their sum.
+   */
+  sources?: {
+    [k: string]: NumberOrExpression;
+  };
+  blend?: NumberOrAttribute;
+  /**
+   * Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.
+   */
+  keep_offset?: boolean;
+  side?: SideOption;
+}
+/**
+ * A drawn, unselectable line from a control to the thing it steers.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "GuideLine".
+ */
+export interface GuideLine {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  from?: Id;
+  to?: Id;
+  /**
+   * How it is drawn.
+   */
+  style?: 'dotted' | 'dashed' | 'solid';
+  side?: SideOption;
+}

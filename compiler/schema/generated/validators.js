@@ -1,0 +1,4020 @@
+// Made by bin/generate.ts from the JSON Schemas. Change those, not this.
+var __getOwnPropNames = Object.getOwnPropertyNames;
+var __commonJS = (cb, mod) => function __require() {
+  try {
+    return mod || (0, cb[__getOwnPropNames(cb)[0]])((mod = { exports: {} }).exports, mod), mod.exports;
+  } catch (e) {
+    throw mod = 0, e;
+  }
+};
+
+// node_modules/ajv/dist/runtime/ucs2length.js
+var require_ucs2length = __commonJS({
+  "node_modules/ajv/dist/runtime/ucs2length.js"(exports) {
+    "use strict";
+    Object.defineProperty(exports, "__esModule", { value: true });
+    function ucs2length(str) {
+      const len = str.length;
+      let length = 0;
+      let pos = 0;
+      let value;
+      while (pos < len) {
+        length++;
+        value = str.charCodeAt(pos++);
+        if (value >= 55296 && value <= 56319 && pos < len) {
+          value = str.charCodeAt(pos);
+          if ((value & 64512) === 56320)
+            pos++;
+        }
+      }
+      return length;
+    }
+    exports.default = ucs2length;
+    ucs2length.code = 'require("ajv/dist/runtime/ucs2length").default';
+  }
+});
+
+// <stdin>
+var validateRecipe = validate52;
+var schema19 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/recipe/1", "title": "Recipe", "description": "A rig recipe, format 1: everything Pintle needs to make one character movable.", "type": "object", "required": ["format", "recipe"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the recipe language.", "examples": [1] }, "recipe": { "$ref": "#/$defs/word", "description": "Name of the recipe: lower-case letters, digits and underscores. Also the character's name unless one is given when compiling.", "examples": ["hare"] }, "title": { "$ref": "#/$defs/line", "description": "What people call the rig.", "examples": ["Upright hare"] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "House rules to follow, as name@version.", "default": "standard@1", "examples": ["tidewrack@1"] }, "extends": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "Recipe version this one changes, as name@version. This document is merged onto it by RFC 7396: maps merge key by key, null removes, anything else replaces.", "examples": ["walker@4"] }, "params": { "description": "Parameters: the numbers that vary from character to character.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Parameter" }, "default": {}, "examples": [{ "stature": { "unit": "cm", "default": 96, "min": 30, "max": 260 } }] }, "scene": { "$ref": "#/$defs/Scene" }, "landmarks": { "description": "Named measured points on the model. Those with side left have a mirrored right twin.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Landmark" }, "default": {}, "examples": [{ "hips": { "at": [0, 51, 0] } }] }, "roles": { "description": "Adds to or adjusts the roles of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Role" }, "default": {}, "examples": [{ "skin": { "token": "sk" } }] }, "containers": { "description": "Adds to or adjusts the containers of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Container" }, "default": {}, "examples": [{ "whiskers": { "parent": "carry" } }] }, "parts": { "description": "Building blocks that expand into chains, controls, solvers, constraints and guide lines. Whatever a part makes can be adjusted by id in those maps.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Part" }, "default": {}, "examples": [{ "root": { "kind": "root" } }] }, "chains": { "description": "Joint chains.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Chain" }, "default": {}, "examples": [{ "spine": { "points": ["hips", "chest"], "joints": 4 } }] }, "controls": { "description": "Controls: what the animator takes hold of. An entry whose id a part has made adjusts that control.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Control" }, "default": {}, "examples": [{ "hips": { "at": "hips", "shape": "square" } }] }, "solvers": { "description": "Solvers: what computes the rotation of several joints at once.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Solver" }, "default": {}, "examples": [{ "boom": { "kind": "two_bone", "joints": ["boom.base", "boom.knee", "boom.tip"], "goal": "hook", "pole": "boom_pole" } }] }, "constraints": { "description": "Constraints: what makes one thing follow others.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Constraint" }, "default": {}, "examples": [{ "neck_turn": { "kind": "orient", "target": "spine.04", "sources": { "head": 1 } } }] }, "guide_lines": { "description": "Guide lines: drawn, never selectable, from a control to the thing it steers.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/GuideLine" }, "default": {}, "examples": [{ "knee_line": { "from": "knee_pole", "to": "leg.left.knee" } }] }, "notes": { "description": "Custom metadata carried on the rig's note node.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": ["string", "number", "boolean"], "maxLength": 2e3 }, "default": {}, "examples": [{ "sequence": "Marsh at dawn" }] } }, "$defs": { "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "id": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "maxLength": 120 }, "line": { "type": "string", "maxLength": 200 }, "NumberOrExpression": { "title": "NumberOrExpression", "description": "A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.", "type": ["number", "string"], "pattern": "^=", "maxLength": 2e3, "examples": [12.5, "=params.stature * 0.53"] }, "Point": { "title": "Point", "description": "Three numbers in the scene's unit and axes, or an expression that gives a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^=", "maxLength": 2e3 }], "examples": [[0, 51, 0], "=mid(landmarks.hip, landmarks.ankle)"] }, "Place": { "title": "Place", "description": "A landmark or joint by name, or a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)", "maxLength": 2e3 }], "examples": ["wrist", [0, 51, 0]] }, "SideOption": { "title": "SideOption", "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.", "enum": ["left", "right", "both", "centre"], "default": "centre", "examples": ["both"] }, "MirrorRule": { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] }, "RotationOrderOption": { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] }, "AxisName": { "title": "AxisName", "enum": ["+x", "-x", "+y", "-y", "+z", "-z"], "description": "One of the six axis directions.", "examples": ["+x"] }, "ChannelName": { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." }, "Parameter": { "title": "Parameter", "description": "A number that varies from character to character.", "type": "object", "required": ["default"], "additionalProperties": false, "properties": { "default": { "type": "number", "description": "Value when a character gives none.", "examples": [96] }, "min": { "type": "number", "description": "Smallest value allowed.", "examples": [30] }, "max": { "type": "number", "description": "Largest value allowed.", "examples": [260] }, "unit": { "$ref": "#/$defs/line", "description": "Unit, for people; nothing is converted.", "examples": ["cm"] }, "whole": { "type": "boolean", "default": false, "description": "Only whole numbers are allowed.", "examples": [true] }, "note": { "$ref": "#/$defs/line", "description": "What the number measures.", "examples": ["floor to crown"] } } }, "Scene": { "title": "Scene", "description": "Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.", "type": "object", "additionalProperties": false, "default": { "up": "+y", "forward": "+z", "unit": "cm" }, "properties": { "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis that points up.", "examples": ["+z"] }, "forward": { "$ref": "#/$defs/AxisName", "default": "+z", "description": "Axis the character faces along. Left is up \xD7 forward.", "examples": ["-y"] }, "unit": { "enum": ["mm", "cm", "m"], "default": "cm", "description": "Unit of length.", "examples": ["m"] } }, "examples": [{ "up": "+z", "forward": "-y", "unit": "m" }] }, "Landmark": { "title": "Landmark", "description": "A named measured point on the model.", "type": "object", "required": ["at"], "additionalProperties": false, "properties": { "at": { "$ref": "#/$defs/Point", "description": "Where it is. For side left: the left point.", "x-unit": "scene unit" }, "side": { "enum": ["left", "centre"], "default": "centre", "description": "left: a mirrored right twin exists.", "examples": ["left"] }, "right": { "$ref": "#/$defs/Point", "description": "The right point, where the model is not symmetrical.", "x-unit": "scene unit" }, "note": { "$ref": "#/$defs/line", "description": "How to find it on the model.", "examples": ["bony tip of the elbow"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Part": { "title": "Part", "description": "A building block; kind decides which.", "type": "object", "required": ["kind"], "discriminator": { "propertyName": "kind" }, "oneOf": [{ "$ref": "#/$defs/LimbPart" }, { "$ref": "#/$defs/RootPart" }, { "$ref": "#/$defs/StrandPart" }] }, "Orient": { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] } }, "examples": [{ "aim": "+y", "up": "+z" }] }, "Chain": { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "PolePlace": { "title": "PolePlace", "description": "Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.", "type": "object", "required": ["joints"], "additionalProperties": false, "properties": { "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "Start, middle and end joint.", "examples": [["leg.left.hip", "leg.left.knee", "leg.left.ankle"]] }, "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end, as a factor on the length of both bones.", "x-unit": "limb lengths", "examples": [1] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the three joints lie on one line.", "examples": [[0, 0, 1]] } }, "examples": [{ "joints": ["leg.left.hip", "leg.left.knee", "leg.left.ankle"], "distance": 0.8 }] }, "ChannelOption": { "title": "ChannelOption", "description": "What an animator may do with a channel.", "type": "object", "additionalProperties": false, "properties": { "locked": { "type": "boolean", "default": false, "description": "The channel cannot be changed.", "examples": [true] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees, scene unit or factor", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees, scene unit or factor", "examples": [40] } } }, "AttributeOption": { "title": "AttributeOption", "description": "A value of its own on a control, beside the nine channels.", "type": "object", "additionalProperties": false, "properties": { "default": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest.", "examples": [1] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "examples": [0] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "examples": [1] }, "note": { "$ref": "#/$defs/line", "description": "What it does, for the animator.", "examples": ["0 turns joint by joint, 1 follows the hand"] } } }, "Control": { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] } } }, "NumberOrAttribute": { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] }, "Solver": { "title": "Solver", "description": "Computes the rotation of several joints at once.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone"], "description": "two_bone: three joints in a row bend so that the last meets the goal.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "The three joints, from root to tip, each the parent of the next.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "Control that the last joint follows.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "Control that the middle joint points at.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Constraint": { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale"], "description": "What is followed: everything, position, rotation or scale.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "side": { "$ref": "#/$defs/SideOption" } } }, "GuideLine": { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "LimbPart": { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "default": { "distance": 1, "guide_line": true }, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "x-unit": "limb lengths", "examples": [1] }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the middle joint.", "examples": [true] } }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "blend": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Rest value of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "RootPart": { "title": "RootPart", "description": "The root control: it carries everything in the carried containers and lies at the origin.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The root control that carries the whole rig." }, "at": { "$ref": "#/$defs/Place", "default": [0, 0, 0], "description": "Where the root control stands.", "x-unit": "scene unit", "examples": [[0, 0, 0]] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Drawn shape.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size taken from the whole rig.", "examples": [1.2] } } }, "StrandPart": { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints, each with its own control." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } } } };
+var func1 = Object.prototype.hasOwnProperty;
+var func2 = require_ucs2length().default;
+var pattern3 = new RegExp("^[a-z][a-z0-9_]*$", "u");
+function validate53(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate53.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (typeof data === "string") {
+    if (func2(data) > 60) {
+      const err0 = { instancePath, schemaPath: "#/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (!pattern3.test(data)) {
+      const err1 = { instancePath, schemaPath: "#/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  validate53.errors = vErrors;
+  return errors === 0;
+}
+validate53.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate55(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate55.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (typeof data === "string") {
+    if (func2(data) > 200) {
+      const err0 = { instancePath, schemaPath: "#/maxLength", keyword: "maxLength", params: { limit: 200 }, message: "must NOT have more than 200 characters" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+  } else {
+    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+    if (vErrors === null) {
+      vErrors = [err1];
+    } else {
+      vErrors.push(err1);
+    }
+    errors++;
+  }
+  validate55.errors = vErrors;
+  return errors === 0;
+}
+validate55.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate58(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate58.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.default === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "default" }, message: "must have required property 'default'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!(key0 === "default" || key0 === "min" || key0 === "max" || key0 === "unit" || key0 === "whole" || key0 === "note")) {
+        const err1 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.default !== void 0) {
+      let data0 = data.default;
+      if (!(typeof data0 == "number" && isFinite(data0))) {
+        const err2 = { instancePath: instancePath + "/default", schemaPath: "#/properties/default/type", keyword: "type", params: { type: "number" }, message: "must be number" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.min !== void 0) {
+      let data1 = data.min;
+      if (!(typeof data1 == "number" && isFinite(data1))) {
+        const err3 = { instancePath: instancePath + "/min", schemaPath: "#/properties/min/type", keyword: "type", params: { type: "number" }, message: "must be number" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.max !== void 0) {
+      let data2 = data.max;
+      if (!(typeof data2 == "number" && isFinite(data2))) {
+        const err4 = { instancePath: instancePath + "/max", schemaPath: "#/properties/max/type", keyword: "type", params: { type: "number" }, message: "must be number" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.unit !== void 0) {
+      if (!validate55(data.unit, { instancePath: instancePath + "/unit", parentData: data, parentDataProperty: "unit", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate55.errors : vErrors.concat(validate55.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.whole !== void 0) {
+      if (typeof data.whole !== "boolean") {
+        const err5 = { instancePath: instancePath + "/whole", schemaPath: "#/properties/whole/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.note !== void 0) {
+      if (!validate55(data.note, { instancePath: instancePath + "/note", parentData: data, parentDataProperty: "note", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate55.errors : vErrors.concat(validate55.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err6 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err6];
+    } else {
+      vErrors.push(err6);
+    }
+    errors++;
+  }
+  validate58.errors = vErrors;
+  return errors === 0;
+}
+validate58.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema23 = { "title": "Scene", "description": "Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.", "type": "object", "additionalProperties": false, "default": { "up": "+y", "forward": "+z", "unit": "cm" }, "properties": { "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis that points up.", "examples": ["+z"] }, "forward": { "$ref": "#/$defs/AxisName", "default": "+z", "description": "Axis the character faces along. Left is up \xD7 forward.", "examples": ["-y"] }, "unit": { "enum": ["mm", "cm", "m"], "default": "cm", "description": "Unit of length.", "examples": ["m"] } }, "examples": [{ "up": "+z", "forward": "-y", "unit": "m" }] };
+var schema24 = { "title": "AxisName", "enum": ["+x", "-x", "+y", "-y", "+z", "-z"], "description": "One of the six axis directions.", "examples": ["+x"] };
+function validate63(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate63.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(data === "+x" || data === "-x" || data === "+y" || data === "-y" || data === "+z" || data === "-z")) {
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema24.enum }, message: "must be equal to one of the allowed values" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  validate63.errors = vErrors;
+  return errors === 0;
+}
+validate63.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate62(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate62.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "up" || key0 === "forward" || key0 === "unit")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.up !== void 0) {
+      if (!validate63(data.up, { instancePath: instancePath + "/up", parentData: data, parentDataProperty: "up", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.forward !== void 0) {
+      if (!validate63(data.forward, { instancePath: instancePath + "/forward", parentData: data, parentDataProperty: "forward", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.unit !== void 0) {
+      let data2 = data.unit;
+      if (!(data2 === "mm" || data2 === "cm" || data2 === "m")) {
+        const err1 = { instancePath: instancePath + "/unit", schemaPath: "#/properties/unit/enum", keyword: "enum", params: { allowedValues: schema23.properties.unit.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  validate62.errors = vErrors;
+  return errors === 0;
+}
+validate62.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema25 = { "title": "Landmark", "description": "A named measured point on the model.", "type": "object", "required": ["at"], "additionalProperties": false, "properties": { "at": { "$ref": "#/$defs/Point", "description": "Where it is. For side left: the left point.", "x-unit": "scene unit" }, "side": { "enum": ["left", "centre"], "default": "centre", "description": "left: a mirrored right twin exists.", "examples": ["left"] }, "right": { "$ref": "#/$defs/Point", "description": "The right point, where the model is not symmetrical.", "x-unit": "scene unit" }, "note": { "$ref": "#/$defs/line", "description": "How to find it on the model.", "examples": ["bony tip of the elbow"] } } };
+var schema27 = { "title": "NumberOrExpression", "description": "A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.", "type": ["number", "string"], "pattern": "^=", "maxLength": 2e3, "examples": [12.5, "=params.stature * 0.53"] };
+var pattern6 = new RegExp("^=", "u");
+function validate70(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate70.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(typeof data == "number" && isFinite(data)) && typeof data !== "string") {
+    const err0 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: schema27.type }, message: "must be number,string" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  if (typeof data === "string") {
+    if (func2(data) > 2e3) {
+      const err1 = { instancePath, schemaPath: "#/maxLength", keyword: "maxLength", params: { limit: 2e3 }, message: "must NOT have more than 2000 characters" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (!pattern6.test(data)) {
+      const err2 = { instancePath, schemaPath: "#/pattern", keyword: "pattern", params: { pattern: "^=" }, message: 'must match pattern "^="' };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+  }
+  validate70.errors = vErrors;
+  return errors === 0;
+}
+validate70.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate69(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate69.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  const _errs0 = errors;
+  let valid0 = false;
+  const _errs1 = errors;
+  if (Array.isArray(data)) {
+    if (data.length < 3) {
+      const err0 = { instancePath, schemaPath: "#/anyOf/0/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    const len0 = data.length;
+    if (len0 > 0) {
+      if (!validate70(data[0], { instancePath: instancePath + "/0", parentData: data, parentDataProperty: 0, rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (len0 > 1) {
+      if (!validate70(data[1], { instancePath: instancePath + "/1", parentData: data, parentDataProperty: 1, rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (len0 > 2) {
+      if (!validate70(data[2], { instancePath: instancePath + "/2", parentData: data, parentDataProperty: 2, rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    const len1 = data.length;
+    if (!(len1 <= 3)) {
+      const err1 = { instancePath, schemaPath: "#/anyOf/0/items", keyword: "items", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/anyOf/0/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  var _valid0 = _errs1 === errors;
+  valid0 = valid0 || _valid0;
+  if (_valid0) {
+    var items0 = true;
+  }
+  const _errs6 = errors;
+  if (typeof data === "string") {
+    if (func2(data) > 2e3) {
+      const err3 = { instancePath, schemaPath: "#/anyOf/1/maxLength", keyword: "maxLength", params: { limit: 2e3 }, message: "must NOT have more than 2000 characters" };
+      if (vErrors === null) {
+        vErrors = [err3];
+      } else {
+        vErrors.push(err3);
+      }
+      errors++;
+    }
+    if (!pattern6.test(data)) {
+      const err4 = { instancePath, schemaPath: "#/anyOf/1/pattern", keyword: "pattern", params: { pattern: "^=" }, message: 'must match pattern "^="' };
+      if (vErrors === null) {
+        vErrors = [err4];
+      } else {
+        vErrors.push(err4);
+      }
+      errors++;
+    }
+  } else {
+    const err5 = { instancePath, schemaPath: "#/anyOf/1/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+    if (vErrors === null) {
+      vErrors = [err5];
+    } else {
+      vErrors.push(err5);
+    }
+    errors++;
+  }
+  var _valid0 = _errs6 === errors;
+  valid0 = valid0 || _valid0;
+  if (!valid0) {
+    const err6 = { instancePath, schemaPath: "#/anyOf", keyword: "anyOf", params: {}, message: "must match a schema in anyOf" };
+    if (vErrors === null) {
+      vErrors = [err6];
+    } else {
+      vErrors.push(err6);
+    }
+    errors++;
+  } else {
+    errors = _errs0;
+    if (vErrors !== null) {
+      if (_errs0) {
+        vErrors.length = _errs0;
+      } else {
+        vErrors = null;
+      }
+    }
+  }
+  validate69.errors = vErrors;
+  evaluated0.items = items0;
+  return errors === 0;
+}
+validate69.evaluated = { "dynamicProps": false, "dynamicItems": true };
+function validate68(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate68.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.at === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "at" }, message: "must have required property 'at'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!(key0 === "at" || key0 === "side" || key0 === "right" || key0 === "note")) {
+        const err1 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.at !== void 0) {
+      if (!validate69(data.at, { instancePath: instancePath + "/at", parentData: data, parentDataProperty: "at", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.side !== void 0) {
+      let data1 = data.side;
+      if (!(data1 === "left" || data1 === "centre")) {
+        const err2 = { instancePath: instancePath + "/side", schemaPath: "#/properties/side/enum", keyword: "enum", params: { allowedValues: schema25.properties.side.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.right !== void 0) {
+      if (!validate69(data.right, { instancePath: instancePath + "/right", parentData: data, parentDataProperty: "right", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.note !== void 0) {
+      if (!validate55(data.note, { instancePath: instancePath + "/note", parentData: data, parentDataProperty: "note", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate55.errors : vErrors.concat(validate55.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err3 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err3];
+    } else {
+      vErrors.push(err3);
+    }
+    errors++;
+  }
+  validate68.errors = vErrors;
+  return errors === 0;
+}
+validate68.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var pattern8 = new RegExp("^[A-Za-z0-9_]*$", "u");
+function validate79(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate79.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "token" || key0 === "container" || key0 === "shown" || key0 === "selectable" || key0 === "title")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.token !== void 0) {
+      let data0 = data.token;
+      if (typeof data0 === "string") {
+        if (func2(data0) > 20) {
+          const err1 = { instancePath: instancePath + "/token", schemaPath: "#/properties/token/maxLength", keyword: "maxLength", params: { limit: 20 }, message: "must NOT have more than 20 characters" };
+          if (vErrors === null) {
+            vErrors = [err1];
+          } else {
+            vErrors.push(err1);
+          }
+          errors++;
+        }
+        if (!pattern8.test(data0)) {
+          const err2 = { instancePath: instancePath + "/token", schemaPath: "#/properties/token/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]*$" }, message: 'must match pattern "^[A-Za-z0-9_]*$"' };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+      } else {
+        const err3 = { instancePath: instancePath + "/token", schemaPath: "#/properties/token/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.container !== void 0) {
+      if (!validate53(data.container, { instancePath: instancePath + "/container", parentData: data, parentDataProperty: "container", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.shown !== void 0) {
+      if (typeof data.shown !== "boolean") {
+        const err4 = { instancePath: instancePath + "/shown", schemaPath: "#/properties/shown/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.selectable !== void 0) {
+      if (typeof data.selectable !== "boolean") {
+        const err5 = { instancePath: instancePath + "/selectable", schemaPath: "#/properties/selectable/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.title !== void 0) {
+      if (!validate55(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate55.errors : vErrors.concat(validate55.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err6 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err6];
+    } else {
+      vErrors.push(err6);
+    }
+    errors++;
+  }
+  validate79.errors = vErrors;
+  return errors === 0;
+}
+validate79.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema29 = { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } };
+function validate84(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate84.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "parent" || key0 === "moves" || key0 === "shown" || key0 === "title")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate53(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.moves !== void 0) {
+      let data1 = data.moves;
+      if (!(data1 === "carried" || data1 === "parked")) {
+        const err1 = { instancePath: instancePath + "/moves", schemaPath: "#/properties/moves/enum", keyword: "enum", params: { allowedValues: schema29.properties.moves.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.shown !== void 0) {
+      if (typeof data.shown !== "boolean") {
+        const err2 = { instancePath: instancePath + "/shown", schemaPath: "#/properties/shown/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.title !== void 0) {
+      if (!validate55(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate55.errors : vErrors.concat(validate55.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err3 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err3];
+    } else {
+      vErrors.push(err3);
+    }
+    errors++;
+  }
+  validate84.errors = vErrors;
+  return errors === 0;
+}
+validate84.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var pattern9 = new RegExp("^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "u");
+function validate88(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate88.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (typeof data === "string") {
+    if (func2(data) > 120) {
+      const err0 = { instancePath, schemaPath: "#/maxLength", keyword: "maxLength", params: { limit: 120 }, message: "must NOT have more than 120 characters" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (!pattern9.test(data)) {
+      const err1 = { instancePath, schemaPath: "#/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$"' };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  validate88.errors = vErrors;
+  return errors === 0;
+}
+validate88.evaluated = { "dynamicProps": false, "dynamicItems": false };
+var schema32 = { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "default": { "distance": 1, "guide_line": true }, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "x-unit": "limb lengths", "examples": [1] }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the middle joint.", "examples": [true] } }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "blend": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Rest value of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+var schema33 = { "title": "SideOption", "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.", "enum": ["left", "right", "both", "centre"], "default": "centre", "examples": ["both"] };
+function validate92(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate92.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(data === "left" || data === "right" || data === "both" || data === "centre")) {
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema33.enum }, message: "must be equal to one of the allowed values" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  validate92.errors = vErrors;
+  return errors === 0;
+}
+validate92.evaluated = { "dynamicProps": false, "dynamicItems": false };
+var pattern10 = new RegExp("^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)", "u");
+function validate95(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate95.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  const _errs0 = errors;
+  let valid0 = false;
+  const _errs1 = errors;
+  if (Array.isArray(data)) {
+    if (data.length < 3) {
+      const err0 = { instancePath, schemaPath: "#/anyOf/0/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    const len0 = data.length;
+    if (len0 > 0) {
+      if (!validate70(data[0], { instancePath: instancePath + "/0", parentData: data, parentDataProperty: 0, rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (len0 > 1) {
+      if (!validate70(data[1], { instancePath: instancePath + "/1", parentData: data, parentDataProperty: 1, rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (len0 > 2) {
+      if (!validate70(data[2], { instancePath: instancePath + "/2", parentData: data, parentDataProperty: 2, rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    const len1 = data.length;
+    if (!(len1 <= 3)) {
+      const err1 = { instancePath, schemaPath: "#/anyOf/0/items", keyword: "items", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/anyOf/0/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  var _valid0 = _errs1 === errors;
+  valid0 = valid0 || _valid0;
+  if (_valid0) {
+    var items0 = true;
+  }
+  const _errs6 = errors;
+  if (typeof data === "string") {
+    if (func2(data) > 2e3) {
+      const err3 = { instancePath, schemaPath: "#/anyOf/1/maxLength", keyword: "maxLength", params: { limit: 2e3 }, message: "must NOT have more than 2000 characters" };
+      if (vErrors === null) {
+        vErrors = [err3];
+      } else {
+        vErrors.push(err3);
+      }
+      errors++;
+    }
+    if (!pattern10.test(data)) {
+      const err4 = { instancePath, schemaPath: "#/anyOf/1/pattern", keyword: "pattern", params: { pattern: "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)" }, message: 'must match pattern "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)"' };
+      if (vErrors === null) {
+        vErrors = [err4];
+      } else {
+        vErrors.push(err4);
+      }
+      errors++;
+    }
+  } else {
+    const err5 = { instancePath, schemaPath: "#/anyOf/1/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+    if (vErrors === null) {
+      vErrors = [err5];
+    } else {
+      vErrors.push(err5);
+    }
+    errors++;
+  }
+  var _valid0 = _errs6 === errors;
+  valid0 = valid0 || _valid0;
+  if (!valid0) {
+    const err6 = { instancePath, schemaPath: "#/anyOf", keyword: "anyOf", params: {}, message: "must match a schema in anyOf" };
+    if (vErrors === null) {
+      vErrors = [err6];
+    } else {
+      vErrors.push(err6);
+    }
+    errors++;
+  } else {
+    errors = _errs0;
+    if (vErrors !== null) {
+      if (_errs0) {
+        vErrors.length = _errs0;
+      } else {
+        vErrors = null;
+      }
+    }
+  }
+  validate95.errors = vErrors;
+  evaluated0.items = items0;
+  return errors === 0;
+}
+validate95.evaluated = { "dynamicProps": false, "dynamicItems": true };
+var schema35 = { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] };
+function validate106(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate106.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(data === "behaviour" || data === "orientation" || data === "world")) {
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema35.enum }, message: "must be equal to one of the allowed values" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  validate106.errors = vErrors;
+  return errors === 0;
+}
+validate106.evaluated = { "dynamicProps": false, "dynamicItems": false };
+var schema36 = { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] };
+function validate108(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate108.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(data === "xyz" || data === "xzy" || data === "yxz" || data === "yzx" || data === "zxy" || data === "zyx")) {
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema36.enum }, message: "must be equal to one of the allowed values" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  validate108.errors = vErrors;
+  return errors === 0;
+}
+validate108.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate91(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate91.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.points === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "points" }, message: "must have required property 'points'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema32.properties, key0)) {
+        const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("limb" !== data.kind) {
+        const err3 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "limb" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.points !== void 0) {
+      let data3 = data.points;
+      if (Array.isArray(data3)) {
+        if (data3.length > 3) {
+          const err4 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/maxItems", keyword: "maxItems", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+        if (data3.length < 3) {
+          const err5 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        const len0 = data3.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data3[i0], { instancePath: instancePath + "/points/" + i0, parentData: data3, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err6 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.names !== void 0) {
+      let data5 = data.names;
+      if (Array.isArray(data5)) {
+        if (data5.length > 3) {
+          const err7 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/maxItems", keyword: "maxItems", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        if (data5.length < 3) {
+          const err8 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err8];
+          } else {
+            vErrors.push(err8);
+          }
+          errors++;
+        }
+        const len1 = data5.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          let data6 = data5[i1];
+          if (typeof data6 === "string") {
+            if (func2(data6) > 60) {
+              const err9 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+              if (vErrors === null) {
+                vErrors = [err9];
+              } else {
+                vErrors.push(err9);
+              }
+              errors++;
+            }
+            if (!pattern3.test(data6)) {
+              const err10 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+              if (vErrors === null) {
+                vErrors = [err10];
+              } else {
+                vErrors.push(err10);
+              }
+              errors++;
+            }
+          } else {
+            const err11 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err11];
+            } else {
+              vErrors.push(err11);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err12 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.goal !== void 0) {
+      if (!validate53(data.goal, { instancePath: instancePath + "/goal", parentData: data, parentDataProperty: "goal", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.goal_parent !== void 0) {
+      if (!validate88(data.goal_parent, { instancePath: instancePath + "/goal_parent", parentData: data, parentDataProperty: "goal_parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.pole !== void 0) {
+      let data9 = data.pole;
+      if (data9 && typeof data9 == "object" && !Array.isArray(data9)) {
+        for (const key1 in data9) {
+          if (!(key1 === "distance" || key1 === "guide_line")) {
+            const err13 = { instancePath: instancePath + "/pole", schemaPath: "#/properties/pole/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key1 }, message: "must NOT have additional properties" };
+            if (vErrors === null) {
+              vErrors = [err13];
+            } else {
+              vErrors.push(err13);
+            }
+            errors++;
+          }
+        }
+        if (data9.distance !== void 0) {
+          if (!validate70(data9.distance, { instancePath: instancePath + "/pole/distance", parentData: data9, parentDataProperty: "distance", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+        if (data9.guide_line !== void 0) {
+          if (typeof data9.guide_line !== "boolean") {
+            const err14 = { instancePath: instancePath + "/pole/guide_line", schemaPath: "#/properties/pole/properties/guide_line/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+            if (vErrors === null) {
+              vErrors = [err14];
+            } else {
+              vErrors.push(err14);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err15 = { instancePath: instancePath + "/pole", schemaPath: "#/properties/pole/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err15];
+        } else {
+          vErrors.push(err15);
+        }
+        errors++;
+      }
+    }
+    if (data.bend !== void 0) {
+      if (!validate69(data.bend, { instancePath: instancePath + "/bend", parentData: data, parentDataProperty: "bend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.blend !== void 0) {
+      if (!validate70(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate106(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate106.errors : vErrors.concat(validate106.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err16 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err16];
+    } else {
+      vErrors.push(err16);
+    }
+    errors++;
+  }
+  validate91.errors = vErrors;
+  return errors === 0;
+}
+validate91.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema37 = { "title": "RootPart", "description": "The root control: it carries everything in the carried containers and lies at the origin.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The root control that carries the whole rig." }, "at": { "$ref": "#/$defs/Place", "default": [0, 0, 0], "description": "Where the root control stands.", "x-unit": "scene unit", "examples": [[0, 0, 0]] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Drawn shape.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size taken from the whole rig.", "examples": [1.2] } } };
+function validate110(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate110.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!(key0 === "kind" || key0 === "at" || key0 === "shape" || key0 === "size")) {
+        const err1 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("root" !== data.kind) {
+        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "root" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.at !== void 0) {
+      if (!validate95(data.at, { instancePath: instancePath + "/at", parentData: data, parentDataProperty: "at", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.shape !== void 0) {
+      let data2 = data.shape;
+      if (!(data2 === "ring" || data2 === "square" || data2 === "diamond" || data2 === "cross" || data2 === "arrow" || data2 === "ball" || data2 === "box" || data2 === "pin" || data2 === "compass")) {
+        const err3 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema37.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.size !== void 0) {
+      if (!validate70(data.size, { instancePath: instancePath + "/size", parentData: data, parentDataProperty: "size", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err4 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err4];
+    } else {
+      vErrors.push(err4);
+    }
+    errors++;
+  }
+  validate110.errors = vErrors;
+  return errors === 0;
+}
+validate110.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema38 = { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints, each with its own control." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+var schema39 = { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] } }, "examples": [{ "aim": "+y", "up": "+z" }] };
+function validate120(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate120.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "rule" || key0 === "aim" || key0 === "up" || key0 === "toward")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.rule !== void 0) {
+      let data0 = data.rule;
+      if (!(data0 === "chain" || data0 === "world")) {
+        const err1 = { instancePath: instancePath + "/rule", schemaPath: "#/properties/rule/enum", keyword: "enum", params: { allowedValues: schema39.properties.rule.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.aim !== void 0) {
+      if (!validate63(data.aim, { instancePath: instancePath + "/aim", parentData: data, parentDataProperty: "aim", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.up !== void 0) {
+      if (!validate63(data.up, { instancePath: instancePath + "/up", parentData: data, parentDataProperty: "up", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.toward !== void 0) {
+      if (!validate69(data.toward, { instancePath: instancePath + "/toward", parentData: data, parentDataProperty: "toward", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  validate120.errors = vErrors;
+  return errors === 0;
+}
+validate120.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate113(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate113.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.points === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "points" }, message: "must have required property 'points'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.joints === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "joints" }, message: "must have required property 'joints'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema38.properties, key0)) {
+        const err3 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("strand" !== data.kind) {
+        const err4 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "strand" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.points !== void 0) {
+      let data3 = data.points;
+      if (Array.isArray(data3)) {
+        if (data3.length > 500) {
+          const err5 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/maxItems", keyword: "maxItems", params: { limit: 500 }, message: "must NOT have more than 500 items" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        if (data3.length < 2) {
+          const err6 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        const len0 = data3.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data3[i0], { instancePath: instancePath + "/points/" + i0, parentData: data3, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err7 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err7];
+        } else {
+          vErrors.push(err7);
+        }
+        errors++;
+      }
+    }
+    if (data.joints !== void 0) {
+      let data5 = data.joints;
+      if (!(typeof data5 == "number" && (!(data5 % 1) && !isNaN(data5)) && isFinite(data5))) {
+        const err8 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+      if (typeof data5 == "number" && isFinite(data5)) {
+        if (data5 > 500 || isNaN(data5)) {
+          const err9 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maximum", keyword: "maximum", params: { comparison: "<=", limit: 500 }, message: "must be <= 500" };
+          if (vErrors === null) {
+            vErrors = [err9];
+          } else {
+            vErrors.push(err9);
+          }
+          errors++;
+        }
+        if (data5 < 2 || isNaN(data5)) {
+          const err10 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minimum", keyword: "minimum", params: { comparison: ">=", limit: 2 }, message: "must be >= 2" };
+          if (vErrors === null) {
+            vErrors = [err10];
+          } else {
+            vErrors.push(err10);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.curve !== void 0) {
+      let data6 = data.curve;
+      if (!(data6 === "smooth" || data6 === "straight")) {
+        const err11 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema38.properties.curve.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err11];
+        } else {
+          vErrors.push(err11);
+        }
+        errors++;
+      }
+    }
+    if (data.shape !== void 0) {
+      let data7 = data.shape;
+      if (!(data7 === "ring" || data7 === "square" || data7 === "diamond" || data7 === "cross" || data7 === "arrow" || data7 === "ball" || data7 === "box" || data7 === "pin" || data7 === "compass")) {
+        const err12 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema38.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.size !== void 0) {
+      if (!validate70(data.size, { instancePath: instancePath + "/size", parentData: data, parentDataProperty: "size", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate106(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate106.errors : vErrors.concat(validate106.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.orient !== void 0) {
+      if (!validate120(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate120.errors : vErrors.concat(validate120.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err13 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err13];
+    } else {
+      vErrors.push(err13);
+    }
+    errors++;
+  }
+  validate113.errors = vErrors;
+  return errors === 0;
+}
+validate113.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate90(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate90.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    const tag0 = data.kind;
+    if (typeof tag0 == "string") {
+      if (tag0 === "limb") {
+        if (!validate91(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate91.errors : vErrors.concat(validate91.errors);
+          errors = vErrors.length;
+        }
+        var props0 = true;
+      } else if (tag0 === "root") {
+        if (!validate110(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate110.errors : vErrors.concat(validate110.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "strand") {
+        if (!validate113(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate113.errors : vErrors.concat(validate113.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else {
+        const err1 = { instancePath, schemaPath: "#/discriminator", keyword: "discriminator", params: { error: "mapping", tag: "kind", tagValue: tag0 }, message: 'value of tag "kind" must be in oneOf' };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    } else {
+      const err2 = { instancePath, schemaPath: "#/discriminator", keyword: "discriminator", params: { error: "tag", tag: "kind", tagValue: tag0 }, message: 'tag "kind" must be string' };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+  } else {
+    const err3 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err3];
+    } else {
+      vErrors.push(err3);
+    }
+    errors++;
+  }
+  validate90.errors = vErrors;
+  evaluated0.props = props0;
+  return errors === 0;
+}
+validate90.evaluated = { "dynamicProps": true, "dynamicItems": false };
+var schema40 = { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+var pattern12 = new RegExp("^[a-z0-9_]+$", "u");
+function validate131(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate131.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!func1.call(schema40.properties, key0)) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.points !== void 0) {
+      let data2 = data.points;
+      if (Array.isArray(data2)) {
+        if (data2.length > 500) {
+          const err2 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/maxItems", keyword: "maxItems", params: { limit: 500 }, message: "must NOT have more than 500 items" };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+        if (data2.length < 1) {
+          const err3 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+        const len0 = data2.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data2[i0], { instancePath: instancePath + "/points/" + i0, parentData: data2, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err4 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.joints !== void 0) {
+      let data4 = data.joints;
+      if (!(typeof data4 == "number" && (!(data4 % 1) && !isNaN(data4)) && isFinite(data4))) {
+        const err5 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+      if (typeof data4 == "number" && isFinite(data4)) {
+        if (data4 > 500 || isNaN(data4)) {
+          const err6 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maximum", keyword: "maximum", params: { comparison: "<=", limit: 500 }, message: "must be <= 500" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        if (data4 < 2 || isNaN(data4)) {
+          const err7 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minimum", keyword: "minimum", params: { comparison: ">=", limit: 2 }, message: "must be >= 2" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.curve !== void 0) {
+      let data5 = data.curve;
+      if (!(data5 === "smooth" || data5 === "straight")) {
+        const err8 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema40.properties.curve.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+    }
+    if (data.names !== void 0) {
+      let data6 = data.names;
+      if (Array.isArray(data6)) {
+        const len1 = data6.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          let data7 = data6[i1];
+          if (typeof data7 === "string") {
+            if (func2(data7) > 60) {
+              const err9 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+              if (vErrors === null) {
+                vErrors = [err9];
+              } else {
+                vErrors.push(err9);
+              }
+              errors++;
+            }
+            if (!pattern12.test(data7)) {
+              const err10 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"' };
+              if (vErrors === null) {
+                vErrors = [err10];
+              } else {
+                vErrors.push(err10);
+              }
+              errors++;
+            }
+          } else {
+            const err11 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err11];
+            } else {
+              vErrors.push(err11);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err12 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate106(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate106.errors : vErrors.concat(validate106.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.orient !== void 0) {
+      if (!validate120(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate120.errors : vErrors.concat(validate120.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err13 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err13];
+    } else {
+      vErrors.push(err13);
+    }
+    errors++;
+  }
+  validate131.errors = vErrors;
+  return errors === 0;
+}
+validate131.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema41 = { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] } } };
+function validate144(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate144.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.joints === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "joints" }, message: "must have required property 'joints'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!(key0 === "joints" || key0 === "distance" || key0 === "bend")) {
+        const err1 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.joints !== void 0) {
+      let data0 = data.joints;
+      if (Array.isArray(data0)) {
+        if (data0.length > 3) {
+          const err2 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maxItems", keyword: "maxItems", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+        if (data0.length < 3) {
+          const err3 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+        const len0 = data0.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate88(data0[i0], { instancePath: instancePath + "/joints/" + i0, parentData: data0, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err4 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.distance !== void 0) {
+      if (!validate70(data.distance, { instancePath: instancePath + "/distance", parentData: data, parentDataProperty: "distance", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.bend !== void 0) {
+      if (!validate69(data.bend, { instancePath: instancePath + "/bend", parentData: data, parentDataProperty: "bend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err5 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err5];
+    } else {
+      vErrors.push(err5);
+    }
+    errors++;
+  }
+  validate144.errors = vErrors;
+  return errors === 0;
+}
+validate144.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema43 = { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." };
+function validate153(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate153.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(data === "move" || data === "turn" || data === "scale" || data === "tx" || data === "ty" || data === "tz" || data === "rx" || data === "ry" || data === "rz" || data === "sx" || data === "sy" || data === "sz")) {
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema43.enum }, message: "must be equal to one of the allowed values" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  validate153.errors = vErrors;
+  return errors === 0;
+}
+validate153.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate155(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate155.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "locked" || key0 === "min" || key0 === "max")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.locked !== void 0) {
+      if (typeof data.locked !== "boolean") {
+        const err1 = { instancePath: instancePath + "/locked", schemaPath: "#/properties/locked/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.min !== void 0) {
+      if (!validate70(data.min, { instancePath: instancePath + "/min", parentData: data, parentDataProperty: "min", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.max !== void 0) {
+      if (!validate70(data.max, { instancePath: instancePath + "/max", parentData: data, parentDataProperty: "max", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  validate155.errors = vErrors;
+  return errors === 0;
+}
+validate155.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate160(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate160.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "default" || key0 === "min" || key0 === "max" || key0 === "note")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.default !== void 0) {
+      if (!validate70(data.default, { instancePath: instancePath + "/default", parentData: data, parentDataProperty: "default", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.min !== void 0) {
+      if (!validate70(data.min, { instancePath: instancePath + "/min", parentData: data, parentDataProperty: "min", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.max !== void 0) {
+      if (!validate70(data.max, { instancePath: instancePath + "/max", parentData: data, parentDataProperty: "max", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.note !== void 0) {
+      if (!validate55(data.note, { instancePath: instancePath + "/note", parentData: data, parentDataProperty: "note", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate55.errors : vErrors.concat(validate55.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err1];
+    } else {
+      vErrors.push(err1);
+    }
+    errors++;
+  }
+  validate160.errors = vErrors;
+  return errors === 0;
+}
+validate160.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate141(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate141.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!func1.call(schema41.properties, key0)) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.at !== void 0) {
+      if (!validate95(data.at, { instancePath: instancePath + "/at", parentData: data, parentDataProperty: "at", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.pole_of !== void 0) {
+      if (!validate144(data.pole_of, { instancePath: instancePath + "/pole_of", parentData: data, parentDataProperty: "pole_of", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate144.errors : vErrors.concat(validate144.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.align !== void 0) {
+      let data4 = data.align;
+      if (typeof data4 === "string") {
+        if (!pattern9.test(data4)) {
+          const err2 = { instancePath: instancePath + "/align", schemaPath: "#/properties/align/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$"' };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+      } else {
+        const err3 = { instancePath: instancePath + "/align", schemaPath: "#/properties/align/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.shape !== void 0) {
+      let data6 = data.shape;
+      if (!(data6 === "ring" || data6 === "square" || data6 === "diamond" || data6 === "cross" || data6 === "arrow" || data6 === "ball" || data6 === "box" || data6 === "pin" || data6 === "compass")) {
+        const err4 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema41.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.size !== void 0) {
+      if (!validate70(data.size, { instancePath: instancePath + "/size", parentData: data, parentDataProperty: "size", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.channels !== void 0) {
+      let data10 = data.channels;
+      if (data10 && typeof data10 == "object" && !Array.isArray(data10)) {
+        for (const key1 in data10) {
+          const _errs16 = errors;
+          if (!validate153(key1, { instancePath: instancePath + "/channels", parentData: data10, parentDataProperty: "channels", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate153.errors : vErrors.concat(validate153.errors);
+            errors = vErrors.length;
+          }
+          var valid1 = _errs16 === errors;
+          if (!valid1) {
+            const err5 = { instancePath: instancePath + "/channels", schemaPath: "#/properties/channels/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err5];
+            } else {
+              vErrors.push(err5);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data10) {
+          if (!validate155(data10[key2], { instancePath: instancePath + "/channels/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data10, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate155.errors : vErrors.concat(validate155.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err6 = { instancePath: instancePath + "/channels", schemaPath: "#/properties/channels/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.attributes !== void 0) {
+      let data12 = data.attributes;
+      if (data12 && typeof data12 == "object" && !Array.isArray(data12)) {
+        for (const key3 in data12) {
+          const _errs21 = errors;
+          if (!validate53(key3, { instancePath: instancePath + "/attributes", parentData: data12, parentDataProperty: "attributes", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid3 = _errs21 === errors;
+          if (!valid3) {
+            const err7 = { instancePath: instancePath + "/attributes", schemaPath: "#/properties/attributes/propertyNames", keyword: "propertyNames", params: { propertyName: key3 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err7];
+            } else {
+              vErrors.push(err7);
+            }
+            errors++;
+          }
+        }
+        for (const key4 in data12) {
+          if (!validate160(data12[key4], { instancePath: instancePath + "/attributes/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data12, parentDataProperty: key4, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate160.errors : vErrors.concat(validate160.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err8 = { instancePath: instancePath + "/attributes", schemaPath: "#/properties/attributes/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+    }
+  } else {
+    const err9 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err9];
+    } else {
+      vErrors.push(err9);
+    }
+    errors++;
+  }
+  validate141.errors = vErrors;
+  return errors === 0;
+}
+validate141.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema46 = { "title": "Solver", "description": "Computes the rotation of several joints at once.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone"], "description": "two_bone: three joints in a row bend so that the last meets the goal.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "The three joints, from root to tip, each the parent of the next.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "Control that the last joint follows.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "Control that the middle joint points at.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+var schema47 = { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] };
+var pattern14 = new RegExp("^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "u");
+function validate172(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate172.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(typeof data == "number" && isFinite(data)) && typeof data !== "string") {
+    const err0 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: schema47.type }, message: "must be number,string" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  if (typeof data === "string") {
+    if (func2(data) > 2e3) {
+      const err1 = { instancePath, schemaPath: "#/maxLength", keyword: "maxLength", params: { limit: 2e3 }, message: "must NOT have more than 2000 characters" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (!pattern14.test(data)) {
+      const err2 = { instancePath, schemaPath: "#/pattern", keyword: "pattern", params: { pattern: "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)" }, message: 'must match pattern "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)"' };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+  }
+  validate172.errors = vErrors;
+  return errors === 0;
+}
+validate172.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate168(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate168.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "omit" || key0 === "kind" || key0 === "joints" || key0 === "goal" || key0 === "pole" || key0 === "blend" || key0 === "side")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if (!(data.kind === "two_bone")) {
+        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema46.properties.kind.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.joints !== void 0) {
+      let data2 = data.joints;
+      if (Array.isArray(data2)) {
+        if (data2.length > 3) {
+          const err3 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maxItems", keyword: "maxItems", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+        if (data2.length < 3) {
+          const err4 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+        const len0 = data2.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate88(data2[i0], { instancePath: instancePath + "/joints/" + i0, parentData: data2, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err5 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.goal !== void 0) {
+      if (!validate88(data.goal, { instancePath: instancePath + "/goal", parentData: data, parentDataProperty: "goal", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.pole !== void 0) {
+      if (!validate88(data.pole, { instancePath: instancePath + "/pole", parentData: data, parentDataProperty: "pole", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.blend !== void 0) {
+      if (!validate172(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate172.errors : vErrors.concat(validate172.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err6 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err6];
+    } else {
+      vErrors.push(err6);
+    }
+    errors++;
+  }
+  validate168.errors = vErrors;
+  return errors === 0;
+}
+validate168.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema48 = { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale"], "description": "What is followed: everything, position, rotation or scale.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "side": { "$ref": "#/$defs/SideOption" } } };
+function validate177(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate177.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "omit" || key0 === "kind" || key0 === "target" || key0 === "sources" || key0 === "blend" || key0 === "keep_offset" || key0 === "side")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      let data1 = data.kind;
+      if (!(data1 === "parent" || data1 === "point" || data1 === "orient" || data1 === "scale")) {
+        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema48.properties.kind.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.target !== void 0) {
+      if (!validate88(data.target, { instancePath: instancePath + "/target", parentData: data, parentDataProperty: "target", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.sources !== void 0) {
+      let data3 = data.sources;
+      if (data3 && typeof data3 == "object" && !Array.isArray(data3)) {
+        if (Object.keys(data3).length < 1) {
+          const err3 = { instancePath: instancePath + "/sources", schemaPath: "#/properties/sources/minProperties", keyword: "minProperties", params: { limit: 1 }, message: "must NOT have fewer than 1 properties" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+        for (const key1 in data3) {
+          const _errs8 = errors;
+          if (!validate88(key1, { instancePath: instancePath + "/sources", parentData: data3, parentDataProperty: "sources", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid1 = _errs8 === errors;
+          if (!valid1) {
+            const err4 = { instancePath: instancePath + "/sources", schemaPath: "#/properties/sources/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err4];
+            } else {
+              vErrors.push(err4);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data3) {
+          if (!validate70(data3[key2], { instancePath: instancePath + "/sources/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data3, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err5 = { instancePath: instancePath + "/sources", schemaPath: "#/properties/sources/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.blend !== void 0) {
+      if (!validate172(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate172.errors : vErrors.concat(validate172.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.keep_offset !== void 0) {
+      if (typeof data.keep_offset !== "boolean") {
+        const err6 = { instancePath: instancePath + "/keep_offset", schemaPath: "#/properties/keep_offset/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err7 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err7];
+    } else {
+      vErrors.push(err7);
+    }
+    errors++;
+  }
+  validate177.errors = vErrors;
+  return errors === 0;
+}
+validate177.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema49 = { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+function validate185(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate185.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "omit" || key0 === "from" || key0 === "to" || key0 === "style" || key0 === "side")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.from !== void 0) {
+      if (!validate88(data.from, { instancePath: instancePath + "/from", parentData: data, parentDataProperty: "from", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.to !== void 0) {
+      if (!validate88(data.to, { instancePath: instancePath + "/to", parentData: data, parentDataProperty: "to", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.style !== void 0) {
+      let data3 = data.style;
+      if (!(data3 === "dotted" || data3 === "dashed" || data3 === "solid")) {
+        const err2 = { instancePath: instancePath + "/style", schemaPath: "#/properties/style/enum", keyword: "enum", params: { allowedValues: schema49.properties.style.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err3 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err3];
+    } else {
+      vErrors.push(err3);
+    }
+    errors++;
+  }
+  validate185.errors = vErrors;
+  return errors === 0;
+}
+validate185.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var pattern4 = new RegExp("^[a-z][a-z0-9_]*@[1-9][0-9]*$", "u");
+function validate52(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  ;
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate52.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.format === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "format" }, message: "must have required property 'format'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.recipe === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "recipe" }, message: "must have required property 'recipe'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema19.properties, key0)) {
+        const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.format !== void 0) {
+      if (1 !== data.format) {
+        const err3 = { instancePath: instancePath + "/format", schemaPath: "#/properties/format/const", keyword: "const", params: { allowedValue: 1 }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.recipe !== void 0) {
+      if (!validate53(data.recipe, { instancePath: instancePath + "/recipe", parentData: data, parentDataProperty: "recipe", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.title !== void 0) {
+      if (!validate55(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate55.errors : vErrors.concat(validate55.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.house !== void 0) {
+      let data3 = data.house;
+      if (typeof data3 === "string") {
+        if (!pattern4.test(data3)) {
+          const err4 = { instancePath: instancePath + "/house", schemaPath: "#/properties/house/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*@[1-9][0-9]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*@[1-9][0-9]*$"' };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+      } else {
+        const err5 = { instancePath: instancePath + "/house", schemaPath: "#/properties/house/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.extends !== void 0) {
+      let data4 = data.extends;
+      if (typeof data4 === "string") {
+        if (!pattern4.test(data4)) {
+          const err6 = { instancePath: instancePath + "/extends", schemaPath: "#/properties/extends/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*@[1-9][0-9]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*@[1-9][0-9]*$"' };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+      } else {
+        const err7 = { instancePath: instancePath + "/extends", schemaPath: "#/properties/extends/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err7];
+        } else {
+          vErrors.push(err7);
+        }
+        errors++;
+      }
+    }
+    if (data.params !== void 0) {
+      let data5 = data.params;
+      if (data5 && typeof data5 == "object" && !Array.isArray(data5)) {
+        for (const key1 in data5) {
+          const _errs11 = errors;
+          if (!validate53(key1, { instancePath: instancePath + "/params", parentData: data5, parentDataProperty: "params", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid1 = _errs11 === errors;
+          if (!valid1) {
+            const err8 = { instancePath: instancePath + "/params", schemaPath: "#/properties/params/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err8];
+            } else {
+              vErrors.push(err8);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data5) {
+          if (!validate58(data5[key2], { instancePath: instancePath + "/params/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data5, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate58.errors : vErrors.concat(validate58.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err9 = { instancePath: instancePath + "/params", schemaPath: "#/properties/params/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err9];
+        } else {
+          vErrors.push(err9);
+        }
+        errors++;
+      }
+    }
+    if (data.scene !== void 0) {
+      if (!validate62(data.scene, { instancePath: instancePath + "/scene", parentData: data, parentDataProperty: "scene", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate62.errors : vErrors.concat(validate62.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.landmarks !== void 0) {
+      let data8 = data.landmarks;
+      if (data8 && typeof data8 == "object" && !Array.isArray(data8)) {
+        for (const key3 in data8) {
+          const _errs17 = errors;
+          if (!validate53(key3, { instancePath: instancePath + "/landmarks", parentData: data8, parentDataProperty: "landmarks", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid3 = _errs17 === errors;
+          if (!valid3) {
+            const err10 = { instancePath: instancePath + "/landmarks", schemaPath: "#/properties/landmarks/propertyNames", keyword: "propertyNames", params: { propertyName: key3 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err10];
+            } else {
+              vErrors.push(err10);
+            }
+            errors++;
+          }
+        }
+        for (const key4 in data8) {
+          if (!validate68(data8[key4], { instancePath: instancePath + "/landmarks/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data8, parentDataProperty: key4, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate68.errors : vErrors.concat(validate68.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err11 = { instancePath: instancePath + "/landmarks", schemaPath: "#/properties/landmarks/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err11];
+        } else {
+          vErrors.push(err11);
+        }
+        errors++;
+      }
+    }
+    if (data.roles !== void 0) {
+      let data10 = data.roles;
+      if (data10 && typeof data10 == "object" && !Array.isArray(data10)) {
+        for (const key5 in data10) {
+          const _errs22 = errors;
+          if (!validate53(key5, { instancePath: instancePath + "/roles", parentData: data10, parentDataProperty: "roles", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid5 = _errs22 === errors;
+          if (!valid5) {
+            const err12 = { instancePath: instancePath + "/roles", schemaPath: "#/properties/roles/propertyNames", keyword: "propertyNames", params: { propertyName: key5 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err12];
+            } else {
+              vErrors.push(err12);
+            }
+            errors++;
+          }
+        }
+        for (const key6 in data10) {
+          if (!validate79(data10[key6], { instancePath: instancePath + "/roles/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data10, parentDataProperty: key6, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate79.errors : vErrors.concat(validate79.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err13 = { instancePath: instancePath + "/roles", schemaPath: "#/properties/roles/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err13];
+        } else {
+          vErrors.push(err13);
+        }
+        errors++;
+      }
+    }
+    if (data.containers !== void 0) {
+      let data12 = data.containers;
+      if (data12 && typeof data12 == "object" && !Array.isArray(data12)) {
+        for (const key7 in data12) {
+          const _errs27 = errors;
+          if (!validate53(key7, { instancePath: instancePath + "/containers", parentData: data12, parentDataProperty: "containers", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid7 = _errs27 === errors;
+          if (!valid7) {
+            const err14 = { instancePath: instancePath + "/containers", schemaPath: "#/properties/containers/propertyNames", keyword: "propertyNames", params: { propertyName: key7 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err14];
+            } else {
+              vErrors.push(err14);
+            }
+            errors++;
+          }
+        }
+        for (const key8 in data12) {
+          if (!validate84(data12[key8], { instancePath: instancePath + "/containers/" + key8.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data12, parentDataProperty: key8, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate84.errors : vErrors.concat(validate84.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err15 = { instancePath: instancePath + "/containers", schemaPath: "#/properties/containers/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err15];
+        } else {
+          vErrors.push(err15);
+        }
+        errors++;
+      }
+    }
+    if (data.parts !== void 0) {
+      let data14 = data.parts;
+      if (data14 && typeof data14 == "object" && !Array.isArray(data14)) {
+        for (const key9 in data14) {
+          const _errs32 = errors;
+          if (!validate88(key9, { instancePath: instancePath + "/parts", parentData: data14, parentDataProperty: "parts", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid9 = _errs32 === errors;
+          if (!valid9) {
+            const err16 = { instancePath: instancePath + "/parts", schemaPath: "#/properties/parts/propertyNames", keyword: "propertyNames", params: { propertyName: key9 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err16];
+            } else {
+              vErrors.push(err16);
+            }
+            errors++;
+          }
+        }
+        for (const key10 in data14) {
+          if (!validate90(data14[key10], { instancePath: instancePath + "/parts/" + key10.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data14, parentDataProperty: key10, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate90.errors : vErrors.concat(validate90.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err17 = { instancePath: instancePath + "/parts", schemaPath: "#/properties/parts/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err17];
+        } else {
+          vErrors.push(err17);
+        }
+        errors++;
+      }
+    }
+    if (data.chains !== void 0) {
+      let data16 = data.chains;
+      if (data16 && typeof data16 == "object" && !Array.isArray(data16)) {
+        for (const key11 in data16) {
+          const _errs37 = errors;
+          if (!validate88(key11, { instancePath: instancePath + "/chains", parentData: data16, parentDataProperty: "chains", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid11 = _errs37 === errors;
+          if (!valid11) {
+            const err18 = { instancePath: instancePath + "/chains", schemaPath: "#/properties/chains/propertyNames", keyword: "propertyNames", params: { propertyName: key11 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err18];
+            } else {
+              vErrors.push(err18);
+            }
+            errors++;
+          }
+        }
+        for (const key12 in data16) {
+          if (!validate131(data16[key12], { instancePath: instancePath + "/chains/" + key12.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key12, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate131.errors : vErrors.concat(validate131.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err19 = { instancePath: instancePath + "/chains", schemaPath: "#/properties/chains/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err19];
+        } else {
+          vErrors.push(err19);
+        }
+        errors++;
+      }
+    }
+    if (data.controls !== void 0) {
+      let data18 = data.controls;
+      if (data18 && typeof data18 == "object" && !Array.isArray(data18)) {
+        for (const key13 in data18) {
+          const _errs42 = errors;
+          if (!validate88(key13, { instancePath: instancePath + "/controls", parentData: data18, parentDataProperty: "controls", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid13 = _errs42 === errors;
+          if (!valid13) {
+            const err20 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/propertyNames", keyword: "propertyNames", params: { propertyName: key13 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err20];
+            } else {
+              vErrors.push(err20);
+            }
+            errors++;
+          }
+        }
+        for (const key14 in data18) {
+          if (!validate141(data18[key14], { instancePath: instancePath + "/controls/" + key14.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data18, parentDataProperty: key14, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate141.errors : vErrors.concat(validate141.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err21 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err21];
+        } else {
+          vErrors.push(err21);
+        }
+        errors++;
+      }
+    }
+    if (data.solvers !== void 0) {
+      let data20 = data.solvers;
+      if (data20 && typeof data20 == "object" && !Array.isArray(data20)) {
+        for (const key15 in data20) {
+          const _errs47 = errors;
+          if (!validate88(key15, { instancePath: instancePath + "/solvers", parentData: data20, parentDataProperty: "solvers", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid15 = _errs47 === errors;
+          if (!valid15) {
+            const err22 = { instancePath: instancePath + "/solvers", schemaPath: "#/properties/solvers/propertyNames", keyword: "propertyNames", params: { propertyName: key15 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err22];
+            } else {
+              vErrors.push(err22);
+            }
+            errors++;
+          }
+        }
+        for (const key16 in data20) {
+          if (!validate168(data20[key16], { instancePath: instancePath + "/solvers/" + key16.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data20, parentDataProperty: key16, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate168.errors : vErrors.concat(validate168.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err23 = { instancePath: instancePath + "/solvers", schemaPath: "#/properties/solvers/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err23];
+        } else {
+          vErrors.push(err23);
+        }
+        errors++;
+      }
+    }
+    if (data.constraints !== void 0) {
+      let data22 = data.constraints;
+      if (data22 && typeof data22 == "object" && !Array.isArray(data22)) {
+        for (const key17 in data22) {
+          const _errs52 = errors;
+          if (!validate88(key17, { instancePath: instancePath + "/constraints", parentData: data22, parentDataProperty: "constraints", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid17 = _errs52 === errors;
+          if (!valid17) {
+            const err24 = { instancePath: instancePath + "/constraints", schemaPath: "#/properties/constraints/propertyNames", keyword: "propertyNames", params: { propertyName: key17 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err24];
+            } else {
+              vErrors.push(err24);
+            }
+            errors++;
+          }
+        }
+        for (const key18 in data22) {
+          if (!validate177(data22[key18], { instancePath: instancePath + "/constraints/" + key18.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data22, parentDataProperty: key18, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate177.errors : vErrors.concat(validate177.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err25 = { instancePath: instancePath + "/constraints", schemaPath: "#/properties/constraints/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err25];
+        } else {
+          vErrors.push(err25);
+        }
+        errors++;
+      }
+    }
+    if (data.guide_lines !== void 0) {
+      let data24 = data.guide_lines;
+      if (data24 && typeof data24 == "object" && !Array.isArray(data24)) {
+        for (const key19 in data24) {
+          const _errs57 = errors;
+          if (!validate88(key19, { instancePath: instancePath + "/guide_lines", parentData: data24, parentDataProperty: "guide_lines", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid19 = _errs57 === errors;
+          if (!valid19) {
+            const err26 = { instancePath: instancePath + "/guide_lines", schemaPath: "#/properties/guide_lines/propertyNames", keyword: "propertyNames", params: { propertyName: key19 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err26];
+            } else {
+              vErrors.push(err26);
+            }
+            errors++;
+          }
+        }
+        for (const key20 in data24) {
+          if (!validate185(data24[key20], { instancePath: instancePath + "/guide_lines/" + key20.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data24, parentDataProperty: key20, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate185.errors : vErrors.concat(validate185.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err27 = { instancePath: instancePath + "/guide_lines", schemaPath: "#/properties/guide_lines/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err27];
+        } else {
+          vErrors.push(err27);
+        }
+        errors++;
+      }
+    }
+    if (data.notes !== void 0) {
+      let data26 = data.notes;
+      if (data26 && typeof data26 == "object" && !Array.isArray(data26)) {
+        for (const key21 in data26) {
+          const _errs62 = errors;
+          if (!validate53(key21, { instancePath: instancePath + "/notes", parentData: data26, parentDataProperty: "notes", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid21 = _errs62 === errors;
+          if (!valid21) {
+            const err28 = { instancePath: instancePath + "/notes", schemaPath: "#/properties/notes/propertyNames", keyword: "propertyNames", params: { propertyName: key21 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err28];
+            } else {
+              vErrors.push(err28);
+            }
+            errors++;
+          }
+        }
+        for (const key22 in data26) {
+          let data27 = data26[key22];
+          if (typeof data27 !== "string" && !(typeof data27 == "number" && isFinite(data27)) && typeof data27 !== "boolean") {
+            const err29 = { instancePath: instancePath + "/notes/" + key22.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/notes/additionalProperties/type", keyword: "type", params: { type: schema19.properties.notes.additionalProperties.type }, message: "must be string,number,boolean" };
+            if (vErrors === null) {
+              vErrors = [err29];
+            } else {
+              vErrors.push(err29);
+            }
+            errors++;
+          }
+          if (typeof data27 === "string") {
+            if (func2(data27) > 2e3) {
+              const err30 = { instancePath: instancePath + "/notes/" + key22.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/notes/additionalProperties/maxLength", keyword: "maxLength", params: { limit: 2e3 }, message: "must NOT have more than 2000 characters" };
+              if (vErrors === null) {
+                vErrors = [err30];
+              } else {
+                vErrors.push(err30);
+              }
+              errors++;
+            }
+          }
+        }
+      } else {
+        const err31 = { instancePath: instancePath + "/notes", schemaPath: "#/properties/notes/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err31];
+        } else {
+          vErrors.push(err31);
+        }
+        errors++;
+      }
+    }
+  } else {
+    const err32 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err32];
+    } else {
+      vErrors.push(err32);
+    }
+    errors++;
+  }
+  validate52.errors = vErrors;
+  return errors === 0;
+}
+validate52.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var validateHouse = validate191;
+var schema50 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/house/1", "title": "HouseRules", "description": "House rules, format 1: a studio's own standard for containers, roles, names and severities.", "type": "object", "required": ["format", "house", "naming", "roles", "containers"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the house-rules language.", "examples": [1] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60, "description": "Name of the house rules.", "examples": ["tidewrack"] }, "version": { "type": "integer", "minimum": 1, "default": 1, "description": "Version of the house rules.", "examples": [1] }, "title": { "type": "string", "maxLength": 200, "description": "What people call them.", "examples": ["Tidewrack house rules"] }, "naming": { "title": "NamingRules", "description": "How names in the scene are made from ids.", "type": "object", "required": ["pattern"], "additionalProperties": false, "properties": { "pattern": { "type": "array", "minItems": 1, "items": { "enum": ["character", "role", "side", "path", "leaf", "index"] }, "description": "Parts of a name in order; empty ones are left out. path: the id without its side and index. leaf: the last segment of the id. index: the padded number of a counted joint.", "examples": [["character", "side", "path", "index", "role"]] }, "separator": { "type": "string", "pattern": "^[A-Za-z0-9_]{0,3}$", "default": "_", "description": "Text between the parts.", "examples": ["_"] }, "index_digits": { "type": "integer", "minimum": 2, "maximum": 6, "default": 2, "description": "Least count of digits in an index.", "examples": [2] }, "sides": { "type": "object", "additionalProperties": false, "description": "Text for each side.", "properties": { "left": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "l", "description": "Text for the left side.", "examples": ["l"] }, "right": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "r", "description": "Text for the right side.", "examples": ["r"] }, "centre": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "", "description": "Text for the centre.", "examples": ["c"] } }, "examples": [{ "left": "l", "right": "r", "centre": "c" }] }, "longest": { "type": "integer", "minimum": 8, "maximum": 255, "default": 64, "description": "Longest name allowed, in characters.", "examples": [64] } } }, "roles": { "description": "What things are for. The compiler itself uses carrier, control, skin, guide_line and note.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Role" } }, "containers": { "description": "The container tree.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Container" } }, "severities": { "description": "Changes the severity of findings, by code. An error of the language itself stays an error.", "type": "object", "additionalProperties": { "enum": ["error", "warning", "info", "off"] }, "default": {}, "examples": [{ "landmark-unused": "off" }] } }, "$defs": { "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "line": { "type": "string", "maxLength": 200 }, "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 } } };
+var pattern16 = new RegExp("^[A-Za-z0-9_]{0,3}$", "u");
+function validate193(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate193.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (typeof data === "string") {
+    if (func2(data) > 60) {
+      const err0 = { instancePath, schemaPath: "#/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (!pattern3.test(data)) {
+      const err1 = { instancePath, schemaPath: "#/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  validate193.errors = vErrors;
+  return errors === 0;
+}
+validate193.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate195(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate195.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (typeof data === "string") {
+    if (func2(data) > 200) {
+      const err0 = { instancePath, schemaPath: "#/maxLength", keyword: "maxLength", params: { limit: 200 }, message: "must NOT have more than 200 characters" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+  } else {
+    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+    if (vErrors === null) {
+      vErrors = [err1];
+    } else {
+      vErrors.push(err1);
+    }
+    errors++;
+  }
+  validate195.errors = vErrors;
+  return errors === 0;
+}
+validate195.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate192(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate192.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "token" || key0 === "container" || key0 === "shown" || key0 === "selectable" || key0 === "title")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.token !== void 0) {
+      let data0 = data.token;
+      if (typeof data0 === "string") {
+        if (func2(data0) > 20) {
+          const err1 = { instancePath: instancePath + "/token", schemaPath: "#/properties/token/maxLength", keyword: "maxLength", params: { limit: 20 }, message: "must NOT have more than 20 characters" };
+          if (vErrors === null) {
+            vErrors = [err1];
+          } else {
+            vErrors.push(err1);
+          }
+          errors++;
+        }
+        if (!pattern8.test(data0)) {
+          const err2 = { instancePath: instancePath + "/token", schemaPath: "#/properties/token/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]*$" }, message: 'must match pattern "^[A-Za-z0-9_]*$"' };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+      } else {
+        const err3 = { instancePath: instancePath + "/token", schemaPath: "#/properties/token/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.container !== void 0) {
+      if (!validate193(data.container, { instancePath: instancePath + "/container", parentData: data, parentDataProperty: "container", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate193.errors : vErrors.concat(validate193.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.shown !== void 0) {
+      if (typeof data.shown !== "boolean") {
+        const err4 = { instancePath: instancePath + "/shown", schemaPath: "#/properties/shown/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.selectable !== void 0) {
+      if (typeof data.selectable !== "boolean") {
+        const err5 = { instancePath: instancePath + "/selectable", schemaPath: "#/properties/selectable/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.title !== void 0) {
+      if (!validate195(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate195.errors : vErrors.concat(validate195.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err6 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err6];
+    } else {
+      vErrors.push(err6);
+    }
+    errors++;
+  }
+  validate192.errors = vErrors;
+  return errors === 0;
+}
+validate192.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate198(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate198.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "parent" || key0 === "moves" || key0 === "shown" || key0 === "title")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate193(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate193.errors : vErrors.concat(validate193.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.moves !== void 0) {
+      let data1 = data.moves;
+      if (!(data1 === "carried" || data1 === "parked")) {
+        const err1 = { instancePath: instancePath + "/moves", schemaPath: "#/properties/moves/enum", keyword: "enum", params: { allowedValues: schema29.properties.moves.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.shown !== void 0) {
+      if (typeof data.shown !== "boolean") {
+        const err2 = { instancePath: instancePath + "/shown", schemaPath: "#/properties/shown/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.title !== void 0) {
+      if (!validate195(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate195.errors : vErrors.concat(validate195.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err3 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err3];
+    } else {
+      vErrors.push(err3);
+    }
+    errors++;
+  }
+  validate198.errors = vErrors;
+  return errors === 0;
+}
+validate198.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate191(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  ;
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate191.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.format === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "format" }, message: "must have required property 'format'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.house === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "house" }, message: "must have required property 'house'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.naming === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "naming" }, message: "must have required property 'naming'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+    if (data.roles === void 0) {
+      const err3 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "roles" }, message: "must have required property 'roles'" };
+      if (vErrors === null) {
+        vErrors = [err3];
+      } else {
+        vErrors.push(err3);
+      }
+      errors++;
+    }
+    if (data.containers === void 0) {
+      const err4 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "containers" }, message: "must have required property 'containers'" };
+      if (vErrors === null) {
+        vErrors = [err4];
+      } else {
+        vErrors.push(err4);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!(key0 === "format" || key0 === "house" || key0 === "version" || key0 === "title" || key0 === "naming" || key0 === "roles" || key0 === "containers" || key0 === "severities")) {
+        const err5 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.format !== void 0) {
+      if (1 !== data.format) {
+        const err6 = { instancePath: instancePath + "/format", schemaPath: "#/properties/format/const", keyword: "const", params: { allowedValue: 1 }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.house !== void 0) {
+      let data1 = data.house;
+      if (typeof data1 === "string") {
+        if (func2(data1) > 60) {
+          const err7 = { instancePath: instancePath + "/house", schemaPath: "#/properties/house/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        if (!pattern3.test(data1)) {
+          const err8 = { instancePath: instancePath + "/house", schemaPath: "#/properties/house/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+          if (vErrors === null) {
+            vErrors = [err8];
+          } else {
+            vErrors.push(err8);
+          }
+          errors++;
+        }
+      } else {
+        const err9 = { instancePath: instancePath + "/house", schemaPath: "#/properties/house/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err9];
+        } else {
+          vErrors.push(err9);
+        }
+        errors++;
+      }
+    }
+    if (data.version !== void 0) {
+      let data2 = data.version;
+      if (!(typeof data2 == "number" && (!(data2 % 1) && !isNaN(data2)) && isFinite(data2))) {
+        const err10 = { instancePath: instancePath + "/version", schemaPath: "#/properties/version/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err10];
+        } else {
+          vErrors.push(err10);
+        }
+        errors++;
+      }
+      if (typeof data2 == "number" && isFinite(data2)) {
+        if (data2 < 1 || isNaN(data2)) {
+          const err11 = { instancePath: instancePath + "/version", schemaPath: "#/properties/version/minimum", keyword: "minimum", params: { comparison: ">=", limit: 1 }, message: "must be >= 1" };
+          if (vErrors === null) {
+            vErrors = [err11];
+          } else {
+            vErrors.push(err11);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.title !== void 0) {
+      let data3 = data.title;
+      if (typeof data3 === "string") {
+        if (func2(data3) > 200) {
+          const err12 = { instancePath: instancePath + "/title", schemaPath: "#/properties/title/maxLength", keyword: "maxLength", params: { limit: 200 }, message: "must NOT have more than 200 characters" };
+          if (vErrors === null) {
+            vErrors = [err12];
+          } else {
+            vErrors.push(err12);
+          }
+          errors++;
+        }
+      } else {
+        const err13 = { instancePath: instancePath + "/title", schemaPath: "#/properties/title/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err13];
+        } else {
+          vErrors.push(err13);
+        }
+        errors++;
+      }
+    }
+    if (data.naming !== void 0) {
+      let data4 = data.naming;
+      if (data4 && typeof data4 == "object" && !Array.isArray(data4)) {
+        if (data4.pattern === void 0) {
+          const err14 = { instancePath: instancePath + "/naming", schemaPath: "#/properties/naming/required", keyword: "required", params: { missingProperty: "pattern" }, message: "must have required property 'pattern'" };
+          if (vErrors === null) {
+            vErrors = [err14];
+          } else {
+            vErrors.push(err14);
+          }
+          errors++;
+        }
+        for (const key1 in data4) {
+          if (!(key1 === "pattern" || key1 === "separator" || key1 === "index_digits" || key1 === "sides" || key1 === "longest")) {
+            const err15 = { instancePath: instancePath + "/naming", schemaPath: "#/properties/naming/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key1 }, message: "must NOT have additional properties" };
+            if (vErrors === null) {
+              vErrors = [err15];
+            } else {
+              vErrors.push(err15);
+            }
+            errors++;
+          }
+        }
+        if (data4.pattern !== void 0) {
+          let data5 = data4.pattern;
+          if (Array.isArray(data5)) {
+            if (data5.length < 1) {
+              const err16 = { instancePath: instancePath + "/naming/pattern", schemaPath: "#/properties/naming/properties/pattern/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+              if (vErrors === null) {
+                vErrors = [err16];
+              } else {
+                vErrors.push(err16);
+              }
+              errors++;
+            }
+            const len0 = data5.length;
+            for (let i0 = 0; i0 < len0; i0++) {
+              let data6 = data5[i0];
+              if (!(data6 === "character" || data6 === "role" || data6 === "side" || data6 === "path" || data6 === "leaf" || data6 === "index")) {
+                const err17 = { instancePath: instancePath + "/naming/pattern/" + i0, schemaPath: "#/properties/naming/properties/pattern/items/enum", keyword: "enum", params: { allowedValues: schema50.properties.naming.properties.pattern.items.enum }, message: "must be equal to one of the allowed values" };
+                if (vErrors === null) {
+                  vErrors = [err17];
+                } else {
+                  vErrors.push(err17);
+                }
+                errors++;
+              }
+            }
+          } else {
+            const err18 = { instancePath: instancePath + "/naming/pattern", schemaPath: "#/properties/naming/properties/pattern/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+            if (vErrors === null) {
+              vErrors = [err18];
+            } else {
+              vErrors.push(err18);
+            }
+            errors++;
+          }
+        }
+        if (data4.separator !== void 0) {
+          let data7 = data4.separator;
+          if (typeof data7 === "string") {
+            if (!pattern16.test(data7)) {
+              const err19 = { instancePath: instancePath + "/naming/separator", schemaPath: "#/properties/naming/properties/separator/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]{0,3}$" }, message: 'must match pattern "^[A-Za-z0-9_]{0,3}$"' };
+              if (vErrors === null) {
+                vErrors = [err19];
+              } else {
+                vErrors.push(err19);
+              }
+              errors++;
+            }
+          } else {
+            const err20 = { instancePath: instancePath + "/naming/separator", schemaPath: "#/properties/naming/properties/separator/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err20];
+            } else {
+              vErrors.push(err20);
+            }
+            errors++;
+          }
+        }
+        if (data4.index_digits !== void 0) {
+          let data8 = data4.index_digits;
+          if (!(typeof data8 == "number" && (!(data8 % 1) && !isNaN(data8)) && isFinite(data8))) {
+            const err21 = { instancePath: instancePath + "/naming/index_digits", schemaPath: "#/properties/naming/properties/index_digits/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+            if (vErrors === null) {
+              vErrors = [err21];
+            } else {
+              vErrors.push(err21);
+            }
+            errors++;
+          }
+          if (typeof data8 == "number" && isFinite(data8)) {
+            if (data8 > 6 || isNaN(data8)) {
+              const err22 = { instancePath: instancePath + "/naming/index_digits", schemaPath: "#/properties/naming/properties/index_digits/maximum", keyword: "maximum", params: { comparison: "<=", limit: 6 }, message: "must be <= 6" };
+              if (vErrors === null) {
+                vErrors = [err22];
+              } else {
+                vErrors.push(err22);
+              }
+              errors++;
+            }
+            if (data8 < 2 || isNaN(data8)) {
+              const err23 = { instancePath: instancePath + "/naming/index_digits", schemaPath: "#/properties/naming/properties/index_digits/minimum", keyword: "minimum", params: { comparison: ">=", limit: 2 }, message: "must be >= 2" };
+              if (vErrors === null) {
+                vErrors = [err23];
+              } else {
+                vErrors.push(err23);
+              }
+              errors++;
+            }
+          }
+        }
+        if (data4.sides !== void 0) {
+          let data9 = data4.sides;
+          if (data9 && typeof data9 == "object" && !Array.isArray(data9)) {
+            for (const key2 in data9) {
+              if (!(key2 === "left" || key2 === "right" || key2 === "centre")) {
+                const err24 = { instancePath: instancePath + "/naming/sides", schemaPath: "#/properties/naming/properties/sides/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key2 }, message: "must NOT have additional properties" };
+                if (vErrors === null) {
+                  vErrors = [err24];
+                } else {
+                  vErrors.push(err24);
+                }
+                errors++;
+              }
+            }
+            if (data9.left !== void 0) {
+              let data10 = data9.left;
+              if (typeof data10 === "string") {
+                if (func2(data10) > 20) {
+                  const err25 = { instancePath: instancePath + "/naming/sides/left", schemaPath: "#/properties/naming/properties/sides/properties/left/maxLength", keyword: "maxLength", params: { limit: 20 }, message: "must NOT have more than 20 characters" };
+                  if (vErrors === null) {
+                    vErrors = [err25];
+                  } else {
+                    vErrors.push(err25);
+                  }
+                  errors++;
+                }
+                if (!pattern8.test(data10)) {
+                  const err26 = { instancePath: instancePath + "/naming/sides/left", schemaPath: "#/properties/naming/properties/sides/properties/left/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]*$" }, message: 'must match pattern "^[A-Za-z0-9_]*$"' };
+                  if (vErrors === null) {
+                    vErrors = [err26];
+                  } else {
+                    vErrors.push(err26);
+                  }
+                  errors++;
+                }
+              } else {
+                const err27 = { instancePath: instancePath + "/naming/sides/left", schemaPath: "#/properties/naming/properties/sides/properties/left/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+                if (vErrors === null) {
+                  vErrors = [err27];
+                } else {
+                  vErrors.push(err27);
+                }
+                errors++;
+              }
+            }
+            if (data9.right !== void 0) {
+              let data11 = data9.right;
+              if (typeof data11 === "string") {
+                if (func2(data11) > 20) {
+                  const err28 = { instancePath: instancePath + "/naming/sides/right", schemaPath: "#/properties/naming/properties/sides/properties/right/maxLength", keyword: "maxLength", params: { limit: 20 }, message: "must NOT have more than 20 characters" };
+                  if (vErrors === null) {
+                    vErrors = [err28];
+                  } else {
+                    vErrors.push(err28);
+                  }
+                  errors++;
+                }
+                if (!pattern8.test(data11)) {
+                  const err29 = { instancePath: instancePath + "/naming/sides/right", schemaPath: "#/properties/naming/properties/sides/properties/right/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]*$" }, message: 'must match pattern "^[A-Za-z0-9_]*$"' };
+                  if (vErrors === null) {
+                    vErrors = [err29];
+                  } else {
+                    vErrors.push(err29);
+                  }
+                  errors++;
+                }
+              } else {
+                const err30 = { instancePath: instancePath + "/naming/sides/right", schemaPath: "#/properties/naming/properties/sides/properties/right/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+                if (vErrors === null) {
+                  vErrors = [err30];
+                } else {
+                  vErrors.push(err30);
+                }
+                errors++;
+              }
+            }
+            if (data9.centre !== void 0) {
+              let data12 = data9.centre;
+              if (typeof data12 === "string") {
+                if (func2(data12) > 20) {
+                  const err31 = { instancePath: instancePath + "/naming/sides/centre", schemaPath: "#/properties/naming/properties/sides/properties/centre/maxLength", keyword: "maxLength", params: { limit: 20 }, message: "must NOT have more than 20 characters" };
+                  if (vErrors === null) {
+                    vErrors = [err31];
+                  } else {
+                    vErrors.push(err31);
+                  }
+                  errors++;
+                }
+                if (!pattern8.test(data12)) {
+                  const err32 = { instancePath: instancePath + "/naming/sides/centre", schemaPath: "#/properties/naming/properties/sides/properties/centre/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]*$" }, message: 'must match pattern "^[A-Za-z0-9_]*$"' };
+                  if (vErrors === null) {
+                    vErrors = [err32];
+                  } else {
+                    vErrors.push(err32);
+                  }
+                  errors++;
+                }
+              } else {
+                const err33 = { instancePath: instancePath + "/naming/sides/centre", schemaPath: "#/properties/naming/properties/sides/properties/centre/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+                if (vErrors === null) {
+                  vErrors = [err33];
+                } else {
+                  vErrors.push(err33);
+                }
+                errors++;
+              }
+            }
+          } else {
+            const err34 = { instancePath: instancePath + "/naming/sides", schemaPath: "#/properties/naming/properties/sides/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+            if (vErrors === null) {
+              vErrors = [err34];
+            } else {
+              vErrors.push(err34);
+            }
+            errors++;
+          }
+        }
+        if (data4.longest !== void 0) {
+          let data13 = data4.longest;
+          if (!(typeof data13 == "number" && (!(data13 % 1) && !isNaN(data13)) && isFinite(data13))) {
+            const err35 = { instancePath: instancePath + "/naming/longest", schemaPath: "#/properties/naming/properties/longest/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+            if (vErrors === null) {
+              vErrors = [err35];
+            } else {
+              vErrors.push(err35);
+            }
+            errors++;
+          }
+          if (typeof data13 == "number" && isFinite(data13)) {
+            if (data13 > 255 || isNaN(data13)) {
+              const err36 = { instancePath: instancePath + "/naming/longest", schemaPath: "#/properties/naming/properties/longest/maximum", keyword: "maximum", params: { comparison: "<=", limit: 255 }, message: "must be <= 255" };
+              if (vErrors === null) {
+                vErrors = [err36];
+              } else {
+                vErrors.push(err36);
+              }
+              errors++;
+            }
+            if (data13 < 8 || isNaN(data13)) {
+              const err37 = { instancePath: instancePath + "/naming/longest", schemaPath: "#/properties/naming/properties/longest/minimum", keyword: "minimum", params: { comparison: ">=", limit: 8 }, message: "must be >= 8" };
+              if (vErrors === null) {
+                vErrors = [err37];
+              } else {
+                vErrors.push(err37);
+              }
+              errors++;
+            }
+          }
+        }
+      } else {
+        const err38 = { instancePath: instancePath + "/naming", schemaPath: "#/properties/naming/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err38];
+        } else {
+          vErrors.push(err38);
+        }
+        errors++;
+      }
+    }
+    if (data.roles !== void 0) {
+      let data14 = data.roles;
+      if (data14 && typeof data14 == "object" && !Array.isArray(data14)) {
+        for (const key3 in data14) {
+          const _errs32 = errors;
+          if (typeof key3 === "string") {
+            if (!pattern3.test(key3)) {
+              const err39 = { instancePath: instancePath + "/roles", schemaPath: "#/properties/roles/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"', propertyName: key3 };
+              if (vErrors === null) {
+                vErrors = [err39];
+              } else {
+                vErrors.push(err39);
+              }
+              errors++;
+            }
+          } else {
+            const err40 = { instancePath: instancePath + "/roles", schemaPath: "#/properties/roles/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key3 };
+            if (vErrors === null) {
+              vErrors = [err40];
+            } else {
+              vErrors.push(err40);
+            }
+            errors++;
+          }
+          var valid5 = _errs32 === errors;
+          if (!valid5) {
+            const err41 = { instancePath: instancePath + "/roles", schemaPath: "#/properties/roles/propertyNames", keyword: "propertyNames", params: { propertyName: key3 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err41];
+            } else {
+              vErrors.push(err41);
+            }
+            errors++;
+          }
+        }
+        for (const key4 in data14) {
+          if (!validate192(data14[key4], { instancePath: instancePath + "/roles/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data14, parentDataProperty: key4, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate192.errors : vErrors.concat(validate192.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err42 = { instancePath: instancePath + "/roles", schemaPath: "#/properties/roles/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err42];
+        } else {
+          vErrors.push(err42);
+        }
+        errors++;
+      }
+    }
+    if (data.containers !== void 0) {
+      let data16 = data.containers;
+      if (data16 && typeof data16 == "object" && !Array.isArray(data16)) {
+        for (const key5 in data16) {
+          const _errs38 = errors;
+          if (typeof key5 === "string") {
+            if (!pattern3.test(key5)) {
+              const err43 = { instancePath: instancePath + "/containers", schemaPath: "#/properties/containers/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"', propertyName: key5 };
+              if (vErrors === null) {
+                vErrors = [err43];
+              } else {
+                vErrors.push(err43);
+              }
+              errors++;
+            }
+          } else {
+            const err44 = { instancePath: instancePath + "/containers", schemaPath: "#/properties/containers/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key5 };
+            if (vErrors === null) {
+              vErrors = [err44];
+            } else {
+              vErrors.push(err44);
+            }
+            errors++;
+          }
+          var valid7 = _errs38 === errors;
+          if (!valid7) {
+            const err45 = { instancePath: instancePath + "/containers", schemaPath: "#/properties/containers/propertyNames", keyword: "propertyNames", params: { propertyName: key5 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err45];
+            } else {
+              vErrors.push(err45);
+            }
+            errors++;
+          }
+        }
+        for (const key6 in data16) {
+          if (!validate198(data16[key6], { instancePath: instancePath + "/containers/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key6, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate198.errors : vErrors.concat(validate198.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err46 = { instancePath: instancePath + "/containers", schemaPath: "#/properties/containers/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err46];
+        } else {
+          vErrors.push(err46);
+        }
+        errors++;
+      }
+    }
+    if (data.severities !== void 0) {
+      let data18 = data.severities;
+      if (data18 && typeof data18 == "object" && !Array.isArray(data18)) {
+        for (const key7 in data18) {
+          let data19 = data18[key7];
+          if (!(data19 === "error" || data19 === "warning" || data19 === "info" || data19 === "off")) {
+            const err47 = { instancePath: instancePath + "/severities/" + key7.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/severities/additionalProperties/enum", keyword: "enum", params: { allowedValues: schema50.properties.severities.additionalProperties.enum }, message: "must be equal to one of the allowed values" };
+            if (vErrors === null) {
+              vErrors = [err47];
+            } else {
+              vErrors.push(err47);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err48 = { instancePath: instancePath + "/severities", schemaPath: "#/properties/severities/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err48];
+        } else {
+          vErrors.push(err48);
+        }
+        errors++;
+      }
+    }
+  } else {
+    const err49 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err49];
+    } else {
+      vErrors.push(err49);
+    }
+    errors++;
+  }
+  validate191.errors = vErrors;
+  return errors === 0;
+}
+validate191.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+export {
+  validateHouse,
+  validateRecipe
+};
