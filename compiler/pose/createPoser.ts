@@ -1,5 +1,5 @@
 import { invariant } from '../findings/invariant';
-import { composeMat4, IDENTITY_MAT4 } from '../math/mat4';
+import { IDENTITY_MAT4 } from '../math/mat4';
 import type { ControlNode, PoseValues, Rig } from '../rig/Rig';
 import { readerOf } from './channelValues';
 import { prepareConstraint } from './constraint';
@@ -7,7 +7,7 @@ import { readChannels, writeChannelMatrix } from './controlTransform';
 import { indexNodes, orderEvaluation } from './evaluationOrder';
 import type { Poser } from './Poser';
 import { prepareTwoBone } from './twoBoneSolver';
-import { multiplyInto, restWorldMatrices, writeMatrix } from './worldMatrices';
+import { multiplyInto, restMatrix, restWorldMatrices, writeMatrix } from './worldMatrices';
 
 /** One thing to do on the flat array of world matrices. */
 type Step = (pose: PoseValues) => void;
@@ -27,7 +27,7 @@ interface Workspace {
 function makeWorkspace(rig: Rig): Workspace {
   const restLocal = new Float64Array(rig.nodes.length * 16);
   rig.nodes.forEach((node, index) => {
-    writeMatrix(restLocal, index, composeMat4(node.at, node.turn));
+    writeMatrix(restLocal, index, restMatrix(node));
   });
   return {
     world: Float64Array.from(restLocal),

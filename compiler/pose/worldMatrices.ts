@@ -1,13 +1,18 @@
 import type { Mat4 } from '../math/mat4';
 import { composeMat4, multiplyMat4 } from '../math/mat4';
-import { rotate } from '../math/quat';
-import type { Quat, Rig, Vec3 } from '../rig/Rig';
+import { normaliseQuat, rotate } from '../math/quat';
+import type { Quat, Rig, RigNode, Vec3 } from '../rig/Rig';
+
+/** Rest transform of a node against its parent; a rounded rotation is brought to length one. */
+export function restMatrix(node: RigNode): Mat4 {
+  return composeMat4(node.at, normaliseQuat(node.turn));
+}
 
 /** World matrix of every node at rest, in the order of `rig.nodes`, from rest transforms alone. */
 export function restWorldMatrices(rig: Rig): readonly Mat4[] {
   const byName = new Map<string, Mat4>();
   return rig.nodes.map((node) => {
-    const own = composeMat4(node.at, node.turn);
+    const own = restMatrix(node);
     const parent = node.parent === null ? undefined : byName.get(node.parent);
     const world = parent === undefined ? own : multiplyMat4(parent, own);
     byName.set(node.name, world);
