@@ -50,7 +50,7 @@ export function quatToEuler(q: Quat, order: RotationOrder): Vec3 {
   // Undo the third rotation, however inexact, before reading the others, so that its error cancels out.
   const sin = Math.sin(c);
   const cos = Math.cos(c);
-  const b = Math.atan2(-at(k, i), cos * at(i, i) + sin * at(j, i));
+  const b = Math.atan2(-at(k, i), middleCosine);
   const a = Math.atan2(sin * at(i, k) - cos * at(j, k), cos * at(j, j) - sin * at(i, j));
   const degrees: [number, number, number] = [0, 0, 0];
   const toDegrees = parity / RADIANS_PER_DEGREE;
