@@ -17,11 +17,17 @@ export const SLERP_LINEAR_COSINE = 1 - 1e-12;
 export const REST_TOLERANCE = 1e-9;
 
 /**
- * Relative to a chain's length: a goal this near to full reach (or to the nearest place the chain can fold to) counts
- * as exactly there. The bend grows with the square root of what is left, so without it the rounding of 1e-16 in a
- * straight chain's rest length would bend it by 1e-8.
+ * Relative to a chain's length: a reach this near to the rest reach, to full reach or to the nearest place the chain
+ * can fold to counts as exactly that. The bend grows with the square root of what is left to full reach, so without
+ * it the rounding of 1e-16 in a straight chain's length would bend it by 1e-8.
  */
 export const REACH_TOLERANCE = 1e-12;
 
-/** Relative to a chain's length: a bend or a pole nearer than this to the line start–end names no plane. */
-export const PLANE_TOLERANCE = 1e-9;
+/** Relative to a chain's length: a middle joint nearer than this to the line start–end leaves the chain straight. */
+export const BEND_TOLERANCE = 2e-10;
+
+/**
+ * Relative to its distance: a pole nearer than this to the line start–goal names no plane. Rounding of 1e-16 would
+ * swing a nearer one's plane by more than 1e-10.
+ */
+export const POLE_TOLERANCE = 1e-6;

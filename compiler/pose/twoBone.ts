@@ -1,7 +1,14 @@
 import { quatFromAxisAngle, rotate } from '../math/quat';
-import { PLANE_TOLERANCE, REACH_TOLERANCE } from '../math/tolerances';
+import { POLE_TOLERANCE, REACH_TOLERANCE } from '../math/tolerances';
 import { addScaled, cross, distance, length, normalise, rejectFrom, sub } from '../math/vec3';
 import type { Vec3 } from '../rig/Rig';
+
+/** How far apart start and end are, and where the middle joint stands: along that line and off it. */
+export interface Reach {
+  readonly distance: number;
+  readonly foot: number;
+  readonly height: number;
+}
 
 export interface TwoBoneInput {
   readonly start: Vec3;
@@ -10,6 +17,8 @@ export interface TwoBoneInput {
   /** Lengths of both bones; greater than zero. */
   readonly upper: number;
   readonly lower: number;
+  /** Reach at rest, in units of both lengths together; null when the bones no longer have their rest proportions. */
+  readonly restReach: Reach | null;
   /** Angle in radians about start → goal by which the middle joint stands off the pole's plane. */
   readonly swivel: number;
   /** Unit direction start → end to use when goal and start fall together. */
@@ -29,7 +38,7 @@ export interface TwoBoneSolution {
 export function poleDirection(start: Vec3, along: Vec3, pole: Vec3, chainLength: number): Vec3 | undefined {
   const toPole = sub(pole, start);
   const side = rejectFrom(toPole, along);
-  const noise = PLANE_TOLERANCE * Math.max(length(toPole), chainLength);
+  const noise = POLE_TOLERANCE * Math.max(length(toPole), chainLength);
   // Made orthogonal twice: the first time may cancel many digits when the pole is far off along the line.
   return length(side) > noise ? normalise(rejectFrom(normalise(side), along)) : undefined;
 }
@@ -38,17 +47,28 @@ function bendDirection(input: TwoBoneInput, along: Vec3): Vec3 {
   const towardPole = poleDirection(input.start, along, input.pole, input.upper + input.lower);
   if (towardPole !== undefined) return rotate(quatFromAxisAngle(along, input.swivel), towardPole);
   const bend = rejectFrom(input.restBend, along);
-  if (length(bend) > PLANE_TOLERANCE) return normalise(bend);
+  if (length(bend) > POLE_TOLERANCE) return normalise(bend);
   // The rest bend lies on the line as well; its plane's normal does not.
   return normalise(cross(cross(input.restDirection, input.restBend), along));
 }
 
-/** `d` within what the chain can span, with the ends of that range reached exactly. */
-function clampReach(d: number, upper: number, lower: number): number {
-  const least = Math.abs(upper - lower);
+/** The triangle of both bones for a distance that is asked for, as near as the bones allow. */
+function reachFor(asked: number, { upper, lower, restReach }: TwoBoneInput): Reach {
   const most = upper + lower;
-  if (d >= most * (1 - REACH_TOLERANCE)) return most;
-  return d <= least + most * REACH_TOLERANCE ? least : d;
+  const least = Math.abs(upper - lower);
+  const tolerance = most * REACH_TOLERANCE;
+  if (restReach !== null && Math.abs(asked - restReach.distance * most) <= tolerance) {
+    return {
+      distance: restReach.distance * most,
+      foot: restReach.foot * most,
+      height: restReach.height * most,
+    };
+  }
+  const d = asked >= most - tolerance ? most : asked <= least + tolerance ? least : asked;
+  const foot = d > 0 ? ((upper - lower) * (most / d) + d) / 2 : 0;
+  const a = Math.min(upper, Math.max(-upper, foot));
+  // (upper − a)(upper + a) keeps the digits that upper² − a² loses near full reach.
+  return { distance: d, foot: a, height: Math.sqrt(Math.max(0, (upper - a) * (upper + a))) };
 }
 
 /**
@@ -57,18 +77,15 @@ function clampReach(d: number, upper: number, lower: number): number {
  * never NaN for finite input with positive lengths.
  */
 export function solveTwoBone(input: TwoBoneInput): TwoBoneSolution {
-  const { start, goal, upper, lower } = input;
+  const { start, goal } = input;
   const asked = distance(start, goal);
-  const along = asked > (upper + lower) * REACH_TOLERANCE ? normalise(sub(goal, start)) : input.restDirection;
+  const isApart = asked > (input.upper + input.lower) * REACH_TOLERANCE;
+  const along = isApart ? normalise(sub(goal, start)) : input.restDirection;
   const bend = bendDirection(input, along);
-  const d = clampReach(asked, upper, lower);
-  const foot = d > 0 ? ((upper - lower) * ((upper + lower) / d) + d) / 2 : 0;
-  const a = Math.min(upper, Math.max(-upper, foot));
-  // (upper − a)(upper + a) keeps the digits that upper² − a² loses near full reach.
-  const height = Math.sqrt(Math.max(0, (upper - a) * (upper + a)));
+  const reach = reachFor(asked, input);
   return {
-    mid: addScaled(addScaled(start, along, a), bend, height),
-    end: addScaled(start, along, d),
+    mid: addScaled(addScaled(start, along, reach.foot), bend, reach.height),
+    end: addScaled(start, along, reach.distance),
     normal: cross(along, bend),
   };
 }

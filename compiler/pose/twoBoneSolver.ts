@@ -2,11 +2,12 @@ import { invariant } from '../findings/invariant';
 import type { Mat4 } from '../math/mat4';
 import { invertMat4, positionOf, rotationOf, transformPoint } from '../math/mat4';
 import { conjugateQuat, IDENTITY_QUAT, multiplyQuat, quatFromAxes, rotate, slerp } from '../math/quat';
-import { PLANE_TOLERANCE } from '../math/tolerances';
+import { BEND_TOLERANCE, POLE_TOLERANCE, REACH_TOLERANCE } from '../math/tolerances';
 import {
   add,
   cross,
   distance,
+  dot,
   length,
   normalise,
   perpendicularTo,
@@ -15,7 +16,7 @@ import {
   sub,
 } from '../math/vec3';
 import type { Quat, Vec3 } from '../rig/Rig';
-import { poleDirection, solveTwoBone } from './twoBone';
+import { poleDirection, type Reach, solveTwoBone } from './twoBone';
 import { readMatrix, readPosition, turnAxes, writePosition } from './worldMatrices';
 
 /** Places in the flat arrays of the nodes a two-bone solver reads and turns. */
@@ -34,6 +35,10 @@ export interface TwoBoneNodes {
 /** What a two-bone solver takes from rest once. */
 interface TwoBoneRest {
   readonly goalToEnd: Vec3;
+  /** In units of both bones' length together. */
+  readonly reach: Reach;
+  /** Length of the upper bone as a share of both. */
+  readonly upperShare: number;
   readonly swivel: number;
   /** Plane normal of the three joints as the start and the middle joint carry it. */
   readonly normalInStart: Vec3;
@@ -56,11 +61,9 @@ function measureRest(nodes: TwoBoneNodes, rest: readonly Mat4[]): TwoBoneRest {
   ];
   const span = distance(start, mid) + distance(mid, end);
   const line = sub(end, start);
-  const direction = normalise(
-    length(line) > span * PLANE_TOLERANCE ? line : perpendicularTo(sub(mid, start)),
-  );
+  const direction = normalise(length(line) > span * BEND_TOLERANCE ? line : perpendicularTo(sub(mid, start)));
   const bend = rejectFrom(sub(mid, start), direction);
-  const isStraight = length(bend) <= span * PLANE_TOLERANCE;
+  const isStraight = length(bend) <= span * BEND_TOLERANCE;
   const towardPole = poleDirection(start, direction, positionOf(at(nodes.pole)), span);
   const restBend = isStraight ? (towardPole ?? perpendicularTo(direction)) : normalise(bend);
   const normal = cross(direction, restBend);
@@ -70,6 +73,12 @@ function measureRest(nodes: TwoBoneNodes, rest: readonly Mat4[]): TwoBoneRest {
   const intoParent = (v: Vec3): Vec3 => (nodes.parent === null ? v : intoFrameOf(nodes.parent, v));
   return {
     goalToEnd: transformPoint(inverseGoal, end),
+    reach: {
+      distance: length(line) / span,
+      foot: dot(sub(mid, start), direction) / span,
+      height: isStraight ? 0 : length(bend) / span,
+    },
+    upperShare: distance(start, mid) / span,
     swivel: isStraight || towardPole === undefined ? 0 : signedAngle(towardPole, restBend, direction),
     normalInStart: intoFrameOf(nodes.start, normal),
     normalInMid: intoFrameOf(nodes.mid, normal),
@@ -82,7 +91,7 @@ function measureRest(nodes: TwoBoneNodes, rest: readonly Mat4[]): TwoBoneRest {
 function boneFrame(bone: Vec3, normal: Vec3): Quat {
   const x = normalise(bone);
   const side = rejectFrom(normal, x);
-  const y = length(side) > PLANE_TOLERANCE ? normalise(side) : perpendicularTo(x);
+  const y = length(side) > POLE_TOLERANCE ? normalise(side) : perpendicularTo(x);
   return quatFromAxes(x, y, cross(x, y));
 }
 
@@ -120,6 +129,7 @@ export function prepareTwoBone(
       pole: readPosition(world, nodes.pole),
       upper,
       lower,
+      restReach: Math.abs(upper / (upper + lower) - rest.upperShare) <= REACH_TOLERANCE ? rest.reach : null,
       swivel: rest.swivel,
       restDirection: rotate(parentTurn, rest.directionInParent),
       restBend: rotate(parentTurn, rest.bendInParent),
