@@ -26,7 +26,10 @@ async function generatedFiles(): Promise<ReadonlyMap<string, string>> {
     ['compiler/emit/generated/templates.js', templatesModule()],
     ['compiler/emit/generated/templates.d.ts', templateDeclarations()],
     ['compiler/house/generated/houseTexts.ts', textModule('HOUSE_TEXTS', 'compiler/house', '.house.yaml')],
-    ['compiler/samples/generated/sampleTexts.ts', textModule('SAMPLE_TEXTS', 'compiler/samples', '.recipe.yaml')],
+    [
+      'compiler/samples/generated/sampleTexts.ts',
+      textModule('SAMPLE_TEXTS', 'compiler/samples', '.recipe.yaml'),
+    ],
     ['compiler/findings/generated/pages.ts', textModule('PAGES', 'compiler', '.page.md')],
   ]);
 }

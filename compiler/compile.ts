@@ -15,7 +15,7 @@ import { sha256Hex } from './hash/sha256Hex';
 import { planSteps } from './plan/planSteps';
 import { resolveRecipe } from './resolve/resolveRecipe';
 import type { Rig } from './rig/Rig';
-import { checkShape } from './schema/checkShape';
+import { checkRecipeShape } from './schema/checkShape';
 import { solveRecipe } from './solve/solveRecipe';
 import type { SourceText } from './source/SourceText';
 import { COMPILER_VERSION } from './version';
@@ -63,13 +63,15 @@ export function compile(request: CompileRequest): Compilation {
   };
   if (merged.value === undefined) return stop();
 
-  const shape = checkShape(merged, 'recipe', findings);
-  const found = readHouse(merged, request.houses ?? {}, findings);
-  if (!found || !shape.recipe) return stop();
+  const shape = checkRecipeShape(merged, findings);
+  if (!shape.value) return stop();
+  const found = readHouse(shape.value.house, merged, request.houses ?? {}, findings);
+  if (!found) return stop();
   const { house, reference } = found;
 
-  const { recipe } = evaluateRecipe(merged, shape.recipe, request.character?.params ?? {}, findings);
-  const context = { document: merged, findings, poisoned: shape.poisoned, house };
+  const shaped = { document: merged, findings, poisoned: shape.poisoned };
+  const { recipe, poisoned } = evaluateRecipe(shape.value, request.character?.params ?? {}, shaped);
+  const context = { ...shaped, poisoned, house };
   const expanded = expandRecipe(recipe, context);
   const resolved = resolveRecipe(recipe, expanded, character, context);
   const solved = solveRecipe(resolved, context);
@@ -82,7 +84,7 @@ export function compile(request: CompileRequest): Compilation {
 
   const scene = {
     character,
-    recipe: `${shape.recipe.recipe}@${request.version ?? 'draft'}`,
+    recipe: `${recipe.recipe}@${request.version ?? 'draft'}`,
     house: reference,
     up: expanded.scene.upAxis,
     forward: expanded.scene.forwardAxis,

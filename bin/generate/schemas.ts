@@ -21,7 +21,11 @@ function readSchema(path: string): Schema {
 }
 
 /** Names of local definitions that a schema refers to, directly or through others. */
-function definitionsUsed(schema: unknown, definitions: Schema, found = new Set<string>()): ReadonlySet<string> {
+function definitionsUsed(
+  schema: unknown,
+  definitions: Schema,
+  found = new Set<string>(),
+): ReadonlySet<string> {
   for (const [, name] of JSON.stringify(schema).matchAll(/"#\/\$defs\/([A-Za-z]+)"/g)) {
     if (!name || found.has(name)) continue;
     found.add(name);
@@ -33,21 +37,25 @@ function definitionsUsed(schema: unknown, definitions: Schema, found = new Set<s
 /** The recipe schema with the fragments of all parts in it. */
 export function bundleRecipeSchema(): Schema {
   const recipe = readSchema('compiler/schema/recipe.schema.json');
-  const definitions = recipe['$defs'] as Schema;
+  const definitions = recipe.$defs as Schema;
   const kinds = readdirSync('compiler/parts', { withFileTypes: true })
     .filter((entry) => entry.isDirectory())
     .map(({ name }) => name)
     .sort();
-  const parts = kinds.map((kind) => withLocalReferences(readSchema(`compiler/parts/${kind}/${kind}.schema.json`)) as Schema);
-  for (const part of parts) definitions[part['title'] as string] = part;
-  (definitions['Part'] as Schema)['oneOf'] = parts.map((part) => ({ $ref: `#/$defs/${part['title'] as string}` }));
+  const parts = kinds.map(
+    (kind) => withLocalReferences(readSchema(`compiler/parts/${kind}/${kind}.schema.json`)) as Schema,
+  );
+  for (const part of parts) definitions[part.title as string] = part;
+  (definitions.Part as Schema).oneOf = parts.map((part) => ({
+    $ref: `#/$defs/${part.title as string}`,
+  }));
   return recipe;
 }
 
 /** The house-rules schema with the definitions it shares with recipes in it. */
 export function bundleHouseSchema(recipe: Schema): Schema {
   const house = withLocalReferences(readSchema('compiler/schema/house.schema.json')) as Schema;
-  const definitions = recipe['$defs'] as Schema;
+  const definitions = recipe.$defs as Schema;
   const used = [...definitionsUsed(house, definitions)].sort();
   return { ...house, $defs: Object.fromEntries(used.map((name) => [name, definitions[name]])) };
 }

@@ -29,7 +29,9 @@ export function templatesModule(): string {
 
 /** Declarations of the templates' module. */
 export function templateDeclarations(): string {
-  const verbs = templateNames().map((name) => JSON.stringify(name)).join(' | ');
+  const verbs = templateNames()
+    .map((name) => JSON.stringify(name))
+    .join(' | ');
   return [
     '// Made by bin/generate.ts from templates/slipway.',
     `export type TemplateName = ${verbs};`,

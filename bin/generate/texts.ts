@@ -12,7 +12,9 @@ export function filesEndingIn(folder: string, suffix: string): readonly string[]
 /** A module that exports one record of texts, by file name without the suffix, sorted. */
 export function textModule(exportName: string, folder: string, suffix: string): string {
   const entries = filesEndingIn(folder, suffix)
-    .map((path) => [path.slice(path.lastIndexOf('/') + 1, -suffix.length), readFileSync(path, 'utf8')] as const)
+    .map(
+      (path) => [path.slice(path.lastIndexOf('/') + 1, -suffix.length), readFileSync(path, 'utf8')] as const,
+    )
     .sort(([a], [b]) => (a < b ? -1 : 1))
     .map(([name, text]) => `  ${JSON.stringify(name)}: ${JSON.stringify(text)},`);
   return [

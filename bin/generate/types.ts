@@ -14,14 +14,14 @@ function forTypes(value: unknown): unknown {
   for (const [key, item] of Object.entries(value)) copy[key] = forTypes(item);
   const { prefixItems } = copy;
   if (Array.isArray(prefixItems)) {
-    delete copy['prefixItems'];
-    copy['items'] = prefixItems;
-    copy['minItems'] = prefixItems.length;
-    copy['maxItems'] = prefixItems.length;
-    copy['additionalItems'] = false;
-  } else if (copy['type'] === 'array') {
-    delete copy['minItems'];
-    delete copy['maxItems'];
+    delete copy.prefixItems;
+    copy.items = prefixItems;
+    copy.minItems = prefixItems.length;
+    copy.maxItems = prefixItems.length;
+    copy.additionalItems = false;
+  } else if (copy.type === 'array') {
+    delete copy.minItems;
+    delete copy.maxItems;
   }
   return copy;
 }

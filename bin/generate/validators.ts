@@ -21,7 +21,7 @@ export async function validatorsOf(schemas: Readonly<Record<string, Schema>>): P
   const exported: Record<string, string> = {};
   for (const [name, schema] of Object.entries(schemas)) {
     ajv.addSchema(schema);
-    exported[name] = schema['$id'] as string;
+    exported[name] = schema.$id as string;
   }
   const source = standaloneCode(ajv, exported);
   const bundled = await build({

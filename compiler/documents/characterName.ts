@@ -14,8 +14,7 @@ export function characterNameOf(
   findings: FindingList,
 ): string {
   const { value } = recipe;
-  const own =
-    typeof value === 'object' && value !== null && !Array.isArray(value) ? value['recipe'] : undefined;
+  const own = typeof value === 'object' && value !== null && !Array.isArray(value) ? value.recipe : undefined;
   const fallback = typeof own === 'string' && CHARACTER_NAME.test(own) ? own : 'unnamed';
   if (given === undefined) return fallback;
   if (CHARACTER_NAME.test(given)) return given;

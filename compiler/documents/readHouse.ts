@@ -3,8 +3,7 @@ import { HOUSE_TEXTS } from '../house/generated/houseTexts';
 import { mergeDocuments } from '../merge/mergeDocuments';
 import type { MergedDocument } from '../merge/types';
 import type { HouseDocument } from '../resolve/types';
-import { checkShape } from '../schema/checkShape';
-import type { HouseRules } from '../schema/generated/houseTypes';
+import { checkHouseShape } from '../schema/checkShape';
 import type { SourceText } from '../source/SourceText';
 import { parseDocument } from '../syntax/parseDocument';
 import { documentFindings } from './findings';
@@ -16,16 +15,17 @@ const BUILT_IN: Readonly<Record<string, SourceText>> = Object.fromEntries(
   Object.entries(HOUSE_TEXTS).map(([name, text]) => [`${name}@1`, { name: `${name}.house.yaml`, text }]),
 );
 
-/** Finds and checks the house rules a recipe names. Null, with findings, when there are none to work with. */
+/**
+ * Finds and checks the house rules a recipe names, or the default ones. Null, with findings, when there are none to
+ * work with.
+ */
 export function readHouse(
+  named: string | undefined,
   recipe: MergedDocument,
   houses: Readonly<Record<string, SourceText>>,
   findings: FindingList,
 ): { readonly reference: string; readonly house: HouseDocument } | null {
-  const { value } = recipe;
-  const named =
-    typeof value === 'object' && value !== null && !Array.isArray(value) ? value['house'] : undefined;
-  const reference = typeof named === 'string' ? named : DEFAULT_HOUSE;
+  const reference = named ?? DEFAULT_HOUSE;
   const known = { ...BUILT_IN, ...houses };
   const text = Object.hasOwn(known, reference) ? known[reference] : undefined;
   if (!text) {
@@ -38,8 +38,6 @@ export function readHouse(
   }
   const document = mergeDocuments([parseDocument(text, findings)]);
   if (document.value === undefined) return null;
-  const shape = checkShape(document, 'house', findings);
-  return shape.isSound
-    ? { reference, house: { document, rules: document.value as unknown as HouseRules } }
-    : null;
+  const { value, isSound } = checkHouseShape(document, findings);
+  return isSound && value ? { reference, house: { document, rules: value } } : null;
 }

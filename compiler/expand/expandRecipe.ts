@@ -38,7 +38,7 @@ function readLandmarks(
 
 /** Writes a recipe out in primitives: parts expanded, sides split, defaults filled in. */
 export function expandRecipe(recipe: EvaluatedRecipe, context: StageContext): ExpandedRecipe {
-  const scene = readSceneFrame(recipe, context);
+  const scene = readSceneFrame(recipe.scene, context);
   const primitives = collectPrimitives(recipe, scene.left, context.poisoned);
   return {
     scene,

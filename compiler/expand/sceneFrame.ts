@@ -1,5 +1,5 @@
-import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import type { Axis, Vec3 } from '../rig/Rig';
+import type { Recipe } from '../schema/generated/recipeTypes';
 import { expandFindings } from './findings';
 import type { StageContext } from './StageContext';
 import type { SceneFrame } from './types';
@@ -24,11 +24,11 @@ export function areParallel(first: Axis, second: Axis): boolean {
 }
 
 /** Reads the scene's axes; left is up × forward. Parallel axes are a finding and forward falls back. */
-export function readSceneFrame(recipe: EvaluatedRecipe, context: StageContext): SceneFrame {
-  const upAxis: Axis = recipe.scene?.up ?? '+y';
-  let forwardAxis: Axis = recipe.scene?.forward ?? (upAxis[1] === 'z' ? '-y' : '+z');
+export function readSceneFrame(scene: Recipe['scene'], context: StageContext): SceneFrame {
+  const upAxis: Axis = scene?.up ?? '+y';
+  let forwardAxis: Axis = scene?.forward ?? (upAxis[1] === 'z' ? '-y' : '+z');
   if (areParallel(upAxis, forwardAxis)) {
-    const key = recipe.scene?.forward === undefined ? 'up' : 'forward';
+    const key = scene?.forward === undefined ? 'up' : 'forward';
     context.findings.report(expandFindings, 'axes-parallel', context.document.spanAt(['scene', key]), {
       first: upAxis,
       second: forwardAxis,
@@ -43,5 +43,5 @@ export function readSceneFrame(recipe: EvaluatedRecipe, context: StageContext): 
     up[2] * forward[0] - up[0] * forward[2] + 0,
     up[0] * forward[1] - up[1] * forward[0] + 0,
   ];
-  return { upAxis, forwardAxis, unit: recipe.scene?.unit ?? 'cm', up, forward, left };
+  return { upAxis, forwardAxis, unit: scene?.unit ?? 'cm', up, forward, left };
 }

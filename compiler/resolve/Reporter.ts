@@ -23,6 +23,8 @@ export function spanInRecipeOrHouse(
 /** Whether an id belongs to an entry that was refused earlier, so that a missing reference is no news. */
 export function isPoisonedReference(context: StageContext, id: string): boolean {
   for (const place of context.poisoned) {
+    // A whole collection was refused: nothing can be said about any id.
+    if (!place.includes('/')) return true;
     const entry = place.slice(place.indexOf('/') + 1);
     if (id === entry || id.startsWith(`${entry}.`)) return true;
   }

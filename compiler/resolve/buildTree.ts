@@ -1,6 +1,7 @@
 import type { ControlSpecification, ExpandedRecipe } from '../expand/types';
 import type { Side } from '../rig/Rig';
 import type { Path } from '../syntax/types';
+import type { Owner } from './checkParentRings';
 import type { LinkedRecipe } from './checkReferences';
 import { CARRIER_ROLE } from './findCarrier';
 import { resolveFindings } from './findings';
@@ -27,7 +28,7 @@ interface TreeInput {
   readonly roles: ReadonlyMap<string, ResolvedRole>;
   readonly carrier: ControlSpecification | null;
   /** Owners on a ring, whose parents are not followed. */
-  readonly onRing: ReadonlySet<string>;
+  readonly onRing: ReadonlySet<Owner>;
   readonly context: ResolveContext;
   readonly namer: NodeNamer;
 }
@@ -118,7 +119,7 @@ export function buildTree(input: TreeInput): Tree {
     for (const chain of linked.chains) {
       const add = (): void => {
         for (const id of chain.jointIds) waiting.delete(id);
-        const parent = onRing.has(chain.id) ? null : chain.parent;
+        const parent = onRing.has(chain) ? null : chain.parent;
         if (parent !== null) request(parent);
         const container = containerOf(chain.role, chain.path);
         const [first] = chain.jointIds;
@@ -142,7 +143,7 @@ export function buildTree(input: TreeInput): Tree {
     }
     for (const control of linked.controls) {
       waiting.set(control.id, () => {
-        const parent = onRing.has(control.id) ? null : control.parent;
+        const parent = onRing.has(control) ? null : control.parent;
         if (parent !== null) request(parent);
         const container = containerOf(control.role, control.path);
         if (containers.get(container)?.carried === false) {

@@ -3,7 +3,7 @@ import { resolveFindings } from './findings';
 import type { ResolveContext } from './Reporter';
 import type { Things } from './things';
 
-type Owner = ChainSpecification | ControlSpecification;
+export type Owner = ChainSpecification | ControlSpecification;
 
 /** The chain or control that an owner's parent belongs to. */
 function parentOwner(owner: Owner, things: Things): Owner | null {
@@ -12,29 +12,29 @@ function parentOwner(owner: Owner, things: Things): Owner | null {
 }
 
 /**
- * Finds parents that form a ring, each ring once, and returns the ids of the owners on them, whose parents must
+ * Finds parents that form a ring, each ring once, and returns the owners on them, whose parents must
  * not be followed. Every owner has at most one parent, so one walk with three colours finds all rings.
  */
 export function checkParentRings(
   owners: readonly Owner[],
   things: Things,
   context: ResolveContext,
-): ReadonlySet<string> {
-  const settled = new Set<string>();
-  const onRing = new Set<string>();
+): ReadonlySet<Owner> {
+  const settled = new Set<Owner>();
+  const onRing = new Set<Owner>();
   for (const first of owners) {
     const walk: Owner[] = [];
-    const position = new Map<string, number>();
+    const position = new Map<Owner, number>();
     let owner: Owner | null = first;
-    while (owner && !settled.has(owner.id) && !position.has(owner.id)) {
-      position.set(owner.id, walk.length);
+    while (owner && !settled.has(owner) && !position.has(owner)) {
+      position.set(owner, walk.length);
       walk.push(owner);
       owner = parentOwner(owner, things);
     }
-    const start = owner ? position.get(owner.id) : undefined;
+    const start = owner ? position.get(owner) : undefined;
     if (owner && start !== undefined) {
       const ring = walk.slice(start);
-      for (const { id } of ring) onRing.add(id);
+      for (const member of ring) onRing.add(member);
       context.findings.report(
         resolveFindings,
         'parent-ring',
@@ -48,7 +48,7 @@ export function checkParentRings(
         },
       );
     }
-    for (const { id } of walk) settled.add(id);
+    for (const member of walk) settled.add(member);
   }
   return onRing;
 }

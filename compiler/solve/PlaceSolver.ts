@@ -24,9 +24,9 @@ export class PlaceSolver {
   readonly places = new Map<string, RestPlace>();
   readonly #chainOfJoint = new Map<string, ChainSpecification>();
   readonly #controls: ReadonlyMap<string, ControlSpecification>;
-  readonly #settled = new Set<string>();
-  /** Ids being placed now, outermost first. */
-  readonly #open: string[] = [];
+  readonly #settled = new Set<Specification>();
+  /** Chains and controls being placed now, outermost first. */
+  readonly #open: Specification[] = [];
 
   constructor(
     private readonly recipe: ResolvedRecipe,
@@ -46,19 +46,19 @@ export class PlaceSolver {
   }
 
   #solve(owner: Specification, place: () => void): void {
-    if (this.#settled.has(owner.id)) return;
-    const start = this.#open.indexOf(owner.id);
+    if (this.#settled.has(owner)) return;
+    const start = this.#open.indexOf(owner);
     if (start >= 0) {
-      const ring = [...this.#open.slice(start), owner.id].map((id) => `"${id}"`).join(' → ');
+      const ring = [...this.#open.slice(start), owner].map(({ id }) => `"${id}"`).join(' → ');
       const span = this.context.document.spanAt(owner.path, 'key');
       this.context.findings.report(solveFindings, 'place-ring', span, { ring });
-      this.#settled.add(owner.id);
+      this.#settled.add(owner);
       return;
     }
-    this.#open.push(owner.id);
+    this.#open.push(owner);
     place();
     this.#open.pop();
-    this.#settled.add(owner.id);
+    this.#settled.add(owner);
   }
 
   /** The rest place of a joint or control, placing it first if need be. */

@@ -7,12 +7,12 @@ import { compile, createPoser, runScript, samples } from '@/compiler';
  * Biomechanics and Motor Control of Human Movement, fig. 4.1. Fractions are partly from memory (see the file);
  * the population was never verified, so they are proportions to start from, not truth about anyone.
  */
-const fractions = (
-  JSON.parse(readFileSync(new URL('../data/body/segment_fractions.json', import.meta.url), 'utf8')) as {
-    lengths: Record<string, number>;
-    widths: Record<string, number>;
-  }
-);
+const fractions = JSON.parse(
+  readFileSync(new URL('../data/body/segment_fractions.json', import.meta.url), 'utf8'),
+) as {
+  lengths: Record<string, number>;
+  widths: Record<string, number>;
+};
 
 const hare = samples.find(({ id }) => id === 'hare');
 
@@ -53,7 +53,13 @@ describe.each([30, 96, 175.04, 260])('the upright hare at a stature of %d cm', (
   });
 
   it('is as wide at shoulders and hips as tabled', () => {
-    expect(distance('arm.left.shoulder', 'arm.right.shoulder') / stature).toBeCloseTo(2 * (fractions.widths['half_shoulder'] as number), 9);
-    expect(distance('leg.left.hip', 'leg.right.hip') / stature).toBeCloseTo(fractions.widths['hips'] as number, 9);
+    expect(distance('arm.left.shoulder', 'arm.right.shoulder') / stature).toBeCloseTo(
+      2 * (fractions.widths.half_shoulder as number),
+      9,
+    );
+    expect(distance('leg.left.hip', 'leg.right.hip') / stature).toBeCloseTo(
+      fractions.widths.hips as number,
+      9,
+    );
   });
 });

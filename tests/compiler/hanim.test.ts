@@ -44,13 +44,16 @@ describe('H-Anim (ISO/IEC 19774) level of articulation one', () => {
     expect(joints).toHaveLength(18);
   });
 
-  it.each(levelOne.map((joint) => [joint.name, joint] as const))('has %s where and under what the standard says', (name, joint) => {
-    const index = rig?.nodes.findIndex((node) => node.name === name) ?? -1;
-    const node = rig?.nodes[index];
-    const parent = rig?.nodes.find((candidate) => candidate.name === node?.parent);
-    expect(parent?.kind === 'joint' ? parent.name : null).toBe(parentAtLevelOne(joint));
-    for (let axis = 0; axis < 3; axis += 1) {
-      expect(poser?.world[index * 16 + 12 + axis]).toBeCloseTo(joint.center[axis] as number, 6);
-    }
-  });
+  it.each(levelOne.map((joint) => [joint.name, joint] as const))(
+    'has %s where and under what the standard says',
+    (name, joint) => {
+      const index = rig?.nodes.findIndex((node) => node.name === name) ?? -1;
+      const node = rig?.nodes[index];
+      const parent = rig?.nodes.find((candidate) => candidate.name === node?.parent);
+      expect(parent?.kind === 'joint' ? parent.name : null).toBe(parentAtLevelOne(joint));
+      for (let axis = 0; axis < 3; axis += 1) {
+        expect(poser?.world[index * 16 + 12 + axis]).toBeCloseTo(joint.center[axis] as number, 6);
+      }
+    },
+  );
 });

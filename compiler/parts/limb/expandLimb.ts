@@ -60,7 +60,7 @@ export const expandLimb: ExpandPart<'limb'> = ({ id, side }, part) => {
         channels: { scale: { locked: true } },
         attributes: {
           reach: {
-            default: part.blend ?? 1,
+            default: part.reach ?? 1,
             min: 0,
             max: 1,
             note: '0 turns joint by joint, 1 follows this control',

@@ -1415,10 +1415,10 @@ export const recipeSchema = {
             ]
           ]
         },
-        "blend": {
+        "reach": {
           "$ref": "#/$defs/NumberOrExpression",
           "default": 1,
-          "description": "Rest value of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.",
+          "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.",
           "examples": [
             1
           ]

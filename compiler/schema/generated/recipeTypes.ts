@@ -302,7 +302,7 @@ export interface LimbPart {
     guide_line?: boolean;
   };
   bend?: Point;
-  blend?: NumberOrExpression;
+  reach?: NumberOrExpression;
   role?: Word;
   mirror?: MirrorRule;
   rotation_order?: RotationOrderOption;

@@ -1,0 +1,32 @@
+import type { Vec3 } from '../rig/Rig';
+import type { Recipe } from '../schema/generated/recipeTypes';
+
+/**
+ * A value after expressions. Numbers that could be expressions are numbers, points three numbers; names stay names.
+ * `blend` keeps its text, because that names an attribute and is no expression.
+ */
+type Evaluated<T> = [number | string] extends [T]
+  ? number
+  : T extends readonly [unknown, unknown, unknown]
+    ? Vec3
+    : T extends readonly (infer Item)[]
+      ? readonly Evaluated<Item>[]
+      : T extends object
+        ? { readonly [K in keyof T]: EvaluatedField<K, T[K]> }
+        : T;
+
+type EvaluatedField<K, V> = K extends 'blend' ? V : K extends 'toward' | 'bend' ? Vec3 : Evaluated<V>;
+
+/** A landmark with its points as numbers. */
+export interface EvaluatedLandmark {
+  readonly at: Vec3;
+  readonly side?: 'left' | 'centre';
+  readonly right?: Vec3;
+}
+
+/** A recipe in which every expression has been replaced by its value. */
+export type EvaluatedRecipe = Omit<Evaluated<Recipe>, 'params' | 'landmarks' | 'notes'> & {
+  readonly params?: Recipe['params'];
+  readonly landmarks?: Readonly<Record<string, EvaluatedLandmark>>;
+  readonly notes?: Recipe['notes'];
+};

@@ -1,0 +1,81 @@
+import {
+  type Document,
+  isAlias,
+  isMap,
+  isNode,
+  isScalar,
+  isSeq,
+  type Node,
+  type Pair,
+  type YAMLMap,
+} from 'yaml';
+import type { LineIndex } from '../source/LineIndex';
+import type { SourceText, Span } from '../source/SourceText';
+import { findLookAlike } from './lookAlikes';
+import type { JsonValue, Path, SourceDocument } from './types';
+
+/** The text of a map key as every stage knows it: look-alike letters read as the Latin ones they imitate. */
+export function keyText(key: unknown): string | null {
+  if (!isScalar(key)) return null;
+  const { value } = key;
+  if (typeof value !== 'string') return null;
+  return findLookAlike(value)?.twin ?? value;
+}
+
+/** The first pair with a key; later twins are findings and are not read. */
+function findPair(map: YAMLMap, key: string): Pair | undefined {
+  return map.items.find((pair) => keyText(pair.key) === key);
+}
+
+/** A parsed YAML text. Positions are looked up in its tree on demand, since most values never need one. */
+export class YamlSource implements SourceDocument {
+  constructor(
+    readonly source: SourceText,
+    readonly value: JsonValue | undefined,
+    private readonly document: Document | null,
+    private readonly anchors: ReadonlyMap<string, Node>,
+    private readonly lines: LineIndex,
+  ) {}
+
+  #follow(node: unknown): Node | null {
+    if (isAlias(node)) return this.anchors.get(node.source) ?? null;
+    return isNode(node) ? node : null;
+  }
+
+  /** The pair or node at a path, as far as it was written, and whether the whole path was. */
+  #find(path: Path): { readonly node: Node | null; readonly pair: Pair | null; readonly whole: boolean } {
+    let node: Node | null = this.document?.contents ?? null;
+    let pair: Pair | null = null;
+    for (const step of path) {
+      const here: Node | null = this.#follow(node);
+      if (isMap(here)) {
+        const next = findPair(here, String(step));
+        if (!next) return { node, pair, whole: false };
+        pair = next;
+        node = isNode(next.value) ? next.value : null;
+      } else if (isSeq(here) && typeof step === 'number' && isNode(here.items[step])) {
+        pair = null;
+        node = here.items[step] as Node;
+      } else {
+        return { node, pair, whole: false };
+      }
+    }
+    return { node, pair, whole: true };
+  }
+
+  has(path: Path): boolean {
+    return this.#find(path).whole;
+  }
+
+  spanAt(path: Path, part: 'value' | 'key' = 'value'): Span {
+    const { node, pair, whole } = this.#find(path);
+    // What was not written is shown at the key of the nearest entry around it: its whole value would say nothing.
+    const wantsKey = part === 'key' || !whole;
+    const key = pair && isNode(pair.key) ? pair.key : null;
+    const range = (wantsKey ? (key ?? node) : (node ?? key))?.range;
+    if (!range) return this.lines.span(0, 0);
+    const [start, end] = range;
+    if (!whole && !key) return this.lines.span(start, Math.min(end, start + 1));
+    return this.lines.span(start, end);
+  }
+}

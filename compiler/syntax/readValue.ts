@@ -1,0 +1,217 @@
+import {
+  type Document,
+  isAlias,
+  isMap,
+  isScalar,
+  isSeq,
+  type Node,
+  type Pair,
+  type Scalar,
+  type YAMLMap,
+} from 'yaml';
+import type { FindingList } from '../findings/FindingList';
+import type { LineIndex } from '../source/LineIndex';
+import type { Span } from '../source/SourceText';
+import { syntaxFindings } from './findings';
+import { LIMITS } from './limits';
+import { codeOf, findLookAlike } from './lookAlikes';
+import type { JsonValue } from './types';
+import { keyText } from './YamlSource';
+
+const CORE_TAG = /^(tag:yaml\.org,2002:|!!)(str|int|float|bool|null|map|seq)$/;
+const RESERVED_KEYS: ReadonlySet<string> = new Set(['__proto__', 'constructor', 'prototype']);
+// Controls, format characters (zero-width, bidirectional, soft hyphen) and line separators: all of them can hide what
+// a reader believes to see. Tab and line breaks are ordinary.
+const HIDDEN = /(?![\t\n\r])[\p{Cc}\p{Cf}\p{Zl}\p{Zp}]/u;
+const WHOLE_NUMBER = /^[-+]?[0-9]+$/;
+/** Keys whose values are words for people, where any alphabet is welcome. */
+const PROSE_KEYS: ReadonlySet<string> = new Set(['title', 'note', 'notes', 'unit']);
+
+interface Anchored {
+  readonly value: JsonValue | undefined;
+  readonly nodes: number;
+}
+
+/**
+ * Turns a composed document into plain values, reporting what plain values cannot hold. Maps become objects without
+ * surprises (no key can reach a prototype); an alias gives the very value of its anchor, within a bound on how far
+ * the document would grow.
+ */
+export class ValueReader {
+  /** Nodes by anchor, for looking up positions later. */
+  readonly anchors = new Map<string, Node>();
+  readonly #finished = new Map<string, Anchored>();
+  readonly #open = new Set<string>();
+  #expanded = 0;
+  #refusedGrowth = false;
+
+  constructor(
+    private readonly document: Document,
+    private readonly lines: LineIndex,
+    private readonly findings: FindingList,
+  ) {}
+
+  read(): JsonValue | undefined {
+    const { contents } = this.document;
+    return contents === null ? undefined : this.#readNode(contents, false);
+  }
+
+  #span(node: Node): Span {
+    const range = node.range ?? [0, 0, 0];
+    return this.lines.span(range[0], range[1]);
+  }
+
+  #readNode(node: unknown, isProse: boolean): JsonValue | undefined {
+    this.#expanded += 1;
+    if (isAlias(node)) return this.#readAlias(node.source, this.#span(node));
+    if (!isScalar(node) && !isMap(node) && !isSeq(node)) return null;
+    if (node.tag !== undefined && !CORE_TAG.test(node.tag)) {
+      this.findings.report(syntaxFindings, 'tag-refused', this.#span(node), { tag: node.tag });
+    }
+    const { anchor } = node;
+    if (anchor === undefined) return this.#readPlain(node, isProse);
+    const before = this.#expanded;
+    this.anchors.set(anchor, node);
+    this.#open.add(anchor);
+    const value = this.#readPlain(node, isProse);
+    this.#open.delete(anchor);
+    this.#finished.set(anchor, { value, nodes: this.#expanded - before });
+    return value;
+  }
+
+  #readAlias(name: string, span: Span): JsonValue | undefined {
+    if (this.#open.has(name)) {
+      this.findings.report(syntaxFindings, 'alias-ring', span, { name });
+      return null;
+    }
+    const anchored = this.#finished.get(name);
+    if (!anchored) {
+      this.findings.report(syntaxFindings, 'alias-unknown', span, { name });
+      return null;
+    }
+    this.#expanded += anchored.nodes;
+    if (this.#expanded > LIMITS.expandedNodes) {
+      if (!this.#refusedGrowth) {
+        this.findings.report(syntaxFindings, 'aliases-too-large', span, { limit: LIMITS.expandedNodes });
+      }
+      this.#refusedGrowth = true;
+      return null;
+    }
+    return anchored.value;
+  }
+
+  #readPlain(node: Node, isProse: boolean): JsonValue | undefined {
+    if (isMap(node)) return this.#readMap(node, isProse);
+    if (isSeq(node)) return node.items.map((item) => this.#readNode(item, isProse) ?? null);
+    return isScalar(node) ? this.#readScalar(node, isProse) : null;
+  }
+
+  #readMap(map: YAMLMap, isProse: boolean): JsonValue {
+    const result: { [key: string]: JsonValue } = {};
+    const firsts = new Map<string, Pair>();
+    for (const pair of map.items) {
+      const key = this.#readKey(pair.key);
+      if (key === null) {
+        this.#readNode(pair.value, true);
+        continue;
+      }
+      const first = firsts.get(key);
+      if (first) {
+        this.findings.report(
+          syntaxFindings,
+          'duplicate-key',
+          this.#span(pair.key as Node),
+          { key },
+          { related: [{ span: this.#span(first.key as Node), label: 'written here first' }] },
+        );
+        continue;
+      }
+      firsts.set(key, pair);
+      result[key] = this.#readNode(pair.value, isProse || PROSE_KEYS.has(key)) ?? null;
+    }
+    return result;
+  }
+
+  /** A key that may be used, or null with a finding. */
+  #readKey(key: unknown): string | null {
+    const node = isScalar(key) || isAlias(key) || isMap(key) || isSeq(key) ? key : null;
+    const span = node ? this.#span(node) : this.lines.span(0, 0);
+    if (!isScalar(key) || typeof key.value !== 'string') {
+      this.findings.report(syntaxFindings, 'key-not-text', span, {});
+      return null;
+    }
+    const { value } = key;
+    if (value === '<<') {
+      this.findings.report(syntaxFindings, 'merge-key', span, {});
+      return null;
+    }
+    if (RESERVED_KEYS.has(value)) {
+      this.findings.report(syntaxFindings, 'key-reserved', span, { key: value });
+      return null;
+    }
+    if (!this.#checkText(value, key, false)) return null;
+    return keyText(key);
+  }
+
+  /** Reports hidden characters and look-alike letters; false when the text must not be used. */
+  #checkText(text: string, node: Node, isProse: boolean): boolean {
+    const hidden = HIDDEN.exec(text);
+    if (hidden) {
+      this.findings.report(syntaxFindings, 'hidden-character', this.#span(node), {
+        code: `U+${codeOf(hidden[0])}`,
+      });
+      return false;
+    }
+    const lookAlike = isProse ? null : findLookAlike(text);
+    if (lookAlike) {
+      const span = this.#span(node);
+      this.findings.report(
+        syntaxFindings,
+        'look-alike-name',
+        span,
+        { name: text, ...lookAlike },
+        {
+          fix: {
+            title: `Write "${lookAlike.twin}" in Latin letters`,
+            safe: true,
+            edits: [{ span, newText: lookAlike.twin }],
+          },
+        },
+      );
+    }
+    return true;
+  }
+
+  #readScalar(node: Scalar, isProse: boolean): JsonValue | undefined {
+    const { value } = node;
+    switch (typeof value) {
+      case 'string':
+        if (!this.#checkText(value, node, isProse)) return undefined;
+        return isProse ? value : (findLookAlike(value)?.twin ?? value);
+      case 'number':
+        return this.#readNumber(node, value);
+      case 'boolean':
+        return value;
+      default:
+        return null;
+    }
+  }
+
+  #readNumber(node: Scalar, value: number): JsonValue | undefined {
+    const text = (node.source ?? String(value)).slice(0, 40);
+    if (!Number.isFinite(value)) {
+      this.findings.report(syntaxFindings, 'number-not-finite', this.#span(node), { text });
+      return undefined;
+    }
+    if (!Number.isSafeInteger(value) && WHOLE_NUMBER.test(node.source ?? '')) {
+      this.findings.report(syntaxFindings, 'number-not-exact', this.#span(node), { text });
+      return undefined;
+    }
+    if (Math.abs(value) > LIMITS.magnitude) {
+      const parameters = { text, limit: LIMITS.magnitude };
+      this.findings.report(syntaxFindings, 'number-too-large', this.#span(node), parameters);
+      return undefined;
+    }
+    return value + 0;
+  }
+}
