@@ -67,7 +67,7 @@ export function compile(request: CompileRequest): Compilation {
   if (!shape.value) return stop();
   const found = readHouse(shape.value.house, merged, request.houses ?? {}, findings);
   if (!found) return stop();
-  const { house, reference } = found;
+  const { house, reference, hash: houseHash } = found;
 
   const shaped = { document: merged, findings, poisoned: shape.poisoned };
   const { recipe, poisoned } = evaluateRecipe(shape.value, request.character?.params ?? {}, shaped);
@@ -90,7 +90,7 @@ export function compile(request: CompileRequest): Compilation {
     forward: expanded.scene.forwardAxis,
     unit: expanded.scene.unit,
     recipeHash,
-    houseHash: sha256Hex(canonicalJson(house.rules)),
+    houseHash,
     compiler: COMPILER_VERSION,
   };
   const rig = assembleRig(scene, resolved, solved);
