@@ -61,7 +61,8 @@ export function compile(request: CompileRequest): Compilation {
     const finished = finishFindings(findings.all);
     return { findings: finished, character, recipeHash: null, rig: null, script: null };
   };
-  if (merged.value === undefined) return stop();
+  // Beyond broken YAML every finding would be about a structure nobody wrote.
+  if (merged.value === undefined || merged.isBroken) return stop();
 
   const shape = checkRecipeShape(merged, findings);
   if (!shape.value) return stop();
@@ -69,9 +70,8 @@ export function compile(request: CompileRequest): Compilation {
   if (!found) return stop();
   const { house, reference, hash: houseHash } = found;
 
-  const shaped = { document: merged, findings, poisoned: shape.poisoned };
-  const { recipe, poisoned } = evaluateRecipe(shape.value, request.character?.params ?? {}, shaped);
-  const context = { ...shaped, poisoned, house };
+  const context = { document: merged, findings, poisoned: shape.poisoned, house };
+  const recipe = evaluateRecipe(shape.value, request.character?.params ?? {}, context);
   const expanded = expandRecipe(recipe, context);
   const resolved = resolveRecipe(recipe, expanded, character, context);
   const solved = solveRecipe(resolved, context);

@@ -6,8 +6,8 @@ export interface StageContext {
   readonly document: MergedDocument;
   readonly findings: FindingList;
   /**
-   * Entries (`chains/arm`) that were refused earlier. They are left out, and what refers to them stays silent:
-   * one root cause, one finding.
+   * Entries (`chains/arm`) that were refused. Stages add to them and leave them out; what refers to them stays
+   * silent: one root cause, one finding.
    */
-  readonly poisoned: ReadonlySet<string>;
+  readonly poisoned: Set<string>;
 }

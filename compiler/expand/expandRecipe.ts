@@ -9,7 +9,9 @@ import { specifyControl } from './specifyControl';
 import { specifyConstraint, specifyGuideLine, specifySolver } from './specifyLinks';
 import type { ExpandedRecipe, LandmarkPoints, SceneFrame } from './types';
 
+/** Fills in the defaults of every entry; an entry that is not complete is poisoned. */
 function specifyAll<E, S>(
+  collection: string,
   entries: ReadonlyMap<string, Sided<E>>,
   specify: (sided: Sided<E>, context: StageContext) => S | null,
   context: StageContext,
@@ -17,7 +19,8 @@ function specifyAll<E, S>(
   const specified: S[] = [];
   for (const sided of entries.values()) {
     const specification = specify(sided, context);
-    if (specification !== null) specified.push(specification);
+    if (specification === null) context.poisoned.add(`${collection}/${sided.id}`);
+    else specified.push(specification);
   }
   return specified;
 }
@@ -43,11 +46,11 @@ export function expandRecipe(recipe: EvaluatedRecipe, context: StageContext): Ex
   return {
     scene,
     landmarks: readLandmarks(recipe, scene, context.poisoned),
-    chains: specifyAll(primitives.chains, specifyChain, context),
-    controls: specifyAll(primitives.controls, specifyControl, context),
-    solvers: specifyAll(primitives.solvers, specifySolver, context),
-    constraints: specifyAll(primitives.constraints, specifyConstraint, context),
-    guideLines: specifyAll(primitives.guide_lines, specifyGuideLine, context),
+    chains: specifyAll('chains', primitives.chains, specifyChain, context),
+    controls: specifyAll('controls', primitives.controls, specifyControl, context),
+    solvers: specifyAll('solvers', primitives.solvers, specifySolver, context),
+    constraints: specifyAll('constraints', primitives.constraints, specifyConstraint, context),
+    guideLines: specifyAll('guide_lines', primitives.guide_lines, specifyGuideLine, context),
     notes: Object.entries(recipe.notes ?? {}).map(([key, value]) => ({ key, value })),
   };
 }

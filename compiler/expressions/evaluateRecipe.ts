@@ -16,14 +16,7 @@ const POINT_KEYS: ReadonlySet<string> = new Set(['at', 'right', 'toward', 'bend'
 /** Keys with words for people, which are never expressions. */
 const PROSE_KEYS: ReadonlySet<string> = new Set(['note', 'title']);
 
-/** A recipe after expressions, with the entries that had to be left out because one of theirs failed. */
-export interface Evaluation {
-  readonly recipe: EvaluatedRecipe;
-  readonly poisoned: ReadonlySet<string>;
-}
-
 class RecipeEvaluator {
-  readonly poisoned: Set<string>;
   readonly #landmarks = new Map<string, EvaluatedLandmark | null>();
   readonly #open: string[] = [];
   readonly #evaluator: Evaluator;
@@ -35,12 +28,9 @@ class RecipeEvaluator {
     params: Readonly<Record<string, number>>,
     left: Vec3,
   ) {
-    this.poisoned = new Set(context.poisoned);
     this.#left = left;
     const names = Object.keys(source.landmarks ?? {});
-    this.#evaluator = new Evaluator({ ...context, poisoned: this.poisoned }, params, names, (name) =>
-      this.#landmarkValue(name),
-    );
+    this.#evaluator = new Evaluator(context, params, names, (name) => this.#landmarkValue(name));
   }
 
   evaluate(): EvaluatedRecipe {
@@ -65,7 +55,7 @@ class RecipeEvaluator {
     for (const [id, entry] of Object.entries(entries)) {
       const place = `${collection}/${id}`;
       const value = this.#value(entry, [collection, id], id);
-      if (value === null) this.poisoned.add(place);
+      if (value === null) this.context.poisoned.add(place);
       else evaluated[id] = value;
     }
     return evaluated;
@@ -121,7 +111,7 @@ class RecipeEvaluator {
       at === null || right === null
         ? null
         : { at, ...(source.side ? { side: source.side } : {}), ...(right ? { right } : {}) };
-    if (!landmark) this.poisoned.add(`landmarks/${name}`);
+    if (!landmark) this.context.poisoned.add(`landmarks/${name}`);
     this.#landmarks.set(name, landmark);
     return landmark;
   }
@@ -149,15 +139,14 @@ class RecipeEvaluator {
 
 /**
  * Works out every expression of a recipe for the given parameter values. An entry with an expression that fails is
- * left out and listed as poisoned; its finding stands at the expression.
+ * left out and added to the poisoned ones; its finding stands at the expression.
  */
 export function evaluateRecipe(
   recipe: Recipe,
   given: Readonly<Record<string, number>>,
   context: StageContext,
-): Evaluation {
+): EvaluatedRecipe {
   const params = readParameters(recipe, given, context);
   const { left } = readSceneFrame(recipe.scene, context);
-  const evaluator = new RecipeEvaluator(recipe, context, params, left);
-  return { recipe: evaluator.evaluate(), poisoned: evaluator.poisoned };
+  return new RecipeEvaluator(recipe, context, params, left).evaluate();
 }

@@ -23,8 +23,11 @@ export const REST_TOLERANCE = 1e-9;
  */
 export const REACH_TOLERANCE = 1e-12;
 
-/** Relative to a chain's length: a middle joint nearer than this to the line start–end leaves the chain straight. */
-export const BEND_TOLERANCE = 2e-10;
+/**
+ * Relative to a chain's length: a middle joint nearer than this to the line start–end leaves the chain straight, so
+ * that the pole alone says which way it bends. Rounded rest positions put a straight chain's middle off by less.
+ */
+export const BEND_TOLERANCE = 1e-6;
 
 /**
  * Relative to its distance: a pole nearer than this to the line start–goal names no plane. Rounding of 1e-16 would

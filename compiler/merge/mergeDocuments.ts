@@ -33,5 +33,12 @@ export function mergeDocuments(layers: readonly SourceDocument[]): MergedDocumen
       .slice(1)
       .map((layer) => ({ span: layer.spanAt(path), label: `set before in ${layer.source.name}` }));
 
-  return { value, layers, spanAt, earlierPlaces };
+  return {
+    value,
+    layers,
+    isBroken: layers.some((layer) => layer.isBroken),
+    refusedEntries: new Set(layers.flatMap((layer) => [...layer.refusedEntries])),
+    spanAt,
+    earlierPlaces,
+  };
 }

@@ -10,6 +10,12 @@ export interface Reach {
   readonly height: number;
 }
 
+/** Reach at rest, in units of both lengths together. */
+export interface RestReach extends Reach {
+  /** Angle in radians, about start → end, from the plane the chain bends in to where its middle joint really stands. */
+  readonly swivel: number;
+}
+
 export interface TwoBoneInput {
   readonly start: Vec3;
   readonly goal: Vec3;
@@ -17,8 +23,8 @@ export interface TwoBoneInput {
   /** Lengths of both bones; greater than zero. */
   readonly upper: number;
   readonly lower: number;
-  /** Reach at rest, in units of both lengths together; null when the bones no longer have their rest proportions. */
-  readonly restReach: Reach | null;
+  /** Null when the bones no longer have their rest proportions. */
+  readonly restReach: RestReach | null;
   /** Angle in radians about start → goal by which the middle joint stands off the pole's plane. */
   readonly swivel: number;
   /** Unit direction start → end to use when goal and start fall together. */
@@ -52,18 +58,19 @@ function bendDirection(input: TwoBoneInput, along: Vec3): Vec3 {
   return normalise(cross(cross(input.restDirection, input.restBend), along));
 }
 
+/** The rest reach at its present size, when it is what is asked for; so rest comes out exactly, bent or straight. */
+function restReachFor(asked: number, { upper, lower, restReach }: TwoBoneInput): RestReach | null {
+  const most = upper + lower;
+  if (restReach === null || Math.abs(asked - restReach.distance * most) > most * REACH_TOLERANCE) return null;
+  const { distance: d, foot, height, swivel } = restReach;
+  return { distance: d * most, foot: foot * most, height: height * most, swivel };
+}
+
 /** The triangle of both bones for a distance that is asked for, as near as the bones allow. */
-function reachFor(asked: number, { upper, lower, restReach }: TwoBoneInput): Reach {
+function reachFor(asked: number, { upper, lower }: TwoBoneInput): Reach {
   const most = upper + lower;
   const least = Math.abs(upper - lower);
   const tolerance = most * REACH_TOLERANCE;
-  if (restReach !== null && Math.abs(asked - restReach.distance * most) <= tolerance) {
-    return {
-      distance: restReach.distance * most,
-      foot: restReach.foot * most,
-      height: restReach.height * most,
-    };
-  }
   const d = asked >= most - tolerance ? most : asked <= least + tolerance ? least : asked;
   const foot = d > 0 ? ((upper - lower) * (most / d) + d) / 2 : 0;
   const a = Math.min(upper, Math.max(-upper, foot));
@@ -82,9 +89,12 @@ export function solveTwoBone(input: TwoBoneInput): TwoBoneSolution {
   const isApart = asked > (input.upper + input.lower) * REACH_TOLERANCE;
   const along = isApart ? normalise(sub(goal, start)) : input.restDirection;
   const bend = bendDirection(input, along);
-  const reach = reachFor(asked, input);
+  const rest = restReachFor(asked, input);
+  const reach = rest ?? reachFor(asked, input);
+  const away =
+    rest === null || rest.swivel === 0 ? bend : rotate(quatFromAxisAngle(along, rest.swivel), bend);
   return {
-    mid: addScaled(addScaled(start, along, reach.foot), bend, reach.height),
+    mid: addScaled(addScaled(start, along, reach.foot), away, reach.height),
     end: addScaled(start, along, reach.distance),
     normal: cross(along, bend),
   };

@@ -16,7 +16,7 @@ import {
   sub,
 } from '../math/vec3';
 import type { Quat, Vec3 } from '../rig/Rig';
-import { poleDirection, type Reach, solveTwoBone } from './twoBone';
+import { poleDirection, type RestReach, solveTwoBone } from './twoBone';
 import { readMatrix, readPosition, turnAxes, writePosition } from './worldMatrices';
 
 /** Places in the flat arrays of the nodes a two-bone solver reads and turns. */
@@ -35,8 +35,7 @@ export interface TwoBoneNodes {
 /** What a two-bone solver takes from rest once. */
 interface TwoBoneRest {
   readonly goalToEnd: Vec3;
-  /** In units of both bones' length together. */
-  readonly reach: Reach;
+  readonly reach: RestReach;
   /** Length of the upper bone as a share of both. */
   readonly upperShare: number;
   readonly swivel: number;
@@ -76,7 +75,8 @@ function measureRest(nodes: TwoBoneNodes, rest: readonly Mat4[]): TwoBoneRest {
     reach: {
       distance: length(line) / span,
       foot: dot(sub(mid, start), direction) / span,
-      height: isStraight ? 0 : length(bend) / span,
+      height: length(bend) / span,
+      swivel: isStraight ? signedAngle(restBend, bend, direction) : 0,
     },
     upperShare: distance(start, mid) / span,
     swivel: isStraight || towardPole === undefined ? 0 : signedAngle(towardPole, restBend, direction),

@@ -13,7 +13,16 @@ export type RotationOrder = 'xyz' | 'xzy' | 'yxz' | 'yzx' | 'zxy' | 'zyx';
 export type Axis = '+x' | '-x' | '+y' | '-y' | '+z' | '-z';
 export type LengthUnit = 'mm' | 'cm' | 'm';
 export type Channel = 'tx' | 'ty' | 'tz' | 'rx' | 'ry' | 'rz' | 'sx' | 'sy' | 'sz';
-export type ShapeName = 'ring' | 'square' | 'diamond' | 'cross' | 'arrow' | 'ball' | 'box' | 'pin' | 'compass';
+export type ShapeName =
+  | 'ring'
+  | 'square'
+  | 'diamond'
+  | 'cross'
+  | 'arrow'
+  | 'ball'
+  | 'box'
+  | 'pin'
+  | 'compass';
 export type LineStyle = 'dotted' | 'dashed' | 'solid';
 
 /** What the header of a script states about the whole rig. */

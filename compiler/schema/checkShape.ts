@@ -16,7 +16,7 @@ export interface Shape<T> {
   /** The document without what was refused; null when it is not even a map. */
   readonly value: T | null;
   /** Entries that were refused, as `chains/arm`; what refers to them has no finding of its own. */
-  readonly poisoned: ReadonlySet<string>;
+  readonly poisoned: Set<string>;
   readonly isSound: boolean;
 }
 
@@ -97,10 +97,12 @@ function check<T>(
     findings.report(schemaFindings, 'not-a-map', document.spanAt([]), { found: kindOf(whole) });
     return { value: null, poisoned: new Set(), isSound: false };
   }
-  if (validate(whole)) return { value: whole as unknown as T, poisoned: new Set(), isSound: true };
-  const poisoned = new Set<string>();
-  for (const error of rootCauses(validate.errors ?? [])) {
+  const poisoned = new Set(document.refusedEntries);
+  const fits = validate(whole);
+  if (fits && poisoned.size === 0) return { value: whole as unknown as T, poisoned, isSound: true };
+  for (const error of fits ? [] : rootCauses(validate.errors ?? [])) {
     const { path, value } = pathOf(error.instancePath, whole);
+    if (document.refusedEntries.has(path.slice(0, 2).join('/'))) continue;
     const shape: ShapeError = { error, path, value, schema };
     reportShapeError(shape, document, findings);
     const refusedKey =

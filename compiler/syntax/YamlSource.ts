@@ -29,22 +29,38 @@ function findPair(map: YAMLMap, key: string): Pair | undefined {
 
 /** A parsed YAML text. Positions are looked up in its tree on demand, since most values never need one. */
 export class YamlSource implements SourceDocument {
+  readonly value: JsonValue | undefined;
+  readonly isBroken: boolean;
+  readonly refusedEntries: ReadonlySet<string>;
+  readonly #document: Document | null;
+  readonly #anchors: ReadonlyMap<string, Node>;
+
+  /** `read` is null for a text that was refused as a whole. */
   constructor(
     readonly source: SourceText,
-    readonly value: JsonValue | undefined,
-    private readonly document: Document | null,
-    private readonly anchors: ReadonlyMap<string, Node>,
     private readonly lines: LineIndex,
-  ) {}
+    read: {
+      readonly document: Document;
+      readonly value: JsonValue | undefined;
+      readonly anchors: ReadonlyMap<string, Node>;
+      readonly refusedEntries: ReadonlySet<string>;
+    } | null,
+  ) {
+    this.value = read?.value;
+    this.isBroken = read === null || read.document.errors.length > 0;
+    this.refusedEntries = read?.refusedEntries ?? new Set();
+    this.#document = read?.document ?? null;
+    this.#anchors = read?.anchors ?? new Map();
+  }
 
   #follow(node: unknown): Node | null {
-    if (isAlias(node)) return this.anchors.get(node.source) ?? null;
+    if (isAlias(node)) return this.#anchors.get(node.source) ?? null;
     return isNode(node) ? node : null;
   }
 
   /** The pair or node at a path, as far as it was written, and whether the whole path was. */
   #find(path: Path): { readonly node: Node | null; readonly pair: Pair | null; readonly whole: boolean } {
-    let node: Node | null = this.document?.contents ?? null;
+    let node: Node | null = this.#document?.contents ?? null;
     let pair: Pair | null = null;
     for (const step of path) {
       const here: Node | null = this.#follow(node);

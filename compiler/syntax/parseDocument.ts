@@ -53,7 +53,7 @@ function firstDocument(
  */
 export function parseDocument(source: SourceText, findings: FindingList): SourceDocument {
   const lines = new LineIndex(source);
-  const nothing = new YamlSource(source, undefined, null, new Map(), lines);
+  const nothing = new YamlSource(source, lines, null);
   const { text } = source;
   if (text.length > LIMITS.characters) {
     findings.report(syntaxFindings, 'text-too-large', lines.span(0, 0), {
@@ -73,5 +73,6 @@ export function parseDocument(source: SourceText, findings: FindingList): Source
   if ((value === undefined || value === null) && document.errors.length === 0) {
     findings.report(syntaxFindings, 'document-empty', lines.span(0, text.length), {});
   }
-  return new YamlSource(source, value ?? undefined, document, reader.anchors, lines);
+  const { anchors, refusedEntries } = reader;
+  return new YamlSource(source, lines, { document, value: value ?? undefined, anchors, refusedEntries });
 }

@@ -41,7 +41,11 @@ export class ValueReader {
   /** Nodes by anchor, for looking up positions later. */
   readonly anchors = new Map<string, Node>();
   readonly #finished = new Map<string, Anchored>();
+  /** Entries in which something was refused; see `SourceDocument.refusedEntries`. */
+  readonly refusedEntries = new Set<string>();
   readonly #open = new Set<string>();
+  /** Map keys from the top to the value being read. */
+  readonly #path: string[] = [];
   #expanded = 0;
   #refusedGrowth = false;
 
@@ -54,6 +58,11 @@ export class ValueReader {
   read(): JsonValue | undefined {
     const { contents } = this.document;
     return contents === null ? undefined : this.#readNode(contents, false);
+  }
+
+  /** Marks the entry being read as one whose value is not whole. */
+  #refuse(): void {
+    this.refusedEntries.add(this.#path.slice(0, 2).join('/'));
   }
 
   #span(node: Node): Span {
@@ -81,11 +90,13 @@ export class ValueReader {
 
   #readAlias(name: string, span: Span): JsonValue | undefined {
     if (this.#open.has(name)) {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'alias-ring', span, { name });
       return null;
     }
     const anchored = this.#finished.get(name);
     if (!anchored) {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'alias-unknown', span, { name });
       return null;
     }
@@ -95,6 +106,7 @@ export class ValueReader {
         this.findings.report(syntaxFindings, 'aliases-too-large', span, { limit: LIMITS.expandedNodes });
       }
       this.#refusedGrowth = true;
+      this.#refuse();
       return null;
     }
     return anchored.value;
@@ -127,7 +139,9 @@ export class ValueReader {
         continue;
       }
       firsts.set(key, pair);
+      this.#path.push(key);
       result[key] = this.#readNode(pair.value, isProse || PROSE_KEYS.has(key)) ?? null;
+      this.#path.pop();
     }
     return result;
   }
@@ -137,15 +151,18 @@ export class ValueReader {
     const node = isScalar(key) || isAlias(key) || isMap(key) || isSeq(key) ? key : null;
     const span = node ? this.#span(node) : this.lines.span(0, 0);
     if (!isScalar(key) || typeof key.value !== 'string') {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'key-not-text', span, {});
       return null;
     }
     const { value } = key;
     if (value === '<<') {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'merge-key', span, {});
       return null;
     }
     if (RESERVED_KEYS.has(value)) {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'key-reserved', span, { key: value });
       return null;
     }
@@ -157,6 +174,7 @@ export class ValueReader {
   #checkText(text: string, node: Node, isProse: boolean): boolean {
     const hidden = HIDDEN.exec(text);
     if (hidden) {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'hidden-character', this.#span(node), {
         code: `U+${codeOf(hidden[0])}`,
       });
@@ -200,15 +218,18 @@ export class ValueReader {
   #readNumber(node: Scalar, value: number): JsonValue | undefined {
     const text = (node.source ?? String(value)).slice(0, 40);
     if (!Number.isFinite(value)) {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'number-not-finite', this.#span(node), { text });
       return undefined;
     }
     if (!Number.isSafeInteger(value) && WHOLE_NUMBER.test(node.source ?? '')) {
+      this.#refuse();
       this.findings.report(syntaxFindings, 'number-not-exact', this.#span(node), { text });
       return undefined;
     }
     if (Math.abs(value) > LIMITS.magnitude) {
       const parameters = { text, limit: LIMITS.magnitude };
+      this.#refuse();
       this.findings.report(syntaxFindings, 'number-too-large', this.#span(node), parameters);
       return undefined;
     }
