@@ -124,6 +124,8 @@ export class ValueReader {
     for (const pair of map.items) {
       const key = this.#readKey(pair.key);
       if (key === null) {
+        // Nothing of the pair is used, but anchors in it may be meant later on.
+        if (!isScalar(pair.key)) this.#readNode(pair.key, true);
         this.#readNode(pair.value, true);
         continue;
       }
@@ -166,8 +168,11 @@ export class ValueReader {
       this.findings.report(syntaxFindings, 'key-reserved', span, { key: value });
       return null;
     }
-    if (!this.#checkText(value, key, false)) return null;
-    return keyText(key);
+    if (key.anchor !== undefined) {
+      this.anchors.set(key.anchor, key);
+      this.#finished.set(key.anchor, { value, nodes: 1 });
+    }
+    return this.#checkText(value, key, false) ? keyText(key) : null;
   }
 
   /** Reports hidden characters and look-alike letters; false when the text must not be used. */

@@ -71,7 +71,9 @@ describe('spreading joints by arc length', () => {
       [3, 5, 0],
     ];
     expect(spread).toHaveLength(worked.length);
-    worked.forEach((point, index) => expect(distance(point, spread[index] as Vec3)).toBeLessThan(1e-12));
+    for (const [index, point] of worked.entries()) {
+      expect(distance(point, spread[index] as Vec3)).toBeLessThan(1e-12);
+    }
   });
 
   it('passes through the points it is given', () => {
@@ -99,7 +101,9 @@ describe('spreading joints by arc length', () => {
     const fine = 1000;
     const placed = spreadByArcLength(points, count, 'smooth') ?? [];
     const many = spreadByArcLength(points, (count - 1) * fine + 1, 'smooth') ?? [];
-    placed.forEach((point, index) => expect(distance(point, many[index * fine] as Vec3)).toBeLessThan(1e-9));
+    for (const [index, point] of placed.entries()) {
+      expect(distance(point, many[index * fine] as Vec3)).toBeLessThan(1e-9);
+    }
     const chord = (index: number) => distance(many[index] as Vec3, many[index + 1] as Vec3);
     expect(chord(0)).toBeCloseTo(chord(fine * 3 + 11), 8);
     expect(chord(0)).toBeCloseTo(chord(fine * 6 - 1), 8);
@@ -148,9 +152,9 @@ describe('spreading joints by arc length', () => {
           'smooth',
         );
         if (!one || !ten) return;
-        one.forEach(([x, y, z], index) =>
-          expect(distance([x * 8, y * 8, z * 8], ten[index] as Vec3)).toBeLessThan(1e-5),
-        );
+        for (const [index, [x, y, z]] of one.entries()) {
+          expect(distance([x * 8, y * 8, z * 8], ten[index] as Vec3)).toBeLessThan(1e-5);
+        }
       }),
     );
   });
