@@ -3,7 +3,8 @@ import type { Channel, ControlNode, NumberOrAttribute, PoseValues, RigAttribute 
 /** All channels in the order in which their values are stored: translate, rotate, scale. */
 export const CHANNELS: readonly Channel[] = ['tx', 'ty', 'tz', 'rx', 'ry', 'rz', 'sx', 'sy', 'sz'];
 
-function clamp(value: number, min: number | null, max: number | null): number {
+/** The value, or the nearer bound when it lies outside; null is no bound. */
+export function clampValue(value: number, min: number | null, max: number | null): number {
   if (min !== null && value < min) return min;
   return max !== null && value > max ? max : value;
 }
@@ -25,13 +26,13 @@ export function channelValue(control: ControlNode, channel: Channel, pose: PoseV
   if (rule?.locked) return rest;
   const value = givenValue(pose, control.name, channel);
   if (value === undefined) return rest;
-  return rule === undefined ? value : clamp(value, rule.min, rule.max);
+  return rule === undefined ? value : clampValue(value, rule.min, rule.max);
 }
 
 /** Value of an attribute: what the pose gives, within its limits; its default when it gives no finite number. */
 export function attributeValue(control: string, attribute: RigAttribute, pose: PoseValues): number {
   const value = givenValue(pose, control, attribute.name);
-  return value === undefined ? attribute.default : clamp(value, attribute.min, attribute.max);
+  return value === undefined ? attribute.default : clampValue(value, attribute.min, attribute.max);
 }
 
 /** A number, or an attribute's value in a pose, prepared by the names it needs. */

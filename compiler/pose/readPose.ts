@@ -2,7 +2,7 @@ import { closestNames } from '../findings/closestNames';
 import type { FindingList } from '../findings/FindingList';
 import type { ChannelRule, ControlNode, PoseValues, Rig, RigAttribute } from '../rig/Rig';
 import type { JsonValue, Path, SourceDocument } from '../syntax/types';
-import { CHANNELS } from './channelValues';
+import { CHANNELS, clampValue } from './channelValues';
 import { poseFindings } from './findings';
 
 type JsonMap = Readonly<Record<string, JsonValue>>;
@@ -49,7 +49,7 @@ function readControl(
     } else if (typeof value !== 'number' || !Number.isFinite(value)) {
       findings.report(poseFindings, 'pose-value-wrong', document.spanAt(path), named);
     } else {
-      const limit = Math.min(Math.max(value, rule.min ?? value), rule.max ?? value);
+      const limit = clampValue(value, rule.min, rule.max);
       if (rule.locked)
         findings.report(poseFindings, 'pose-channel-locked', document.spanAt(path, 'key'), named);
       else if (limit !== value) {

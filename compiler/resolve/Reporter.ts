@@ -20,11 +20,21 @@ export function spanInRecipeOrHouse(
   return (inRecipe ? context.document : context.house.document).spanAt(path, part);
 }
 
+/** When one of these was refused as a whole, nothing can be said about any id. */
+const COLLECTIONS_WITH_IDS: ReadonlySet<string> = new Set([
+  'landmarks',
+  'parts',
+  'chains',
+  'controls',
+  'roles',
+  'containers',
+]);
+
 /** Whether an id belongs to an entry that was refused earlier, so that a missing reference is no news. */
 export function isPoisonedReference(context: StageContext, id: string): boolean {
   for (const place of context.poisoned) {
-    // A whole collection was refused: nothing can be said about any id.
-    if (!place.includes('/')) return true;
+    if (COLLECTIONS_WITH_IDS.has(place)) return true;
+    if (!place.includes('/')) continue;
     const entry = place.slice(place.indexOf('/') + 1);
     if (id === entry || id.startsWith(`${entry}.`)) return true;
   }

@@ -1,4 +1,7 @@
+import type { Path } from '../../syntax/types';
 import type { Rule } from '../Rule';
+
+const GROUPS: Readonly<Record<string, string>> = { t: 'move', r: 'turn', s: 'scale' };
 
 /** A limit whose smallest value is above its largest leaves no value at all. */
 export const limitInverted: Rule = {
@@ -9,21 +12,21 @@ export const limitInverted: Rule = {
   message: '"{name}" of "{id}" has min {min} above max {max}.',
   help: 'Swap the two numbers, or correct one of them.',
   create(context) {
+    const { document } = context.stage;
+    /** The key that the limit was written under: the channel's own or its group's. */
+    const writtenKey = (path: Path, channel: string): string | undefined =>
+      [channel, GROUPS[channel[0] ?? '']].find(
+        (key) => key !== undefined && document.layers.some((layer) => layer.has([...path, 'channels', key])),
+      );
     return {
       control({ id, channels, attributes, path }) {
-        for (const [name, { min, max }] of Object.entries(channels)) {
+        const reported = new Set<string>();
+        for (const [channel, { min, max }] of Object.entries(channels)) {
           if (min === null || max === null || min <= max) continue;
-          const group = { t: 'move', r: 'turn', s: 'scale' }[name[0] ?? ''] ?? name;
-          const document = context.stage.document;
-          const written = [name, group].find((key) =>
-            document.layers.some((layer) => layer.has([...path, 'channels', key])),
-          );
-          context.report([...path, 'channels', ...(written === undefined ? [] : [written])], {
-            id,
-            name,
-            min,
-            max,
-          });
+          const name = writtenKey(path, channel) ?? channel;
+          if (reported.has(name)) continue;
+          reported.add(name);
+          context.report([...path, 'channels', name], { id, name, min, max });
         }
         for (const { name, min, max } of attributes) {
           if (min !== null && max !== null && min > max) {
