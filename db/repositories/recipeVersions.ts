@@ -97,7 +97,9 @@ export function recipeVersionsRepository(database: Knex) {
     async findTextByName(showId: string, name: string, number: number): Promise<string | undefined> {
       const row = await database('recipe_versions')
         .join('recipes', 'recipes.id', 'recipe_versions.recipe_id')
-        .where({ 'recipes.show_id': showId, 'recipes.name': name, 'recipe_versions.number': number })
+        .where('recipes.show_id', showId)
+        .where('recipes.name', name)
+        .where('recipe_versions.number', number)
         .first('recipe_versions.text');
       return row?.text;
     },
