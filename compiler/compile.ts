@@ -17,7 +17,7 @@ import { resolveRecipe } from './resolve/resolveRecipe';
 import type { Rig } from './rig/Rig';
 import { checkRecipeShape } from './schema/checkShape';
 import { solveRecipe } from './solve/solveRecipe';
-import type { SourceText } from './source/SourceText';
+import type { SourceText, Span } from './source/SourceText';
 import { COMPILER_VERSION } from './version';
 
 /** Everything one compile depends on; the same request always gives the same compilation. */
@@ -45,6 +45,14 @@ export interface Compilation {
   readonly recipeHash: string | null;
   readonly rig: Rig | null;
   readonly script: string | null;
+  /** Where a node of the rig was written, by its id; null for what no document wrote. */
+  placeOf(nodeId: string): NodePlace | null;
+}
+
+/** The entry that a node comes from: its key, and everything it says. */
+export interface NodePlace {
+  readonly key: Span;
+  readonly value: Span;
 }
 
 /**
@@ -59,7 +67,7 @@ export function compile(request: CompileRequest): Compilation {
   const character = characterNameOf(request.character?.name, merged, findings);
   const stop = (): Compilation => {
     const finished = finishFindings(findings.all);
-    return { findings: finished, character, recipeHash: null, rig: null, script: null };
+    return { findings: finished, character, recipeHash: null, rig: null, script: null, placeOf: () => null };
   };
   // Beyond broken YAML every finding would be about a structure nobody wrote.
   if (merged.value === undefined || merged.isBroken) return stop();
@@ -97,5 +105,11 @@ export function compile(request: CompileRequest): Compilation {
   checkEvaluationRing(rig, resolved, context);
   if (findings.hasErrors) return { ...stop(), recipeHash };
   const script = emitScript(planSteps(rig));
-  return { findings: finishFindings(findings.all), character, recipeHash, rig, script };
+  const placeOf = (nodeId: string): NodePlace | null => {
+    const path = resolved.nodeById.get(nodeId)?.path;
+    return path && path.length > 0 && merged.layers.some((layer) => layer.has(path))
+      ? { key: merged.spanAt(path, 'key'), value: merged.spanAt(path) }
+      : null;
+  };
+  return { findings: finishFindings(findings.all), character, recipeHash, rig, script, placeOf };
 }

@@ -1,7 +1,7 @@
 /** The compiler's only door: everything outside `compiler/` imports from here. */
 export { type BuildFile, buildFiles, utf8Length } from './build/buildFiles';
 export { findingsToSarif } from './build/findingsToSarif';
-export { type Compilation, type CompileRequest, compile } from './compile';
+export { type Compilation, type CompileRequest, compile, type NodePlace } from './compile';
 export { type BaseReference, findBaseReference } from './documents/findBaseReference';
 export { DEFAULT_HOUSE } from './documents/readHouse';
 export { type Explanation, explainFinding } from './findings/explainFinding';
