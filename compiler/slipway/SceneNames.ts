@@ -70,7 +70,7 @@ export class SceneNames {
     if (madeOn !== undefined && madeOn > line) {
       const parameters = { name, line: madeOn };
       this.#findings.report(slipwayFindings, 'script-reference-forward', span, parameters);
-    } else if (this.#steps.has(name) || (madeOn === undefined && this.#everyLineRead)) {
+    } else if (this.#steps.has(name) || madeOn === line || (madeOn === undefined && this.#everyLineRead)) {
       this.#findings.report(slipwayFindings, 'script-reference-unknown', span, { name });
     }
     // What is left was made on a line that has a finding of its own.

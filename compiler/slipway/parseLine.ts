@@ -75,7 +75,7 @@ class LineReader {
     const items: Value[] = [];
     this.#literal('(');
     while (this.#next() !== ')') {
-      if (items.length > 0) this.#literal(' ');
+      if (items.length > 0) this.#literal(' ', 'a space or ")"');
       items.push(this.#scalar());
     }
     this.#literal(')');
@@ -108,10 +108,8 @@ class LineReader {
     return [word, this.#from(start)];
   }
 
-  #literal(character: string): void {
-    if (this.#next() !== character) {
-      throw new Unreadable(this.#at, character === ' ' ? 'a space' : `"${character}"`);
-    }
+  #literal(character: string, expected = character === ' ' ? 'a space' : `"${character}"`): void {
+    if (this.#next() !== character) throw new Unreadable(this.#at, expected);
     this.#at += 1;
   }
 

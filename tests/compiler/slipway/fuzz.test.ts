@@ -12,6 +12,11 @@ function expectOrderly(text: string): void {
   const { rig, findings } = runScript({ name: 'fuzz.slip', text });
   expect(rig === null).toBe(findings.length > 0);
   expect(findings.length).toBeLessThanOrEqual(MAXIMUM_FINDINGS + 1);
+  if (rig !== null) {
+    // Whatever a script without findings makes is in the rig.
+    const made = rig.nodes.length + rig.constraints.length + rig.solvers.length;
+    expect(made).toBe(text.match(/^(group|joint|control|note|line|constrain|solve) /gm)?.length ?? 0);
+  }
   for (const { span, message, help } of findings) {
     expect(span.start).toBeGreaterThanOrEqual(0);
     expect(span.end).toBeGreaterThanOrEqual(span.start);
