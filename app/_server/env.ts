@@ -7,6 +7,9 @@ export interface Environment {
   readonly origin: string | null;
 }
 
+/** How much the log says: everything, or only what went wrong. */
+export type LogLevel = 'info' | 'error';
+
 function required(name: string): string {
   const value = process.env[name];
   if (!value) throw new Error(`${name} is not set`);
@@ -20,4 +23,14 @@ export function readEnvironment(): Environment {
     authSecret: process.env.AUTH_SECRET || required('NEXTAUTH_SECRET'),
     origin: process.env.NEXTAUTH_URL ? new URL(process.env.NEXTAUTH_URL).origin : null,
   };
+}
+
+/** The log's level; `info` unless LOG_LEVEL says `error`. */
+export function readLogLevel(): LogLevel {
+  return process.env.LOG_LEVEL === 'error' ? 'error' : 'info';
+}
+
+/** Whether this is `next dev`, whose fast refresh needs eval in the browser. */
+export function isDevelopment(): boolean {
+  return process.env.NODE_ENV === 'development';
 }
