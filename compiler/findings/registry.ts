@@ -3,6 +3,7 @@ import { RULES } from '../check/rules/index';
 import { documentFindings } from '../documents/findings';
 import { expandFindings } from '../expand/findings';
 import { expressionFindings } from '../expressions/findings';
+import { poseFindings } from '../pose/findings';
 import { resolveFindings } from '../resolve/findings';
 import { schemaFindings } from '../schema/findings';
 import { slipwayFindings } from '../slipway/findings';
@@ -22,6 +23,7 @@ const DECLARATIONS: Readonly<Record<string, FindingDeclaration>> = {
   ...evaluationFindings,
   ...Object.fromEntries(RULES.map((rule) => [rule.code, rule])),
   ...slipwayFindings,
+  ...poseFindings,
 };
 
 /** What a code stands for, or undefined for an unknown code. */
