@@ -6,12 +6,11 @@ function here(path: string): string {
   return fileURLToPath(new URL(path, import.meta.url));
 }
 
-/** Knex's settings with migrations and seeds, for a PostgreSQL at `url`. Needs tsx: migrations are TypeScript. */
+/** Knex's settings with migrations, for a PostgreSQL at `url`. Needs tsx: migrations are TypeScript. */
 export function migrationConfig(url: string): Knex.Config {
   return {
     ...connectionConfig(url),
     migrations: { directory: here('./db/migrations'), extension: 'ts', loadExtensions: ['.ts'] },
-    seeds: { directory: here('./db/seeds'), extension: 'ts', loadExtensions: ['.ts'] },
   };
 }
 

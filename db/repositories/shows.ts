@@ -23,6 +23,12 @@ export function showsRepository(database: Knex) {
       return database('shows').where({ slug }).whereIn('id', scope).first('id', 'slug', 'title');
     },
 
+    /** Id of the show with that slug, whoever asks: for setting a database up, not for people. */
+    async findIdBySlug(slug: string): Promise<string | undefined> {
+      const row = await database('shows').where({ slug }).first('id');
+      return row?.id;
+    },
+
     /** Adds a show and returns its id; the database refuses a slug that is taken. */
     async insert(show: Omit<Show, 'id'>): Promise<string> {
       const [row] = await database('shows').insert({ slug: show.slug, title: show.title }).returning('id');
