@@ -47,10 +47,12 @@ function planControl({ name, attributes, channels }: ControlNode): Step[] {
     name,
     values: { name: attribute.name, default: attribute.default, min: attribute.min, max: attribute.max },
   }));
-  const locked = CHANNEL_NAMES.filter((channel) => channels[channel]?.locked);
+  const listed = CHANNEL_NAMES.filter((channel) => channels[channel] !== undefined);
+  const locked = listed.filter((channel) => channels[channel]?.locked);
   if (locked.length > 0) steps.push({ verb: 'lock', name, values: { channels: locked } });
-  for (const channel of CHANNEL_NAMES) {
-    const { min = null, max = null } = channels[channel] ?? {};
+  for (const channel of listed) {
+    const min = channels[channel]?.min ?? null;
+    const max = channels[channel]?.max ?? null;
     if (min !== null || max !== null) steps.push({ verb: 'limit', name, values: { channel, min, max } });
   }
   return steps;

@@ -145,7 +145,7 @@ export type RigSolver = TwoBoneSolver;
 
 export interface Rig {
   readonly scene: RigScene;
-  /** Parents come before children. */
+  /** Parents come before children, and a line after the nodes at both its ends. */
   readonly nodes: readonly RigNode[];
   readonly constraints: readonly RigConstraint[];
   readonly solvers: readonly RigSolver[];

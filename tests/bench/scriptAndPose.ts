@@ -1,0 +1,51 @@
+import { emitScript } from '@/compiler/emit/emitScript';
+import { planSteps } from '@/compiler/plan/planSteps';
+import { createPoser } from '@/compiler/pose/createPoser';
+import { runScript } from '@/compiler/slipway/runScript';
+import { makeLargeRig } from './largeRig';
+
+export interface BenchRow {
+  readonly name: string;
+  readonly value: number;
+  readonly goal: number;
+  readonly unit: string;
+}
+
+const ROUNDS = 15;
+
+/** Median time of one call in milliseconds, over rounds of `calls` calls, after as many to warm up. */
+function medianMilliseconds(calls: number, task: () => void): number {
+  const times: number[] = [];
+  for (let round = 0; round < ROUNDS * 2; round += 1) {
+    const start = performance.now();
+    for (let call = 0; call < calls; call += 1) task();
+    if (round >= ROUNDS) times.push((performance.now() - start) / calls);
+  }
+  times.sort((a, b) => a - b);
+  return times[Math.floor(times.length / 2)] ?? Number.NaN;
+}
+
+/** Times of a rig of 150 joints: posing it, emitting its script, running the script. */
+export async function measure(): Promise<readonly BenchRow[]> {
+  const { rig, pose } = makeLargeRig();
+  const poser = createPoser(rig);
+  const text = emitScript(planSteps(rig));
+  const row = (name: string, goal: number, value: number): BenchRow => ({ name, value, goal, unit: 'ms' });
+  return [
+    row(
+      'evaluate a pose, 150 joints',
+      0.3,
+      medianMilliseconds(100, () => poser.evaluate(pose)),
+    ),
+    row(
+      'plan and emit, 150 joints',
+      3,
+      medianMilliseconds(5, () => void emitScript(planSteps(rig))),
+    ),
+    row(
+      'run the script, 150 joints',
+      15,
+      medianMilliseconds(3, () => void runScript({ name: 'bench.slip', text })),
+    ),
+  ];
+}
