@@ -2,17 +2,17 @@ import { fileURLToPath } from 'node:url';
 import type { Knex } from 'knex';
 import { connectionConfig } from './db/client';
 
-function here(path: string): string {
-  return fileURLToPath(new URL(path, import.meta.url));
-}
+/**
+ * For Knex's command line, run through tsx: `tsx node_modules/knex/bin/cli.js migrate:make name`. Programs use
+ * `db/migrationSource.ts`, which lists the same files under the same names.
+ */
+const config: Knex.Config = {
+  ...connectionConfig(process.env.DATABASE_URL ?? ''),
+  migrations: {
+    directory: fileURLToPath(new URL('./db/migrations', import.meta.url)),
+    extension: 'ts',
+    loadExtensions: ['.ts'],
+  },
+};
 
-/** Knex's settings with migrations, for a PostgreSQL at `url`. Needs tsx: migrations are TypeScript. */
-export function migrationConfig(url: string): Knex.Config {
-  return {
-    ...connectionConfig(url),
-    migrations: { directory: here('./db/migrations'), extension: 'ts', loadExtensions: ['.ts'] },
-  };
-}
-
-/** For Knex's command line: `tsx node_modules/knex/bin/cli.js migrate:latest`. */
-export default migrationConfig(process.env.DATABASE_URL ?? '');
+export default config;
