@@ -1,0 +1,64 @@
+'use client';
+
+import { Dialog } from 'radix-ui';
+import { useState } from 'react';
+
+/** Something a person can do on the page. */
+export interface Command {
+  readonly id: string;
+  readonly words: string;
+  readonly keys: string | null;
+  run(): void;
+}
+
+/** Everything that can be done here, to be found by typing a few letters. */
+export function CommandList({
+  commands,
+  onClose,
+}: {
+  readonly commands: readonly Command[];
+  onClose(): void;
+}) {
+  const [search, setSearch] = useState('');
+  const words = search.trim().toLowerCase();
+  const found = commands.filter((command) => command.words.toLowerCase().includes(words));
+  const run = (command: Command | undefined): void => {
+    if (!command) return;
+    onClose();
+    command.run();
+  };
+  return (
+    <Dialog.Root open onOpenChange={(open) => !open && onClose()}>
+      <Dialog.Portal>
+        <Dialog.Overlay className="dialog-veil" />
+        <Dialog.Content className="dialog-sheet" aria-describedby={undefined}>
+          <Dialog.Title className="dialog-title">What would you like to do?</Dialog.Title>
+          <form
+            onSubmit={(event) => {
+              event.preventDefault();
+              run(found[0]);
+            }}
+          >
+            <input
+              className="plain-input w-full"
+              aria-label="Search the commands"
+              value={search}
+              onChange={(event) => setSearch(event.target.value)}
+            />
+          </form>
+          <ul className="mt-3 divide-y divide-rule">
+            {found.map((command) => (
+              <li key={command.id}>
+                <button type="button" className="command-row" onClick={() => run(command)}>
+                  <span>{command.words}</span>
+                  {command.keys && <kbd className="figures text-ink-soft text-sm">{command.keys}</kbd>}
+                </button>
+              </li>
+            ))}
+          </ul>
+          {found.length === 0 && <p className="mt-3 text-ink-soft">No command has these letters.</p>}
+        </Dialog.Content>
+      </Dialog.Portal>
+    </Dialog.Root>
+  );
+}

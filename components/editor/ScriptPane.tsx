@@ -1,0 +1,60 @@
+'use client';
+
+import { useEffect, useMemo, useRef } from 'react';
+
+const ID = / id="([a-z0-9_.]+)"/;
+
+export interface ScriptPaneProps {
+  readonly script: string;
+  readonly chosen: readonly string[];
+  onChoose(id: string | null): void;
+}
+
+/** The emitted build script, line by line; lines that make a chosen thing are marked. */
+export function ScriptPane({ script, chosen, onChoose }: ScriptPaneProps) {
+  const lines = useMemo(
+    () =>
+      script
+        .trimEnd()
+        .split('\n')
+        .map((text, index) => ({ number: index + 1, text, id: ID.exec(text)?.[1] ?? null })),
+    [script],
+  );
+  const first = useRef<HTMLLIElement>(null);
+  const ids = useMemo(() => new Set(chosen), [chosen]);
+  const firstChosen = lines.find(({ id }) => id !== null && ids.has(id))?.number;
+
+  useEffect(() => {
+    if (firstChosen !== undefined) first.current?.scrollIntoView({ block: 'nearest' });
+  }, [firstChosen]);
+
+  return (
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolling region must be reachable by keyboard.
+    <section className="h-full overflow-auto" aria-label="Build script" tabIndex={0}>
+      <ol className="figures script-lines py-2 text-xs">
+        {lines.map(({ number, text, id }) => {
+          const isChosen = id !== null && ids.has(id);
+          return (
+            <li
+              key={number}
+              ref={number === firstChosen ? first : undefined}
+              aria-current={isChosen ? 'true' : undefined}
+              className={isChosen ? 'script-line script-line-chosen' : 'script-line'}
+            >
+              <span aria-hidden className="script-number">
+                {number}
+              </span>
+              {id === null ? (
+                <span>{text}</span>
+              ) : (
+                <button type="button" tabIndex={-1} className="text-left" onClick={() => onChoose(id)}>
+                  {text}
+                </button>
+              )}
+            </li>
+          );
+        })}
+      </ol>
+    </section>
+  );
+}

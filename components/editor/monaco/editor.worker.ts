@@ -1,0 +1,1 @@
+import 'monaco-editor/esm/vs/editor/editor.worker.js';

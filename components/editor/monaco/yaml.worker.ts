@@ -1,0 +1,1 @@
+import 'monaco-yaml/yaml.worker.js';

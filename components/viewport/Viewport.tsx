@@ -1,0 +1,253 @@
+'use client';
+
+import { Canvas, useThree } from '@react-three/fiber';
+import {
+  type KeyboardEvent,
+  type PointerEvent,
+  useCallback,
+  useEffect,
+  useMemo,
+  useRef,
+  useState,
+} from 'react';
+import { type PerspectiveCamera, Vector3 } from 'three';
+import { OrbitControls } from 'three/examples/jsm/controls/OrbitControls.js';
+import type { RigScene } from '@/compiler';
+import type { BuiltRig } from '@/components/worker/messages';
+import { CameraDesk, type Standpoint } from './CameraDesk';
+import { type Colours, onSchemeChange, readColours } from './colours';
+import { type Audience, type Drawing, drawRig } from './drawing';
+import { Ground } from './Ground';
+import { nearestNode } from './nearestNode';
+import { pressKey, STANDPOINTS } from './pressKey';
+import { RigDrawing } from './RigDrawing';
+
+export interface ViewportProps {
+  readonly built: BuiltRig;
+  /** True while the text has errors and the picture belongs to an earlier one. */
+  readonly isOlder: boolean;
+  /** Ids of the chosen nodes. */
+  readonly chosen: readonly string[];
+  onChoose(id: string | null): void;
+}
+
+interface Stage {
+  readonly camera: PerspectiveCamera;
+  readonly desk: CameraDesk;
+}
+
+/** Lends the canvas's camera and controls to the page around it. */
+function StageKeeper({
+  scene,
+  onStage,
+}: {
+  readonly scene: Pick<RigScene, 'up' | 'forward'>;
+  onStage(stage: Stage | null): void;
+}) {
+  const camera = useThree((state) => state.camera) as PerspectiveCamera;
+  const canvas = useThree((state) => state.gl.domElement);
+  const invalidate = useThree((state) => state.invalidate);
+  const { up, forward } = scene;
+  useEffect(() => {
+    const controls = new OrbitControls(camera, canvas);
+    controls.enableDamping = false;
+    controls.addEventListener('change', () => invalidate());
+    onStage({ camera, desk: new CameraDesk(camera, controls, { up, forward }, () => invalidate()) });
+    return () => {
+      controls.dispose();
+      onStage(null);
+    };
+  }, [camera, canvas, invalidate, onStage, up, forward]);
+  return null;
+}
+
+function boxAround(drawing: Drawing, world: Float64Array, nodes: readonly number[]) {
+  if (nodes.length === 0) return drawing;
+  const reach = drawing.size * 0.08;
+  const low: [number, number, number] = [Infinity, Infinity, Infinity];
+  const high: [number, number, number] = [-Infinity, -Infinity, -Infinity];
+  for (const node of nodes) {
+    for (let axis = 0; axis < 3; axis += 1) {
+      const value = world[node * 16 + 12 + axis] ?? 0;
+      low[axis] = Math.min(low[axis] as number, value - reach);
+      high[axis] = Math.max(high[axis] as number, value + reach);
+    }
+  }
+  return { low, high };
+}
+
+/** The rig that the script built, drawn as on paper. Everything a pointer does here, keys do too. */
+export function Viewport({ built, isOlder, chosen, onChoose }: ViewportProps) {
+  const [audience, setAudience] = useState<Audience>('rigger');
+  const [colours, setColours] = useState<Colours>(readColours);
+  const [hovered, setHovered] = useState<{
+    readonly id: string;
+    readonly x: number;
+    readonly y: number;
+  } | null>(null);
+  const [stage, setStage] = useState<Stage | null>(null);
+  const frame = useRef<HTMLDivElement>(null);
+  const pressedAt = useRef<readonly [number, number] | null>(null);
+
+  useEffect(() => onSchemeChange(() => setColours(readColours())), []);
+
+  const { rig, world } = built;
+  const drawing = useMemo(() => drawRig({ rig, world }, audience), [rig, world, audience]);
+  const chosenNodes = useMemo(() => {
+    const ids = new Set(chosen);
+    return rig.nodes.flatMap(({ id }, index) => (ids.has(id) ? [index] : []));
+  }, [rig, chosen]);
+  const latest = useRef({ drawing, world, chosenNodes });
+  latest.current = { drawing, world, chosenNodes };
+
+  const keepStage = useCallback((next: Stage | null) => {
+    next?.desk.stand('free', latest.current.drawing);
+    setStage(next);
+  }, []);
+
+  const nodeUnder = (event: PointerEvent): number | null => {
+    const box = frame.current?.getBoundingClientRect();
+    if (!box || !stage) return null;
+    return nearestNode(
+      drawing,
+      stage.camera,
+      box.width,
+      box.height,
+      event.clientX - box.left,
+      event.clientY - box.top,
+    );
+  };
+
+  const move = (event: PointerEvent): void => {
+    if (event.buttons !== 0) return;
+    const node = nodeUnder(event);
+    const box = frame.current?.getBoundingClientRect();
+    const id = node === null ? undefined : rig.nodes[node]?.id;
+    if (id === undefined || node === null || !box || !stage) {
+      setHovered(null);
+      return;
+    }
+    const at = new Vector3(world[node * 16 + 12], world[node * 16 + 13], world[node * 16 + 14]).project(
+      stage.camera,
+    );
+    setHovered({ id, x: ((at.x + 1) / 2) * box.width, y: ((1 - at.y) / 2) * box.height });
+  };
+
+  const release = (event: PointerEvent): void => {
+    const [x, y] = pressedAt.current ?? [0, 0];
+    const wasDrag = Math.hypot(event.clientX - x, event.clientY - y) > 4;
+    if (event.button !== 0 || wasDrag) return;
+    const node = nodeUnder(event);
+    onChoose(node === null ? null : (rig.nodes[node]?.id ?? null));
+  };
+
+  const stand = (standpoint: Standpoint): void => stage?.desk.stand(standpoint, drawing);
+  const frameAll = (): void => stage?.desk.frame(drawing);
+  const frameChosen = (): void => stage?.desk.frame(boxAround(drawing, world, chosenNodes));
+  const letGo = (): void => onChoose(null);
+
+  const press = (event: KeyboardEvent): void => {
+    if (!stage || event.ctrlKey || event.metaKey || event.altKey) return;
+    const targets = { stand, frameAll, frameChosen, letGo };
+    if (pressKey(event.key, event.shiftKey, stage.desk, targets)) event.preventDefault();
+  };
+
+  const hoveredNode = hovered ? rig.nodes.find(({ id }) => id === hovered.id) : undefined;
+
+  return (
+    <section aria-label="Picture of the rig" className="flex h-full min-h-0 flex-col">
+      <div className="flex flex-wrap items-center gap-x-4 gap-y-1 border-rule border-b px-3 py-1 text-sm">
+        {STANDPOINTS.map(({ standpoint, words, key }) => (
+          <button
+            key={standpoint}
+            type="button"
+            className="plain-action"
+            aria-keyshortcuts={key}
+            onClick={() => stand(standpoint)}
+          >
+            {words}
+          </button>
+        ))}
+        <button type="button" className="plain-action" aria-keyshortcuts="Home" onClick={frameAll}>
+          Whole rig
+        </button>
+        <button
+          type="button"
+          className="plain-action"
+          aria-keyshortcuts="End"
+          disabled={chosenNodes.length === 0}
+          onClick={frameChosen}
+        >
+          Chosen
+        </button>
+        <label className="ml-auto flex items-center gap-2">
+          As seen by
+          <select
+            className="plain-select"
+            value={audience}
+            onChange={(event) => setAudience(event.target.value === 'animator' ? 'animator' : 'rigger')}
+          >
+            <option value="rigger">the rigger</option>
+            <option value="animator">the animator</option>
+          </select>
+        </label>
+      </div>
+      <div
+        ref={frame}
+        role="application"
+        aria-label={`Rig ${rig.scene.character}: arrows turn, shift and arrows move, plus and minus zoom, 1 to 4 change the standpoint, Home frames all, End frames what is chosen. The table shows the same in words.`}
+        // biome-ignore lint/a11y/noNoninteractiveTabindex: see above.
+        tabIndex={0}
+        className="relative min-h-0 flex-1 cursor-crosshair"
+        data-testid="viewport"
+        onKeyDown={press}
+        onPointerMove={move}
+        onPointerLeave={() => setHovered(null)}
+        onPointerDown={(event) => {
+          pressedAt.current = [event.clientX, event.clientY];
+        }}
+        onPointerUp={release}
+      >
+        <Canvas
+          frameloop="demand"
+          flat
+          dpr={[1, 2]}
+          camera={{ fov: 32 }}
+          gl={{ antialias: true, alpha: false }}
+          aria-hidden
+        >
+          <color attach="background" args={[colours.sheet]} />
+          <StageKeeper scene={rig.scene} onStage={keepStage} />
+          <Ground scene={rig.scene} size={drawing.size} rule={colours.rule} ink={colours.inkSoft} />
+          <RigDrawing drawing={drawing} colours={colours} chosen={chosenNodes} />
+        </Canvas>
+        {hovered && hoveredNode && (
+          <p
+            className="pointer-events-none absolute border border-ink bg-paper px-2 py-0.5 text-xs"
+            style={{ left: hovered.x + 12, top: hovered.y - 12 }}
+          >
+            <span className="figures">{hoveredNode.id}</span>
+            <span className="text-ink-soft"> in {hoveredNode.container}</span>
+          </p>
+        )}
+        {isOlder && (
+          <p role="status" className="absolute inset-x-0 top-0 bg-paper/90 px-3 py-1 text-signal text-sm">
+            From the last text that compiled.
+          </p>
+        )}
+        <Legend />
+      </div>
+    </section>
+  );
+}
+
+/** Tells the sides apart in words, colour and line. */
+function Legend() {
+  return (
+    <ul className="pointer-events-none absolute right-3 bottom-2 flex gap-4 text-xs text-ink-soft">
+      <li className="side-key side-key-left">left</li>
+      <li className="side-key side-key-right">right</li>
+      <li className="side-key side-key-centre">centre</li>
+    </ul>
+  );
+}

@@ -1,0 +1,110 @@
+import { BufferAttribute, BufferGeometry, Color, Vector3 } from 'three';
+import type { Side } from '@/compiler';
+import type { Drawing } from './drawing';
+
+const FACETS = 6;
+/** A right-side stroke is broken into this many dashes, so that sides differ in more than colour. */
+const DASHES = 4;
+const DASH_SHARE = 0.62;
+
+interface Frustum {
+  readonly from: Vector3;
+  readonly to: Vector3;
+  readonly fromRadius: number;
+  readonly toRadius: number;
+  readonly colour: Color;
+}
+
+function sideways(direction: Vector3): readonly [Vector3, Vector3] {
+  const helper = Math.abs(direction.y) < 0.9 ? new Vector3(0, 1, 0) : new Vector3(1, 0, 0);
+  const first = new Vector3().crossVectors(direction, helper).normalize();
+  return [first, new Vector3().crossVectors(direction, first)];
+}
+
+function addFrustum(
+  { from, to, fromRadius, toRadius, colour }: Frustum,
+  points: number[],
+  colours: number[],
+): void {
+  const direction = to.clone().sub(from).normalize();
+  const [first, second] = sideways(direction);
+  const rim = (centre: Vector3, radius: number, facet: number): Vector3 => {
+    const angle = (2 * Math.PI * facet) / FACETS;
+    return centre
+      .clone()
+      .addScaledVector(first, Math.cos(angle) * radius)
+      .addScaledVector(second, Math.sin(angle) * radius);
+  };
+  for (let facet = 0; facet < FACETS; facet += 1) {
+    const corners = [
+      rim(from, fromRadius, facet),
+      rim(from, fromRadius, facet + 1),
+      rim(to, toRadius, facet),
+      rim(to, toRadius, facet + 1),
+    ] as const;
+    for (const corner of [0, 1, 2, 1, 3, 2] as const) {
+      points.push(...corners[corner].toArray());
+      colours.push(colour.r, colour.g, colour.b);
+    }
+  }
+}
+
+/** Tapered strokes for bones and arrowheads for leaders, as one mesh with a colour for each corner. */
+export function strokeGeometry(
+  drawing: Drawing,
+  colours: Readonly<Record<Side, string>>,
+  leaderColour: string,
+): BufferGeometry {
+  const points: number[] = [];
+  const tints: number[] = [];
+  const colourOf = {
+    left: new Color(colours.left),
+    right: new Color(colours.right),
+    centre: new Color(colours.centre),
+  };
+  for (const { side, from, to } of drawing.bones) {
+    const start = new Vector3(...from);
+    const end = new Vector3(...to);
+    const length = start.distanceTo(end);
+    if (length === 0) continue;
+    const thick = Math.min(length * 0.09, drawing.size * 0.009);
+    const pieces = side === 'right' ? DASHES : 1;
+    for (let piece = 0; piece < pieces; piece += 1) {
+      const a = piece / pieces;
+      const b = pieces === 1 ? 1 : a + DASH_SHARE / pieces;
+      addFrustum(
+        {
+          from: start.clone().lerp(end, a),
+          to: start.clone().lerp(end, b),
+          fromRadius: thick * (1 - a * 0.85),
+          toRadius: thick * (1 - b * 0.85),
+          colour: colourOf[side],
+        },
+        points,
+        tints,
+      );
+    }
+  }
+  const head = drawing.size * 0.014;
+  for (const { from, to } of drawing.leaders) {
+    const tip = new Vector3(...to);
+    const back = new Vector3(...from).sub(tip);
+    if (back.length() === 0) continue;
+    back.normalize();
+    addFrustum(
+      {
+        from: tip.clone().addScaledVector(back, head * 1.6),
+        to: tip.clone().addScaledVector(back, head * 0.3),
+        fromRadius: head * 0.32,
+        toRadius: 0,
+        colour: new Color(leaderColour),
+      },
+      points,
+      tints,
+    );
+  }
+  const geometry = new BufferGeometry();
+  geometry.setAttribute('position', new BufferAttribute(new Float32Array(points), 3));
+  geometry.setAttribute('color', new BufferAttribute(new Float32Array(tints), 3));
+  return geometry;
+}
