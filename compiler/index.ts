@@ -14,6 +14,7 @@ export type * from './rig/Rig';
 export { type Sample, samples } from './samples/samples';
 export { houseSchema } from './schema/generated/houseSchema';
 export { recipeSchema } from './schema/generated/recipeSchema';
+export { type Polyline, shapeLines } from './slipway/shapes';
 export { runScript } from './slipway/runScript';
 export type { SourceText, Span } from './source/SourceText';
 export { COMPILER_VERSION } from './version';

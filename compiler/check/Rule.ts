@@ -17,6 +17,8 @@ export interface RuleContext {
   readonly recipe: EvaluatedRecipe;
   readonly resolved: ResolvedRecipe;
   readonly stage: ResolveContext;
+  /** False when entries were refused: then nothing can be called missing or unused. */
+  readonly isWhole: boolean;
   /** Reports the rule's own code at a path of the recipe. */
   report(
     path: Path,

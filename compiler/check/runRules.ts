@@ -11,6 +11,7 @@ export function runRules(recipe: EvaluatedRecipe, resolved: ResolvedRecipe, stag
       recipe,
       resolved,
       stage,
+      isWhole: stage.poisoned.size === 0,
       report(path, parameters, more = {}) {
         stage.findings.add({
           code: rule.code,

@@ -30,6 +30,7 @@ export const controlSteersNothing: Rule = {
         followAttribute(constraint.blend);
       },
       finish() {
+        if (!context.isWhole) return;
         for (const { id, role, path } of context.resolved.controls) {
           if (role !== CARRIER_ROLE && !followed.has(id)) context.report(path, { id }, { part: 'key' });
         }

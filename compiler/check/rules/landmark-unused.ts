@@ -21,6 +21,7 @@ export const landmarkUnused: Rule = {
         if (place.kind === 'place') use(place.at);
       },
       finish() {
+        if (!context.isWhole) return;
         const inExpressions = namesInExpressions(context.stage.document.value, 'landmarks');
         for (const name of Object.keys(context.recipe.landmarks ?? {})) {
           if (!used.has(name) && !inExpressions.has(name))

@@ -12,6 +12,7 @@ export const nothingCarries: Rule = {
   create(context) {
     return {
       finish() {
+        if (!context.isWhole) return;
         const hasNodes = context.resolved.chains.length + context.resolved.controls.length > 0;
         if (hasNodes && !findsCarrier(context.resolved)) context.report(['recipe'], {});
       },

@@ -12,6 +12,7 @@ export const parameterUnused: Rule = {
   create(context) {
     return {
       finish() {
+        if (!context.isWhole) return;
         const read = namesInExpressions(context.stage.document.value, 'params');
         for (const name of Object.keys(context.recipe.params ?? {})) {
           if (!read.has(name)) context.report(['params', name], { name }, { part: 'key' });
