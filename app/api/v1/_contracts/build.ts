@@ -11,11 +11,13 @@ export const buildFileSchema = z.object({
 export type BuildFile = z.infer<typeof buildFileSchema>;
 
 /** What one compile of a version produced; the same inputs always have the same key. */
-export const buildSchema = z.object({
-  key: sha256Schema,
-  character: z.string(),
-  files: z.array(buildFileSchema),
-});
+export const buildSchema = z
+  .object({
+    key: sha256Schema,
+    character: z.string(),
+    files: z.array(buildFileSchema),
+  })
+  .meta({ id: 'Build' });
 export type Build = z.infer<typeof buildSchema>;
 
 export const buildFilePathSchema = versionPathSchema.extend({ name: z.string().min(1).max(200) });

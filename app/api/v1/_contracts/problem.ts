@@ -35,21 +35,23 @@ export const inputIssueSchema = z.object({
 export type InputIssue = z.infer<typeof inputIssueSchema>;
 
 /** An answer of media type application/problem+json (RFC 9457). */
-export const problemSchema = z.object({
-  type: z.string(),
-  title: z.string(),
-  status: z.number().int(),
-  detail: z.string(),
-  /** The same as the end of `type`, so that callers need not take an address apart. */
-  code: problemCodeSchema,
-  requestId: z.string(),
-  /** With `invalid-input`. */
-  issues: z.array(inputIssueSchema).optional(),
-  /** With `stale-parent`: the version somebody saved meanwhile. */
-  newest: newestVersionSchema.optional(),
-  /** With `draft-changed`: the draft as it is stored now; null when there is none any more. */
-  draft: draftSchema.nullable().optional(),
-  /** With `recipe-has-errors`. */
-  findings: z.array(findingSchema).optional(),
-});
+export const problemSchema = z
+  .object({
+    type: z.string(),
+    title: z.string(),
+    status: z.number().int(),
+    detail: z.string(),
+    /** The same as the end of `type`, so that callers need not take an address apart. */
+    code: problemCodeSchema,
+    requestId: z.string(),
+    /** With `invalid-input`. */
+    issues: z.array(inputIssueSchema).optional(),
+    /** With `stale-parent`: the version somebody saved meanwhile. */
+    newest: newestVersionSchema.optional(),
+    /** With `draft-changed`: the draft as it is stored now; null when there is none any more. */
+    draft: draftSchema.nullable().optional(),
+    /** With `recipe-has-errors`. */
+    findings: z.array(findingSchema).optional(),
+  })
+  .meta({ id: 'Problem' });
 export type Problem = z.infer<typeof problemSchema>;

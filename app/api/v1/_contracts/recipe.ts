@@ -56,15 +56,17 @@ export const createRecipeRequestSchema = z.strictObject({
 });
 export type CreateRecipeRequest = z.infer<typeof createRecipeRequestSchema>;
 
-export const recipeSchema = z.object({
-  id: idSchema,
-  show: z.object({ slug: slugSchema, title: z.string() }),
-  name: z.string(),
-  title: z.string(),
-  /** The strongest role the asking person holds in the recipe's show. */
-  role: roleSchema,
-  latest: latestVersionSchema.nullable(),
-});
+export const recipeSchema = z
+  .object({
+    id: idSchema,
+    show: z.object({ slug: slugSchema, title: z.string() }),
+    name: z.string(),
+    title: z.string(),
+    /** The strongest role the asking person holds in the recipe's show. */
+    role: roleSchema,
+    latest: latestVersionSchema.nullable(),
+  })
+  .meta({ id: 'Recipe' });
 export type Recipe = z.infer<typeof recipeSchema>;
 
 export const recipePathSchema = z.strictObject({ recipeId: idSchema });

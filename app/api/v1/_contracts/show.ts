@@ -6,7 +6,9 @@ export const roleSchema = z.enum(['admin', 'reviewer', 'rigger', 'operator', 'vi
 export type Role = z.infer<typeof roleSchema>;
 
 /** A show as its member sees it; `role` is the strongest the person holds in it. */
-export const showSchema = z.object({ id: idSchema, slug: slugSchema, title: z.string(), role: roleSchema });
+export const showSchema = z
+  .object({ id: idSchema, slug: slugSchema, title: z.string(), role: roleSchema })
+  .meta({ id: 'Show' });
 export type Show = z.infer<typeof showSchema>;
 
 export const showListSchema = z.object({ items: z.array(showSchema) });

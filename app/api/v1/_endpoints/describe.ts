@@ -40,7 +40,7 @@ function problemsOf(endpoint: Endpoint): readonly ProblemCode[] {
   return [...endpoint.problems, ...general];
 }
 
-function describeProblems(endpoint: Endpoint, problem: z.ZodType): Record<number, ResponseConfig> {
+function describeProblems(endpoint: Endpoint): Record<number, ResponseConfig> {
   const titles = new Map<number, string[]>();
   for (const code of problemsOf(endpoint)) {
     const status = problemStatus(code);
@@ -50,7 +50,7 @@ function describeProblems(endpoint: Endpoint, problem: z.ZodType): Record<number
   return Object.fromEntries(
     sorted.map(([status, words]) => [
       status,
-      { description: words.join('; '), content: { 'application/problem+json': { schema: problem } } },
+      { description: words.join('; '), content: { 'application/problem+json': { schema: problemSchema } } },
     ]),
   );
 }
@@ -58,7 +58,6 @@ function describeProblems(endpoint: Endpoint, problem: z.ZodType): Record<number
 /** The OpenAPI 3.1 description of the API, made from the very schemas that requests are read by. */
 export function describeApi(version: string) {
   const registry = new OpenAPIRegistry();
-  const problem = registry.register('Problem', problemSchema);
   registry.registerComponent('securitySchemes', 'session', {
     type: 'apiKey',
     in: 'cookie',
@@ -85,7 +84,7 @@ export function describeApi(version: string) {
         ...Object.fromEntries(
           Object.entries(endpoint.answers).map(([status, answer]) => [status, describeAnswer(answer)]),
         ),
-        ...describeProblems(endpoint, problem),
+        ...describeProblems(endpoint),
       },
     });
   }
