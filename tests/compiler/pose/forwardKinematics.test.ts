@@ -102,6 +102,15 @@ describe('forward kinematics', () => {
     expectNear(world.get('parked') ?? [], [1, 0, 0, 0, 0, 1, 0, 0, 0, 0, 1, 0, 5, 0, 0, 1]);
   });
 
+  it('fills whole matrices, the last row too', () => {
+    const poser = createPoser(rigOf([control('root'), joint('hip', { parent: 'root', at: [1, 2, 3] })]));
+    poser.evaluate({ root: { sx: 2, rx: 10 } });
+    for (const start of [0, 16]) {
+      expect([3, 7, 11, 15].map((entry) => poser.world[start + entry])).toEqual([0, 0, 0, 1]);
+    }
+    expect(poser.world).toHaveLength(32);
+  });
+
   it('gives the same numbers for a pose whatever was evaluated before', () => {
     fc.assert(
       fc.property(posedTree, ({ nodes, pose }) => {

@@ -1,25 +1,23 @@
-import type { Mat4 } from '@/compiler/math/mat4';
+import { type Mat4, positionOf } from '@/compiler/math/mat4';
 import { createPoser } from '@/compiler/pose/createPoser';
-import type { PoseValues, Rig } from '@/compiler/rig/Rig';
+import { readMatrix } from '@/compiler/pose/worldMatrices';
+import type { PoseValues, Rig, Vec3 } from '@/compiler/rig/Rig';
 
 /** World matrices of a rig by name, for the given control values. */
 export function worldOf(rig: Rig, pose: PoseValues = {}): ReadonlyMap<string, Mat4> {
   const poser = createPoser(rig);
   poser.evaluate(pose);
-  return new Map(
-    rig.nodes.map(({ name }, index) => [
-      name,
-      Array.from(poser.world.subarray(index * 16, index * 16 + 16)) as unknown as Mat4,
-    ]),
-  );
+  return new Map(rig.nodes.map(({ name }, index) => [name, readMatrix(poser.world, index)]));
+}
+
+/** Matrix of one node among such matrices. */
+export function matrixIn(world: ReadonlyMap<string, Mat4>, name: string): Mat4 {
+  const matrix = world.get(name);
+  if (matrix === undefined) throw new Error(`no node ${name}`);
+  return matrix;
 }
 
 /** Position of one node among such matrices. */
-export function positionIn(
-  world: ReadonlyMap<string, Mat4>,
-  name: string,
-): readonly [number, number, number] {
-  const m = world.get(name);
-  if (m === undefined) throw new Error(`no node ${name}`);
-  return [m[12], m[13], m[14]];
+export function positionIn(world: ReadonlyMap<string, Mat4>, name: string): Vec3 {
+  return positionOf(matrixIn(world, name));
 }
