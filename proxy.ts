@@ -1,6 +1,6 @@
 import { type NextRequest, NextResponse } from 'next/server';
 import { sessionPerson } from './app/_server/auth/sessionPerson';
-import { isDevelopment } from './app/_server/env';
+import { isDevelopment, readEnvironment } from './app/_server/env';
 import { contentSecurityPolicy } from './app/_server/http/contentSecurityPolicy';
 import { problemResponse } from './app/_server/http/problems';
 import { requestIdOf } from './app/_server/http/requestId';
@@ -9,8 +9,9 @@ import { Refusal } from './app/_server/refusal';
 /** Addresses that need no session; everything else does. */
 const PUBLIC = [/^\/sign-in$/, /^\/api\/auth\//, /^\/api\/v1\/(health|ready|openapi\.json)$/];
 
+/** Under the application's own origin where that is stated: Next writes every loopback address as `localhost`. */
 function signInAddress({ nextUrl }: NextRequest): URL {
-  const address = new URL('/sign-in', nextUrl);
+  const address = new URL('/sign-in', readEnvironment().origin ?? nextUrl.origin);
   address.searchParams.set('callbackUrl', `${nextUrl.pathname}${nextUrl.search}`);
   return address;
 }
