@@ -25,6 +25,7 @@ export async function idempotent<Answer>(
   if (key === undefined) return work();
   const keys = idempotencyKeysRepository(transaction);
   const claim = { personId, key, requestHash: sha256Hex(JSON.stringify(asked)) };
+  await keys.forgetOld();
   const earlier = await keys.claim(claim);
   if (!earlier) {
     const answer = await work();

@@ -22,12 +22,21 @@ function derive(password: string, salt: Buffer, { logN, r, p }: PasswordCost): P
   });
 }
 
+function format({ logN, r, p }: PasswordCost, salt: Buffer, key: Buffer): string {
+  return `$scrypt$ln=${logN},r=${r},p=${p}$${salt.toString('base64url')}$${key.toString('base64url')}`;
+}
+
+/**
+ * A hash of the usual cost that no password fits: checked when an address is unknown, so that this takes as long
+ * as a wrong password.
+ */
+export const DECOY_HASH = format(PASSWORD_COST, Buffer.alloc(SALT_BYTES), Buffer.alloc(KEY_BYTES));
+
 /** Hashes a password under a fresh salt; salt and cost stand in the hash, so that the cost can rise later. */
 export async function hashPassword(password: string, cost: PasswordCost = PASSWORD_COST): Promise<string> {
   const salt = randomBytes(SALT_BYTES);
   const key = await derive(password, salt, cost);
-  const { logN, r, p } = cost;
-  return `$scrypt$ln=${logN},r=${r},p=${p}$${salt.toString('base64url')}$${key.toString('base64url')}`;
+  return format(cost, salt, key);
 }
 
 /** Whether the password is the one that was hashed; false for a hash in no form of ours. */

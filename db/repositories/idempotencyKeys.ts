@@ -35,6 +35,15 @@ export function idempotencyKeysRepository(transaction: Knex.Transaction) {
       return { requestHash: row.request_hash, answer: row.answer };
     },
 
+    /** Forgets keys older than a day, as long as nobody else is at it. */
+    async forgetOld(): Promise<void> {
+      await transaction.raw(
+        `delete from idempotency_keys where (person_id, key) in (
+           select person_id, key from idempotency_keys
+           where created_at < now() - interval '1 day' limit 100 for update skip locked)`,
+      );
+    },
+
     /** Keeps the answer for the next time the same request comes. */
     async storeAnswer(claim: IdempotencyClaim, answer: unknown): Promise<void> {
       await transaction('idempotency_keys')

@@ -52,9 +52,13 @@ export function signInAttemptsRepository(database: Knex) {
       );
     },
 
-    /** Forgets tries older than a day. */
+    /** Forgets tries older than a day, as long as nobody else is at it. */
     async forgetOld(): Promise<void> {
-      await database('sign_in_attempts').whereRaw("at < now() - interval '1 day'").delete();
+      await database.raw(
+        `delete from sign_in_attempts where id in (
+           select id from sign_in_attempts
+           where at < now() - interval '1 day' limit 1000 for update skip locked)`,
+      );
     },
   };
 }

@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import { MAXIMUM_BODY_BYTES } from '@/app/_server/http/readJsonBody';
 import { type ProblemCode, problemSchema } from '@/app/api/v1/_contracts/problem';
 import { MAXIMUM_RECIPE_LENGTH } from '@/app/api/v1/_contracts/recipeText';
@@ -209,15 +209,20 @@ describe('an answer', () => {
     expect(hostile.headers.get('x-request-id')).toMatch(/^[0-9a-f-]{36}$/);
   });
 
-  it('to a fault of ours says nothing about its cause', async () => {
+  it('to a fault of ours says nothing about its cause, which stands in the log under the request id', async () => {
+    const stderr = vi.spyOn(process.stderr, 'write').mockReturnValue(true);
     // Nothing a caller sends makes the server fail, so the fault is made behind its back.
     await test.database.raw('alter table people rename to people_elsewhere');
     try {
       const response = await callApi(readMeEndpoint, { as: world.people.viewer });
       const problem = await expectProblem(response, 500, 'internal-error');
       expect(JSON.stringify(problem)).not.toMatch(/people|select|\.ts|at /i);
+      const logged = JSON.parse(String(stderr.mock.calls[0]?.[0]));
+      expect(logged).toMatchObject({ event: 'request.failed', requestId: problem.requestId });
+      expect(logged.cause).toContain('relation "people" does not exist');
     } finally {
       await test.database.raw('alter table people_elsewhere rename to people');
+      stderr.mockRestore();
     }
   });
 });

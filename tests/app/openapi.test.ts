@@ -1,6 +1,7 @@
 import { readdirSync } from 'node:fs';
 import Ajv2020 from 'ajv/dist/2020.js';
 import addFormats from 'ajv-formats';
+import { NextRequest } from 'next/server';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { endpoints } from '@/app/api/v1/_endpoints/all';
 import { describeApi } from '@/app/api/v1/_endpoints/describe';
@@ -77,13 +78,17 @@ describe('the OpenAPI description', () => {
       const described = endpoints.filter((endpoint) => endpoint.path === path);
       const methods = described.map(({ method }) => method.toUpperCase());
       for (const method of ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'].filter((it) => !methods.includes(it))) {
-        const response = await module[method]?.(new (await import('next/server')).NextRequest('http://a/'), {
+        const response = await module[method]?.(new NextRequest('http://a/'), {
           params: Promise.resolve({}),
         });
         expect(response?.status).toBe(405);
         const allowed = response?.headers.get('allow')?.split(', ') ?? [];
         expect(allowed.toSorted()).toEqual(methods.toSorted());
       }
+      const options = await module.OPTIONS?.(new NextRequest('http://a/', { method: 'OPTIONS' }), {
+        params: Promise.resolve({}),
+      });
+      expect(options?.headers.get('allow')?.split(', ').toSorted()).toEqual(methods.toSorted());
     }
   });
 

@@ -169,6 +169,13 @@ describe('saving a version', () => {
     expect((await save(world.people.reviewer, 2, 'theirs', 'key-1')).number).toBe(3);
   });
 
+  it('remembers a key for a day', async () => {
+    await save(world.people.rigger, 1, 'once', 'key-3');
+    await test.database.raw("update idempotency_keys set created_at = created_at - interval '25 hours'");
+    expect((await save(world.people.rigger, 2, 'new', 'key-4')).number).toBe(3);
+    expect(await test.database('idempotency_keys').select('key')).toEqual([{ key: 'key-4' }]);
+  });
+
   it('keeps no answer of a request that was refused', async () => {
     await expect(save(world.people.rigger, 9, 'again', 'key-2')).rejects.toThrow(Refusal);
     expect((await save(world.people.rigger, 1, 'again', 'key-2')).number).toBe(2);

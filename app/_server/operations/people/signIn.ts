@@ -2,7 +2,7 @@ import type { Knex } from 'knex';
 import { auditLogRepository } from '@/db/repositories/auditLog';
 import { type Person, peopleRepository } from '@/db/repositories/people';
 import { type RecentFailures, signInAttemptsRepository } from '@/db/repositories/signInAttempts';
-import { hashPassword, verifyPassword } from '../../password';
+import { DECOY_HASH, verifyPassword } from '../../password';
 
 /** Tries are counted over this many minutes. */
 const WINDOW_MINUTES = 15;
@@ -19,9 +19,6 @@ export type SignInResult =
   | { readonly kind: 'signed-in'; readonly person: Person }
   | { readonly kind: 'refused' }
   | { readonly kind: 'too-many-attempts' };
-
-/** A hash no password fits, made once; checked for unknown addresses so that they take as long as known ones. */
-let decoy: Promise<string> | undefined;
 
 /**
  * Checks an address and password. A wrong password and an unknown address are told apart neither by the answer
@@ -42,8 +39,7 @@ export async function signIn(
     return { kind: 'too-many-attempts' };
   }
   const found = await peopleRepository(database).findByEmail(attempt.email);
-  decoy ??= hashPassword('a password nobody has');
-  const fits = await verifyPassword(attempt.password, found?.passwordHash ?? (await decoy));
+  const fits = await verifyPassword(attempt.password, found?.passwordHash ?? DECOY_HASH);
   if (!found || !fits) return { kind: 'refused' };
   await attempts.markSucceeded(id);
   await auditLogRepository(database).append({

@@ -5,6 +5,6 @@ import { COMPILER_VERSION } from '@/compiler/index';
 import { describeApi } from '../_endpoints/describe';
 import { readOpenApiEndpoint } from '../_endpoints/service';
 
-export const { GET, POST, PUT, PATCH, DELETE } = route({
+export const { GET, POST, PUT, PATCH, DELETE, OPTIONS } = route({
   GET: handle(readOpenApiEndpoint, ({ request }) => jsonWithEtag(request, describeApi(COMPILER_VERSION))),
 });

@@ -4,6 +4,6 @@ import { route } from '@/app/_server/http/route';
 import { listShows } from '@/app/_server/operations/shows/listShows';
 import { listShowsEndpoint } from '../_endpoints/shows';
 
-export const { GET, POST, PUT, PATCH, DELETE } = route({
+export const { GET, POST, PUT, PATCH, DELETE, OPTIONS } = route({
   GET: handle(listShowsEndpoint, async ({ caller }) => json(await listShows(caller))),
 });

@@ -12,7 +12,7 @@ function draftJson(draft: Draft): Response {
   return json(draft, { headers: { etag: `"${draft.revision}"` } });
 }
 
-export const { GET, POST, PUT, PATCH, DELETE } = route({
+export const { GET, POST, PUT, PATCH, DELETE, OPTIONS } = route({
   GET: handle(readDraftEndpoint, async ({ caller, params }) => draftJson(await readDraft(caller, params))),
   PUT: handle(putDraftEndpoint, async ({ request, caller, params, body }) => {
     const expected = expectedDraft(request.headers);

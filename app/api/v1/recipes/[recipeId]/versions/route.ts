@@ -6,7 +6,7 @@ import { listVersions } from '@/app/_server/operations/versions/listVersions';
 import { saveVersion } from '@/app/_server/operations/versions/saveVersion';
 import { createVersionEndpoint, listVersionsEndpoint } from '../../../_endpoints/versions';
 
-export const { GET, POST, PUT, PATCH, DELETE } = route({
+export const { GET, POST, PUT, PATCH, DELETE, OPTIONS } = route({
   GET: handle(listVersionsEndpoint, async ({ caller, params, query }) =>
     json(await listVersions(caller, { ...params, ...query })),
   ),

@@ -6,7 +6,7 @@ import { createRecipe } from '@/app/_server/operations/recipes/createRecipe';
 import { listRecipes } from '@/app/_server/operations/recipes/listRecipes';
 import { createRecipeEndpoint, listRecipesEndpoint } from '../../../_endpoints/recipes';
 
-export const { GET, POST, PUT, PATCH, DELETE } = route({
+export const { GET, POST, PUT, PATCH, DELETE, OPTIONS } = route({
   GET: handle(listRecipesEndpoint, async ({ caller, params, query }) =>
     json(await listRecipes(caller, { ...params, ...query })),
   ),
