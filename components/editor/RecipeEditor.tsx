@@ -7,6 +7,8 @@ import type { Draft } from '@/app/api/v1/_contracts/draft';
 import type { Recipe } from '@/app/api/v1/_contracts/recipe';
 import type { Version } from '@/app/api/v1/_contracts/version';
 import type { Fix, SourceText, Span } from '@/compiler';
+import { instantWords } from '@/components/frame/dates';
+import { TitleBlock } from '@/components/frame/TitleBlock';
 import { useCompiler } from '@/components/worker/useCompiler';
 import type { CodePaneHandle } from './CodePane';
 import { type Command, CommandList } from './CommandList';
@@ -18,7 +20,6 @@ import { Panes } from './Panes';
 import { SaveVersionDialog } from './SaveVersionDialog';
 import { ScriptPane } from './ScriptPane';
 import { ThingsPane } from './ThingsPane';
-import { TitleStrip } from './TitleStrip';
 import { useDraft } from './useDraft';
 import { useSelection } from './useSelection';
 import './editor.css';
@@ -227,11 +228,17 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
       <p className="sr-only" role="status" aria-live="polite">
         {compiler.sequence > 0 ? countFindings(findings) : ''}
       </p>
-      <TitleStrip
-        recipe={recipe}
-        version={version}
-        isChanged={isChanged}
-        findings={countFindings(findings)}
+      <TitleBlock
+        cells={[
+          ['Show', recipe.show.title],
+          ['Recipe', recipe.name],
+          ['Version', `${version.number}${isChanged ? ', changed' : ''}`],
+          ['State', isChanged ? 'draft' : version.state],
+          ['Hash', version.contentHash.slice(0, 12)],
+          ['Drawn by', version.author.name],
+          ['Date (UTC)', instantWords(version.createdAt)],
+          ['Findings', countFindings(findings)],
+        ]}
       />
 
       {isListing && <CommandList commands={commands} onClose={() => setIsListing(false)} />}
@@ -243,7 +250,7 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
           errorCount={errorCount}
           onClose={() => setIsSaving(false)}
           onSaved={(saved) => {
-            setVersion(saved);
+            setVersion({ ...saved, text });
             keeper.forget();
             setIsSaving(false);
             router.refresh();

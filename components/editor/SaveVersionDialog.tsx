@@ -3,7 +3,7 @@
 import { useMutation } from '@tanstack/react-query';
 import { Dialog } from 'radix-ui';
 import { type FormEvent, useState } from 'react';
-import type { NewestVersion, Version } from '@/app/api/v1/_contracts/version';
+import type { NewestVersion, VersionListItem } from '@/app/api/v1/_contracts/version';
 import { ApiProblem } from '@/components/api/ApiProblem';
 import { createVersion } from './editorApi';
 import { TwoSides } from './TwoSides';
@@ -13,7 +13,7 @@ export interface SaveVersionDialogProps {
   readonly parent: number;
   readonly text: string;
   readonly errorCount: number;
-  onSaved(version: Version): void;
+  onSaved(version: VersionListItem): void;
   onTakeTheirs(newest: NewestVersion): void;
   onClose(): void;
 }

@@ -1,5 +1,5 @@
 import type { Draft, PutDraftRequest } from '@/app/api/v1/_contracts/draft';
-import type { CreateVersionRequest, Version } from '@/app/api/v1/_contracts/version';
+import type { CreateVersionRequest, VersionListItem } from '@/app/api/v1/_contracts/version';
 import { requestJson } from '@/components/api/request';
 
 /** Stores a draft; `revision` is the one believed to be stored, null when there is none. */
@@ -17,6 +17,6 @@ export function deleteDraft(recipeId: string): Promise<void> {
 }
 
 /** Saves the next version; refused when `parent` is no longer the newest. */
-export function createVersion(recipeId: string, version: CreateVersionRequest): Promise<Version> {
-  return requestJson<Version>(`/recipes/${recipeId}/versions`, { method: 'POST', body: version });
+export function createVersion(recipeId: string, version: CreateVersionRequest): Promise<VersionListItem> {
+  return requestJson<VersionListItem>(`/recipes/${recipeId}/versions`, { method: 'POST', body: version });
 }

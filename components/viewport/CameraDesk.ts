@@ -1,4 +1,4 @@
-import { MathUtils, OrthographicCamera, type PerspectiveCamera, Vector3 } from 'three';
+import { MathUtils, type PerspectiveCamera, Vector3 } from 'three';
 import type { OrbitControls } from 'three/examples/jsm/controls/OrbitControls.js';
 import type { RigScene, Vec3 } from '@/compiler';
 import { axisOf } from './Ground';
@@ -12,12 +12,24 @@ export interface Box {
 }
 
 /** Room left around what is framed, as a factor on its size. */
-const MARGIN = 1.25;
+const MARGIN = 1.12;
+
+/** The eight corners of a box. */
+function cornersOf({ low, high }: Box): readonly Vector3[] {
+  return [0, 1, 2, 3, 4, 5, 6, 7].map(
+    (corner) =>
+      new Vector3(
+        corner & 1 ? high[0] : low[0],
+        corner & 2 ? high[1] : low[1],
+        corner & 4 ? high[2] : low[2],
+      ),
+  );
+}
 
 /** Moves the camera of one viewport: standpoints, framing, and small steps for the keyboard. */
 export class CameraDesk {
   constructor(
-    private readonly camera: PerspectiveCamera | OrthographicCamera,
+    private readonly camera: PerspectiveCamera,
     private readonly controls: OrbitControls,
     private readonly scene: Pick<RigScene, 'up' | 'forward'>,
     private readonly redraw: () => void,
@@ -38,7 +50,7 @@ export class CameraDesk {
         // A hair off the vertical keeps "up" on the screen defined.
         return up.addScaledVector(forward, 1e-3).normalize();
       default:
-        return forward.addScaledVector(left, 0.75).addScaledVector(up, 0.45).normalize();
+        return forward.addScaledVector(left, 0.75).addScaledVector(up, 0.35).normalize();
     }
   }
 
@@ -52,21 +64,25 @@ export class CameraDesk {
     this.#frame(box, this.camera.position.clone().sub(this.controls.target).normalize());
   }
 
-  #frame({ low, high }: Box, direction: Vector3): void {
-    const from = new Vector3(...low);
-    const to = new Vector3(...high);
-    const radius = Math.max(from.distanceTo(to) / 2, 1e-6) * MARGIN;
-    this.controls.target.copy(from.add(to).multiplyScalar(0.5));
-    let distance = radius * 4;
-    if (this.camera instanceof OrthographicCamera) {
-      const { right, left, top, bottom } = this.camera;
-      this.camera.zoom = Math.min(right - left, top - bottom) / (2 * radius);
-    } else {
-      const half = MathUtils.degToRad(this.camera.fov) / 2;
-      const narrow = Math.min(1, this.camera.aspect);
-      distance = radius / Math.sin(half) / narrow;
-    }
-    this.camera.position.copy(this.controls.target).addScaledVector(direction, distance);
+  /** The least distance from the box's middle at which all its corners are in the picture. */
+  #distanceTo(box: Box, target: Vector3, direction: Vector3): number {
+    const right = new Vector3().crossVectors(this.camera.up, direction).normalize();
+    const upward = new Vector3().crossVectors(direction, right);
+    const tall = Math.tan(MathUtils.degToRad(this.camera.fov) / 2);
+    const wide = tall * this.camera.aspect;
+    const needs = cornersOf(box).map((corner) => {
+      const from = corner.sub(target);
+      const needed = Math.max(Math.abs(from.dot(right)) / wide, Math.abs(from.dot(upward)) / tall);
+      return needed * MARGIN + from.dot(direction);
+    });
+    return Math.max(...needs, 1e-6);
+  }
+
+  #frame(box: Box, direction: Vector3): void {
+    const target = new Vector3(...box.low).add(new Vector3(...box.high)).multiplyScalar(0.5);
+    const distance = this.#distanceTo(box, target, direction);
+    this.controls.target.copy(target);
+    this.camera.position.copy(target).addScaledVector(direction, distance);
     this.camera.near = distance / 200;
     this.camera.far = distance * 50;
     this.camera.updateProjectionMatrix();

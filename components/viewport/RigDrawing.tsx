@@ -9,6 +9,9 @@ import { Joints } from './Joints';
 import { strokeGeometry } from './strokes';
 
 const NO_ENDS: readonly number[] = [];
+const SIDES = ['left', 'right', 'centre'] as const;
+/** Width of the ink around a control's stroke, in pixels. */
+const CASING = 3.2;
 
 export interface RigDrawingProps {
   readonly drawing: Drawing;
@@ -47,14 +50,25 @@ export function RigDrawing({ drawing, colours, chosen }: RigDrawingProps) {
       <mesh geometry={strokes}>
         <meshBasicMaterial vertexColors side={DoubleSide} toneMapped={false} />
       </mesh>
-      <FatLines ends={drawing.controls.left} colour={colours.left} width={1.6} dash={null} />
+      {/* Sky blue and orange alone are too light on paper; an ink casing gives every stroke its contrast. */}
+      {SIDES.map((side) => (
+        <FatLines
+          key={side}
+          ends={drawing.controls[side]}
+          colour={colours.ink}
+          width={CASING}
+          dash={null}
+          opacity={0.55}
+        />
+      ))}
+      <FatLines ends={drawing.controls.left} colour={colours.left} width={1.8} dash={null} />
       <FatLines
         ends={drawing.controls.right}
         colour={colours.right}
         width={1.6}
         dash={[size * 0.012, size * 0.007]}
       />
-      <FatLines ends={drawing.controls.centre} colour={colours.centre} width={1.6} dash={null} />
+      <FatLines ends={drawing.controls.centre} colour={colours.centre} width={1.8} dash={null} />
       <FatLines ends={leaders} colour={colours.inkSoft} width={1.4} dash={[size * 0.003, size * 0.009]} />
       <FatLines ends={chosenOutlines} colour={colours.signal} width={3} dash={null} />
       <FatLines

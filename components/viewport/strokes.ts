@@ -67,7 +67,7 @@ export function strokeGeometry(
     const end = new Vector3(...to);
     const length = start.distanceTo(end);
     if (length === 0) continue;
-    const thick = Math.min(length * 0.09, drawing.size * 0.009);
+    const thick = Math.min(length * 0.1, drawing.size * 0.011);
     const pieces = side === 'right' ? DASHES : 1;
     for (let piece = 0; piece < pieces; piece += 1) {
       const a = piece / pieces;

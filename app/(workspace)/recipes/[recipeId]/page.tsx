@@ -1,29 +1,22 @@
 import type { Metadata } from 'next';
-import { notFound } from 'next/navigation';
 import { openRecipe } from '@/app/_server/operations/recipes/openRecipe';
 import { readRecipe } from '@/app/_server/operations/recipes/readRecipe';
 import { loadForPage } from '@/app/_server/session';
-import { recipePathSchema } from '@/app/api/v1/_contracts/recipe';
 import { versionNumberSchema } from '@/app/api/v1/_contracts/version';
 import { RecipeEditor } from '@/components/editor/RecipeEditor';
+import { recipeIdOf } from './recipeId';
 
 type Props = PageProps<'/recipes/[recipeId]'>;
 
-/** The recipe a path names; what cannot be an id names nothing. */
-async function recipeIdOf({ params }: Props): Promise<string> {
-  const path = recipePathSchema.safeParse(await params);
-  return path.success ? path.data.recipeId : notFound();
-}
-
 export async function generateMetadata(props: Props): Promise<Metadata> {
-  const recipeId = await recipeIdOf(props);
+  const recipeId = await recipeIdOf(props.params);
   const { title } = await loadForPage((caller) => readRecipe(caller, { recipeId }));
   return { title };
 }
 
 /** The editor of one recipe; `?version=2` shows an older version to look at only. */
 export default async function RecipePage(props: Props) {
-  const recipeId = await recipeIdOf(props);
+  const recipeId = await recipeIdOf(props.params);
   const asked = versionNumberSchema.safeParse((await props.searchParams).version);
   const { recipe, version, draft, bases, isEditable } = await loadForPage((caller) =>
     openRecipe(caller, { recipeId, number: asked.success ? asked.data : undefined }),

@@ -1,0 +1,85 @@
+import { type ComparedLine, type ComparedRow, compareTexts } from './compareTexts';
+
+function Line({ line, sign }: { readonly line: ComparedLine | null; readonly sign: string }) {
+  if (!line) return <td className="compared-none" colSpan={2} />;
+  return (
+    <>
+      <td className="compared-number">{line.number}</td>
+      <td className="compared-text">
+        <span aria-hidden className="compared-sign">
+          {sign}
+        </span>
+        {line.pieces.map(({ text, isChanged }, index) =>
+          isChanged ? (
+            // biome-ignore lint/suspicious/noArrayIndexKey: pieces of one line never move.
+            <mark key={index}>{text}</mark>
+          ) : (
+            // biome-ignore lint/suspicious/noArrayIndexKey: pieces of one line never move.
+            <span key={index}>{text}</span>
+          ),
+        )}
+      </td>
+    </>
+  );
+}
+
+const WORDS: Readonly<Record<ComparedRow['kind'], string>> = {
+  same: '',
+  changed: 'changed',
+  removed: 'removed',
+  added: 'added',
+};
+
+function RowTable({ rows }: { readonly rows: readonly ComparedRow[] }) {
+  return (
+    <table className="compared-table figures">
+      <tbody>
+        {rows.map((row) => (
+          <tr
+            key={`${row.before?.number ?? ''}-${row.after?.number ?? ''}`}
+            className={`compared compared-${row.kind}`}
+          >
+            <Line line={row.before} sign={row.kind === 'same' ? ' ' : '−'} />
+            <Line line={row.after} sign={row.kind === 'same' ? ' ' : '+'} />
+            <td className="sr-only">{WORDS[row.kind]}</td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+export interface TextComparisonProps {
+  readonly beforeTitle: string;
+  readonly before: string;
+  readonly afterTitle: string;
+  readonly after: string;
+}
+
+/** Two texts beside each other, by line and word; what is the same far from any change is folded. */
+export function TextComparison({ beforeTitle, before, afterTitle, after }: TextComparisonProps) {
+  const blocks = compareTexts(before, after);
+  if (before === after) return <p className="mt-6">Both texts are the same.</p>;
+  return (
+    <div className="compared-blocks mt-6">
+      <div className="compared-titles">
+        <p>{beforeTitle}</p>
+        <p>{afterTitle}</p>
+      </div>
+      {blocks.map(({ kind, rows }) => {
+        const first = rows[0];
+        const key = `${first?.before?.number ?? ''}-${first?.after?.number ?? ''}`;
+        return kind === 'rows' ? (
+          <RowTable key={key} rows={rows} />
+        ) : (
+          <details key={key}>
+            <summary className="compared-fold">
+              {rows.length} line{rows.length === 1 ? '' : 's'} the same
+            </summary>
+            <RowTable rows={rows} />
+          </details>
+        );
+      })}
+    </div>
+  );
+}
