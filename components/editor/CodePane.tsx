@@ -148,6 +148,7 @@ export function CodePane({
         quickSuggestions: { other: true, comments: false, strings: true },
         wordBasedSuggestions: 'off',
         stickyScroll: { enabled: false },
+        bracketPairColorization: { enabled: false },
       }}
     />
   );

@@ -1,6 +1,14 @@
 import { type ComparedLine, type ComparedRow, compareTexts } from './compareTexts';
 
-function Line({ line, sign }: { readonly line: ComparedLine | null; readonly sign: string }) {
+function Line({
+  line,
+  sign,
+  words,
+}: {
+  readonly line: ComparedLine | null;
+  readonly sign: string;
+  readonly words: string;
+}) {
   if (!line) return <td className="compared-none" colSpan={2} />;
   return (
     <>
@@ -9,6 +17,7 @@ function Line({ line, sign }: { readonly line: ComparedLine | null; readonly sig
         <span aria-hidden className="compared-sign">
           {sign}
         </span>
+        {words !== '' && <span className="sr-only">{words}: </span>}
         {line.pieces.map(({ text, isChanged }, index) =>
           isChanged ? (
             // biome-ignore lint/suspicious/noArrayIndexKey: pieces of one line never move.
@@ -23,25 +32,31 @@ function Line({ line, sign }: { readonly line: ComparedLine | null; readonly sig
   );
 }
 
-const WORDS: Readonly<Record<ComparedRow['kind'], string>> = {
-  same: '',
-  changed: 'changed',
-  removed: 'removed',
-  added: 'added',
+/** What a reader who cannot see the colours hears before a line. */
+const WORDS: Readonly<Record<ComparedRow['kind'], { readonly before: string; readonly after: string }>> = {
+  same: { before: '', after: '' },
+  changed: { before: 'before', after: 'after' },
+  removed: { before: 'removed', after: '' },
+  added: { before: '', after: 'added' },
 };
 
 function RowTable({ rows }: { readonly rows: readonly ComparedRow[] }) {
   return (
     <table className="compared-table figures">
+      <colgroup>
+        <col className="compared-number-column" />
+        <col />
+        <col className="compared-number-column" />
+        <col />
+      </colgroup>
       <tbody>
         {rows.map((row) => (
           <tr
             key={`${row.before?.number ?? ''}-${row.after?.number ?? ''}`}
             className={`compared compared-${row.kind}`}
           >
-            <Line line={row.before} sign={row.kind === 'same' ? ' ' : '−'} />
-            <Line line={row.after} sign={row.kind === 'same' ? ' ' : '+'} />
-            <td className="sr-only">{WORDS[row.kind]}</td>
+            <Line line={row.before} sign={row.kind === 'same' ? ' ' : '−'} words={WORDS[row.kind].before} />
+            <Line line={row.after} sign={row.kind === 'same' ? ' ' : '+'} words={WORDS[row.kind].after} />
           </tr>
         ))}
       </tbody>

@@ -15,10 +15,12 @@ export interface FatLinesProps {
   /** Lengths of dash and gap in scene units; null for an unbroken line. */
   readonly dash: readonly [number, number] | null;
   readonly opacity?: number;
+  /** Lies beneath whatever else is drawn at the same place: the casing of another line. */
+  readonly isCasing?: boolean;
 }
 
 /** Straight strokes of an even width on the screen, unbroken or dashed. */
-export function FatLines({ ends, colour, width, dash, opacity = 1 }: FatLinesProps) {
+export function FatLines({ ends, colour, width, dash, opacity = 1, isCasing = false }: FatLinesProps) {
   const invalidate = useThree((state) => state.invalidate);
   const [dashSize, gapSize] = dash ?? [1, 0];
   const isDashed = dash !== null;
@@ -40,9 +42,12 @@ export function FatLines({ ends, colour, width, dash, opacity = 1 }: FatLinesPro
     material.gapSize = gapSize;
     material.transparent = opacity < 1;
     material.opacity = opacity;
+    // A casing leaves no depth behind, so that its line, at the very same depth, is always drawn over it.
+    material.depthWrite = !isCasing;
+    lines.renderOrder = isCasing ? -1 : 0;
     material.needsUpdate = true;
     invalidate();
-  }, [lines, colour, width, isDashed, dashSize, gapSize, opacity, invalidate]);
+  }, [lines, colour, width, isDashed, dashSize, gapSize, opacity, isCasing, invalidate]);
 
   useEffect(
     () => () => {

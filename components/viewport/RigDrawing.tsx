@@ -55,10 +55,10 @@ export function RigDrawing({ drawing, colours, chosen }: RigDrawingProps) {
         <FatLines
           key={side}
           ends={drawing.controls[side]}
-          colour={colours.ink}
+          colour={colours.inkSoft}
           width={CASING}
           dash={null}
-          opacity={0.55}
+          isCasing
         />
       ))}
       <FatLines ends={drawing.controls.left} colour={colours.left} width={1.8} dash={null} />
