@@ -47,6 +47,27 @@ function pathOf(
   return { path, value };
 }
 
+/** What a schema can say about the name of a key. */
+const NAME_KEYWORDS: ReadonlySet<string> = new Set(['pattern', 'maxLength', 'enum']);
+
+/**
+ * Errors about the names of keys, marked with the key. The validator marks only those whose schema stands in place;
+ * behind a reference they look like errors of the map itself, right before the summary that has the key.
+ */
+function withKeyNames(errors: readonly ErrorObject[]): readonly ErrorObject[] {
+  const marked = [...errors];
+  errors.forEach(({ keyword, instancePath, params }, summary) => {
+    if (keyword !== 'propertyNames') return;
+    const propertyName = String(params.propertyName);
+    for (let index = summary - 1; index >= 0; index -= 1) {
+      const error = errors[index] as ErrorObject;
+      if (error.instancePath !== instancePath || !NAME_KEYWORDS.has(error.keyword)) return;
+      marked[index] = { ...error, propertyName };
+    }
+  });
+  return marked;
+}
+
 /**
  * Leaves one error for each root cause: of the branches of a point or place only the summary, and what lies deeper;
  * of a refused key name only the reason; of a missing kind only one word.
@@ -100,7 +121,7 @@ function check<T>(
   const poisoned = new Set(document.refusedEntries);
   const fits = validate(whole);
   if (fits && poisoned.size === 0) return { value: whole as unknown as T, poisoned, isSound: true };
-  for (const error of fits ? [] : rootCauses(validate.errors ?? [])) {
+  for (const error of fits ? [] : rootCauses(withKeyNames(validate.errors ?? []))) {
     const { path, value } = pathOf(error.instancePath, whole);
     if (document.refusedEntries.has(path.slice(0, 2).join('/'))) continue;
     const shape: ShapeError = { error, path, value, schema };

@@ -4,9 +4,8 @@ import type { FindingList } from '../findings/FindingList';
 import type { MergedDocument } from '../merge/types';
 import type { JsonValue, Path } from '../syntax/types';
 import { schemaFindings } from './findings';
+import { partKinds, schemaAt } from './schemaAt';
 import { kindOf, patternWords, placeWords, typeWords } from './shapeWords';
-
-type SchemaNode = { readonly [key: string]: unknown };
 
 /** A validator's error with the path it is about, and what the schema and the document hold there. */
 export interface ShapeError {
@@ -17,21 +16,6 @@ export interface ShapeError {
 }
 
 const LISTED_KEYS = 12;
-
-function schemaNodeAt(root: unknown, schemaPath: string): SchemaNode {
-  let node: unknown = root;
-  for (const step of schemaPath.replace(/^.*#\/?/, '').split('/')) {
-    if (step === '') continue;
-    const key = decodeURIComponent(step).replaceAll('~1', '/').replaceAll('~0', '~');
-    node = typeof node === 'object' && node !== null ? (node as SchemaNode)[key] : undefined;
-  }
-  return typeof node === 'object' && node !== null ? (node as SchemaNode) : {};
-}
-
-function allowedKeys({ error, schema }: ShapeError): readonly string[] {
-  const owner = schemaNodeAt(schema, error.schemaPath.replace(/\/[^/]*$/, ''));
-  return Object.keys((owner.properties as SchemaNode | undefined) ?? {});
-}
 
 function quoteList(values: readonly unknown[]): string {
   const shown = values
@@ -48,7 +32,7 @@ function didYouMean(close: readonly string[]): string {
 
 /** Turns one validator error into a finding in words at its exact place. */
 export function reportShapeError(shape: ShapeError, document: MergedDocument, findings: FindingList): void {
-  const { error, path, value } = shape;
+  const { error, path, value, schema } = shape;
   const parameters = error.params as Readonly<Record<string, unknown>>;
   const what = placeWords(path);
   const span = () => document.spanAt(path);
@@ -67,7 +51,7 @@ export function reportShapeError(shape: ShapeError, document: MergedDocument, fi
       schemaFindings,
       'not-one-of',
       place,
-      { value: chosen, what: placeWords(at.length > path.length ? path : at), allowed: quoteList(allowed) },
+      { value: chosen, what: placeWords(part === 'key' ? path : at), allowed: quoteList(allowed) },
       only !== undefined && close.length === 1
         ? {
             help: `${didYouMean(close)} Allowed are ${quoteList(allowed)}.`,
@@ -100,7 +84,7 @@ export function reportShapeError(shape: ShapeError, document: MergedDocument, fi
   switch (error.keyword) {
     case 'additionalProperties': {
       const key = String(parameters.additionalProperty);
-      const known = allowedKeys(shape);
+      const known = Object.keys(schemaAt(schema, document.value, path).properties ?? {});
       const close = closestNames(key, known);
       const [only] = close;
       const place = document.spanAt([...path, key], 'key');
@@ -134,10 +118,16 @@ export function reportShapeError(shape: ShapeError, document: MergedDocument, fi
     case 'discriminator': {
       const key = String(parameters.tag);
       const at = [...path, key];
-      if (parameters.error === 'tag') {
+      if (parameters.error !== 'tag') {
+        reportChoice(String(parameters.tagValue), partKinds(), at, 'value');
+      } else if (parameters.tagValue === undefined) {
         findings.report(schemaFindings, 'missing-key', document.spanAt(path, 'key'), { what, key });
       } else {
-        reportChoice(String(parameters.tagValue), partKinds(shape.schema), at, 'value');
+        findings.report(schemaFindings, 'wrong-type', document.spanAt(at), {
+          what: placeWords(at),
+          found: kindOf(parameters.tagValue as JsonValue),
+          wanted: typeWords('string'),
+        });
       }
       return;
     }
@@ -190,7 +180,7 @@ export function reportShapeError(shape: ShapeError, document: MergedDocument, fi
       return;
     }
     case 'anyOf':
-      reportPlace(what, value, span(), findings);
+      reportPlace(what, value, schemaAt(schema, document.value, path).title === 'Place', span(), findings);
       return;
     default:
       findings.report(schemaFindings, 'wrong-type', span(), {
@@ -205,6 +195,7 @@ export function reportShapeError(shape: ShapeError, document: MergedDocument, fi
 function reportPlace(
   what: string,
   value: JsonValue | undefined,
+  mayBeNamed: boolean,
   span: ReturnType<MergedDocument['spanAt']>,
   findings: FindingList,
 ): void {
@@ -218,7 +209,9 @@ function reportPlace(
   } else if (typeof value === 'string') {
     findings.report(schemaFindings, 'text-not-legal', span, {
       value: value.slice(0, 80),
-      wanted: 'three numbers in brackets, a landmark or joint, or an expression that begins with =',
+      wanted: mayBeNamed
+        ? 'three numbers in brackets, a landmark or joint, or an expression that begins with ='
+        : 'three numbers in brackets, or an expression that begins with =',
     });
   } else {
     findings.report(schemaFindings, 'wrong-type', span, {
@@ -227,15 +220,4 @@ function reportPlace(
       wanted: 'three numbers in brackets',
     });
   }
-}
-
-function partKinds(schema: unknown): readonly string[] {
-  const definitions = (schema as SchemaNode).$defs as SchemaNode;
-  const parts = (definitions.Part as SchemaNode).oneOf as readonly { readonly $ref: string }[];
-  return parts.map(({ $ref }) => {
-    const properties = schemaNodeAt(schema, $ref).properties as {
-      readonly kind: { readonly const: string };
-    };
-    return properties.kind.const;
-  });
 }
