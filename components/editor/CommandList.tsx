@@ -1,7 +1,7 @@
 'use client';
 
 import { Dialog } from 'radix-ui';
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 
 /** Something a person can do on the page. */
 export interface Command {
@@ -22,16 +22,26 @@ export function CommandList({
   const [search, setSearch] = useState('');
   const words = search.trim().toLowerCase();
   const found = commands.filter((command) => command.words.toLowerCase().includes(words));
+  const chosen = useRef<Command | null>(null);
   const run = (command: Command | undefined): void => {
     if (!command) return;
+    chosen.current = command;
     onClose();
-    command.run();
   };
   return (
     <Dialog.Root open onOpenChange={(open) => !open && onClose()}>
       <Dialog.Portal>
         <Dialog.Overlay className="dialog-veil" />
-        <Dialog.Content className="dialog-sheet" aria-describedby={undefined}>
+        <Dialog.Content
+          className="dialog-sheet"
+          aria-describedby={undefined}
+          onCloseAutoFocus={(event) => {
+            // The list gives the keyboard back to where it came from, unless a command takes it elsewhere.
+            if (!chosen.current) return;
+            event.preventDefault();
+            chosen.current.run();
+          }}
+        >
           <Dialog.Title className="dialog-title">What would you like to do?</Dialog.Title>
           <form
             onSubmit={(event) => {

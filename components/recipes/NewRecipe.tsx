@@ -99,22 +99,24 @@ export function NewRecipe({ slug, samples }: NewRecipeProps) {
                 <span className="field-error">Say what people call it, in at most 120 characters.</span>
               )}
             </label>
-            <label className="grid gap-1">
-              Name
-              <input
-                className="plain-input figures"
-                aria-invalid={errors.name !== undefined || isTaken}
-                aria-describedby="name-help"
-                {...form.register('name')}
-              />
-              <span id="name-help" className="text-ink-soft text-sm">
+            <div className="grid gap-1">
+              <label className="grid gap-1">
+                Name
+                <input
+                  className="plain-input figures"
+                  aria-invalid={errors.name !== undefined || isTaken}
+                  aria-describedby="name-help name-error"
+                  {...form.register('name')}
+                />
+              </label>
+              <p id="name-help" className="text-ink-soft text-sm">
                 Begins every name in the scene: lower-case letters, digits and underscores, a letter first.
-              </span>
-              {errors.name && <span className="field-error">Write a name such as old_hare.</span>}
-              {isTaken && (
-                <span className="field-error">This show has a recipe of that name. Choose another.</span>
-              )}
-            </label>
+              </p>
+              <p id="name-error" className="field-error">
+                {errors.name && 'Write a name such as old_hare.'}
+                {isTaken && 'This show has a recipe of that name. Choose another.'}
+              </p>
+            </div>
             {create.isError && !isTaken && (
               <p role="alert" className="finding finding-error px-3 py-2">
                 {refusalWords(create.error)}
