@@ -27,9 +27,9 @@ export interface CompileRequest {
   readonly houses?: Readonly<Record<string, SourceText>>;
   /** Recipe versions by `name@version`, for `extends`. */
   readonly bases?: Readonly<Record<string, SourceText>>;
-  /** The cast member to build; without one, the recipe under its own name and default parameters. */
+  /** The cast member to build; without one, or without a name, the recipe under its own name. */
   readonly character?: {
-    readonly name: string;
+    readonly name?: string;
     readonly params?: Readonly<Record<string, number>>;
     readonly patch?: SourceText;
   };

@@ -1,0 +1,26 @@
+import { mkdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import type { BuildFile } from '../../compiler/index';
+import { WrongUse } from './WrongUse';
+
+/**
+ * Writes files into a folder, made if need be. Each is written beside its place and then moved there, and none is
+ * moved before all are written, so that nothing half-written is ever seen under its name.
+ */
+export function writeFiles(folder: string, files: readonly BuildFile[]): void {
+  const drafts = files.map(({ name, text }) => ({
+    text,
+    place: join(folder, name),
+    draft: join(folder, `.${name}.${process.pid}`),
+  }));
+  try {
+    mkdirSync(folder, { recursive: true });
+    for (const { draft, text } of drafts) writeFileSync(draft, text);
+    for (const { draft, place } of drafts) renameSync(draft, place);
+  } catch (error) {
+    for (const { draft } of drafts) rmSync(draft, { force: true });
+    throw new WrongUse(
+      `${folder} cannot be written to: ${(error as NodeJS.ErrnoException).code ?? 'unknown'}.`,
+    );
+  }
+}
