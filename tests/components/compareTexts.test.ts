@@ -4,7 +4,8 @@ import { type ComparedLine, type ComparedRow, compareTexts } from '@/components/
 
 const rowsOf = (before: string, after: string): readonly ComparedRow[] =>
   compareTexts(before, after).flatMap(({ rows }) => rows);
-const textOf = (line: ComparedLine | null): string | null => line?.pieces.map(({ text }) => text).join('');
+const textOf = (line: ComparedLine | null): string | null =>
+  line?.pieces.map(({ text }) => text).join('') ?? null;
 const short = (before: string, after: string) =>
   rowsOf(before, after).map((row) => [row.kind, textOf(row.before), textOf(row.after)]);
 
