@@ -13,7 +13,12 @@ export function templateNames(): readonly string[] {
 export function templatesModule(): string {
   const entries = templateNames().map((name) => {
     const text = readFileSync(`templates/slipway/${name}.hbs`, 'utf8');
-    const compiled = Handlebars.precompile(text, { strict: true, noEscape: true, knownHelpersOnly: true });
+    const compiled = Handlebars.precompile(text, {
+      strict: true,
+      noEscape: true,
+      knownHelpersOnly: true,
+      data: false,
+    });
     return `  ${JSON.stringify(name)}: Handlebars.template(${String(compiled)}),`;
   });
   return [

@@ -11,6 +11,7 @@ import type { RelatedPlace } from '../findings/Finding';
 import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
 import type { Path } from '../syntax/types';
+import type { ExpressionNames } from './namesInExpressions';
 
 /** What a rule may read and how it speaks. Rules cannot change anything. */
 export interface RuleContext {
@@ -19,6 +20,8 @@ export interface RuleContext {
   readonly stage: ResolveContext;
   /** False when entries were refused: then nothing can be called missing or unused. */
   readonly isWhole: boolean;
+  /** Names that expressions read, listed when first asked for. */
+  expressionNames(): ExpressionNames;
   /** Reports the rule's own code at a path of the recipe. */
   report(
     path: Path,

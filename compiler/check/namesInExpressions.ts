@@ -1,18 +1,24 @@
 import type { JsonValue } from '../syntax/types';
 
-/** Names read as `<scope>.<name>` in any expression of a document. */
-export function namesInExpressions(
-  value: JsonValue | undefined,
-  scope: 'params' | 'landmarks',
-): ReadonlySet<string> {
-  const names = new Set<string>();
-  const pattern = new RegExp(`\\b${scope}\\s*\\.\\s*([a-z][a-z0-9_]*)`, 'g');
+/** Names that a document's expressions read. */
+export interface ExpressionNames {
+  readonly params: ReadonlySet<string>;
+  readonly landmarks: ReadonlySet<string>;
+}
+
+const READ = /\b(params|landmarks)\s*\.\s*([a-z][a-z0-9_]*)/g;
+
+/** Lists the names read as `params.name` and `landmarks.name` in all expressions of a document. */
+export function namesInExpressions(value: JsonValue | undefined): ExpressionNames {
+  const names = { params: new Set<string>(), landmarks: new Set<string>() };
   const pending: (JsonValue | undefined)[] = [value];
   for (let item = pending.pop(); item !== undefined; item = pending.pop()) {
     if (typeof item === 'string') {
-      if (item.startsWith('=')) for (const [, name] of item.matchAll(pattern)) names.add(name as string);
+      if (!item.startsWith('=')) continue;
+      for (const [, scope, name] of item.matchAll(READ))
+        names[scope as keyof ExpressionNames].add(name as string);
     } else if (typeof item === 'object' && item !== null) {
-      for (const child of Object.values(item)) pending.push(child);
+      for (const key in item) pending.push((item as { [key: string]: JsonValue })[key]);
     }
   }
   return names;

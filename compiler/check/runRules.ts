@@ -2,16 +2,23 @@ import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import { fillTemplate } from '../findings/FindingList';
 import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
+import { type ExpressionNames, namesInExpressions } from './namesInExpressions';
 import { RULES } from './rules/index';
 
 /** Runs every rule over the resolved recipe in one walk. */
 export function runRules(recipe: EvaluatedRecipe, resolved: ResolvedRecipe, stage: ResolveContext): void {
+  let names: ExpressionNames | null = null;
+  const expressionNames = (): ExpressionNames => {
+    names ??= namesInExpressions(stage.document.value);
+    return names;
+  };
   const handlers = RULES.map((rule) =>
     rule.create({
       recipe,
       resolved,
       stage,
       isWhole: stage.poisoned.size === 0,
+      expressionNames,
       report(path, parameters, more = {}) {
         stage.findings.add({
           code: rule.code,

@@ -8,7 +8,9 @@ import { stepView } from './stepView';
  * lines before it and the SHA-256 of their bytes. The same steps always give the same bytes.
  */
 export function emitScript(steps: readonly Step[]): string {
-  let script = 'slipway 1\n';
-  for (const step of steps) script += templates[step.verb](stepView(step));
+  // Joined once: a text grown line by line is a chain of pieces that hashing would have to put together.
+  const lines = ['slipway 1\n'];
+  for (const step of steps) lines.push(templates[step.verb](stepView(step)));
+  const script = lines.join('');
   return `${script}end steps=${steps.length + 1} sha256="${sha256Hex(script)}"\n`;
 }

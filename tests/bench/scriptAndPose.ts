@@ -2,14 +2,9 @@ import { emitScript } from '@/compiler/emit/emitScript';
 import { planSteps } from '@/compiler/plan/planSteps';
 import { createPoser } from '@/compiler/pose/createPoser';
 import { runScript } from '@/compiler/slipway/runScript';
+import type { BenchRow } from './BenchRow';
 import { makeLargeRig } from './largeRig';
-
-export interface BenchRow {
-  readonly name: string;
-  readonly value: number;
-  readonly goal: number;
-  readonly unit: string;
-}
+import { median } from './median';
 
 const ROUNDS = 15;
 
@@ -21,8 +16,7 @@ function medianMilliseconds(calls: number, task: () => void): number {
     for (let call = 0; call < calls; call += 1) task();
     if (round >= ROUNDS) times.push((performance.now() - start) / calls);
   }
-  times.sort((a, b) => a - b);
-  return times[Math.floor(times.length / 2)] ?? Number.NaN;
+  return median(times);
 }
 
 /** Times of a rig of 150 joints: posing it, emitting its script, running the script. */

@@ -1,5 +1,4 @@
 import type { PlaceReference } from '../../expand/types';
-import { namesInExpressions } from '../namesInExpressions';
 import type { Rule } from '../Rule';
 
 /** A landmark that nothing uses is measured for nothing, or stands for a misspelt name elsewhere. */
@@ -22,7 +21,7 @@ export const landmarkUnused: Rule = {
       },
       finish() {
         if (!context.isWhole) return;
-        const inExpressions = namesInExpressions(context.stage.document.value, 'landmarks');
+        const inExpressions = context.expressionNames().landmarks;
         for (const name of Object.keys(context.recipe.landmarks ?? {})) {
           if (!used.has(name) && !inExpressions.has(name))
             context.report(['landmarks', name], { name }, { part: 'key' });

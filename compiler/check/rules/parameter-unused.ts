@@ -1,4 +1,3 @@
-import { namesInExpressions } from '../namesInExpressions';
 import type { Rule } from '../Rule';
 
 /** A parameter that no expression reads changes nothing when a roster varies it. */
@@ -13,7 +12,7 @@ export const parameterUnused: Rule = {
     return {
       finish() {
         if (!context.isWhole) return;
-        const read = namesInExpressions(context.stage.document.value, 'params');
+        const read = context.expressionNames().params;
         for (const name of Object.keys(context.recipe.params ?? {})) {
           if (!read.has(name)) context.report(['params', name], { name }, { part: 'key' });
         }

@@ -26,10 +26,10 @@ export const templates = {
     + ((stack1 = alias2(alias1(depth0, "name", {"start":{"line":1,"column":27},"end":{"line":1,"column":31}} ), depth0)) != null ? stack1 : "")
     + " default="
     + ((stack1 = alias2(alias1(depth0, "default", {"start":{"line":1,"column":44},"end":{"line":1,"column":51}} ), depth0)) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"min"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":53},"end":{"line":1,"column":83}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"max"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":83},"end":{"line":1,"column":113}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"min"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"loc":{"start":{"line":1,"column":53},"end":{"line":1,"column":83}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"max"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"loc":{"start":{"line":1,"column":83},"end":{"line":1,"column":113}}})) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "constrain": Handlebars.template({"0":function(container,depth0,helpers,partials,data) {
     var stack1;
 
@@ -57,9 +57,9 @@ export const templates = {
     + ((stack1 = alias2(alias1(depth0, "weights", {"start":{"line":1,"column":97},"end":{"line":1,"column":104}} ), depth0)) != null ? stack1 : "")
     + " keep_offset="
     + ((stack1 = alias2(alias1(depth0, "keep_offset", {"start":{"line":1,"column":121},"end":{"line":1,"column":132}} ), depth0)) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"blend"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":134},"end":{"line":1,"column":170}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(depth0 != null ? depth0 : (container.nullContext || {}),lookupProperty(depth0,"blend"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"loc":{"start":{"line":1,"column":134},"end":{"line":1,"column":170}}})) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "control": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -86,7 +86,7 @@ export const templates = {
     + " size="
     + ((stack1 = alias2(alias1(depth0, "size", {"start":{"line":1,"column":166},"end":{"line":1,"column":170}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "entry": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -97,7 +97,7 @@ export const templates = {
     + " value="
     + ((stack1 = alias2(alias1(depth0, "value", {"start":{"line":1,"column":41},"end":{"line":1,"column":46}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "group": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -118,7 +118,7 @@ export const templates = {
     + " turn="
     + ((stack1 = alias2(alias1(depth0, "turn", {"start":{"line":1,"column":118},"end":{"line":1,"column":122}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "joint": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -141,7 +141,7 @@ export const templates = {
     + " order="
     + ((stack1 = alias2(alias1(depth0, "order", {"start":{"line":1,"column":133},"end":{"line":1,"column":138}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "limit": Handlebars.template({"0":function(container,depth0,helpers,partials,data) {
     var stack1;
 
@@ -164,10 +164,10 @@ export const templates = {
     + ((stack1 = alias2(alias1(depth0, "quotedName", {"start":{"line":1,"column":8},"end":{"line":1,"column":18}} ), depth0)) != null ? stack1 : "")
     + " channel="
     + ((stack1 = alias2(alias1(depth0, "channel", {"start":{"line":1,"column":31},"end":{"line":1,"column":38}} ), depth0)) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"min"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":40},"end":{"line":1,"column":70}}})) != null ? stack1 : "")
-    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"max"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"data":data,"loc":{"start":{"line":1,"column":70},"end":{"line":1,"column":100}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"min"),{"name":"if","hash":{},"fn":container.program(0, data, 0),"inverse":container.noop,"loc":{"start":{"line":1,"column":40},"end":{"line":1,"column":70}}})) != null ? stack1 : "")
+    + ((stack1 = lookupProperty(helpers,"if").call(alias3,lookupProperty(depth0,"max"),{"name":"if","hash":{},"fn":container.program(1, data, 0),"inverse":container.noop,"loc":{"start":{"line":1,"column":70},"end":{"line":1,"column":100}}})) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "line": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -194,7 +194,7 @@ export const templates = {
     + " style="
     + ((stack1 = alias2(alias1(depth0, "style", {"start":{"line":1,"column":156},"end":{"line":1,"column":161}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "lock": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -203,7 +203,7 @@ export const templates = {
     + " channels="
     + ((stack1 = alias2(alias1(depth0, "channels", {"start":{"line":1,"column":31},"end":{"line":1,"column":39}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "note": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -224,7 +224,7 @@ export const templates = {
     + " turn="
     + ((stack1 = alias2(alias1(depth0, "turn", {"start":{"line":1,"column":117},"end":{"line":1,"column":121}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "scene": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -247,7 +247,7 @@ export const templates = {
     + " compiler="
     + ((stack1 = alias2(alias1(depth0, "compiler", {"start":{"line":1,"column":164},"end":{"line":1,"column":172}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "show": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -258,7 +258,7 @@ export const templates = {
     + " selectable="
     + ((stack1 = alias2(alias1(depth0, "selectable", {"start":{"line":1,"column":49},"end":{"line":1,"column":59}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
   "solve": Handlebars.template({"compiler":[8,">= 4.3.0"],"main":function(container,depth0,helpers,partials,data) {
     var stack1, alias1=container.strict, alias2=container.lambda;
 
@@ -281,5 +281,5 @@ export const templates = {
     + " blend="
     + ((stack1 = alias2(alias1(depth0, "blend", {"start":{"line":1,"column":121},"end":{"line":1,"column":126}} ), depth0)) != null ? stack1 : "")
     + "\n";
-},"useData":true}),
+}}),
 };
