@@ -33,5 +33,5 @@ if (values.json !== undefined) {
 if (values.keep) {
   const machine = `${cpus().length} cores, Node ${process.version}`;
   const head = `# What was measured last\n\nBy \`npm run bench -- --keep\` on a machine with ${machine}. Medians; ratios are taken turn by turn in one run.\n\n`;
-  writeFileSync(fileURLToPath(new URL('./RESULTS.md', import.meta.url)), `${head}${table}\n`);
+  writeFileSync('tests/bench/RESULTS.md', `${head}${table}\n`);
 }
