@@ -53,6 +53,13 @@ export function applyTheme(isNight: boolean): void {
       'editorSuggestWidget.selectedForeground': colours.ink,
       'editorSuggestWidget.highlightForeground': colours.signal,
       'editorGutter.background': colours.sheet,
+      // Brackets in ink: colour in the text means side or finding, nothing else.
+      'editorBracketHighlight.foreground1': colours.inkSoft,
+      'editorBracketHighlight.foreground2': colours.inkSoft,
+      'editorBracketHighlight.foreground3': colours.inkSoft,
+      'editorBracketHighlight.foreground4': colours.inkSoft,
+      'editorBracketHighlight.foreground5': colours.inkSoft,
+      'editorBracketHighlight.foreground6': colours.inkSoft,
       'scrollbarSlider.background': `${colours.rule}aa`,
       focusBorder: colours.signal,
     },
