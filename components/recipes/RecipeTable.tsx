@@ -105,7 +105,7 @@ export function RecipeTable({ slug, list, query, mayWrite }: RecipeTableProps) {
               </td>
               <td className="text-right">
                 <Link className="plain-action" href={`/recipes/${id}/versions`}>
-                  Versions<span className="sr-only"> of {title}</span>
+                  Versions <span className="sr-only">of {title}</span>
                 </Link>
               </td>
             </tr>
