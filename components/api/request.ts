@@ -6,6 +6,8 @@ export interface RequestOptions {
   readonly body?: unknown;
   readonly headers?: Readonly<Record<string, string>>;
   readonly signal?: AbortSignal;
+  /** Whether the request goes on when its page is left; only for small bodies. */
+  readonly keepalive?: boolean;
 }
 
 /**
@@ -13,9 +15,10 @@ export interface RequestOptions {
  * that cannot be reached throws what `fetch` throws.
  */
 export async function requestJson<Answer>(path: string, options: RequestOptions = {}): Promise<Answer> {
-  const { method = 'GET', body, headers = {}, signal } = options;
+  const { method = 'GET', body, headers = {}, signal, keepalive = false } = options;
   const response = await fetch(`/api/v1${path}`, {
     method,
+    keepalive,
     headers: { ...headers, ...(body === undefined ? {} : { 'content-type': 'application/json' }) },
     ...(body === undefined ? {} : { body: JSON.stringify(body) }),
     ...(signal ? { signal } : {}),

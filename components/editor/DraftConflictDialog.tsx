@@ -2,7 +2,7 @@
 
 import { Dialog } from 'radix-ui';
 import type { Draft } from '@/app/api/v1/_contracts/draft';
-import { TwoSides } from './TwoSides';
+import { TextComparison } from '@/components/versions/TextComparison';
 
 export interface DraftConflictDialogProps {
   readonly other: Draft | null;
@@ -28,7 +28,12 @@ export function DraftConflictDialog({ other, text, onKeepMine, onTakeOther }: Dr
               : 'The other window has saved a version or dropped the draft. You can go on with your text as a new draft.'}
           </Dialog.Description>
           {other && (
-            <TwoSides leftTitle="The other window" left={other.text} rightTitle="This window" right={text} />
+            <TextComparison
+              beforeTitle="The other window"
+              before={other.text}
+              afterTitle="This window"
+              after={text}
+            />
           )}
           <div className="mt-4 flex flex-wrap gap-3">
             <button type="button" className="action action-main" onClick={onKeepMine}>

@@ -17,11 +17,12 @@ function words({ state, isReadOnly, restored, isChanged }: DraftWordsProps): str
       return 'Storing your draft…';
     case 'stored':
       return `${restored ? 'Your draft' : 'Draft'} is stored (${new Date(state.at).toISOString().slice(11, 19)} UTC).`;
-    case 'unreachable':
-      return 'The server cannot be reached. Go on typing; your draft is stored as soon as it can be.';
+    case 'failed':
+    case 'refused':
+      return state.words;
     case 'conflict':
       return 'Another window changed this draft.';
-    default:
+    case 'same':
       return isChanged ? 'Changed…' : 'Same as the saved version.';
   }
 }

@@ -14,7 +14,7 @@ import type { CodePaneHandle } from './CodePane';
 import { type Command, CommandList } from './CommandList';
 import { DraftConflictDialog } from './DraftConflictDialog';
 import { DraftWords } from './DraftWords';
-import { deleteDraft } from './editorApi';
+import { createVersion, readVersion } from './editorApi';
 import { countFindings, FindingsPane } from './FindingsPane';
 import { Panes } from './Panes';
 import { SaveVersionDialog } from './SaveVersionDialog';
@@ -75,10 +75,18 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
   const goTo = useCallback((span: Span) => code.current?.goTo(span), []);
   const applyFix = useCallback((fix: Fix) => code.current?.applyFix(fix), []);
 
-  const backToSaved = async (): Promise<void> => {
-    await deleteDraft(recipe.id).catch(() => undefined);
+  const backToSaved = (): Promise<void> => {
     setText(version.text);
-    keeper.takeOther(null);
+    return keeper.goOnFrom(version.text);
+  };
+  const takeTheirs = async (number: number): Promise<void> => {
+    const theirs = await readVersion(recipe.id, number);
+    // As an edit, so that undo brings one's own text back.
+    setText(theirs.text);
+    setVersion(theirs);
+    setIsSaving(false);
+    await keeper.goOnFrom(theirs.text);
+    router.refresh();
   };
 
   const commands = useMemo<readonly Command[]>(() => {
@@ -248,18 +256,14 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
           parent={version.number}
           text={text}
           errorCount={errorCount}
-          onClose={() => setIsSaving(false)}
+          save={(wanted, key) => keeper.during(() => createVersion(recipe.id, wanted, key))}
           onSaved={(saved) => {
             setVersion({ ...saved, text });
-            keeper.forget();
             setIsSaving(false);
             router.refresh();
           }}
-          onTakeTheirs={(newest) => {
-            setText(newest.text);
-            setIsSaving(false);
-            router.refresh();
-          }}
+          takeTheirs={takeTheirs}
+          onClose={() => setIsSaving(false)}
         />
       )}
       {keeper.state.kind === 'conflict' && (

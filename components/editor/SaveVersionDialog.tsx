@@ -2,35 +2,52 @@
 
 import { useMutation } from '@tanstack/react-query';
 import { Dialog } from 'radix-ui';
-import { type FormEvent, useState } from 'react';
-import type { NewestVersion, VersionListItem } from '@/app/api/v1/_contracts/version';
+import { type FormEvent, useRef, useState } from 'react';
+import type { CreateVersionRequest, NewestVersion, VersionListItem } from '@/app/api/v1/_contracts/version';
 import { ApiProblem } from '@/components/api/ApiProblem';
-import { createVersion } from './editorApi';
-import { TwoSides } from './TwoSides';
+import { TextComparison } from '@/components/versions/TextComparison';
 
 export interface SaveVersionDialogProps {
   readonly recipeId: string;
   readonly parent: number;
   readonly text: string;
   readonly errorCount: number;
+  /** Saves; the same key is given again when the same save is tried again. */
+  save(version: CreateVersionRequest, key: string): Promise<VersionListItem>;
   onSaved(version: VersionListItem): void;
-  onTakeTheirs(newest: NewestVersion): void;
+  /** Goes on from the version that somebody else saved. */
+  takeTheirs(number: number): Promise<void>;
   onClose(): void;
+}
+
+function failureWords(error: unknown): string {
+  return error instanceof ApiProblem
+    ? error.problem.detail
+    : 'The server cannot be reached. Your text is still here; try again.';
 }
 
 /** Asks what changed and saves the next version; when somebody was quicker, shows both sides first. */
 export function SaveVersionDialog(props: SaveVersionDialogProps) {
-  const { recipeId, parent, text, errorCount, onSaved, onTakeTheirs, onClose } = props;
+  const { recipeId, parent, text, errorCount, onSaved, onClose } = props;
   const [message, setMessage] = useState('');
   const [newest, setNewest] = useState<NewestVersion | null>(null);
+  const attempt = useRef({ asked: '', key: '' });
   const save = useMutation({
-    mutationFn: () => createVersion(recipeId, { parent: newest?.number ?? parent, message, text }),
+    mutationFn: () => {
+      const version = { parent: newest?.number ?? parent, message, text };
+      const asked = JSON.stringify(version);
+      if (attempt.current.asked !== asked) attempt.current = { asked, key: crypto.randomUUID() };
+      return props.save(version, attempt.current.key);
+    },
     onSuccess: onSaved,
     onError(error) {
       if (error instanceof ApiProblem && error.problem.newest) setNewest(error.problem.newest);
     },
   });
+  const take = useMutation({ mutationFn: props.takeTheirs });
   const isStale = save.error instanceof ApiProblem && save.error.problem.code === 'stale-parent';
+  const isBusy = save.isPending || take.isPending;
+  const failure = take.error ?? (isStale ? null : save.error);
 
   const submit = (event: FormEvent): void => {
     event.preventDefault();
@@ -38,7 +55,7 @@ export function SaveVersionDialog(props: SaveVersionDialogProps) {
   };
 
   return (
-    <Dialog.Root open onOpenChange={(open) => !open && onClose()}>
+    <Dialog.Root open onOpenChange={(open) => !open && !isBusy && onClose()}>
       <Dialog.Portal>
         <Dialog.Overlay className="dialog-veil" />
         <Dialog.Content className={newest ? 'dialog-sheet dialog-sheet-wide' : 'dialog-sheet'}>
@@ -49,12 +66,22 @@ export function SaveVersionDialog(props: SaveVersionDialogProps) {
               : 'A version is kept for good. Say in a line what changed, for those who read it later.'}
           </Dialog.Description>
           {newest && (
-            <TwoSides
-              leftTitle={`Version ${newest.number}, ${newest.author.name}`}
-              left={newest.text}
-              rightTitle="Yours"
-              right={text}
-            />
+            <>
+              <TextComparison
+                beforeTitle={`Version ${newest.number}, ${newest.author.name}`}
+                before={newest.text}
+                afterTitle="Yours"
+                after={text}
+              />
+              <a
+                className="plain-action mt-3 inline-block"
+                href={`/recipes/${recipeId}/compare?from=${parent}&to=${newest.number}`}
+                target="_blank"
+                rel="noopener"
+              >
+                See what changed from version {parent} to {newest.number} (in a new window)
+              </a>
+            </>
           )}
           <form onSubmit={submit} className="mt-4 grid gap-3">
             {errorCount > 0 && (
@@ -73,19 +100,13 @@ export function SaveVersionDialog(props: SaveVersionDialogProps) {
                 onChange={(event) => setMessage(event.target.value)}
               />
             </label>
-            {save.isError && !isStale && (
+            {failure && (
               <p role="alert" className="text-signal">
-                {save.error instanceof ApiProblem
-                  ? save.error.problem.detail
-                  : 'The server cannot be reached. Your text is still here; try again.'}
+                {failureWords(failure)}
               </p>
             )}
             <div className="flex flex-wrap gap-3">
-              <button
-                type="submit"
-                className="action action-main"
-                disabled={save.isPending || message.trim() === ''}
-              >
+              <button type="submit" className="action action-main" disabled={isBusy || message.trim() === ''}>
                 {save.isPending
                   ? 'Saving…'
                   : newest
@@ -93,12 +114,17 @@ export function SaveVersionDialog(props: SaveVersionDialogProps) {
                     : 'Save version'}
               </button>
               {newest && (
-                <button type="button" className="action" onClick={() => onTakeTheirs(newest)}>
+                <button
+                  type="button"
+                  className="action"
+                  disabled={isBusy}
+                  onClick={() => take.mutate(newest.number)}
+                >
                   Go on from version {newest.number}
                 </button>
               )}
               <Dialog.Close asChild>
-                <button type="button" className="action">
+                <button type="button" className="action" disabled={isBusy}>
                   Not now
                 </button>
               </Dialog.Close>

@@ -18,14 +18,8 @@ function Line({
           {sign}
         </span>
         {words !== '' && <span className="sr-only">{words}: </span>}
-        {line.pieces.map(({ text, isChanged }, index) =>
-          isChanged ? (
-            // biome-ignore lint/suspicious/noArrayIndexKey: pieces of one line never move.
-            <mark key={index}>{text}</mark>
-          ) : (
-            // biome-ignore lint/suspicious/noArrayIndexKey: pieces of one line never move.
-            <span key={index}>{text}</span>
-          ),
+        {line.pieces.map(({ text, start, isChanged }) =>
+          isChanged ? <mark key={start}>{text}</mark> : <span key={start}>{text}</span>,
         )}
       </td>
     </>

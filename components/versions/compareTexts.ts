@@ -3,6 +3,8 @@ import { diffLines, diffWordsWithSpace } from 'diff';
 /** A stretch of a line; changed ones are marked. */
 export interface Piece {
   readonly text: string;
+  /** Where it begins in its line. */
+  readonly start: number;
   readonly isChanged: boolean;
 }
 
@@ -33,7 +35,7 @@ function toLines(value: string): readonly string[] {
 }
 
 function plain(text: string): readonly Piece[] {
-  return [{ text, isChanged: false }];
+  return [{ text, start: 0, isChanged: false }];
 }
 
 /** The two sides of a changed line, by words. */
@@ -42,10 +44,15 @@ function byWords(
   after: string,
 ): { readonly before: readonly Piece[]; readonly after: readonly Piece[] } {
   const parts = diffWordsWithSpace(before, after);
-  const side = (skip: 'added' | 'removed'): readonly Piece[] =>
-    parts
-      .filter((part) => !part[skip])
-      .map(({ value, added, removed }) => ({ text: value, isChanged: added === true || removed === true }));
+  const side = (skip: 'added' | 'removed'): readonly Piece[] => {
+    const pieces: Piece[] = [];
+    let start = 0;
+    for (const { value, added, removed } of parts.filter((part) => !part[skip])) {
+      pieces.push({ text: value, start, isChanged: added === true || removed === true });
+      start += value.length;
+    }
+    return pieces;
+  };
   return { before: side('added'), after: side('removed') };
 }
 
