@@ -1,7 +1,7 @@
 'use client';
 
 import { zodResolver } from '@hookform/resolvers/zod';
-import { signIn } from 'next-auth/react';
+import { getProviders, signIn } from 'next-auth/react';
 import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { type SignInRequest, signInRequestSchema } from '@/app/api/v1/_contracts/signIn';
@@ -19,7 +19,11 @@ export function SignInForm({ callbackUrl }: { readonly callbackUrl: string }) {
 
   const submit = form.handleSubmit(async (values) => {
     setRefusal(null);
-    const answer = await signIn('credentials', { ...values, redirect: false }).catch(() => undefined);
+    // Asked first, because signIn itself leaves the page, and what was typed, when it cannot learn the providers.
+    const isReachable = (await getProviders()) !== null;
+    const answer = isReachable
+      ? await signIn('credentials', { ...values, redirect: false }).catch(() => undefined)
+      : undefined;
     if (!answer) {
       setRefusal('The server cannot be reached. Try again in a moment.');
     } else if (answer.error) {
