@@ -11,9 +11,10 @@ export default {
         ink: { DEFAULT: 'var(--ink)', soft: 'var(--ink-soft)' },
         rule: 'var(--rule)',
         signal: 'var(--signal)',
-        left: 'var(--left)',
-        right: 'var(--right)',
-        centre: 'var(--centre)',
+        // Not `left` and `right`: classes such as `text-left` would then set a colour in place of an alignment.
+        'side-left': 'var(--left)',
+        'side-right': 'var(--right)',
+        'side-centre': 'var(--centre)',
         error: 'var(--error)',
         warning: 'var(--warning)',
         info: 'var(--info)',

@@ -56,8 +56,8 @@ function toFailure(error: unknown): DraftOutcome {
 export class DraftQueue {
   #revision: number | null;
   #storedText: string;
-  /** The text of a request whose answer may have been lost on the way. */
-  #sentText: string | null = null;
+  /** Texts that were sent and not answered: any of them may be stored. */
+  readonly #unanswered = new Set<string>();
   #last: Promise<unknown> = Promise.resolve();
 
   constructor(private readonly options: DraftQueueOptions) {
@@ -67,7 +67,7 @@ export class DraftQueue {
 
   /** Whether the server has this text, as far as is known. */
   holds(text: string): boolean {
-    return text === this.#storedText;
+    return this.#unanswered.size === 0 && text === this.#storedText;
   }
 
   /** Stores a text after everything asked before; null when there was nothing left to do. */
@@ -97,7 +97,7 @@ export class DraftQueue {
   follow(draft: Draft | null, savedText: string): void {
     this.#revision = draft?.revision ?? null;
     this.#storedText = draft?.text ?? savedText;
-    this.#sentText = null;
+    this.#unanswered.clear();
   }
 
   /** The next attempt writes over a draft that was seen and not wanted. */
@@ -106,21 +106,23 @@ export class DraftQueue {
   }
 
   async #put(draft: PutDraftRequest): Promise<DraftOutcome> {
-    const sentBefore = this.#sentText;
-    this.#sentText = draft.text;
     try {
       const stored = await this.options.put(draft, this.#revision);
       this.follow(stored, stored.text);
       return { kind: 'stored', at: stored.updatedAt };
     } catch (error) {
       const conflict = toConflict(error);
-      const other = conflict?.other;
+      if (!conflict) {
+        if (!(error instanceof ApiProblem) || error.problem.status >= 500) this.#unanswered.add(draft.text);
+        return toFailure(error);
+      }
+      const { other } = conflict;
       // The same text is no conflict, and neither is our own earlier one of which only the answer was lost.
-      if (other && (other.text === draft.text || other.text === sentBefore)) {
+      if (other && (other.text === draft.text || this.#unanswered.has(other.text))) {
         this.follow(other, other.text);
         return this.holds(draft.text) ? { kind: 'stored', at: other.updatedAt } : this.#put(draft);
       }
-      return conflict ?? toFailure(error);
+      return conflict;
     }
   }
 

@@ -95,6 +95,9 @@ export function drawRig({ rig, world }: Pick<BuiltRig, 'rig' | 'world'>, audienc
       const ends = outlineOf(rig, node, world, index);
       controls[node.side].push(...ends);
       outlines.set(index, ends);
+      for (let end = 0; end + 2 < ends.length; end += 3) {
+        grow([ends[end] as number, ends[end + 1] as number, ends[end + 2] as number]);
+      }
     } else if (node.kind === 'line') {
       const from = indexOf.get(node.from);
       const to = indexOf.get(node.to);

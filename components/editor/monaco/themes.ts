@@ -52,6 +52,7 @@ export function applyTheme(isNight: boolean): void {
       'editorSuggestWidget.selectedBackground': `${colours.left}66`,
       'editorSuggestWidget.selectedForeground': colours.ink,
       'editorSuggestWidget.highlightForeground': colours.signal,
+      'editorSuggestWidget.focusHighlightForeground': colours.signal,
       'editorGutter.background': colours.sheet,
       // Brackets in ink: colour in the text means side or finding, nothing else.
       'editorBracketHighlight.foreground1': colours.inkSoft,
