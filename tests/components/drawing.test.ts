@@ -81,11 +81,23 @@ describe('a rig as strokes', () => {
     expect(Math.max(...radii)).toBeCloseTo(widest, 9);
   });
 
-  it('boxes joints and controls, and never with nothing', () => {
-    const { low, high, size } = drawRig(builtSample('eel'), 'rigger');
+  it.each(samples.map(({ id }) => id))('%s: is boxed with the whole of every control', (id) => {
+    const { low, high, size, outlines, joints } = drawRig(builtSample(id), 'rigger');
+    const [outside, flat] = [[...outlines.values()].flat(), joints.flatMap(({ at }) => at)].map((numbers) =>
+      numbers.filter((value, index) => {
+        const axis = index % 3;
+        return value < (low[axis] ?? 0) || value > (high[axis] ?? 0);
+      }),
+    );
+    expect([outside, flat]).toEqual([[], []]);
     expect(size).toBeCloseTo(Math.hypot(high[0] - low[0], high[1] - low[1], high[2] - low[2]), 12);
-    const { rig, world } = builtText('format: 1\nrecipe: a\nparts: { root: { kind: root } }\n');
-    expect(drawRig({ rig, world }, 'rigger').size).toBe(1);
+  });
+
+  it('has a size even with one joint alone, or with nothing', () => {
+    const { rig, world } = builtText('format: 1\nrecipe: a\nchains: { c: { points: [[1, 2, 3]] } }\n');
+    const nodes = rig.nodes.filter(({ kind }) => kind === 'joint');
+    expect(nodes).toHaveLength(1);
+    expect(drawRig({ rig: { ...rig, nodes }, world }, 'rigger').size).toBe(1);
     expect(drawRig({ rig: { ...rig, nodes: [] }, world }, 'rigger').size).toBeGreaterThan(0);
   });
 });
