@@ -49,6 +49,10 @@ describe.each([
       await page.goto(address);
       if (/^\/recipes\/[^/]+$/.test(address.split('?')[0] ?? '')) await untilDrawn(page);
       await check();
+      for (const tab of await page.getByRole('tab').all()) {
+        await tab.click();
+        await check();
+      }
     }
     expect(troubles).toEqual([]);
     await context.close();
