@@ -83,11 +83,18 @@ export class YamlSource implements SourceDocument {
     return this.#find(path).whole;
   }
 
+  /** The document's first key, which stands for the whole where something at the top is missing. */
+  #firstKey(path: Path): Node | null {
+    const contents = this.#document?.contents;
+    const first = path.length <= 1 && isMap(contents) ? contents.items[0]?.key : null;
+    return isNode(first) ? first : null;
+  }
+
   spanAt(path: Path, part: 'value' | 'key' = 'value'): Span {
     const { node, pair, whole } = this.#find(path);
     // What was not written is shown at the key of the nearest entry around it: its whole value would say nothing.
     const wantsKey = part === 'key' || !whole;
-    const key = pair && isNode(pair.key) ? pair.key : null;
+    const key = pair && isNode(pair.key) ? pair.key : this.#firstKey(path);
     const range = (wantsKey ? (key ?? node) : (node ?? key))?.range;
     if (!range) return this.lines.span(0, 0);
     const [start, end] = range;
