@@ -24,6 +24,8 @@ export interface CodePaneHandle {
   goTo(span: Span): void;
   /** Changes the text as a fix says; can be undone like typing. */
   applyFix(fix: Fix): void;
+  /** Puts the cursor at the next finding and shows what it says. */
+  nextFinding(): void;
   focus(): void;
 }
 
@@ -79,6 +81,10 @@ export function CodePane({
       editor.current?.pushUndoStop();
       editor.current?.focus();
     },
+    nextFinding() {
+      editor.current?.focus();
+      editor.current?.trigger('pintle', 'editor.action.marker.next', null);
+    },
     focus() {
       editor.current?.focus();
     },
@@ -128,7 +134,7 @@ export function CodePane({
       loading={<p className="p-4 text-ink-soft">Opening the text…</p>}
       options={{
         readOnly: isReadOnly,
-        ariaLabel: 'Recipe text. Control M switches whether Tab writes a tab or moves on.',
+        ariaLabel: 'Recipe text. Control M lets Tab move on instead of indenting.',
         automaticLayout: true,
         fontFamily: 'var(--font-figures)',
         fontSize: 13,

@@ -2,10 +2,10 @@
 
 import { Dialog } from 'radix-ui';
 import { useRef, useState } from 'react';
+import { stepThrough } from '@/components/ui/stepThrough';
 
 /** Something a person can do on the page. */
 export interface Command {
-  readonly id: string;
   readonly words: string;
   readonly keys: string | null;
   run(): void;
@@ -22,6 +22,7 @@ export function CommandList({
   const [search, setSearch] = useState('');
   const words = search.trim().toLowerCase();
   const found = commands.filter((command) => command.words.toLowerCase().includes(words));
+  const list = useRef<HTMLUListElement>(null);
   const chosen = useRef<Command | null>(null);
   const run = (command: Command | undefined): void => {
     if (!command) return;
@@ -53,12 +54,17 @@ export function CommandList({
               className="plain-input w-full"
               aria-label="Search the commands"
               value={search}
+              onKeyDown={(event) => {
+                if (event.key !== 'ArrowDown') return;
+                event.preventDefault();
+                list.current?.querySelector('button')?.focus();
+              }}
               onChange={(event) => setSearch(event.target.value)}
             />
           </form>
-          <ul className="mt-3 divide-y divide-rule">
+          <ul className="mt-3 divide-y divide-rule" ref={list} onKeyDown={stepThrough}>
             {found.map((command) => (
-              <li key={command.id}>
+              <li key={command.words}>
                 <button type="button" className="command-row" onClick={() => run(command)}>
                   <span>{command.words}</span>
                   {command.keys && <kbd className="figures text-ink-soft text-sm">{command.keys}</kbd>}

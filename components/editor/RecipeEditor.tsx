@@ -2,7 +2,7 @@
 
 import dynamic from 'next/dynamic';
 import { useRouter } from 'next/navigation';
-import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
+import { useCallback, useMemo, useRef, useState } from 'react';
 import type { Draft } from '@/app/api/v1/_contracts/draft';
 import type { Recipe } from '@/app/api/v1/_contracts/recipe';
 import type { Version } from '@/app/api/v1/_contracts/version';
@@ -10,17 +10,22 @@ import type { Fix, SourceText, Span } from '@/compiler';
 import { instantWords } from '@/components/frame/dates';
 import { TitleBlock } from '@/components/frame/TitleBlock';
 import { useCompiler } from '@/components/worker/useCompiler';
+import { Announcement } from './Announcement';
+import { BuildDialog } from './BuildDialog';
 import type { CodePaneHandle } from './CodePane';
 import { type Command, CommandList } from './CommandList';
 import { DraftConflictDialog } from './DraftConflictDialog';
 import { DraftWords } from './DraftWords';
+import { EditorStrip } from './EditorStrip';
 import { createVersion, readVersion } from './editorApi';
 import { countFindings, FindingsPane } from './FindingsPane';
 import { Panes } from './Panes';
 import { SaveVersionDialog } from './SaveVersionDialog';
 import { ScriptPane } from './ScriptPane';
+import { TextFoot } from './TextFoot';
 import { ThingsPane } from './ThingsPane';
 import { useDraft } from './useDraft';
+import { useEditorKeys } from './useEditorKeys';
 import { useSelection } from './useSelection';
 import './editor.css';
 
@@ -43,8 +48,7 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
   const router = useRouter();
   const [version, setVersion] = useState(opened);
   const [text, setText] = useState(draft?.text ?? opened.text);
-  const [isSaving, setIsSaving] = useState(false);
-  const [isListing, setIsListing] = useState(false);
+  const [dialog, setDialog] = useState<'save' | 'commands' | 'build' | null>(null);
   const code = useRef<CodePaneHandle>(null);
 
   // The name under which the server compiles it too, so that findings name the same document.
@@ -84,52 +88,44 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
     // As an edit, so that undo brings one's own text back.
     setText(theirs.text);
     setVersion(theirs);
-    setIsSaving(false);
+    setDialog(null);
     await keeper.goOnFrom(theirs.text);
     router.refresh();
   };
 
+  const canSave = !isReadOnly && isChanged;
+  const close = useCallback(() => setDialog(null), []);
+  useEditorKeys({
+    onSave: () => canSave && dialog === null && setDialog('save'),
+    onCommands: () => dialog === null && setDialog('commands'),
+  });
+
   const commands = useMemo<readonly Command[]>(() => {
     const go = (path: string) => () => router.push(`/recipes/${recipe.id}${path}`);
+    const focus = (selector: string) => () => document.querySelector<HTMLElement>(selector)?.focus();
     return [
-      ...(isReadOnly
+      ...(canSave ? [{ words: 'Save a version', keys: 'Ctrl S', run: () => setDialog('save') }] : []),
+      { words: 'Go to the text', keys: null, run: () => code.current?.focus() },
+      { words: 'Go to the next finding in the text', keys: 'Alt F8', run: () => code.current?.nextFinding() },
+      { words: 'Go to the picture of the rig', keys: null, run: focus('[data-testid="viewport"]') },
+      { words: 'Go to the findings', keys: null, run: focus('#tab-findings') },
+      { words: 'Go to the list of things', keys: null, run: focus('#tab-things') },
+      { words: 'Go to the build script', keys: null, run: focus('#tab-script') },
+      ...(version.errors === 0
+        ? [{ words: `Files of build ${version.number}`, keys: null, run: () => setDialog('build') }]
+        : []),
+      { words: 'Show all versions', keys: null, run: go('/versions') },
+      ...(version.parent === null
         ? []
-        : [{ id: 'save', words: 'Save a version', keys: 'Ctrl S', run: () => setIsSaving(true) }]),
-      { id: 'text', words: 'Go to the text', keys: null, run: () => code.current?.focus() },
-      {
-        id: 'picture',
-        words: 'Go to the picture of the rig',
-        keys: null,
-        run: () => focusOn('[data-testid="viewport"]'),
-      },
-      { id: 'findings', words: 'Go to the findings', keys: null, run: () => focusOn('#tab-findings') },
-      { id: 'things', words: 'Go to the list of things', keys: null, run: () => focusOn('#tab-things') },
-      { id: 'script', words: 'Go to the build script', keys: null, run: () => focusOn('#tab-script') },
-      { id: 'versions', words: 'Show all versions', keys: null, run: go('/versions') },
-      {
-        id: 'compare',
-        words: 'Compare with the version before',
-        keys: null,
-        run: go(`/compare?from=${Math.max(1, version.number - 1)}&to=${version.number}`),
-      },
+        : [
+            {
+              words: `Compare version ${version.number} with ${version.parent}`,
+              keys: null,
+              run: go(`/compare?from=${version.parent}&to=${version.number}`),
+            },
+          ]),
     ];
-  }, [isReadOnly, recipe.id, router, version.number]);
-
-  useEffect(() => {
-    const press = (event: KeyboardEvent): void => {
-      if (!(event.ctrlKey || event.metaKey)) return;
-      if (event.key === 's') {
-        event.preventDefault();
-        if (!isReadOnly) setIsSaving(true);
-      } else if (event.key === '.') {
-        event.preventDefault();
-        setIsListing(true);
-      }
-    };
-    // Before the text editor sees them, which has meanings of its own for both.
-    window.addEventListener('keydown', press, { capture: true });
-    return () => window.removeEventListener('keydown', press, { capture: true });
-  }, [isReadOnly]);
+  }, [canSave, recipe.id, router, version]);
 
   const picture = built ? (
     <Viewport built={built} isOlder={compiler.isBuiltOlder} chosen={selection.chosen} onChoose={choose} />
@@ -143,65 +139,47 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
 
   return (
     <div className="editor-sheet" data-compiled={compiler.sequence} data-took={compiler.took.toFixed(1)}>
-      <div className="editor-strip">
-        <h1 className="editor-title">{recipe.title}</h1>
-        <DraftWords
-          state={keeper.state}
-          isReadOnly={isReadOnly}
-          restored={draft !== null}
-          isChanged={isChanged}
-        />
-        <div className="ml-auto flex flex-wrap items-center gap-3">
-          <button
-            type="button"
-            className="plain-action"
-            onClick={() => setIsListing(true)}
-            aria-keyshortcuts="Control+."
-          >
-            Commands
-          </button>
-          {!isReadOnly && isChanged && (
-            <button type="button" className="plain-action" onClick={() => void backToSaved()}>
-              Back to version {version.number}
-            </button>
-          )}
-          <a className="plain-action" href={`/recipes/${recipe.id}/versions`}>
-            Versions
-          </a>
-          {version.errors === 0 && (
-            <a
-              className="plain-action"
-              href={`/api/v1/recipes/${recipe.id}/versions/${version.number}/build/archive`}
-              title={isChanged ? 'Your unsaved changes are not in it' : undefined}
-            >
-              Download build {version.number}
-            </a>
-          )}
-          {!isReadOnly && (
-            <button
-              type="button"
-              className="action action-main"
-              disabled={!isChanged}
-              onClick={() => setIsSaving(true)}
-            >
-              Save version
-            </button>
-          )}
-        </div>
-      </div>
+      <EditorStrip
+        recipeId={recipe.id}
+        title={recipe.title}
+        number={version.number}
+        hasBuild={version.errors === 0}
+        newer={
+          !isReadOnly && recipe.latest && recipe.latest.number > version.number ? recipe.latest.number : null
+        }
+        isReadOnly={isReadOnly}
+        isChanged={isChanged}
+        draftWords={
+          <DraftWords
+            state={keeper.state}
+            isReadOnly={isReadOnly}
+            restored={draft !== null}
+            isChanged={isChanged}
+          />
+        }
+        openCommands={() => setDialog('commands')}
+        openBuild={() => setDialog('build')}
+        backToSaved={() => void backToSaved()}
+        save={() => setDialog('save')}
+      />
 
       <Panes
         text={
-          <CodePane
-            ref={code}
-            name={recipe.name}
-            text={text}
-            isReadOnly={isReadOnly}
-            findings={findings}
-            chosen={selection.ranges}
-            onChange={setText}
-            onCursor={selection.chooseAt}
-          />
+          <>
+            <div>
+              <CodePane
+                ref={code}
+                name={recipe.name}
+                text={text}
+                isReadOnly={isReadOnly}
+                findings={findings}
+                chosen={selection.ranges}
+                onChange={setText}
+                onCursor={selection.chooseAt}
+              />
+            </div>
+            <TextFoot />
+          </>
         }
         picture={picture}
         tabs={[
@@ -233,9 +211,7 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
         ]}
       />
 
-      <p className="sr-only" role="status" aria-live="polite">
-        {compiler.sequence > 0 ? countFindings(findings) : ''}
-      </p>
+      <Announcement words={compiler.sequence > 0 ? countFindings(findings) : ''} />
       <TitleBlock
         cells={[
           ['Show', recipe.show.title],
@@ -249,8 +225,11 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
         ]}
       />
 
-      {isListing && <CommandList commands={commands} onClose={() => setIsListing(false)} />}
-      {isSaving && (
+      {dialog === 'commands' && <CommandList commands={commands} onClose={close} />}
+      {dialog === 'build' && (
+        <BuildDialog recipeId={recipe.id} number={version.number} isChanged={isChanged} onClose={close} />
+      )}
+      {dialog === 'save' && (
         <SaveVersionDialog
           recipeId={recipe.id}
           parent={version.number}
@@ -259,11 +238,11 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
           save={(wanted, key) => keeper.during(() => createVersion(recipe.id, wanted, key))}
           onSaved={(saved) => {
             setVersion({ ...saved, text });
-            setIsSaving(false);
+            close();
             router.refresh();
           }}
           takeTheirs={takeTheirs}
-          onClose={() => setIsSaving(false)}
+          onClose={close}
         />
       )}
       {keeper.state.kind === 'conflict' && (
@@ -281,8 +260,4 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
       )}
     </div>
   );
-}
-
-function focusOn(selector: string): void {
-  document.querySelector<HTMLElement>(selector)?.focus();
 }

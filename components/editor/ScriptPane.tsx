@@ -1,6 +1,7 @@
 'use client';
 
 import { useEffect, useMemo, useRef } from 'react';
+import { stepThrough } from '@/components/ui/stepThrough';
 
 const ID = / id="([a-z0-9_.]+)"/;
 
@@ -28,10 +29,11 @@ export function ScriptPane({ script, chosen, onChoose }: ScriptPaneProps) {
     if (firstChosen !== undefined) first.current?.scrollIntoView({ block: 'nearest' });
   }, [firstChosen]);
 
+  const tabStop = firstChosen ?? lines.find(({ id }) => id !== null)?.number;
+
   return (
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolling region must be reachable by keyboard.
-    <section className="h-full overflow-auto" aria-label="Build script" tabIndex={0}>
-      <ol className="figures script-lines py-2 text-xs">
+    <section className="h-full overflow-auto" aria-label="Build script">
+      <ol className="figures script-lines py-2 text-xs" onKeyDown={stepThrough}>
         {lines.map(({ number, text, id }) => {
           const isChosen = id !== null && ids.has(id);
           return (
@@ -47,7 +49,12 @@ export function ScriptPane({ script, chosen, onChoose }: ScriptPaneProps) {
               {id === null ? (
                 <span>{text}</span>
               ) : (
-                <button type="button" tabIndex={-1} className="text-left" onClick={() => onChoose(id)}>
+                <button
+                  type="button"
+                  tabIndex={number === tabStop ? 0 : -1}
+                  className="text-left"
+                  onClick={() => onChoose(id)}
+                >
                   {text}
                 </button>
               )}

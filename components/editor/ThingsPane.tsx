@@ -1,7 +1,8 @@
 'use client';
 
-import { type KeyboardEvent, useMemo, useRef, useState } from 'react';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import type { RigNode } from '@/compiler';
+import { stepThrough } from '@/components/ui/stepThrough';
 import type { BuiltRig } from '@/components/worker/messages';
 
 export interface ThingsPaneProps {
@@ -9,6 +10,8 @@ export interface ThingsPaneProps {
   readonly chosen: readonly string[];
   onChoose(id: string | null): void;
 }
+
+const AXES = ['x', 'y', 'z'] as const;
 
 interface Row {
   readonly node: RigNode;
@@ -36,7 +39,6 @@ export function lengthWords(value: number): string {
 export function ThingsPane({ built, chosen, onChoose }: ThingsPaneProps) {
   const [search, setSearch] = useState('');
   const [role, setRole] = useState('');
-  const body = useRef<HTMLTableSectionElement>(null);
   const rows = useMemo(() => toRows(built), [built]);
   const roles = useMemo(() => [...new Set(rows.map(({ node }) => node.role))].sort(), [rows]);
   const ids = useMemo(() => new Set(chosen), [chosen]);
@@ -48,15 +50,13 @@ export function ThingsPane({ built, chosen, onChoose }: ThingsPaneProps) {
       (words === '' || node.id.includes(words) || node.name.toLowerCase().includes(words)),
   );
 
-  const step = (event: KeyboardEvent): void => {
-    const move = { ArrowDown: 1, ArrowUp: -1 }[event.key];
-    if (move === undefined) return;
-    const buttons = [...(body.current?.querySelectorAll('button') ?? [])];
-    const next = buttons[buttons.indexOf(document.activeElement as HTMLButtonElement) + move];
-    if (!next) return;
-    event.preventDefault();
-    next.focus();
-  };
+  const firstChosen = shown.find(({ node }) => ids.has(node.id))?.node.id;
+  const tabStop = firstChosen ?? shown[0]?.node.id;
+  const first = useRef<HTMLTableRowElement>(null);
+
+  useEffect(() => {
+    if (firstChosen !== undefined) first.current?.scrollIntoView({ block: 'nearest' });
+  }, [firstChosen]);
 
   return (
     <section aria-label="Things in the rig" className="flex h-full min-h-0 flex-col">
@@ -80,8 +80,7 @@ export function ThingsPane({ built, chosen, onChoose }: ThingsPaneProps) {
         </label>
         <span className="figures text-ink-soft">{shown.length}</span>
       </div>
-      {/* biome-ignore lint/a11y/noNoninteractiveTabindex: a scrolling region must be reachable by keyboard. */}
-      <section className="min-h-0 flex-1 overflow-auto" tabIndex={0} aria-label="List of things">
+      <section className="scrolls-under-head min-h-0 flex-1 overflow-auto" aria-label="List of things">
         <table className="w-full text-sm">
           <thead className="sticky top-0 bg-sheet text-left text-ink-soft">
             <tr className="border-rule border-b">
@@ -94,23 +93,20 @@ export function ThingsPane({ built, chosen, onChoose }: ThingsPaneProps) {
               <th className="px-2 py-1 font-normal" scope="col">
                 Side
               </th>
-              <th className="px-2 py-1 text-right font-normal" scope="col">
-                x
-              </th>
-              <th className="px-2 py-1 text-right font-normal" scope="col">
-                y
-              </th>
-              <th className="px-3 py-1 text-right font-normal" scope="col">
-                z
-              </th>
+              {AXES.map((axis) => (
+                <th key={axis} className="px-2 py-1 text-right font-normal last:pr-3" scope="col">
+                  {axis}
+                </th>
+              ))}
             </tr>
           </thead>
-          <tbody ref={body} onKeyDown={step}>
+          <tbody onKeyDown={stepThrough}>
             {shown.map(({ node, depth, position }) => {
               const isChosen = ids.has(node.id);
               return (
                 <tr
                   key={node.id}
+                  ref={node.id === firstChosen ? first : undefined}
                   data-node={node.id}
                   className={isChosen ? 'row-chosen' : ''}
                   aria-selected={isChosen}
@@ -118,6 +114,7 @@ export function ThingsPane({ built, chosen, onChoose }: ThingsPaneProps) {
                   <th scope="row" className="px-3 py-0.5 text-left font-normal">
                     <button
                       type="button"
+                      tabIndex={node.id === tabStop ? 0 : -1}
                       className="thing-name figures"
                       style={{ paddingLeft: isFiltered ? 0 : `${Math.min(depth, 12) * 0.6}rem` }}
                       aria-pressed={isChosen}
@@ -132,10 +129,9 @@ export function ThingsPane({ built, chosen, onChoose }: ThingsPaneProps) {
                     {!node.shown && <span title="Hidden from animators"> (hidden)</span>}
                   </td>
                   <td className="px-2 py-0.5 text-ink-soft">{node.side}</td>
-                  {position.map((value, axis) => (
-                    // biome-ignore lint/suspicious/noArrayIndexKey: the three axes keep their places.
+                  {AXES.map((axis, index) => (
                     <td key={axis} className="figures px-2 py-0.5 text-right last:pr-3">
-                      {lengthWords(value)}
+                      {lengthWords(position[index] ?? 0)}
                     </td>
                   ))}
                 </tr>

@@ -18,9 +18,11 @@ import { CameraDesk, type Standpoint } from './CameraDesk';
 import { type Colours, onSchemeChange, readColours } from './colours';
 import { type Audience, type Drawing, drawRig } from './drawing';
 import { Ground } from './Ground';
+import { Legend } from './Legend';
 import { nearestNode } from './nearestNode';
-import { pressKey, STANDPOINTS } from './pressKey';
+import { pressKey } from './pressKey';
 import { RigDrawing } from './RigDrawing';
+import { ViewBar } from './ViewBar';
 
 export interface ViewportProps {
   readonly built: BuiltRig;
@@ -156,65 +158,33 @@ export function Viewport({ built, isOlder, chosen, onChoose }: ViewportProps) {
 
   return (
     <section aria-label="Picture of the rig" className="flex h-full min-h-0 flex-col">
-      <div className="flex flex-wrap items-center gap-x-4 gap-y-1 border-rule border-b px-3 py-1 text-sm">
-        {STANDPOINTS.map(({ standpoint, words, key }) => (
-          <button
-            key={standpoint}
-            type="button"
-            className="plain-action"
-            aria-keyshortcuts={key}
-            onClick={() => stand(standpoint)}
-          >
-            {words}
-          </button>
-        ))}
-        <button type="button" className="plain-action" aria-keyshortcuts="Home" onClick={frameAll}>
-          Whole rig
-        </button>
-        <button
-          type="button"
-          className="plain-action"
-          aria-keyshortcuts="End"
-          disabled={chosenNodes.length === 0}
-          onClick={frameChosen}
-        >
-          Chosen
-        </button>
-        <label className="ml-auto flex items-center gap-2">
-          As seen by
-          <select
-            className="plain-select"
-            value={audience}
-            onChange={(event) => setAudience(event.target.value === 'animator' ? 'animator' : 'rigger')}
-          >
-            <option value="rigger">the rigger</option>
-            <option value="animator">the animator</option>
-          </select>
-        </label>
-      </div>
-      <div
-        ref={frame}
-        role="application"
-        aria-label={`Rig ${rig.scene.character}: arrows turn, shift and arrows move, plus and minus zoom, 1 to 4 change the standpoint, Home frames all, End frames what is chosen. The table shows the same in words.`}
-        // biome-ignore lint/a11y/noNoninteractiveTabindex: see above.
-        tabIndex={0}
-        className="relative min-h-0 flex-1 cursor-crosshair"
-        data-testid="viewport"
-        onKeyDown={press}
-        onPointerMove={move}
-        onPointerLeave={() => setHovered(null)}
-        onPointerDown={(event) => {
-          pressedAt.current = [event.clientX, event.clientY];
-        }}
-        onPointerUp={release}
-      >
+      <ViewBar
+        audience={audience}
+        hasChosen={chosenNodes.length > 0}
+        stand={stand}
+        frameAll={frameAll}
+        frameChosen={frameChosen}
+        onAudience={setAudience}
+      />
+      <div ref={frame} className="relative min-h-0 flex-1">
         <Canvas
+          role="application"
+          aria-label={`Rig ${rig.scene.character}: arrows turn, shift and arrows move, plus and minus zoom, 1 to 4 change the standpoint, Home frames all, End frames what is chosen. The table shows the same in words.`}
+          tabIndex={0}
+          className="cursor-crosshair"
+          data-testid="viewport"
+          onKeyDown={press}
+          onPointerMove={move}
+          onPointerLeave={() => setHovered(null)}
+          onPointerDown={(event) => {
+            pressedAt.current = [event.clientX, event.clientY];
+          }}
+          onPointerUp={release}
           frameloop="demand"
           flat
           dpr={[1, 2]}
           camera={{ fov: 32 }}
           gl={{ antialias: true, alpha: false }}
-          aria-hidden
         >
           <color attach="background" args={[colours.sheet]} />
           <StageKeeper scene={rig.scene} onStage={keepStage} />
@@ -238,16 +208,5 @@ export function Viewport({ built, isOlder, chosen, onChoose }: ViewportProps) {
         <Legend />
       </div>
     </section>
-  );
-}
-
-/** Tells the sides apart in words, colour and line. */
-function Legend() {
-  return (
-    <ul className="pointer-events-none absolute right-3 bottom-2 flex gap-4 text-xs text-ink-soft">
-      <li className="side-key side-key-left">left</li>
-      <li className="side-key side-key-right">right</li>
-      <li className="side-key side-key-centre">centre</li>
-    </ul>
   );
 }

@@ -1,10 +1,18 @@
 import { cleanup, render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
-import { afterEach, describe, expect, it, vi } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { lengthWords, ThingsPane } from '@/components/editor/ThingsPane';
 import { builtSample } from './sample';
 
 afterEach(cleanup);
+/** The document of these tests has no layout and so no scrolling; what was brought into sight is written down. */
+const seen = vi.fn();
+beforeEach(() => {
+  seen.mockReset();
+  Element.prototype.scrollIntoView = function scrollIntoView() {
+    seen(this.getAttribute('data-node'));
+  };
+});
 
 const built = builtSample('hare');
 
@@ -64,6 +72,16 @@ describe('things in the rig', () => {
     await user.click(screen.getByRole('button', { name: 'arm.left.elbow' }));
     expect(onChoose).toHaveBeenLastCalledWith('arm.left.elbow');
     expect(screen.getAllByRole('button', { pressed: true })).toEqual([chosen]);
+  });
+
+  it('are brought into sight when they are chosen elsewhere, and are one stop of the Tab key', async () => {
+    const { user } = show(['arm.left.wrist']);
+    expect(seen).toHaveBeenCalledExactlyOnceWith('arm.left.wrist');
+    await user.click(screen.getByRole('combobox', { name: 'Role' }));
+    await user.tab();
+    expect(document.activeElement).toBe(screen.getByRole('button', { name: 'arm.left.wrist' }));
+    await user.tab();
+    expect(document.activeElement).toBe(document.body);
   });
 
   it('can be walked through by arrow keys', async () => {
