@@ -13,11 +13,13 @@ import { dirname, join } from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
 import { fileURLToPath } from 'node:url';
 import { ensureBuild } from './host/build.mjs';
+import { claimFolder } from './host/claimFolder.mjs';
+import { clusterFolder } from './host/clusterFolder.mjs';
 import { ensureDebianPackage, findPostgresPrograms } from './host/debian.mjs';
 import { ensurePackages } from './host/packages.mjs';
 import { anyPort, findPort } from './host/ports.mjs';
 import { startCluster } from './host/postgres.mjs';
-import { run } from './host/run.mjs';
+import { endRunning, run } from './host/run.mjs';
 
 const root = dirname(dirname(fileURLToPath(import.meta.url)));
 const data = join(root, '.data');
@@ -30,6 +32,7 @@ let isEnding = false;
 async function end(code) {
   if (isEnding) return wait(60_000).then(() => process.exit(1));
   isEnding = true;
+  await endRunning();
   for (const ending of endings.reverse()) await ending().catch((error) => console.error(error.message));
   process.exit(code);
 }
@@ -48,11 +51,14 @@ function readSecrets() {
   return secrets;
 }
 
-/** @param {string} databasePassword */
-async function startOwnDatabase(databasePassword) {
-  const port = await anyPort();
-  const cluster = await startCluster({ folder: join(data, 'postgres'), password: databasePassword, port });
+/** @param {string} databasePassword @param {import('./host/claimFolder.mjs').Hold} hold */
+async function startOwnDatabase(databasePassword, hold) {
+  const folder = clusterFolder(data);
+  if (!folder.startsWith(data)) console.log(`The database lies in ${folder}: its user cannot enter ${data}.`);
+  const cluster = startCluster({ folder, password: databasePassword, port: await anyPort() });
   endings.push(() => cluster.stop());
+  hold.addServer(cluster.pid);
+  await cluster.ready();
   return cluster.url;
 }
 
@@ -80,19 +86,22 @@ async function untilReady(origin, server) {
 
 /** @param {string} what @returns {Promise<never>} */
 function fail(what) {
-  console.error(what);
+  // What fails because it was told to end has nothing to report.
+  if (!isEnding) console.error(what);
   return end(1);
 }
 
 async function main() {
   const began = Date.now();
+  const hold = await claimFolder(data);
+  endings.push(async () => hold.release());
   if (!(await ensurePackages(root))) return fail('Pintle was not started.');
   const isDemo = !process.env.DATABASE_URL;
   if (isDemo && !(await ensureDebianPackage('postgresql', findPostgresPrograms)))
     return fail('Pintle was not started.');
 
   const secrets = readSecrets();
-  const databaseUrl = process.env.DATABASE_URL ?? (await startOwnDatabase(secrets.databasePassword));
+  const databaseUrl = process.env.DATABASE_URL ?? (await startOwnDatabase(secrets.databasePassword, hold));
   const port = await findPort(Number(process.env.PORT ?? 3000));
   const origin = process.env.NEXTAUTH_URL ?? `http://127.0.0.1:${port}`;
   const secret = process.env.AUTH_SECRET ?? secrets.authSecret;
@@ -110,6 +119,7 @@ async function main() {
   }
   if (!(await ensureBuild(root, '.next', env))) return fail('The application could not be built.');
 
+  if (isEnding) return fail('');
   const next = join(root, 'node_modules/next/dist/bin/next');
   const server = spawn(process.execPath, [next, 'start', '-H', '127.0.0.1', '-p', String(port)], {
     cwd: root,
@@ -118,6 +128,7 @@ async function main() {
     detached: true,
   });
   const ended = new Promise((resolve) => server.once('exit', resolve));
+  hold.addServer(server.pid);
   endings.push(async () => {
     if (server.exitCode === null) server.kill('SIGTERM');
     await ended;
@@ -134,5 +145,10 @@ async function main() {
   if (!isEnding) return fail('The web server ended by itself.');
 }
 
+if (process.env.npm_lifecycle_event === 'start') {
+  // Told to end, npm and its shell do so without passing it on: then the parent is another one from one look to the next.
+  const parent = process.ppid;
+  setInterval(() => process.ppid !== parent && void end(0), 500).unref();
+}
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(0));
 await main().catch((error) => fail(error.message));

@@ -8,7 +8,7 @@ import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { ensureDebianPackage, findChromium, findPostgresPrograms } from './host/debian.mjs';
 import { ensurePackages } from './host/packages.mjs';
-import { run } from './host/run.mjs';
+import { endRunning, run } from './host/run.mjs';
 
 const root = dirname(dirname(fileURLToPath(import.meta.url)));
 const projects = process.argv.slice(2);
@@ -42,14 +42,14 @@ async function runTests() {
   const report = join(root, '.tmp', 'vitest.json');
   rmSync(report, { force: true });
   const chosen = projects.flatMap((project) => ['--project', project]);
-  await tool('vitest', [
+  const ran = await tool('vitest', [
     'run',
     ...chosen,
     '--reporter=default',
     '--reporter=json',
     `--outputFile.json=${report}`,
   ]);
-  const { numPassedTests, numFailedTests, numPendingTests, success, testResults } = JSON.parse(
+  const { numPassedTests, numFailedTests, numPendingTests, testResults } = JSON.parse(
     readFileSync(report, 'utf8'),
   );
   counts.passed += numPassedTests;
@@ -59,7 +59,8 @@ async function runTests() {
     (file) => file.status === 'failed' && file.assertionResults.length === 0,
   ).length;
   counts.failed += broken;
-  return success || numFailedTests + broken > 0;
+  // Each failed test is counted already; an error outside of every test shows in vitest's exit code alone.
+  return ran || numFailedTests + broken > 0;
 }
 
 async function main() {
@@ -81,4 +82,7 @@ async function main() {
   process.exit(counts.failed > 0 ? 1 : 0);
 }
 
+for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
+  process.on(signal, () => void endRunning().then(() => process.exit(1)));
+}
 await main();

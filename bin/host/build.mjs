@@ -54,7 +54,7 @@ export async function ensureBuild(root, folder, env) {
   const code = await run(process.execPath, [next, 'build'], {
     cwd: root,
     env: { ...env, PINTLE_DIST_DIR: folder, NEXT_TELEMETRY_DISABLED: '1', NODE_ENV: 'production' },
-    stdio: ['ignore', 'pipe', 'inherit'],
+    quietly: true,
   });
   if (code !== 0) return false;
   writeFileSync(stamp, wanted);

@@ -36,7 +36,7 @@ export async function ensureDebianPackage(name, find) {
   console.log(`Installing ${name} from Debian's packages…`);
   // A private cluster is made by us; the one Debian would start by itself is not wanted.
   const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive', PG_CREATE_MAIN_CLUSTER: 'false' };
-  const quiet = { env, stdio: /** @type {const} */ (['ignore', 'ignore', 'inherit']) };
+  const quiet = { env, quietly: true };
   await run('apt-get', ['update', '-q'], quiet);
   const code = await run('apt-get', ['install', '-y', '-q', '--no-install-recommends', name], quiet);
   if (code === 0 && find()) return true;

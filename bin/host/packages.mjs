@@ -22,7 +22,8 @@ export async function ensurePackages(root) {
   const wanted = lockHash(root);
   if (existsSync(stamp) && readFileSync(stamp, 'utf8') === wanted) return true;
   console.log('Installing packages…');
-  const code = await run('npm', ['ci', '--no-audit', '--no-fund'], { cwd: root });
+  // Also where NODE_ENV is "production": the build checks types, and those packages count as needed for development.
+  const code = await run('npm', ['ci', '--include=dev', '--no-audit', '--no-fund'], { cwd: root });
   if (code !== 0) {
     console.error('The packages could not be installed. Look at what npm says above, then try again.');
     return false;
