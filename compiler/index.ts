@@ -8,6 +8,7 @@ export { type Explanation, explainFinding } from './findings/explainFinding';
 export type { Finding, Fix, RelatedPlace, Severity } from './findings/Finding';
 export { listFindingCodes } from './findings/registry';
 export { sha256Hex } from './hash/sha256Hex';
+export { axisDirection, leftDirection } from './math/axisDirection';
 export { createPoser } from './pose/createPoser';
 export { describePose, type PosedNode } from './pose/describePose';
 export type { Poser } from './pose/Poser';

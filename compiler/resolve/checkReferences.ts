@@ -13,13 +13,10 @@ import { isPoisonedReference, type ResolveContext, reportUnknown } from './Repor
 import type { Things } from './things';
 
 /** The parts of an expanded recipe whose references all lead somewhere. */
-export interface LinkedRecipe {
-  readonly chains: readonly ChainSpecification[];
-  readonly controls: readonly ControlSpecification[];
-  readonly solvers: readonly SolverSpecification[];
-  readonly constraints: readonly ConstraintSpecification[];
-  readonly guideLines: readonly GuideLineSpecification[];
-}
+export type LinkedRecipe = Pick<
+  ExpandedRecipe,
+  'chains' | 'controls' | 'solvers' | 'constraints' | 'guideLines'
+>;
 
 /**
  * Checks every reference and leaves out links (solvers, constraints, guide lines) that lead nowhere. Chains and

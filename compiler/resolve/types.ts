@@ -1,12 +1,4 @@
-import type {
-  ChainSpecification,
-  ConstraintSpecification,
-  ControlSpecification,
-  GuideLineSpecification,
-  LandmarkPoints,
-  SceneFrame,
-  SolverSpecification,
-} from '../expand/types';
+import type { ExpandedRecipe } from '../expand/types';
 import type { MergedDocument } from '../merge/types';
 import type { Side } from '../rig/Rig';
 import type { HouseRules } from '../schema/generated/houseTypes';
@@ -59,15 +51,8 @@ export interface Seat {
   readonly follows: string;
 }
 
-export interface ResolvedRecipe {
-  readonly scene: SceneFrame;
-  readonly landmarks: ReadonlyMap<string, LandmarkPoints>;
-  readonly chains: readonly ChainSpecification[];
-  readonly controls: readonly ControlSpecification[];
-  readonly solvers: readonly SolverSpecification[];
-  readonly constraints: readonly ConstraintSpecification[];
-  readonly guideLines: readonly GuideLineSpecification[];
-  readonly notes: readonly { readonly key: string; readonly value: string | number | boolean }[];
+/** An expanded recipe whose references all lead somewhere, with the tree of nodes it makes. */
+export interface ResolvedRecipe extends ExpandedRecipe {
   readonly containers: ReadonlyMap<string, ResolvedContainer>;
   readonly roles: ReadonlyMap<string, ResolvedRole>;
   readonly seats: readonly Seat[];

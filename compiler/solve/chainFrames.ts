@@ -1,6 +1,6 @@
-import { axisDirection } from '../expand/sceneFrame';
 import { mirrorPoint } from '../expand/sides';
 import type { ChainSpecification, SceneFrame } from '../expand/types';
+import { axisDirection } from '../math/axisDirection';
 import { quatToAxes } from '../math/mat4';
 import { conjugateQuat, IDENTITY_QUAT, multiplyQuat, quatBetween, quatFromAxes, rotate } from '../math/quat';
 import { add, cross, length, negate, normalise, rejectFrom, sub } from '../math/vec3';

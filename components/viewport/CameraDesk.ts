@@ -1,45 +1,57 @@
 import { MathUtils, type PerspectiveCamera, Vector3 } from 'three';
 import type { OrbitControls } from 'three/examples/jsm/controls/OrbitControls.js';
-import type { RigScene, Vec3 } from '@/compiler';
-import { axisOf } from './Ground';
+import { axisDirection, type RigScene, type Vec3 } from '@/compiler';
 
 /** Where the viewer may stand. */
 export type Standpoint = 'free' | 'front' | 'side' | 'top';
 
-export interface Box {
-  readonly low: Vec3;
-  readonly high: Vec3;
-}
-
 /** Room left around what is framed, as a factor on its size. */
 const MARGIN = 1.12;
 
-/** The eight corners of a box. */
-function cornersOf({ low, high }: Box): readonly Vector3[] {
-  return [0, 1, 2, 3, 4, 5, 6, 7].map(
-    (corner) =>
-      new Vector3(
-        corner & 1 ? high[0] : low[0],
-        corner & 2 ? high[1] : low[1],
-        corner & 4 ? high[2] : low[2],
-      ),
-  );
+/** Where a camera must be across one direction of its picture, and how far back, to hold all points between its edges. */
+interface Fit {
+  readonly across: number;
+  readonly back: number;
+}
+
+/**
+ * Fits points, given by their places across the picture and towards the camera, between the two edges of a view
+ * that widens by `slope` on each side: each edge is moved back until it touches its outermost point, and the camera
+ * stands where both edges meet.
+ */
+function fit(points: readonly (readonly [across: number, towards: number])[], slope: number): Fit {
+  const high = Math.max(...points.map(([across, towards]) => towards + across / slope));
+  const low = Math.max(...points.map(([across, towards]) => towards - across / slope));
+  return { across: ((high - low) * slope) / 2, back: (high + low) / 2 };
 }
 
 /** Moves the camera of one viewport: standpoints, framing, and small steps for the keyboard. */
 export class CameraDesk {
+  #isTouched = false;
+
   constructor(
     private readonly camera: PerspectiveCamera,
     private readonly controls: OrbitControls,
     private readonly scene: Pick<RigScene, 'up' | 'forward'>,
     private readonly redraw: () => void,
   ) {
-    this.camera.up.set(...axisOf(scene.up));
+    this.camera.up.set(...axisDirection(scene.up));
+  }
+
+  /** Whether somebody has moved the camera. */
+  get isTouched(): boolean {
+    return this.#isTouched;
+  }
+
+  /** Says that somebody moves the camera; from then on it stays where it is put. */
+  touch(): this {
+    this.#isTouched = true;
+    return this;
   }
 
   #direction(standpoint: Standpoint): Vector3 {
-    const up = new Vector3(...axisOf(this.scene.up));
-    const forward = new Vector3(...axisOf(this.scene.forward));
+    const up = new Vector3(...axisDirection(this.scene.up));
+    const forward = new Vector3(...axisDirection(this.scene.forward));
     const left = new Vector3().crossVectors(up, forward);
     switch (standpoint) {
       case 'front':
@@ -54,35 +66,41 @@ export class CameraDesk {
     }
   }
 
-  /** Stands at a standpoint and frames a box. */
-  stand(standpoint: Standpoint, box: Box): void {
-    this.#frame(box, this.#direction(standpoint));
+  /** Stands at a standpoint and frames points. */
+  stand(standpoint: Standpoint, points: readonly Vec3[]): void {
+    this.#frame(points, this.#direction(standpoint));
   }
 
-  /** Frames a box from where the camera stands. */
-  frame(box: Box): void {
-    this.#frame(box, this.camera.position.clone().sub(this.controls.target).normalize());
+  /** Frames points from the side on which the camera stands. */
+  frame(points: readonly Vec3[]): void {
+    this.#frame(points, this.camera.position.clone().sub(this.controls.target).normalize());
   }
 
-  /** The least distance from the box's middle at which all its corners are in the picture. */
-  #distanceTo(box: Box, target: Vector3, direction: Vector3): number {
+  #frame(points: readonly Vec3[], direction: Vector3): void {
     const right = new Vector3().crossVectors(this.camera.up, direction).normalize();
     const upward = new Vector3().crossVectors(direction, right);
-    const tall = Math.tan(MathUtils.degToRad(this.camera.fov) / 2);
-    const wide = tall * this.camera.aspect;
-    const needs = cornersOf(box).map((corner) => {
-      const from = corner.sub(target);
-      const needed = Math.max(Math.abs(from.dot(right)) / wide, Math.abs(from.dot(upward)) / tall);
-      return needed * MARGIN + from.dot(direction);
+    const seen = points.map((point) => {
+      const place = new Vector3(...point);
+      return { across: place.dot(right), up: place.dot(upward), towards: place.dot(direction) };
     });
-    return Math.max(...needs, 1e-6);
-  }
-
-  #frame(box: Box, direction: Vector3): void {
-    const target = new Vector3(...box.low).add(new Vector3(...box.high)).multiplyScalar(0.5);
-    const distance = this.#distanceTo(box, target, direction);
-    this.controls.target.copy(target);
-    this.camera.position.copy(target).addScaledVector(direction, distance);
+    const tall = Math.tan(MathUtils.degToRad(this.camera.fov) / 2) / MARGIN;
+    const sideways = fit(
+      seen.map(({ across, towards }) => [across, towards]),
+      tall * this.camera.aspect,
+    );
+    const upwards = fit(
+      seen.map(({ up, towards }) => [up, towards]),
+      tall,
+    );
+    const depths = seen.map(({ towards }) => towards);
+    const middle = (Math.max(...depths) + Math.min(...depths)) / 2;
+    const distance = Math.max(sideways.back - middle, upwards.back - middle, 1e-6);
+    this.controls.target
+      .copy(right)
+      .multiplyScalar(sideways.across)
+      .addScaledVector(upward, upwards.across)
+      .addScaledVector(direction, middle);
+    this.camera.position.copy(this.controls.target).addScaledVector(direction, distance);
     this.camera.near = distance / 200;
     this.camera.far = distance * 50;
     this.camera.updateProjectionMatrix();
@@ -92,6 +110,7 @@ export class CameraDesk {
 
   /** Turns about the target by degrees: sideways and upwards. */
   orbit(sideways: number, upwards: number): void {
+    this.touch();
     const up = this.camera.up.clone().normalize();
     const offset = this.camera.position.clone().sub(this.controls.target);
     offset.applyAxisAngle(up, MathUtils.degToRad(-sideways));
@@ -106,6 +125,7 @@ export class CameraDesk {
 
   /** Moves the picture by shares of its height. */
   pan(sideways: number, upwards: number): void {
+    this.touch();
     const distance = this.camera.position.distanceTo(this.controls.target);
     const right = new Vector3().setFromMatrixColumn(this.camera.matrix, 0);
     const upward = new Vector3().setFromMatrixColumn(this.camera.matrix, 1);
@@ -118,6 +138,7 @@ export class CameraDesk {
 
   /** Comes nearer by a factor; below one, goes back. */
   approach(factor: number): void {
+    this.touch();
     const offset = this.camera.position.clone().sub(this.controls.target);
     this.camera.position.copy(this.controls.target).addScaledVector(offset, 1 / factor);
     this.controls.update();

@@ -1,22 +1,8 @@
 'use client';
 
 import { useMemo } from 'react';
-import type { RigScene, Vec3 } from '@/compiler';
+import { axisDirection, leftDirection, type RigScene, type Vec3 } from '@/compiler';
 import { FatLines } from './FatLines';
-
-const AXES: Readonly<Record<string, Vec3>> = {
-  '+x': [1, 0, 0],
-  '-x': [-1, 0, 0],
-  '+y': [0, 1, 0],
-  '-y': [0, -1, 0],
-  '+z': [0, 0, 1],
-  '-z': [0, 0, -1],
-};
-
-/** The direction of a scene axis. */
-export function axisOf(name: string): Vec3 {
-  return AXES[name] ?? [0, 1, 0];
-}
 
 /** A spacing of 1, 2 or 5 times a power of ten, so that graph paper reads like a ruler. */
 export function paperSpacing(size: number): number {
@@ -24,10 +10,6 @@ export function paperSpacing(size: number): number {
   const power = 10 ** Math.floor(Math.log10(raw));
   const share = raw / power;
   return power * (share < 1.5 ? 1 : share < 3.5 ? 2 : share < 7.5 ? 5 : 10);
-}
-
-function cross(a: Vec3, b: Vec3): Vec3 {
-  return [a[1] * b[2] - a[2] * b[1], a[2] * b[0] - a[0] * b[2], a[0] * b[1] - a[1] * b[0]];
 }
 
 interface GroundLines {
@@ -38,8 +20,8 @@ interface GroundLines {
 
 /** Graph paper on the ground with every fifth line bold, and a mark that points forward. */
 function groundLines(scene: Pick<RigScene, 'up' | 'forward'>, size: number): GroundLines {
-  const forward = axisOf(scene.forward);
-  const left = cross(axisOf(scene.up), forward);
+  const forward = axisDirection(scene.forward);
+  const left = leftDirection(scene);
   const spacing = paperSpacing(size);
   const count = 10;
   const reach = spacing * count;
