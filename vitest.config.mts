@@ -52,7 +52,7 @@ export default defineConfig({
           globalSetup: ['tests/support/applicationSetup.ts'],
           // One browser at a time: two cores draw pictures in software.
           fileParallelism: false,
-          testTimeout: 120_000,
+          testTimeout: 300_000,
           hookTimeout: 240_000,
         },
       },

@@ -53,7 +53,7 @@ export async function visit(browser: Browser, options: VisitOptions = {}): Promi
     });
   });
   const page = await context.newPage();
-  page.setDefaultTimeout(30_000);
+  page.setDefaultTimeout(60_000);
   return { context, page, troubles };
 }
 
