@@ -141,6 +141,8 @@ export function CodePane({
         lineHeight: 20,
         fontLigatures: false,
         glyphMargin: true,
+        lineNumbersMinChars: 3,
+        lineDecorationsWidth: 8,
         minimap: { enabled: false },
         scrollBeyondLastLine: false,
         padding: { top: 12, bottom: 12 },

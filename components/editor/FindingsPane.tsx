@@ -44,9 +44,7 @@ export function countFindings(findings: readonly Finding[]): string {
 export function FindingsPane({ findings, isReadOnly, source, onGoTo, onFix }: FindingsPaneProps) {
   if (findings.length === 0) {
     return (
-      <p className="p-4 text-ink-soft">
-        Nothing is wrong. The build script below was made from exactly this text.
-      </p>
+      <p className="p-4 text-ink-soft">Nothing is wrong. The build script was made from exactly this text.</p>
     );
   }
   return (

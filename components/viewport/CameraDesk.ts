@@ -8,6 +8,9 @@ export type Standpoint = 'free' | 'front' | 'side' | 'top';
 /** Room left around what is framed, as a factor on its size. */
 const MARGIN = 1.12;
 
+/** The camera stays outside of what is framed, by this factor on half its depth: points in one line of sight need it. */
+const CLEARANCE = 1.05;
+
 /** Where a camera must be across one direction of its picture, and how far back, to hold all points between its edges. */
 interface Fit {
   readonly across: number;
@@ -19,7 +22,7 @@ interface Fit {
  * that widens by `slope` on each side: each edge is moved back until it touches its outermost point, and the camera
  * stands where both edges meet.
  */
-function fit(points: readonly (readonly [across: number, towards: number])[], slope: number): Fit {
+function fitBetween(points: readonly (readonly [across: number, towards: number])[], slope: number): Fit {
   const high = Math.max(...points.map(([across, towards]) => towards + across / slope));
   const low = Math.max(...points.map(([across, towards]) => towards - across / slope));
   return { across: ((high - low) * slope) / 2, back: (high + low) / 2 };
@@ -84,17 +87,19 @@ export class CameraDesk {
       return { across: place.dot(right), up: place.dot(upward), towards: place.dot(direction) };
     });
     const tall = Math.tan(MathUtils.degToRad(this.camera.fov) / 2) / MARGIN;
-    const sideways = fit(
+    const sideways = fitBetween(
       seen.map(({ across, towards }) => [across, towards]),
       tall * this.camera.aspect,
     );
-    const upwards = fit(
+    const upwards = fitBetween(
       seen.map(({ up, towards }) => [up, towards]),
       tall,
     );
     const depths = seen.map(({ towards }) => towards);
-    const middle = (Math.max(...depths) + Math.min(...depths)) / 2;
-    const distance = Math.max(sideways.back - middle, upwards.back - middle, 1e-6);
+    const [near, far] = [Math.max(...depths), Math.min(...depths)];
+    const middle = (near + far) / 2;
+    const clear = ((near - far) / 2) * CLEARANCE + 1e-6;
+    const distance = Math.max(sideways.back - middle, upwards.back - middle, clear);
     this.controls.target
       .copy(right)
       .multiplyScalar(sideways.across)

@@ -15,21 +15,25 @@ export function paperSpacing(size: number): number {
 interface GroundLines {
   readonly fine: readonly number[];
   readonly bold: readonly number[];
-  readonly mark: readonly number[];
 }
 
-/** Graph paper on the ground with every fifth line bold, and a mark that points forward. */
-function groundLines(scene: Pick<RigScene, 'up' | 'forward'>, size: number): GroundLines {
+/** A point on the ground, by how far it lies to the left and forward. */
+type OnGround = (leftwards: number, onwards: number) => Vec3;
+
+function onGround(scene: Pick<RigScene, 'up' | 'forward'>): OnGround {
   const forward = axisDirection(scene.forward);
   const left = leftDirection(scene);
-  const spacing = paperSpacing(size);
+  return (leftwards, onwards) => [
+    left[0] * leftwards + forward[0] * onwards,
+    left[1] * leftwards + forward[1] * onwards,
+    left[2] * leftwards + forward[2] * onwards,
+  ];
+}
+
+/** Graph paper on the ground with every fifth line bold. */
+function groundLines(on: OnGround, spacing: number): GroundLines {
   const count = 10;
   const reach = spacing * count;
-  const on = (a: number, b: number): Vec3 => [
-    left[0] * a + forward[0] * b,
-    left[1] * a + forward[1] * b,
-    left[2] * a + forward[2] * b,
-  ];
   const fine: number[] = [];
   const bold: number[] = [];
   for (let step = -count; step <= count; step += 1) {
@@ -37,36 +41,50 @@ function groundLines(scene: Pick<RigScene, 'up' | 'forward'>, size: number): Gro
     into.push(...on(step * spacing, -reach), ...on(step * spacing, reach));
     into.push(...on(-reach, step * spacing), ...on(reach, step * spacing));
   }
-  const tip = reach + spacing * 1.6;
-  const wing = spacing * 0.7;
-  const mark = [
-    ...on(0, reach),
-    ...on(0, tip),
-    ...on(0, tip),
-    ...on(wing, tip - wing * 1.4),
-    ...on(0, tip),
-    ...on(-wing, tip - wing * 1.4),
+  return { fine, bold };
+}
+
+/** How far forward of the origin something reaches. */
+function reachOf({ low, high }: GroundProps['extent'], scene: Pick<RigScene, 'forward'>): number {
+  const forward = axisDirection(scene.forward);
+  const reach = forward.map((share, axis) => Math.max(share * (low[axis] ?? 0), share * (high[axis] ?? 0)));
+  return reach.reduce((sum, part) => sum + part, 0);
+}
+
+/** The arrow on the ground before the rig that points forward: its line ends, the tip last. */
+function forwardMark(on: OnGround, from: number, spacing: number): readonly number[] {
+  const [tail, tip] = [from + spacing * 0.4, from + spacing * 1.6];
+  const wing = spacing * 0.4;
+  return [
+    ...[...on(wing, tip - wing), ...on(0, tip)],
+    ...[...on(-wing, tip - wing), ...on(0, tip)],
+    ...[...on(0, tail), ...on(0, tip)],
   ];
-  return { fine, bold, mark };
 }
 
 export interface GroundProps {
   readonly scene: Pick<RigScene, 'up' | 'forward'>;
-  readonly size: number;
+  /** The box around the rig and its size. */
+  readonly extent: { readonly low: Vec3; readonly high: Vec3; readonly size: number };
   readonly rule: string;
   readonly ink: string;
 }
 
 /** The ground a rig stands on. */
-export function Ground({ scene, size, rule, ink }: GroundProps) {
+export function Ground({ scene, extent, rule, ink }: GroundProps) {
   const { up, forward } = scene;
-  const spacing = paperSpacing(size);
-  const lines = useMemo(() => groundLines({ up, forward }, spacing * 16), [up, forward, spacing]);
+  const spacing = paperSpacing(extent.size);
+  const from = reachOf(extent, scene);
+  const lines = useMemo(() => groundLines(onGround({ up, forward }), spacing), [up, forward, spacing]);
+  const mark = useMemo(
+    () => forwardMark(onGround({ up, forward }), from, spacing),
+    [up, forward, from, spacing],
+  );
   return (
     <>
       <FatLines ends={lines.fine} colour={rule} width={0.8} dash={null} opacity={0.55} />
       <FatLines ends={lines.bold} colour={rule} width={1.2} dash={null} />
-      <FatLines ends={lines.mark} colour={ink} width={1.6} dash={null} />
+      <FatLines ends={mark} colour={ink} width={1.6} dash={null} />
     </>
   );
 }

@@ -2,58 +2,65 @@
 
 import { useEffect, useMemo } from 'react';
 import { BufferAttribute, BufferGeometry, Color } from 'three';
-import type { Side } from '@/compiler';
-import type { Colours } from './colours';
 import type { JointMark } from './drawing';
-import { ringTexture } from './ringTexture';
+import { type RingKind, ringTexture } from './ringTexture';
 
-/** Width of a joint's circle on the screen, in pixels. */
-const WIDTH = 11;
+export interface JointsProps {
+  readonly joints: readonly JointMark[];
+  /** Width of a circle on the screen, in pixels. */
+  readonly width: number;
+  readonly sheet: string;
+  /** Drawn around every circle, because sky blue and orange alone are too light on paper. */
+  readonly ink: string;
+  colourOf(joint: JointMark): Color;
+  /** Joints with a greater layer are drawn over those with a lesser one. */
+  readonly layer: number;
+}
 
-function pointGeometry(joints: readonly JointMark[], colourOf: (side: Side) => string): BufferGeometry {
+function pointGeometry(joints: readonly JointMark[], colourOf: (joint: JointMark) => Color): BufferGeometry {
   const geometry = new BufferGeometry();
-  geometry.setAttribute(
-    'position',
-    new BufferAttribute(new Float32Array(joints.flatMap(({ at }) => [...at])), 3),
-  );
-  const tints = joints.flatMap(({ side }) => new Color(colourOf(side)).toArray());
+  const places = joints.flatMap(({ at }) => [...at]);
+  const tints = joints.flatMap((joint) => colourOf(joint).toArray());
+  geometry.setAttribute('position', new BufferAttribute(new Float32Array(places), 3));
   geometry.setAttribute('color', new BufferAttribute(new Float32Array(tints), 3));
   return geometry;
 }
 
-/** Joints as small open circles, broken on the right side; filled with paper so that strokes end at their rim. */
-export function Joints({
-  joints,
-  colours,
-}: {
-  readonly joints: readonly JointMark[];
-  readonly colours: Colours;
-}) {
-  const textures = useMemo(
-    () => ({ ring: ringTexture('ring'), broken: ringTexture('broken'), disc: ringTexture('disc') }),
-    [],
-  );
-  const parts = useMemo(() => {
-    const right = joints.filter(({ side }) => side === 'right');
-    const others = joints.filter(({ side }) => side !== 'right');
-    return {
-      discs: pointGeometry(joints, () => colours.sheet),
-      rings: pointGeometry(others, (side) => colours[side]),
-      broken: pointGeometry(right, (side) => colours[side]),
-    };
-  }, [joints, colours]);
+const KINDS: readonly RingKind[] = ['disc', 'ringCasing', 'brokenCasing', 'ring', 'broken'];
 
+/** Joints as small open circles, broken on the right side; filled with paper so that strokes end at their rim. */
+export function Joints({ joints, width, sheet, ink, colourOf, layer }: JointsProps) {
+  const textures = useMemo(() => KINDS.map((kind) => ({ kind, texture: ringTexture(kind) })), []);
   useEffect(
     () => () => {
-      for (const geometry of Object.values(parts)) geometry.dispose();
+      for (const { texture } of textures) texture.dispose();
     },
-    [parts],
+    [textures],
   );
 
-  const layer = (geometry: BufferGeometry, texture: keyof typeof textures, order: number, width: number) => (
-    <points geometry={geometry} renderOrder={order}>
+  const geometries = useMemo<Readonly<Record<RingKind, BufferGeometry>>>(() => {
+    const right = joints.filter(({ side }) => side === 'right');
+    const others = joints.filter(({ side }) => side !== 'right');
+    const inked = () => new Color(ink);
+    return {
+      disc: pointGeometry(joints, () => new Color(sheet)),
+      ringCasing: pointGeometry(others, inked),
+      brokenCasing: pointGeometry(right, inked),
+      ring: pointGeometry(others, colourOf),
+      broken: pointGeometry(right, colourOf),
+    };
+  }, [joints, sheet, ink, colourOf]);
+  useEffect(
+    () => () => {
+      for (const geometry of Object.values(geometries)) geometry.dispose();
+    },
+    [geometries],
+  );
+
+  return textures.map(({ kind, texture }, order) => (
+    <points key={kind} geometry={geometries[kind]} renderOrder={layer + order}>
       <pointsMaterial
-        map={textures[texture]}
+        map={texture}
         vertexColors
         size={width}
         sizeAttenuation={false}
@@ -63,13 +70,5 @@ export function Joints({
         toneMapped={false}
       />
     </points>
-  );
-
-  return (
-    <>
-      {layer(parts.discs, 'disc', 2, WIDTH)}
-      {layer(parts.rings, 'ring', 3, WIDTH)}
-      {layer(parts.broken, 'broken', 3, WIDTH)}
-    </>
-  );
+  ));
 }

@@ -1,6 +1,6 @@
 'use client';
 
-import { Canvas, useThree } from '@react-three/fiber';
+import { Canvas } from '@react-three/fiber';
 import {
   type KeyboardEvent,
   type PointerEvent,
@@ -10,18 +10,18 @@ import {
   useRef,
   useState,
 } from 'react';
-import { type PerspectiveCamera, Vector3 } from 'three';
-import { OrbitControls } from 'three/examples/jsm/controls/OrbitControls.js';
-import type { RigScene } from '@/compiler';
+import { Vector3 } from 'three';
 import type { BuiltRig } from '@/components/worker/messages';
-import { CameraDesk, type Standpoint } from './CameraDesk';
+import type { Standpoint } from './CameraDesk';
 import { type Colours, onSchemeChange, readColours } from './colours';
-import { type Audience, type Drawing, drawRig } from './drawing';
+import { type Audience, drawRig } from './drawing';
+import { pointsAround, pointsOf } from './framing';
 import { Ground } from './Ground';
 import { Legend } from './Legend';
 import { nearestNode } from './nearestNode';
 import { pressKey } from './pressKey';
 import { RigDrawing } from './RigDrawing';
+import { type Stage, StageKeeper } from './StageKeeper';
 import { ViewBar } from './ViewBar';
 
 export interface ViewportProps {
@@ -31,51 +31,6 @@ export interface ViewportProps {
   /** Ids of the chosen nodes. */
   readonly chosen: readonly string[];
   onChoose(id: string | null): void;
-}
-
-interface Stage {
-  readonly camera: PerspectiveCamera;
-  readonly desk: CameraDesk;
-}
-
-/** Lends the canvas's camera and controls to the page around it. */
-function StageKeeper({
-  scene,
-  onStage,
-}: {
-  readonly scene: Pick<RigScene, 'up' | 'forward'>;
-  onStage(stage: Stage | null): void;
-}) {
-  const camera = useThree((state) => state.camera) as PerspectiveCamera;
-  const canvas = useThree((state) => state.gl.domElement);
-  const invalidate = useThree((state) => state.invalidate);
-  const { up, forward } = scene;
-  useEffect(() => {
-    const controls = new OrbitControls(camera, canvas);
-    controls.enableDamping = false;
-    controls.addEventListener('change', () => invalidate());
-    onStage({ camera, desk: new CameraDesk(camera, controls, { up, forward }, () => invalidate()) });
-    return () => {
-      controls.dispose();
-      onStage(null);
-    };
-  }, [camera, canvas, invalidate, onStage, up, forward]);
-  return null;
-}
-
-function boxAround(drawing: Drawing, world: Float64Array, nodes: readonly number[]) {
-  if (nodes.length === 0) return drawing;
-  const reach = drawing.size * 0.08;
-  const low: [number, number, number] = [Infinity, Infinity, Infinity];
-  const high: [number, number, number] = [-Infinity, -Infinity, -Infinity];
-  for (const node of nodes) {
-    for (let axis = 0; axis < 3; axis += 1) {
-      const value = world[node * 16 + 12 + axis] ?? 0;
-      low[axis] = Math.min(low[axis] as number, value - reach);
-      high[axis] = Math.max(high[axis] as number, value + reach);
-    }
-  }
-  return { low, high };
 }
 
 /** The rig that the script built, drawn as on paper. Everything a pointer does here, keys do too. */
@@ -99,13 +54,10 @@ export function Viewport({ built, isOlder, chosen, onChoose }: ViewportProps) {
     const ids = new Set(chosen);
     return rig.nodes.flatMap(({ id }, index) => (ids.has(id) ? [index] : []));
   }, [rig, chosen]);
-  const latest = useRef({ drawing, world, chosenNodes });
-  latest.current = { drawing, world, chosenNodes };
+  const latest = useRef(drawing);
+  latest.current = drawing;
 
-  const keepStage = useCallback((next: Stage | null) => {
-    next?.desk.stand('free', latest.current.drawing);
-    setStage(next);
-  }, []);
+  const wholeRig = useCallback(() => pointsOf(latest.current), []);
 
   const nodeUnder = (event: PointerEvent): number | null => {
     const box = frame.current?.getBoundingClientRect();
@@ -143,9 +95,9 @@ export function Viewport({ built, isOlder, chosen, onChoose }: ViewportProps) {
     onChoose(node === null ? null : (rig.nodes[node]?.id ?? null));
   };
 
-  const stand = (standpoint: Standpoint): void => stage?.desk.stand(standpoint, drawing);
-  const frameAll = (): void => stage?.desk.frame(drawing);
-  const frameChosen = (): void => stage?.desk.frame(boxAround(drawing, world, chosenNodes));
+  const stand = (standpoint: Standpoint): void => stage?.desk.touch().stand(standpoint, pointsOf(drawing));
+  const frameAll = (): void => stage?.desk.touch().frame(pointsOf(drawing));
+  const frameChosen = (): void => stage?.desk.touch().frame(pointsAround(drawing, world, chosenNodes));
   const letGo = (): void => onChoose(null);
 
   const press = (event: KeyboardEvent): void => {
@@ -187,8 +139,8 @@ export function Viewport({ built, isOlder, chosen, onChoose }: ViewportProps) {
           gl={{ antialias: true, alpha: false }}
         >
           <color attach="background" args={[colours.sheet]} />
-          <StageKeeper scene={rig.scene} onStage={keepStage} />
-          <Ground scene={rig.scene} size={drawing.size} rule={colours.rule} ink={colours.inkSoft} />
+          <StageKeeper scene={rig.scene} wholeRig={wholeRig} onStage={setStage} />
+          <Ground scene={rig.scene} extent={drawing} rule={colours.rule} ink={colours.inkSoft} />
           <RigDrawing drawing={drawing} colours={colours} chosen={chosenNodes} />
         </Canvas>
         {hovered && hoveredNode && (

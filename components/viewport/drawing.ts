@@ -10,11 +10,14 @@ export type Segments = Readonly<Record<Side, readonly number[]>>;
 export interface JointMark {
   readonly node: number;
   readonly side: Side;
+  /** False for what animators do not see; drawn faintly. */
+  readonly isShown: boolean;
   readonly at: Vec3;
 }
 
 export interface BoneStroke {
   readonly side: Side;
+  readonly isShown: boolean;
   readonly from: Vec3;
   readonly to: Vec3;
 }
@@ -86,10 +89,10 @@ export function drawRig({ rig, world }: Pick<BuiltRig, 'rig' | 'world'>, audienc
     if (node.kind === 'joint' || node.kind === 'control') grow(at);
     if (audience === 'animator' && !node.shown) return;
     if (node.kind === 'joint') {
-      joints.push({ node: index, side: node.side, at });
+      joints.push({ node: index, side: node.side, isShown: node.shown, at });
       const parent = node.parent === null ? undefined : indexOf.get(node.parent);
       if (parent !== undefined && rig.nodes[parent]?.kind === 'joint') {
-        bones.push({ side: node.side, from: positionAt(world, parent), to: at });
+        bones.push({ side: node.side, isShown: node.shown, from: positionAt(world, parent), to: at });
       }
     } else if (node.kind === 'control') {
       const ends = outlineOf(rig, node, world, index);

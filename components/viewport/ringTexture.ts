@@ -1,9 +1,17 @@
 import { CanvasTexture, SRGBColorSpace } from 'three';
 
 const SIZE = 64;
+/** Widths of lines, as shares of the texture. */
+const RING = 0.14;
+const CASING = 0.22;
 
-/** A white circle on nothing, to be tinted: open for a joint, broken for the right side, or a filled disc. */
-export function ringTexture(kind: 'ring' | 'broken' | 'disc'): CanvasTexture {
+export type RingKind = 'ring' | 'broken' | 'ringCasing' | 'brokenCasing' | 'disc';
+
+/**
+ * A white circle on nothing, to be tinted: open for a joint, broken for the right side, either wider as the ink
+ * around it, or a filled disc.
+ */
+export function ringTexture(kind: RingKind): CanvasTexture {
   const canvas = document.createElement('canvas');
   canvas.width = SIZE;
   canvas.height = SIZE;
@@ -11,10 +19,10 @@ export function ringTexture(kind: 'ring' | 'broken' | 'disc'): CanvasTexture {
   if (context) {
     context.fillStyle = '#ffffff';
     context.strokeStyle = '#ffffff';
-    context.lineWidth = SIZE * 0.14;
-    if (kind === 'broken') context.setLineDash([SIZE * 0.2, SIZE * 0.13]);
+    context.lineWidth = SIZE * (kind === 'ring' || kind === 'broken' ? RING : CASING);
+    if (kind === 'broken' || kind === 'brokenCasing') context.setLineDash([SIZE * 0.2, SIZE * 0.13]);
     context.beginPath();
-    context.arc(SIZE / 2, SIZE / 2, SIZE * (kind === 'disc' ? 0.42 : 0.38), 0, Math.PI * 2);
+    context.arc(SIZE / 2, SIZE / 2, SIZE * 0.36, 0, Math.PI * 2);
     if (kind === 'disc') context.fill();
     else context.stroke();
   }

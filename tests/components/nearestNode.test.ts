@@ -18,7 +18,7 @@ const drawing = (
   joints: readonly (readonly [number, number, number])[],
   outlines: readonly (readonly [number, readonly number[]])[],
 ): Drawing => ({
-  joints: joints.map((at, node) => ({ node, side: 'centre', at })),
+  joints: joints.map((at, node) => ({ node, side: 'centre', isShown: true, at })),
   bones: [],
   controls: { left: [], right: [], centre: [] },
   leaders: [],
