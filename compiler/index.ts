@@ -3,6 +3,7 @@ export { type BuildFile, buildFiles, utf8Length } from './build/buildFiles';
 export { findingsToSarif } from './build/findingsToSarif';
 export { type Compilation, type CompileRequest, compile, type NodePlace } from './compile';
 export { type BaseReference, findBaseReference } from './documents/findBaseReference';
+export { findHouseReference } from './documents/findHouseReference';
 export { DEFAULT_HOUSE } from './documents/readHouse';
 export { type Explanation, explainFinding } from './findings/explainFinding';
 export type { Finding, Fix, RelatedPlace, Severity } from './findings/Finding';

@@ -1,5 +1,7 @@
-import { compile, type Finding } from '../../compiler/index';
+import { compile } from '../../compiler/index';
+import { countWords } from './countWords';
 import { hasErrors, printFindings } from './printFindings';
+import { startProgress } from './progress';
 import { readHouse } from './readHouse';
 import { readParameters } from './readParameters';
 import { readRequest } from './readRequest';
@@ -13,11 +15,14 @@ export function check(parameters: readonly string[]): number {
   });
   if (positionals.length === 0) throw new WrongUse('Name at least one recipe file.');
   const houses = readHouse(values.house);
-  const results = positionals.map((file) => {
+  const progress = startProgress(positionals.length, { isWanted: !values.json });
+  const results = positionals.map((file, index) => {
+    progress.show(index, file);
     const { recipe, bases } = readRequest(file);
     const { findings } = compile({ recipe, bases, houses });
     return { file, findings, sources: [recipe, ...Object.values(bases), ...Object.values(houses)] };
   });
+  progress.clear();
   if (values.json) {
     console.log(
       JSON.stringify(
@@ -33,12 +38,4 @@ export function check(parameters: readonly string[]): number {
     }
   }
   return results.some(({ findings }) => hasErrors(findings)) ? 1 : 0;
-}
-
-/** How many findings of each weight, in words. */
-export function countWords(findings: readonly Finding[]): string {
-  if (findings.length === 0) return 'nothing is wrong';
-  const count = (severity: Finding['severity']): number =>
-    findings.filter((finding) => finding.severity === severity).length;
-  return `${count('error')} errors, ${count('warning')} warnings, ${count('info')} notes`;
 }

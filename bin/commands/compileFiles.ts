@@ -1,6 +1,7 @@
-import { buildFiles, compile } from '../../compiler/index';
-import { countWords } from './check';
+import { type BuildFile, buildFiles, compile } from '../../compiler/index';
+import { countWords } from './countWords';
 import { hasErrors, printFindings } from './printFindings';
+import { startProgress } from './progress';
 import { readHouse } from './readHouse';
 import { readParameters } from './readParameters';
 import { readRequest } from './readRequest';
@@ -21,6 +22,20 @@ function readValues(pairs: readonly string[]): Readonly<Record<string, number>> 
   );
 }
 
+/** Refuses recipes whose builds would lie over one another. */
+function checkNames(
+  results: readonly { readonly file: string; readonly files: readonly BuildFile[] }[],
+): void {
+  const writers = new Map<string, string>();
+  for (const { file, files } of results) {
+    for (const { name } of files) {
+      const other = writers.get(name);
+      if (other !== undefined) throw new WrongUse(`${other} and ${file} would both write ${name}.`);
+      writers.set(name, file);
+    }
+  }
+}
+
 /** `compile FILE… --out DIR`: writes script, rig, findings and manifest of each recipe. */
 export function compileFiles(parameters: readonly string[]): number {
   const { values, positionals } = readParameters(parameters, {
@@ -37,10 +52,10 @@ export function compileFiles(parameters: readonly string[]): number {
     throw new WrongUse('--character names one character: give one file.');
   const params = readValues(values.params ?? []);
   const houses = readHouse(values.house);
-  const isTerminal = process.stderr.isTTY && !values.json;
 
+  const progress = startProgress(positionals.length, { isWanted: !values.json });
   const results = positionals.map((file, index) => {
-    if (isTerminal) process.stderr.write(`\r${index + 1}/${positionals.length} ${file}\u001b[K`);
+    progress.show(index, file);
     const { recipe, bases } = readRequest(file);
     const compilation = compile({
       recipe,
@@ -48,17 +63,24 @@ export function compileFiles(parameters: readonly string[]): number {
       houses,
       character: { ...(character === undefined ? {} : { name: character }), params },
     });
-    const files = buildFiles(compilation);
-    writeFiles(out, files);
     const sources = [recipe, ...Object.values(bases), ...Object.values(houses)];
-    return { file, findings: compilation.findings, files: files.map(({ name }) => name), sources };
+    return { file, findings: compilation.findings, files: buildFiles(compilation), sources };
   });
-  if (isTerminal) process.stderr.write('\r\u001b[K');
+  progress.clear();
+  checkNames(results);
+  writeFiles(
+    out,
+    results.flatMap(({ files }) => files),
+  );
 
   if (values.json) {
     console.log(
       JSON.stringify(
-        results.map(({ file, findings, files }) => ({ file, findings, files })),
+        results.map(({ file, findings, files }) => ({
+          file,
+          findings,
+          files: files.map(({ name }) => name),
+        })),
         null,
         2,
       ),
@@ -66,7 +88,7 @@ export function compileFiles(parameters: readonly string[]): number {
   } else {
     for (const { file, findings, files, sources } of results) {
       printFindings(findings, sources);
-      console.log(`${file}: ${countWords(findings)}; wrote ${files.join(', ')}`);
+      console.log(`${file}: ${countWords(findings)}; wrote ${files.map(({ name }) => name).join(', ')}`);
     }
   }
   return results.some(({ findings }) => hasErrors(findings)) ? 1 : 0;

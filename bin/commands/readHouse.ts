@@ -1,5 +1,4 @@
-import { parse } from 'yaml';
-import { DEFAULT_HOUSE, type SourceText } from '../../compiler/index';
+import { DEFAULT_HOUSE, findHouseReference, type SourceText } from '../../compiler/index';
 import { readText } from './readText';
 
 /**
@@ -9,12 +8,6 @@ import { readText } from './readText';
 export function readHouse(path: string | undefined): Readonly<Record<string, SourceText>> {
   if (path === undefined) return {};
   const text = readText(path);
-  const houses: Record<string, SourceText> = { [DEFAULT_HOUSE]: text };
-  try {
-    const { house, version } = parse(text.text) as { house?: unknown; version?: unknown };
-    if (typeof house === 'string') houses[`${house}@${typeof version === 'number' ? version : 1}`] = text;
-  } catch {
-    // Not YAML: the compiler reports it when the recipe follows these rules.
-  }
-  return houses;
+  const reference = findHouseReference(text);
+  return { [DEFAULT_HOUSE]: text, ...(reference === undefined ? {} : { [reference]: text }) };
 }

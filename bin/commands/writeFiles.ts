@@ -3,6 +3,12 @@ import { join } from 'node:path';
 import type { BuildFile } from '../../compiler/index';
 import { WrongUse } from './WrongUse';
 
+function cannotWrite(folder: string, error: unknown): WrongUse {
+  const code = (error as NodeJS.ErrnoException).code;
+  const reason = code === 'EEXIST' || code === 'ENOTDIR' ? 'it is not a folder' : (code ?? 'unknown');
+  return new WrongUse(`${folder} cannot be written to: ${reason}.`);
+}
+
 /**
  * Writes files into a folder, made if need be. Each is written beside its place and then moved there, and none is
  * moved before all are written, so that nothing half-written is ever seen under its name.
@@ -15,12 +21,14 @@ export function writeFiles(folder: string, files: readonly BuildFile[]): void {
   }));
   try {
     mkdirSync(folder, { recursive: true });
+  } catch (error) {
+    throw cannotWrite(folder, error);
+  }
+  try {
     for (const { draft, text } of drafts) writeFileSync(draft, text);
     for (const { draft, place } of drafts) renameSync(draft, place);
   } catch (error) {
     for (const { draft } of drafts) rmSync(draft, { force: true });
-    throw new WrongUse(
-      `${folder} cannot be written to: ${(error as NodeJS.ErrnoException).code ?? 'unknown'}.`,
-    );
+    throw cannotWrite(folder, error);
   }
 }

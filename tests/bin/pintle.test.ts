@@ -1,10 +1,10 @@
-import { spawnSync } from 'node:child_process';
 import { mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { recipeSchema, samples } from '@/compiler';
+import { runPintle } from '../support/pintle';
 
 const root = fileURLToPath(new URL('../..', import.meta.url));
 let folder: string;
@@ -13,19 +13,7 @@ beforeAll(() => {
 });
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
-/** Runs the real program as the shell would. */
-function pintle(...parameters: string[]) {
-  const { status, stdout, stderr } = spawnSync(
-    join(root, 'node_modules/.bin/tsx'),
-    [join(root, 'bin/pintle.ts'), ...parameters],
-    {
-      cwd: folder,
-      encoding: 'utf8',
-      maxBuffer: 64 * 1024 * 1024,
-    },
-  );
-  return { status, stdout, stderr };
-}
+const pintle = (...parameters: string[]) => runPintle(folder, parameters);
 
 function write(name: string, text: string): string {
   writeFileSync(join(folder, name), text);
