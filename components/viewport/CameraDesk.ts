@@ -8,24 +8,34 @@ export type Standpoint = 'free' | 'front' | 'side' | 'top';
 /** Room left around what is framed, as a factor on its size. */
 const MARGIN = 1.12;
 
-/** The camera stays outside of what is framed, by this factor on half its depth: points in one line of sight need it. */
-const CLEARANCE = 1.05;
+/** The camera stays so far before what is framed, as a share of half its depth: points in one line of sight need it. */
+const CLEARANCE = 0.05;
 
-/** Where a camera must be across one direction of its picture, and how far back, to hold all points between its edges. */
-interface Fit {
-  readonly across: number;
-  readonly back: number;
-}
+/** A point by its place across one direction of the picture, and towards the camera. */
+type Seen = readonly [across: number, towards: number];
 
 /**
- * Fits points, given by their places across the picture and towards the camera, between the two edges of a view
- * that widens by `slope` on each side: each edge is moved back until it touches its outermost point, and the camera
- * stands where both edges meet.
+ * How far back a camera must be at least to see points between two edges that part by `slope` on each side: each edge
+ * is moved back until it touches its outermost point, and the camera stands where both edges meet.
  */
-function fitBetween(points: readonly (readonly [across: number, towards: number])[], slope: number): Fit {
+function leastBack(points: readonly Seen[], slope: number): number {
   const high = Math.max(...points.map(([across, towards]) => towards + across / slope));
   const low = Math.max(...points.map(([across, towards]) => towards - across / slope));
-  return { across: ((high - low) * slope) / 2, back: (high + low) / 2 };
+  return (high + low) / 2;
+}
+
+/** Where a camera so far back must be across the picture, for the outermost points to be as far from either edge. */
+function middleAcross(points: readonly Seen[], back: number): number {
+  let low = Math.min(...points.map(([across]) => across));
+  let high = Math.max(...points.map(([across]) => across));
+  // Halved until doubles can tell no more.
+  for (let step = 0; step < 60; step += 1) {
+    const middle = (low + high) / 2;
+    const slopes = points.map(([across, towards]) => (across - middle) / (back - towards));
+    if (Math.max(...slopes) + Math.min(...slopes) > 0) low = middle;
+    else high = middle;
+  }
+  return (low + high) / 2;
 }
 
 /** Moves the camera of one viewport: standpoints, framing, and small steps for the keyboard. */
@@ -82,29 +92,21 @@ export class CameraDesk {
   #frame(points: readonly Vec3[], direction: Vector3): void {
     const right = new Vector3().crossVectors(this.camera.up, direction).normalize();
     const upward = new Vector3().crossVectors(direction, right);
-    const seen = points.map((point) => {
-      const place = new Vector3(...point);
-      return { across: place.dot(right), up: place.dot(upward), towards: place.dot(direction) };
-    });
+    const places = points.map((point) => new Vector3(...point));
+    const seenAlong = (axis: Vector3): readonly Seen[] =>
+      places.map((place) => [place.dot(axis), place.dot(direction)]);
+    const [sideways, upwards] = [seenAlong(right), seenAlong(upward)];
     const tall = Math.tan(MathUtils.degToRad(this.camera.fov) / 2) / MARGIN;
-    const sideways = fitBetween(
-      seen.map(({ across, towards }) => [across, towards]),
-      tall * this.camera.aspect,
-    );
-    const upwards = fitBetween(
-      seen.map(({ up, towards }) => [up, towards]),
-      tall,
-    );
-    const depths = seen.map(({ towards }) => towards);
+    const depths = sideways.map(([, towards]) => towards);
     const [near, far] = [Math.max(...depths), Math.min(...depths)];
-    const middle = (near + far) / 2;
-    const clear = ((near - far) / 2) * CLEARANCE + 1e-6;
-    const distance = Math.max(sideways.back - middle, upwards.back - middle, clear);
+    const clear = near + ((near - far) / 2) * CLEARANCE + 1e-6;
+    const back = Math.max(leastBack(sideways, tall * this.camera.aspect), leastBack(upwards, tall), clear);
+    const distance = back - (near + far) / 2;
     this.controls.target
-      .copy(right)
-      .multiplyScalar(sideways.across)
-      .addScaledVector(upward, upwards.across)
-      .addScaledVector(direction, middle);
+      .copy(direction)
+      .multiplyScalar((near + far) / 2)
+      .addScaledVector(right, middleAcross(sideways, back))
+      .addScaledVector(upward, middleAcross(upwards, back));
     this.camera.position.copy(this.controls.target).addScaledVector(direction, distance);
     this.camera.near = distance / 200;
     this.camera.far = distance * 50;

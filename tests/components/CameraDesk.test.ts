@@ -37,7 +37,7 @@ function widest(camera: PerspectiveCamera, points: readonly Vec3[]): number {
 }
 
 describe('framing', () => {
-  it('has every point in the picture, before the camera', () => {
+  it('has every point in the picture, before the camera, and all of them in its middle', () => {
     fc.assert(
       fc.property(
         fc.array(point, { minLength: 1, maxLength: 20 }),
