@@ -4,7 +4,7 @@ import type { Vec3 } from '../rig/Rig';
 import type { Span } from '../source/SourceText';
 import { LIMITS } from '../syntax/limits';
 import type { Path } from '../syntax/types';
-import { isPoint } from './environment';
+import { isPoint, recipeFunctionNames } from './environment';
 import { expressionFindings } from './findings';
 import { type NameRead, parseExpression } from './parseExpression';
 
@@ -19,9 +19,14 @@ export interface LandmarkValue {
   readonly right: { readonly x: number; readonly y: number; readonly z: number };
 }
 
-/** Gives the value of a landmark, working it out first if need be; null when it has none. */
+/** Gives the value of a landmark that was worked out before; null when it has none. */
 export type FindLandmark = (name: string) => LandmarkValue | null;
 
+const SCOPE_WORDS: Readonly<Record<NameRead['scope'], string>> = {
+  params: 'parameter',
+  landmarks: 'landmark',
+  functions: 'function',
+};
 const WORDS: Readonly<Record<Wanted, string>> = { number: 'a number', point: 'a point' };
 
 function describe(value: unknown): string {
@@ -33,12 +38,37 @@ function describe(value: unknown): string {
 
 /** Works out single expressions against parameters and landmarks, and reports what is wrong at its exact place. */
 export class Evaluator {
+  /** Parsed expressions by text: the order of landmarks needs them before their values do. */
+  readonly #parsed = new Map<string, ReturnType<typeof parseExpression>>();
+  readonly #names: Readonly<Record<NameRead['scope'], ReadonlySet<string>>>;
+
   constructor(
     private readonly context: StageContext,
     private readonly params: Readonly<Record<string, number>>,
-    private readonly landmarkNames: readonly string[],
+    landmarkNames: readonly string[],
     private readonly findLandmark: FindLandmark,
-  ) {}
+  ) {
+    this.#names = {
+      params: new Set(Object.keys(params)),
+      landmarks: new Set(landmarkNames),
+      functions: new Set(recipeFunctionNames),
+    };
+  }
+
+  #parse(text: string): ReturnType<typeof parseExpression> {
+    const known = this.#parsed.get(text);
+    if (known) return known;
+    const parsed = parseExpression(text.slice(1));
+    this.#parsed.set(text, parsed);
+    return parsed;
+  }
+
+  /** The landmarks that an expression (text with its `=`) reads. */
+  landmarksRead(text: string): readonly string[] {
+    const parsed = this.#parse(text);
+    if ('fault' in parsed) return [];
+    return parsed.reads.filter(({ scope }) => scope === 'landmarks').map(({ name }) => name);
+  }
 
   /** The span of a part of the expression where the author's text holds it unchanged, else of the whole value. */
   #spanInside(path: Path, text: string, start: number, end: number): Span {
@@ -65,8 +95,8 @@ export class Evaluator {
   #knowsNames(reads: readonly NameRead[], path: Path, text: string): boolean {
     let known = true;
     for (const { scope, name, start, end } of reads) {
-      const names = scope === 'params' ? Object.keys(this.params) : this.landmarkNames;
-      if (names.includes(name)) continue;
+      const names = this.#names[scope];
+      if (names.has(name)) continue;
       known = false;
       if (this.context.poisoned.has(`${scope}/${name}`) || this.context.poisoned.has(scope)) continue;
       const close = closestNames(name, names);
@@ -76,7 +106,7 @@ export class Evaluator {
         expressionFindings,
         'expression-unknown-name',
         span,
-        { what: scope === 'params' ? 'parameter' : 'landmark', name },
+        { what: SCOPE_WORDS[scope], name },
         only === undefined
           ? {}
           : {
@@ -93,7 +123,7 @@ export class Evaluator {
   /** The value of an expression (text with its `=`), or null with a finding, or silently when a cause is known. */
   evaluate(text: string, path: Path, wanted: Wanted): number | Vec3 | null {
     const { findings } = this.context;
-    const parsed = parseExpression(text.slice(1));
+    const parsed = this.#parse(text);
     if ('fault' in parsed) {
       const { problem, start, end } = parsed.fault;
       findings.report(expressionFindings, 'expression-syntax', this.#spanInside(path, text, start, end), {

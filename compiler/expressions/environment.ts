@@ -41,24 +41,43 @@ function dist(a: unknown, b: unknown): number {
   return Math.sqrt(x * x + y * y + z * z);
 }
 
+type RecipeFunction = (...given: readonly unknown[]) => unknown;
+
+/** The functions of expressions: how many values each takes, and what it gives. */
+const FUNCTIONS: Readonly<Record<string, { readonly takes: number; readonly give: RecipeFunction }>> = {
+  dist: { takes: 2, give: (a, b) => dist(a, b) },
+  mix: { takes: 3, give: (a, b, share) => mix(a, b, share) },
+  mid: { takes: 2, give: (a, b) => mix(a, b, 0.5) },
+  min: { takes: 2, give: (a, b) => Math.min(number(a), number(b)) },
+  max: { takes: 2, give: (a, b) => Math.max(number(a), number(b)) },
+  abs: { takes: 1, give: (a) => Math.abs(number(a)) },
+  sqrt: { takes: 1, give: (a) => Math.sqrt(number(a)) },
+  clamp: {
+    takes: 3,
+    give: (a, low, high) => Math.min(Math.max(number(a), number(low)), number(high)),
+  },
+};
+
+/** Names of all functions that an expression may call. */
+export const recipeFunctionNames: readonly string[] = Object.keys(FUNCTIONS);
+
+function createEnvironment(): Environment {
+  const environment = new Environment({
+    homogeneousAggregateLiterals: false,
+    limits: { maxAstNodes: 400, maxDepth: 40, maxListElements: 16, maxMapEntries: 16, maxCallArguments: 8 },
+  })
+    .registerVariable('params', 'map')
+    .registerVariable('landmarks', 'map')
+    .registerOperator('double % double', (a: number, b: number) => a % b);
+  for (const [name, { takes, give }] of Object.entries(FUNCTIONS)) {
+    environment.registerFunction(`${name}(${Array(takes).fill('dyn').join(', ')}): dyn`, give);
+  }
+  return environment;
+}
+
 /**
  * CEL as recipes use it: `params` and `landmarks` to read, a few geometric functions, and small bounds. It has no
- * loops and no way to anything else. It is built once and never changed.
+ * way to anything else; that recipes call no function of CEL's own is seen to where they are parsed. It is built
+ * once and never changed.
  */
-export const recipeEnvironment = new Environment({
-  homogeneousAggregateLiterals: false,
-  limits: { maxAstNodes: 400, maxDepth: 40, maxListElements: 16, maxMapEntries: 16, maxCallArguments: 8 },
-})
-  .registerVariable('params', 'map')
-  .registerVariable('landmarks', 'map')
-  .registerOperator('double % double', (a: number, b: number) => a % b)
-  .registerFunction('dist(dyn, dyn): dyn', dist)
-  .registerFunction('mix(dyn, dyn, dyn): dyn', mix)
-  .registerFunction('mid(dyn, dyn): dyn', (a: unknown, b: unknown) => mix(a, b, 0.5))
-  .registerFunction('min(dyn, dyn): dyn', (a: unknown, b: unknown) => Math.min(number(a), number(b)))
-  .registerFunction('max(dyn, dyn): dyn', (a: unknown, b: unknown) => Math.max(number(a), number(b)))
-  .registerFunction('abs(dyn): dyn', (a: unknown) => Math.abs(number(a)))
-  .registerFunction('sqrt(dyn): dyn', (a: unknown) => Math.sqrt(number(a)))
-  .registerFunction('clamp(dyn, dyn, dyn): dyn', (a: unknown, low: unknown, high: unknown) =>
-    Math.min(Math.max(number(a), number(low)), number(high)),
-  );
+export const recipeEnvironment = createEnvironment();

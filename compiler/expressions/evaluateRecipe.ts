@@ -7,6 +7,7 @@ import type { Path } from '../syntax/types';
 import type { EvaluatedLandmark, EvaluatedRecipe } from './EvaluatedRecipe';
 import { Evaluator, type LandmarkValue, type Wanted } from './Evaluator';
 import { expressionFindings } from './findings';
+import { orderByReads } from './orderByReads';
 import { readParameters } from './readParameters';
 
 /** Collections whose entries may hold expressions. */
@@ -18,7 +19,6 @@ const PROSE_KEYS: ReadonlySet<string> = new Set(['note', 'title']);
 
 class RecipeEvaluator {
   readonly #landmarks = new Map<string, EvaluatedLandmark | null>();
-  readonly #open: string[] = [];
   readonly #evaluator: Evaluator;
   readonly #left: Vec3;
 
@@ -34,10 +34,15 @@ class RecipeEvaluator {
   }
 
   evaluate(): EvaluatedRecipe {
+    const names = Object.keys(this.source.landmarks ?? {});
+    const { order, rings } = orderByReads(names, (name) => this.#landmarksRead(name));
+    for (const ring of rings) this.#reportRing(ring);
+    for (const name of order) this.#landmarks.set(name, this.#landmark(name));
     const landmarks: Record<string, EvaluatedLandmark> = {};
-    for (const name of Object.keys(this.source.landmarks ?? {})) {
-      const landmark = this.#landmark(name);
+    for (const name of names) {
+      const landmark = this.#landmarks.get(name);
       if (landmark) landmarks[name] = landmark;
+      else this.context.poisoned.add(`landmarks/${name}`);
     }
     const evaluated: Record<string, unknown> = { ...this.source, landmarks };
     for (const collection of COLLECTIONS) {
@@ -89,35 +94,30 @@ class RecipeEvaluator {
     return POINT_KEYS.has(key) ? 'point' : 'number';
   }
 
+  #landmarksRead(name: string): readonly string[] {
+    const { at, right } = this.source.landmarks?.[name] ?? {};
+    return [at, right]
+      .flat()
+      .filter((item) => typeof item === 'string' && item.startsWith('='))
+      .flatMap((item) => this.#evaluator.landmarksRead(item as string));
+  }
+
+  /** A landmark whose own landmarks are worked out; on a ring some are not, so that it has no value. */
   #landmark(name: string): EvaluatedLandmark | null {
-    const known = this.#landmarks.get(name);
-    if (known !== undefined) return known;
-    const start = this.#open.indexOf(name);
-    if (start >= 0) {
-      this.#reportRing([...this.#open.slice(start), name]);
-      return null;
-    }
     const source = this.source.landmarks?.[name];
     if (!source) return null;
-    this.#open.push(name);
     const path = ['landmarks', name];
     const at = this.#value(source.at, [...path, 'at'], 'at') as Vec3 | null;
     const right =
       source.right === undefined
         ? undefined
         : (this.#value(source.right, [...path, 'right'], 'right') as Vec3 | null);
-    this.#open.pop();
-    const landmark: EvaluatedLandmark | null =
-      at === null || right === null
-        ? null
-        : { at, ...(source.side ? { side: source.side } : {}), ...(right ? { right } : {}) };
-    if (!landmark) this.context.poisoned.add(`landmarks/${name}`);
-    this.#landmarks.set(name, landmark);
-    return landmark;
+    if (at === null || right === null) return null;
+    return { at, ...(source.side ? { side: source.side } : {}), ...(right ? { right } : {}) };
   }
 
   #landmarkValue(name: string): LandmarkValue | null {
-    const landmark = this.#landmark(name);
+    const landmark = this.#landmarks.get(name);
     if (!landmark) return null;
     const { at, side } = landmark;
     const right = landmark.right ?? (side === 'left' ? mirrorPoint(at, this.#left) : at);

@@ -10,7 +10,7 @@ export const expressionFindings = declareFindings({
   },
   'expression-unknown-name': {
     severity: 'error',
-    summary: 'An expression reads a name that does not exist.',
+    summary: 'An expression reads or calls a name that does not exist.',
     message: 'There is no {what} "{name}".',
     help: 'Add it, or read one that exists.',
   },

@@ -30,6 +30,8 @@ const PROSE_KEYS: ReadonlySet<string> = new Set(['title', 'note', 'notes', 'unit
 interface Anchored {
   readonly value: JsonValue | undefined;
   readonly nodes: number;
+  /** Collections inside one another, aliases written out. */
+  readonly depth: number;
 }
 
 /**
@@ -47,7 +49,12 @@ export class ValueReader {
   /** Map keys from the top to the value being read. */
   readonly #path: string[] = [];
   #expanded = 0;
+  /** Collections open around the value being read. */
+  #depth = 0;
+  /** The deepest place read so far within the anchor being read. */
+  #deepest = 0;
   #refusedGrowth = false;
+  #refusedDepth = false;
 
   constructor(
     private readonly document: Document,
@@ -80,11 +87,15 @@ export class ValueReader {
     const { anchor } = node;
     if (anchor === undefined) return this.#readPlain(node, isProse);
     const before = this.#expanded;
+    const deepestBefore = this.#deepest;
+    this.#deepest = this.#depth;
     this.anchors.set(anchor, node);
     this.#open.add(anchor);
     const value = this.#readPlain(node, isProse);
     this.#open.delete(anchor);
-    this.#finished.set(anchor, { value, nodes: this.#expanded - before });
+    const depth = this.#deepest - this.#depth;
+    this.#finished.set(anchor, { value, nodes: this.#expanded - before, depth });
+    this.#deepest = Math.max(this.#deepest, deepestBefore);
     return value;
   }
 
@@ -100,6 +111,16 @@ export class ValueReader {
       this.findings.report(syntaxFindings, 'alias-unknown', span, { name });
       return null;
     }
+    // The tokens show only how deep the text itself goes; aliases of values that hold aliases go deeper.
+    const deepest = this.#depth + anchored.depth;
+    if (deepest > LIMITS.depth) {
+      if (!this.#refusedDepth)
+        this.findings.report(syntaxFindings, 'nested-too-deep', span, { limit: LIMITS.depth });
+      this.#refusedDepth = true;
+      this.#refuse();
+      return null;
+    }
+    this.#deepest = Math.max(this.#deepest, deepest);
     this.#expanded += anchored.nodes;
     if (this.#expanded > LIMITS.expandedNodes) {
       if (!this.#refusedGrowth) {
@@ -113,9 +134,16 @@ export class ValueReader {
   }
 
   #readPlain(node: Node, isProse: boolean): JsonValue | undefined {
-    if (isMap(node)) return this.#readMap(node, isProse);
-    if (isSeq(node)) return node.items.map((item) => this.#readNode(item, isProse) ?? null);
-    return isScalar(node) ? this.#readScalar(node, isProse) : null;
+    if (isScalar(node)) return this.#readScalar(node, isProse);
+    this.#depth += 1;
+    this.#deepest = Math.max(this.#deepest, this.#depth);
+    const value = isMap(node)
+      ? this.#readMap(node, isProse)
+      : isSeq(node)
+        ? node.items.map((item) => this.#readNode(item, isProse) ?? null)
+        : null;
+    this.#depth -= 1;
+    return value;
   }
 
   #readMap(map: YAMLMap, isProse: boolean): JsonValue {
@@ -170,7 +198,7 @@ export class ValueReader {
     }
     if (key.anchor !== undefined) {
       this.anchors.set(key.anchor, key);
-      this.#finished.set(key.anchor, { value, nodes: 1 });
+      this.#finished.set(key.anchor, { value, nodes: 1, depth: 0 });
     }
     return this.#checkText(value, key, false) ? keyText(key) : null;
   }

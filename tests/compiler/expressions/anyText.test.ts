@@ -45,6 +45,8 @@ const SCRAPS = [
   'null',
   'has',
   'map',
+  'matches',
+  'size',
   '\\',
   '\n',
   '=',

@@ -7,7 +7,8 @@ describe('faults of expressions', () => {
     ['(1', 'expression-syntax'],
     ['1 2', 'expression-syntax'],
     ['', 'expression-syntax'],
-    ['frobnicate(1)', 'expression-failed'],
+    ["params['x']", 'expression-syntax'],
+    ["landmarks['hips'].x", 'expression-syntax'],
     ['params.x + landmarks.hips', 'expression-failed'],
     ['sqrt(landmarks.hips)', 'expression-failed'],
     ['mix(landmarks.hips, 3, 0.5)', 'expression-failed'],
@@ -82,6 +83,33 @@ describe('names that are not there', () => {
     expect(faultsOf('landmarks.kne.x')[0]).toMatchObject({ covered: 'kne', help: 'Did you mean "knee"?' });
   });
 
+  it('may be functions, whose closest is offered', () => {
+    expect(faultsOf('mixx(1, 2, 0.5)')[0]).toMatchObject({
+      code: 'expression-unknown-name',
+      covered: 'mixx',
+      message: 'There is no function "mixx".',
+      help: 'Did you mean "mix"?',
+    });
+  });
+
+  it.each([
+    ['a pattern that takes exponential time', `"${'a'.repeat(60)}!".matches("(a+)+$") ? 1 : 2`, 'matches'],
+    [
+      'loops in loops',
+      Array.from({ length: 12 }, (_, i) => i).reduce(
+        (inner, i) => `[1,2,3,4,5,6,7,8,9,10,11,12].map(v${i}, ${inner})`,
+        '1',
+      ),
+      'map',
+    ],
+    ['a clock', 'timestamp("2020-01-01T00:00:00Z").getSeconds()', 'timestamp'],
+    ['a type', 'double("1")', 'double'],
+  ])('hold no function of the library itself: %s', (_, expression, name) => {
+    const found = faultsOf(expression);
+    expect(new Set(found.map(({ code }) => code))).toEqual(new Set(['expression-unknown-name']));
+    expect(found.map(({ message }) => message)).toContain(`There is no function "${name}".`);
+  });
+
   it('are silent where the name was refused before', () => {
     const { found } = evaluateText('params: { p: { default: big } }\ncontrols: { c: { size: "=params.p" } }');
     expect(found.map(({ code }) => code)).toEqual(['wrong-type']);
@@ -111,6 +139,22 @@ describe('landmarks in a ring', () => {
       ['["=landmarks.a.x + landmarks.a.y", 0, 0]', '"c" is worked out here'],
     ]);
     expect(poisoned).toEqual(['landmarks/a', 'landmarks/b', 'landmarks/c', 'landmarks/d']);
+  });
+
+  it('are told of apart when they are apart', () => {
+    const { found } = evaluateText(
+      'landmarks: { a: { at: "=landmarks.b" }, b: { at: "=landmarks.a" }, c: { at: "=landmarks.c" } }',
+    );
+    expect(found.map(({ code }) => code)).toEqual(['expression-ring', 'expression-ring']);
+  });
+
+  it('may be thousands, or none of thousands in a row', () => {
+    const row = (last: string) => {
+      const lines = Array.from({ length: 5000 }, (_, i) => `  p${i}: { at: "=landmarks.p${i + 1}" }`);
+      return `landmarks:\n${lines.join('\n')}\n  p5000: { at: ${last} }`;
+    };
+    expect(evaluateText(row('[1, 2, 3]')).recipe.landmarks?.p0?.at).toEqual([1, 2, 3]);
+    expect(evaluateText(row('"=landmarks.p0"')).found.map(({ code }) => code)).toEqual(['expression-ring']);
   });
 
   it('may be one alone', () => {

@@ -94,9 +94,27 @@ describe('bounds', () => {
       Array.from({ length: 20_000 }, (_, i) => `k${i}: 1`).join('\n'),
       'too-many-keys',
     ],
+    [
+      'aliases that lie ever deeper in one another',
+      Array.from(
+        { length: 150 },
+        (_, i) => `k${i}: &a${i} ${'['.repeat(60)}${i > 0 ? `*a${i - 1}` : '1'}${']'.repeat(60)}`,
+      ).join('\n'),
+      'nested-too-deep',
+    ],
     ['a very long scalar', `a: ${'x'.repeat(30_000)}`, 'scalar-too-long'],
   ])('refuses %s with one finding', (_, text, code) => {
     expect(parse(text).codes).toEqual([code]);
+  });
+
+  it('allows the same depth with aliases as without', () => {
+    const nested = (depth: number, inner: string) => `${'['.repeat(depth)}${inner}${']'.repeat(depth)}`;
+    const text = (depth: number) => `a: &a ${nested(30, '1')}\nb: &b ${nested(depth, '*a')}\nc: *b\n`;
+    expect(parse(text(33)).codes).toEqual([]);
+    expect(parse(text(34)).codes).toEqual(['nested-too-deep']);
+    expect(covered(text(34))).toBe('*a');
+    expect(parse(`a: ${nested(63, '1')}`).codes).toEqual([]);
+    expect(parse(`a: ${nested(64, '1')}`).codes).toEqual(['nested-too-deep']);
   });
 
   it('reads eight thousand keys of one map', () => {
