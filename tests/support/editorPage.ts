@@ -24,10 +24,12 @@ export async function replaceInText(page: Page, words: string, others: string): 
   await page.locator('.monaco-editor textarea, .monaco-editor .native-edit-context').first().focus();
   await page.keyboard.press('Control+Home');
   await page.keyboard.press('Control+f');
-  await page.keyboard.press('Control+a');
-  await page.keyboard.type(words);
-  await page.keyboard.press('Enter');
+  const search = page.locator('.find-widget.visible textarea').first();
+  await search.fill(words);
+  await search.press('Enter');
+  await page.locator('.find-widget.visible .matchesCount', { hasText: /^1 of/ }).waitFor();
   await page.keyboard.press('Escape');
+  await page.locator('.find-widget.visible').waitFor({ state: 'detached' });
   await page.keyboard.type(others);
 }
 
