@@ -52,6 +52,8 @@ export default defineConfig({
           globalSetup: ['tests/support/applicationSetup.ts'],
           // One browser at a time: two cores draw pictures in software.
           fileParallelism: false,
+          // After all others, which would take those cores from it.
+          sequence: { groupOrder: 1 },
           testTimeout: 300_000,
           hookTimeout: 240_000,
         },
