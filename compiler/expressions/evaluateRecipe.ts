@@ -1,13 +1,13 @@
 import type { StageContext } from '../expand/StageContext';
 import { readSceneFrame } from '../expand/sceneFrame';
 import { mirrorPoint } from '../expand/sides';
+import { orderByReads } from '../order/orderByReads';
 import type { Vec3 } from '../rig/Rig';
 import type { Recipe } from '../schema/generated/recipeTypes';
 import type { Path } from '../syntax/types';
 import type { EvaluatedLandmark, EvaluatedRecipe } from './EvaluatedRecipe';
 import { Evaluator, type LandmarkValue, type Wanted } from './Evaluator';
 import { expressionFindings } from './findings';
-import { orderByReads } from './orderByReads';
 import { readParameters } from './readParameters';
 
 /** Collections whose entries may hold expressions. */

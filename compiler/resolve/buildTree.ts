@@ -1,4 +1,5 @@
-import type { ControlSpecification, ExpandedRecipe } from '../expand/types';
+import type { ChainSpecification, ControlSpecification, ExpandedRecipe } from '../expand/types';
+import { orderByReads } from '../order/orderByReads';
 import type { Side } from '../rig/Rig';
 import type { Path } from '../syntax/types';
 import type { Owner } from './checkParentRings';
@@ -107,66 +108,63 @@ export function buildTree(input: TreeInput): Tree {
     return seat;
   };
 
-  const addJointsAndControls = (): void => {
-    // A parent must be drafted before its children ask for its container, whatever order they are written in.
-    const waiting = new Map<string, () => void>();
-    const request = (id: string): void => {
-      const add = waiting.get(id);
-      if (!add) return;
-      waiting.delete(id);
-      add();
-    };
-    for (const chain of linked.chains) {
-      const add = (): void => {
-        for (const id of chain.jointIds) waiting.delete(id);
-        const parent = onRing.has(chain) ? null : chain.parent;
-        if (parent !== null) request(parent);
-        const container = containerOf(chain.role, chain.path);
-        const [first] = chain.jointIds;
-        if (first === undefined) return;
-        let above = hang(first, parent, container, chain.side, chain.path);
-        for (const id of chain.jointIds) {
-          if (drafts.has(id)) continue;
-          drafts.set(id, {
-            id,
-            kind: 'joint',
-            role: chain.role,
-            side: chain.side,
-            container,
-            parent: above,
-            path: chain.path,
-          });
-          above = id;
-        }
-      };
-      for (const id of chain.jointIds) waiting.set(id, add);
+  const addChain = (chain: ChainSpecification, parent: string | null): void => {
+    const container = containerOf(chain.role, chain.path);
+    const [first] = chain.jointIds;
+    if (first === undefined) return;
+    let above = hang(first, parent, container, chain.side, chain.path);
+    for (const id of chain.jointIds) {
+      if (drafts.has(id)) continue;
+      drafts.set(id, {
+        id,
+        kind: 'joint',
+        role: chain.role,
+        side: chain.side,
+        container,
+        parent: above,
+        path: chain.path,
+      });
+      above = id;
     }
-    for (const control of linked.controls) {
-      waiting.set(control.id, () => {
-        const parent = onRing.has(control) ? null : control.parent;
-        if (parent !== null) request(parent);
-        const container = containerOf(control.role, control.path);
-        if (containers.get(container)?.carried === false) {
-          const span = context.document.spanAt(control.path, 'key');
-          context.findings.report(resolveFindings, 'control-in-parked-container', span, {
-            id: control.id,
-            container,
-          });
-        }
-        const above = hang(control.id, parent, container, control.side, control.path);
-        drafts.set(control.id, {
-          id: control.id,
-          kind: 'control',
-          role: control.role,
-          side: control.side,
-          container,
-          parent: above,
-          path: control.path,
-        });
+  };
+
+  const addControl = (control: ControlSpecification, parent: string | null): void => {
+    const container = containerOf(control.role, control.path);
+    if (containers.get(container)?.carried === false) {
+      const span = context.document.spanAt(control.path, 'key');
+      context.findings.report(resolveFindings, 'control-in-parked-container', span, {
+        id: control.id,
+        container,
       });
     }
-    if (carrier) request(carrier.id);
-    for (const id of [...waiting.keys()]) request(id);
+    const above = hang(control.id, parent, container, control.side, control.path);
+    drafts.set(control.id, {
+      id: control.id,
+      kind: 'control',
+      role: control.role,
+      side: control.side,
+      container,
+      parent: above,
+      path: control.path,
+    });
+  };
+
+  const addJointsAndControls = (): void => {
+    const { chains, controls } = linked;
+    const owners = new Map<string, Owner>();
+    for (const chain of chains) for (const id of chain.jointIds) owners.set(id, chain);
+    for (const control of controls) owners.set(control.id, control);
+    const parentOf = (owner: Owner): string | null => (onRing.has(owner) ? null : owner.parent);
+    // A parent must be drafted before its children ask for its container, whatever order they are written in.
+    const written = new Set<Owner>([...(carrier ? [carrier] : []), ...chains, ...controls]);
+    const { order } = orderByReads([...written], (owner) => {
+      const parent = owners.get(parentOf(owner) ?? '');
+      return parent ? [parent] : [];
+    });
+    for (const owner of order) {
+      if ('jointIds' in owner) addChain(owner, parentOf(owner));
+      else addControl(owner, parentOf(owner));
+    }
   };
 
   const addLinesAndNotes = (): void => {

@@ -1,5 +1,6 @@
 import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import { mergePatch } from '../merge/mergePatch';
+import { orderByReads } from '../order/orderByReads';
 import type { HouseRules } from '../schema/generated/houseTypes';
 import type { JsonValue } from '../syntax/types';
 import { resolveFindings } from './findings';
@@ -32,16 +33,27 @@ export function resolveContainers(
   recipe: EvaluatedRecipe,
   context: ResolveContext,
 ): ReadonlyMap<string, ResolvedContainer> {
-  const entries = mergeMaps<ContainerEntry>(context.house.rules.containers, recipe.containers);
+  const entries = new Map(
+    Object.entries(mergeMaps<ContainerEntry>(context.house.rules.containers, recipe.containers)),
+  );
+  const { order, rings } = orderByReads([...entries.keys()], (id) => {
+    const parent = entries.get(id)?.parent;
+    return parent === undefined ? [] : [parent];
+  });
+  for (const ring of rings) {
+    const span = spanInRecipeOrHouse(context, ['containers', ring.at(-2) ?? '', 'parent']);
+    context.findings.report(resolveFindings, 'container-ring', span, { ring: ring.join(' → ') });
+  }
   const resolved = new Map<string, ResolvedContainer>();
-  const open: string[] = [];
-
-  const resolve = (id: string, entry: ContainerEntry): ResolvedContainer => {
-    const known = resolved.get(id);
-    if (known) return known;
-    open.push(id);
-    const parent = resolveParent(id, entry);
-    open.pop();
+  for (const id of order) {
+    const entry = entries.get(id);
+    if (!entry) continue;
+    if (entry.parent !== undefined && !entries.has(entry.parent)) {
+      const span = spanInRecipeOrHouse(context, ['containers', id, 'parent']);
+      reportUnknown(context, span, 'container', entry.parent, entries.keys());
+    }
+    // On a ring one parent is not settled before; the container then lies in the rig.
+    const parent = entry.parent === undefined ? undefined : resolved.get(entry.parent);
     const inherited = parent?.carried ?? false;
     let carried = entry.moves === undefined ? inherited : entry.moves === 'carried';
     if (parent && carried !== inherited) {
@@ -58,34 +70,13 @@ export function resolveContainers(
       );
       carried = inherited;
     }
-    const container: ResolvedContainer = {
+    resolved.set(id, {
       id,
       parent: parent?.id ?? null,
       carried,
       shown: (entry.shown ?? true) && (parent?.shown ?? true),
-    };
-    resolved.set(id, container);
-    return container;
-  };
-
-  const resolveParent = (id: string, entry: ContainerEntry): ResolvedContainer | null => {
-    if (entry.parent === undefined) return null;
-    const span = spanInRecipeOrHouse(context, ['containers', id, 'parent']);
-    const parentEntry = entries[entry.parent];
-    if (!parentEntry) {
-      reportUnknown(context, span, 'container', entry.parent, Object.keys(entries));
-      return null;
-    }
-    const start = open.indexOf(entry.parent);
-    if (start >= 0) {
-      const ring = [...open.slice(start), entry.parent].join(' → ');
-      context.findings.report(resolveFindings, 'container-ring', span, { ring });
-      return null;
-    }
-    return resolve(entry.parent, parentEntry);
-  };
-
-  for (const [id, entry] of Object.entries(entries)) resolve(id, entry);
+    });
+  }
   return resolved;
 }
 

@@ -6,6 +6,7 @@ import type {
 } from '../expand/types';
 import { IDENTITY_QUAT } from '../math/quat';
 import { distance } from '../math/vec3';
+import { orderByReads } from '../order/orderByReads';
 import { type ResolveContext, reportUnknown } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
 import type { Quat, Vec3 } from '../rig/Rig';
@@ -16,6 +17,8 @@ import { solveFindings } from './findings';
 import { polePosition } from './polePosition';
 import type { RestPlace } from './types';
 
+type Owner = ChainSpecification | ControlSpecification;
+
 /**
  * Finds where chains and controls stand, each once, whatever order they are written in. A place that depends on
  * itself is a finding; what depends on a missing place is left out silently, since the cause was reported.
@@ -24,9 +27,6 @@ export class PlaceSolver {
   readonly places = new Map<string, RestPlace>();
   readonly #chainOfJoint = new Map<string, ChainSpecification>();
   readonly #controls: ReadonlyMap<string, ControlSpecification>;
-  readonly #settled = new Set<Specification>();
-  /** Chains and controls being placed now, outermost first. */
-  readonly #open: Specification[] = [];
 
   constructor(
     private readonly recipe: ResolvedRecipe,
@@ -37,37 +37,39 @@ export class PlaceSolver {
   }
 
   solveAll(): void {
-    for (const chain of this.recipe.chains) this.#solve(chain, () => this.#placeChain(chain));
-    for (const control of this.recipe.controls) this.#solve(control, () => this.#placeControl(control));
+    const owners: readonly Owner[] = [...this.recipe.chains, ...this.recipe.controls];
+    const { order, rings } = orderByReads(owners, (owner) => this.#ownersRead(owner));
+    for (const ring of rings) {
+      const span = this.context.document.spanAt(ring[0]?.path ?? [], 'key');
+      const words = ring.map(({ id }) => `"${id}"`).join(' → ');
+      this.context.findings.report(solveFindings, 'place-ring', span, { ring: words });
+    }
+    for (const owner of order) {
+      if ('jointIds' in owner) this.#placeChain(owner);
+      else this.#placeControl(owner);
+    }
+  }
+
+  /** The chains and controls that must be placed before this one. */
+  #ownersRead(owner: Owner): readonly Owner[] {
+    const joint = (reference: PlaceReference): Owner | undefined =>
+      typeof reference !== 'string' || this.recipe.landmarks.has(reference)
+        ? undefined
+        : this.#chainOfJoint.get(reference);
+    const thing = (id: string): Owner | undefined => this.#chainOfJoint.get(id) ?? this.#controls.get(id);
+    const read: (Owner | undefined)[] = [];
+    if ('jointIds' in owner) read.push(...owner.points.map(joint));
+    else {
+      const { place, align } = owner;
+      if (place.kind === 'place') read.push(joint(place.at));
+      else read.push(...place.joints.map(thing));
+      if (align !== null) read.push(thing(align));
+    }
+    return read.filter((item) => item !== undefined);
   }
 
   #spanOf(owner: Specification, keys: Path) {
     return this.context.document.spanAt([...owner.path, ...keys]);
-  }
-
-  #solve(owner: Specification, place: () => void): void {
-    if (this.#settled.has(owner)) return;
-    const start = this.#open.indexOf(owner);
-    if (start >= 0) {
-      const ring = [...this.#open.slice(start), owner].map(({ id }) => `"${id}"`).join(' → ');
-      const span = this.context.document.spanAt(owner.path, 'key');
-      this.context.findings.report(solveFindings, 'place-ring', span, { ring });
-      this.#settled.add(owner);
-      return;
-    }
-    this.#open.push(owner);
-    place();
-    this.#open.pop();
-    this.#settled.add(owner);
-  }
-
-  /** The rest place of a joint or control, placing it first if need be. */
-  #placeOf(id: string): RestPlace | null {
-    const chain = this.#chainOfJoint.get(id);
-    const control = this.#controls.get(id);
-    if (chain) this.#solve(chain, () => this.#placeChain(chain));
-    else if (control) this.#solve(control, () => this.#placeControl(control));
-    return this.places.get(id) ?? null;
   }
 
   /** The world position of a landmark (on the owner's side), a joint or a literal point. */
@@ -75,7 +77,7 @@ export class PlaceSolver {
     if (typeof reference !== 'string') return reference;
     const landmark = this.recipe.landmarks.get(reference);
     if (landmark) return owner.side === 'right' ? landmark.right : landmark.left;
-    if (this.#chainOfJoint.has(reference)) return this.#placeOf(reference)?.position ?? null;
+    if (this.#chainOfJoint.has(reference)) return this.places.get(reference)?.position ?? null;
     const span = this.#spanOf(owner, keys);
     const candidates = [...this.recipe.landmarks.keys(), ...this.#chainOfJoint.keys()];
     reportUnknown(this.context, span, 'landmark or joint', reference, candidates);
@@ -124,13 +126,13 @@ export class PlaceSolver {
   }
 
   #controlTurn(control: ControlSpecification): Quat | null {
-    return control.align === null ? IDENTITY_QUAT : (this.#placeOf(control.align)?.turn ?? null);
+    return control.align === null ? IDENTITY_QUAT : (this.places.get(control.align)?.turn ?? null);
   }
 
   #controlPosition(control: ControlSpecification): Vec3 | null {
     const { place } = control;
     if (place.kind === 'place') return this.#positionOf(place.at, control, ['at']);
-    const [start, mid, end] = place.joints.map((id) => this.#placeOf(id)?.position);
+    const [start, mid, end] = place.joints.map((id) => this.places.get(id)?.position);
     if (!start || !mid || !end) return null;
     const pole = polePosition(start, mid, end, place.distance, place.bend);
     if (typeof pole !== 'string') return pole;

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { orderByReads } from '@/compiler/expressions/orderByReads';
+import { orderByReads } from '@/compiler/order/orderByReads';
 
 const NAMES = ['a', 'b', 'c', 'd', 'e', 'f'];
 const graph = fc.dictionary(
