@@ -24,6 +24,8 @@ export interface CodePaneHandle {
   goTo(span: Span): void;
   /** Changes the text as a fix says; can be undone like typing. */
   applyFix(fix: Fix): void;
+  /** Puts another text in the place of all of it, as one step that can be undone by itself. */
+  replaceText(text: string): void;
   /** Puts the cursor at the next finding and shows what it says. */
   nextFinding(): void;
   focus(): void;
@@ -80,6 +82,13 @@ export function CodePane({
       editor.current?.executeEdits('fix', edits);
       editor.current?.pushUndoStop();
       editor.current?.focus();
+    },
+    replaceText(next) {
+      const model = editor.current?.getModel();
+      if (!model) return;
+      editor.current?.pushUndoStop();
+      editor.current?.executeEdits('replace', [{ range: model.getFullModelRange(), text: next }]);
+      editor.current?.pushUndoStop();
     },
     nextFinding() {
       editor.current?.focus();

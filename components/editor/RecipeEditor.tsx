@@ -79,14 +79,18 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
   const goTo = useCallback((span: Span) => code.current?.goTo(span), []);
   const applyFix = useCallback((fix: Fix) => code.current?.applyFix(fix), []);
 
+  /** As an edit of the text, so that undo brings the earlier one back. */
+  const replaceText = (next: string): void => {
+    code.current?.replaceText(next);
+    setText(next);
+  };
   const backToSaved = (): Promise<void> => {
-    setText(version.text);
+    replaceText(version.text);
     return keeper.goOnFrom(version.text);
   };
   const takeTheirs = async (number: number): Promise<void> => {
     const theirs = await readVersion(recipe.id, number);
-    // As an edit, so that undo brings one's own text back.
-    setText(theirs.text);
+    replaceText(theirs.text);
     setVersion(theirs);
     setDialog(null);
     await keeper.goOnFrom(theirs.text);
@@ -253,7 +257,7 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
           onTakeOther={() => {
             const { state } = keeper;
             const other = state.kind === 'conflict' ? state.other : null;
-            setText(other?.text ?? version.text);
+            replaceText(other?.text ?? version.text);
             keeper.takeOther(other);
           }}
         />

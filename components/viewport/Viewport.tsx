@@ -145,6 +145,7 @@ export function Viewport({ built, isOlder, chosen, onChoose }: ViewportProps) {
         </Canvas>
         {hovered && hoveredNode && (
           <p
+            data-testid="hovered"
             className="pointer-events-none absolute border border-ink bg-paper px-2 py-0.5 text-xs"
             style={{ left: hovered.x + 12, top: hovered.y - 12 }}
           >
