@@ -55,6 +55,8 @@ export default defineConfig({
           // After all others, which would take those cores from it.
           sequence: { groupOrder: 1 },
           testTimeout: 300_000,
+          // A busy machine may take its time to draw; a wait that ends well ends at once.
+          expect: { poll: { timeout: 30_000, interval: 200 } },
           hookTimeout: 240_000,
         },
       },
