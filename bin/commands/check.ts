@@ -5,6 +5,7 @@ import { startProgress } from './progress';
 import { readHouse } from './readHouse';
 import { readParameters } from './readParameters';
 import { readRequest } from './readRequest';
+import { sayUnusedHouse } from './sayUnusedHouse';
 import { WrongUse } from './WrongUse';
 
 /** `check FILE…`: compiles recipes and prints what is wrong; writes nothing. */
@@ -15,14 +16,16 @@ export function check(parameters: readonly string[]): number {
   });
   if (positionals.length === 0) throw new WrongUse('Name at least one recipe file.');
   const houses = readHouse(values.house);
+  // All are read before any is compiled, so that a file that is not there is said at once.
+  const requests = positionals.map((file) => ({ file, ...readRequest(file) }));
   const progress = startProgress(positionals.length, { isWanted: !values.json });
-  const results = positionals.map((file, index) => {
+  const results = requests.map(({ file, recipe, bases }, index) => {
     progress.show(index, file);
-    const { recipe, bases } = readRequest(file);
-    const { findings } = compile({ recipe, bases, houses });
-    return { file, findings, sources: [recipe, ...Object.values(bases), ...Object.values(houses)] };
+    const { findings, rig } = compile({ recipe, bases, houses });
+    return { file, findings, rig, sources: [recipe, ...Object.values(bases), ...Object.values(houses)] };
   });
   progress.clear();
+  sayUnusedHouse(values.house, houses, results);
   if (values.json) {
     console.log(
       JSON.stringify(

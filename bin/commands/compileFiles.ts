@@ -5,6 +5,7 @@ import { startProgress } from './progress';
 import { readHouse } from './readHouse';
 import { readParameters } from './readParameters';
 import { readRequest } from './readRequest';
+import { sayUnusedHouse } from './sayUnusedHouse';
 import { WrongUse } from './WrongUse';
 import { writeFiles } from './writeFiles';
 
@@ -53,10 +54,11 @@ export function compileFiles(parameters: readonly string[]): number {
   const params = readValues(values.params ?? []);
   const houses = readHouse(values.house);
 
+  // All are read before any is compiled, so that a file that is not there is said at once.
+  const requests = positionals.map((file) => ({ file, ...readRequest(file) }));
   const progress = startProgress(positionals.length, { isWanted: !values.json });
-  const results = positionals.map((file, index) => {
+  const results = requests.map(({ file, recipe, bases }, index) => {
     progress.show(index, file);
-    const { recipe, bases } = readRequest(file);
     const compilation = compile({
       recipe,
       bases,
@@ -64,9 +66,11 @@ export function compileFiles(parameters: readonly string[]): number {
       character: { ...(character === undefined ? {} : { name: character }), params },
     });
     const sources = [recipe, ...Object.values(bases), ...Object.values(houses)];
-    return { file, findings: compilation.findings, files: buildFiles(compilation), sources };
+    const { findings, rig } = compilation;
+    return { file, findings, rig, files: buildFiles(compilation), sources };
   });
   progress.clear();
+  sayUnusedHouse(values.house, houses, results);
   checkNames(results);
   writeFiles(
     out,

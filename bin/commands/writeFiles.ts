@@ -1,12 +1,14 @@
-import { mkdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { renameSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import type { BuildFile } from '../../compiler/index';
+import { makeFolder } from './makeFolder';
+import { printable } from './printable';
 import { WrongUse } from './WrongUse';
 
 function cannotWrite(folder: string, error: unknown): WrongUse {
   const code = (error as NodeJS.ErrnoException).code;
   const reason = code === 'EEXIST' || code === 'ENOTDIR' ? 'it is not a folder' : (code ?? 'unknown');
-  return new WrongUse(`${folder} cannot be written to: ${reason}.`);
+  return new WrongUse(`${printable(folder)} cannot be written to: ${reason}.`);
 }
 
 /**
@@ -20,7 +22,7 @@ export function writeFiles(folder: string, files: readonly BuildFile[]): void {
     draft: join(folder, `.${name}.${process.pid}`),
   }));
   try {
-    mkdirSync(folder, { recursive: true });
+    makeFolder(folder);
   } catch (error) {
     throw cannotWrite(folder, error);
   }

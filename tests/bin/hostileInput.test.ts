@@ -60,6 +60,18 @@ it('does not read a file of gigabytes into memory', () => {
   expect(stderr).toContain('vast.yaml is larger than 64 MiB.');
 });
 
+it('reads no device without end', () => {
+  const { status, stderr } = pintle('check', '/dev/zero');
+  expect(status).toBe(2);
+  expect(stderr).toContain('/dev/zero is larger than 64 MiB.');
+});
+
+it('comes back from a folder in which none can be made', () => {
+  const { status, stderr } = pintle('compile', 'one.recipe.yaml', '--out', '/proc/astray/further');
+  expect(status).toBe(2);
+  expect(stderr).toContain('/proc/astray/further cannot be written to: ENOENT.');
+});
+
 it('finds the name of house rules that are nested beyond measure without falling over', () => {
   writeFileSync(join(folder, 'deep.house.yaml'), `house: ${'['.repeat(100_000)}`);
   const { status, stdout } = pintle('check', 'one.recipe.yaml', '--house', 'deep.house.yaml');

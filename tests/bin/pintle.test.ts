@@ -132,6 +132,19 @@ describe('pintle compile and run', () => {
     pintle('compile', hare(), '--out', 'housed', '--house', 'own.house.yaml');
     expect(readFileSync(join(folder, 'housed/hare.slip'), 'utf8')).toContain('_knochen"');
   });
+
+  it('makes the folders it writes into', () => {
+    expect(pintle('compile', hare(), '--out', 'show/reel/hare').status).toBe(0);
+    expect(readdirSync(join(folder, 'show/reel/hare'))).toHaveLength(4);
+  });
+
+  it('says when a recipe follows other house rules than those of the file', () => {
+    const house = readFileSync(join(root, 'compiler/house/tidewrack.house.yaml'), 'utf8');
+    write('other.house.yaml', house.replace('house: tidewrack', 'house: sandbar'));
+    const { status, stderr } = pintle('check', hare(), '--house', 'other.house.yaml');
+    expect(stderr).toBe('hare.recipe.yaml follows tidewrack@1; other.house.yaml was not used for it.\n');
+    expect(status).toBe(0);
+  });
 });
 
 describe('pintle schema and explain', () => {
