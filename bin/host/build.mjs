@@ -18,6 +18,7 @@ const SOURCES = [
   'postcss.config.mjs',
   'tailwind.config.ts',
   'tsconfig.json',
+  'tsconfig.app.json',
 ];
 const STAMP = 'pintle-sources';
 
