@@ -4,7 +4,7 @@ import { AxeBuilder } from '@axe-core/playwright';
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { launchBrowser, signIn, visit } from '../support/browser';
-import { makeRecipe, positionOf, replaceInText, untilDrawn } from '../support/editorPage';
+import { makeRecipe, replaceInText, untilDrawn } from '../support/editorPage';
 
 let browser: Browser;
 beforeAll(async () => {
