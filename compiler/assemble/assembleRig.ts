@@ -7,20 +7,11 @@ import {
   rotate,
 } from '../math/quat';
 import { add, sub, ZERO } from '../math/vec3';
-import { seatFollowId } from '../resolve/ids';
 import type { ResolvedNode, ResolvedRecipe } from '../resolve/types';
-import type {
-  NumberOrAttribute,
-  Quat,
-  Rig,
-  RigConstraint,
-  RigNode,
-  RigScene,
-  RigSolver,
-  Vec3,
-} from '../rig/Rig';
+import type { Quat, Rig, RigNode, RigScene, Vec3 } from '../rig/Rig';
 import { POSITION_DECIMALS, TURN_DECIMALS } from '../solve/tolerances';
 import type { RestPlace, SolvedRecipe } from '../solve/types';
+import { assembleLinks } from './assembleLinks';
 
 const WORLD: RestPlace = { position: ZERO, turn: IDENTITY_QUAT };
 
@@ -52,6 +43,7 @@ export function assembleRig(scene: RigScene, recipe: ResolvedRecipe, solved: Sol
   const chainOf = new Map(recipe.chains.flatMap((chain) => chain.jointIds.map((id) => [id, chain] as const)));
   const controlOf = new Map(recipe.controls.map((control) => [control.id, control]));
   const lineOf = new Map(recipe.guideLines.map((line) => [line.id, line]));
+  const meshOf = new Map(recipe.geometry.map(({ id, mesh }) => [id, mesh]));
   const world = new Map<string, RestPlace>();
 
   const base = (node: ResolvedNode) => {
@@ -77,8 +69,11 @@ export function assembleRig(scene: RigScene, recipe: ResolvedRecipe, solved: Sol
 
   const assembleNode = (node: ResolvedNode): RigNode => {
     switch (node.kind) {
-      case 'joint':
-        return { ...base(node), kind: 'joint', order: chainOf.get(node.id)?.order ?? 'xyz' };
+      case 'joint': {
+        const chain = chainOf.get(node.id);
+        const limits = chain?.limits[node.id.slice(chain.id.length + 1)] ?? {};
+        return { ...base(node), kind: 'joint', order: chain?.order ?? 'xyz', limits };
+      }
       case 'control': {
         const control = controlOf.get(node.id);
         return {
@@ -105,49 +100,13 @@ export function assembleRig(scene: RigScene, recipe: ResolvedRecipe, solved: Sol
         return { ...base(node), kind: 'note', entries: recipe.notes };
       case 'group':
         return { ...base(node), kind: 'group' };
+      case 'geometry':
+        return { ...base(node), kind: 'geometry', mesh: meshOf.get(node.id) ?? node.id };
       default:
         return node.kind satisfies never;
     }
   };
 
-  const blendOf = (blend: number | string): NumberOrAttribute => {
-    if (typeof blend === 'number') return blend;
-    const dot = blend.lastIndexOf('.');
-    return { control: nameOf(blend.slice(0, dot)), attribute: blend.slice(dot + 1) };
-  };
-
-  const constraints: RigConstraint[] = recipe.seats.map(({ id, follows }) => ({
-    id: seatFollowId(id),
-    name: recipe.linkNames.get(seatFollowId(id)) ?? id,
-    kind: 'parent',
-    target: nameOf(id),
-    sources: [{ node: nameOf(follows), weight: 1 }],
-    blend: null,
-    keepOffset: true,
-  }));
-  for (const constraint of recipe.constraints) {
-    constraints.push({
-      id: constraint.id,
-      name: recipe.linkNames.get(constraint.id) ?? constraint.id,
-      kind: constraint.kind,
-      target: nameOf(constraint.target),
-      sources: constraint.sources.map(({ node, weight }) => ({ node: nameOf(node), weight })),
-      blend: constraint.blend === null ? null : blendOf(constraint.blend),
-      keepOffset: constraint.keepOffset,
-    });
-  }
-
-  const solvers: RigSolver[] = recipe.solvers.map((solver) => ({
-    kind: 'two_bone',
-    id: solver.id,
-    name: recipe.linkNames.get(solver.id) ?? solver.id,
-    start: nameOf(solver.joints[0]),
-    mid: nameOf(solver.joints[1]),
-    end: nameOf(solver.joints[2]),
-    goal: nameOf(solver.goal),
-    pole: nameOf(solver.pole),
-    blend: blendOf(solver.blend),
-  }));
-
-  return { scene, nodes: recipe.nodes.map(assembleNode), constraints, solvers };
+  const nodes = recipe.nodes.map(assembleNode);
+  return { scene, nodes, ...assembleLinks(recipe, solved) };
 }

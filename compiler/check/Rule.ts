@@ -2,7 +2,11 @@ import type {
   ChainSpecification,
   ConstraintSpecification,
   ControlSpecification,
+  DriverSpecification,
+  GeometrySpecification,
   GuideLineSpecification,
+  ShapeSpecification,
+  SkinSpecification,
   SolverSpecification,
 } from '../expand/types';
 import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
@@ -36,6 +40,10 @@ export interface RuleHandlers {
   control?(control: ControlSpecification): void;
   solver?(solver: SolverSpecification): void;
   constraint?(constraint: ConstraintSpecification): void;
+  driver?(driver: DriverSpecification): void;
+  geometry?(mesh: GeometrySpecification): void;
+  skin?(skin: SkinSpecification): void;
+  shape?(shape: ShapeSpecification): void;
   guideLine?(line: GuideLineSpecification): void;
   finish?(): void;
 }

@@ -1,3 +1,4 @@
+import { idsWritten } from '../expand/solverIds';
 import { declareFindings } from '../findings/catalogue';
 import { findEvaluationRing } from '../pose/evaluationOrder';
 import type { ResolveContext } from '../resolve/Reporter';
@@ -25,7 +26,7 @@ export function checkEvaluationRing(rig: Rig, recipe: ResolvedRecipe, context: R
   const link =
     recipe.constraints.find(
       ({ target, sources }) => on.has(target) && sources.some(({ node }) => on.has(node)),
-    ) ?? recipe.solvers.find(({ joints }) => joints.some((joint) => on.has(joint)));
+    ) ?? recipe.solvers.find((solver) => idsWritten(solver).some((id) => on.has(id)));
   context.findings.report(
     evaluationFindings,
     'evaluation-ring',

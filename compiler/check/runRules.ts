@@ -36,6 +36,10 @@ export function runRules(recipe: EvaluatedRecipe, resolved: ResolvedRecipe, stag
   for (const solver of resolved.solvers) for (const handler of handlers) handler.solver?.(solver);
   for (const constraint of resolved.constraints)
     for (const handler of handlers) handler.constraint?.(constraint);
+  for (const driver of resolved.drivers) for (const handler of handlers) handler.driver?.(driver);
+  for (const mesh of resolved.geometry) for (const handler of handlers) handler.geometry?.(mesh);
+  for (const skin of resolved.skins) for (const handler of handlers) handler.skin?.(skin);
+  for (const shape of resolved.shapes) for (const handler of handlers) handler.shape?.(shape);
   for (const line of resolved.guideLines) for (const handler of handlers) handler.guideLine?.(line);
   for (const handler of handlers) handler.finish?.();
 }

@@ -9,7 +9,7 @@ function printNumbers(values: readonly number[]): string {
   return `(${values.map(printNumber).join(' ')})`;
 }
 
-function printBlend(value: NumberOrAttribute): string {
+function printAmount(value: NumberOrAttribute): string {
   if (typeof value === 'number') return printNumber(value);
   return `attr(${printString(value.control)} ${printString(value.attribute)})`;
 }
@@ -29,8 +29,11 @@ const PRINTERS: Printers = {
   vector: printNumbers,
   quaternion: printNumbers,
   weights: printNumbers,
+  numbers: printNumbers,
+  texts: (texts) => `(${texts.map(printString).join(' ')})`,
   channels: (names) => `(${names.join(' ')})`,
-  blend: printBlend,
+  blend: printAmount,
+  amount: printAmount,
   scalar: printScalar,
 };
 

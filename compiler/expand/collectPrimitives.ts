@@ -18,13 +18,7 @@ type Collected = { readonly [C in Collection]: Map<string, Sided<PrimitiveEntrie
 type SideOption = Side | 'both';
 
 function emptyCollections(): Collected {
-  return {
-    chains: new Map(),
-    controls: new Map(),
-    solvers: new Map(),
-    constraints: new Map(),
-    guide_lines: new Map(),
-  };
+  return Object.fromEntries(COLLECTIONS.map((collection) => [collection, new Map()])) as unknown as Collected;
 }
 
 /** The ids under which a part or primitive appears: one for each side it stands on. */
@@ -125,10 +119,9 @@ export function collectPrimitives(
   for (const [id, part] of Object.entries(recipe.parts ?? {})) {
     if (!isPoisoned(`parts/${id}`)) addPart(collected, id, part, left);
   }
-  addEntries(collected.chains, 'chains', recipe.chains ?? {}, left, isPoisoned);
-  addEntries(collected.controls, 'controls', recipe.controls ?? {}, left, isPoisoned);
-  addEntries(collected.solvers, 'solvers', recipe.solvers ?? {}, left, isPoisoned);
-  addEntries(collected.constraints, 'constraints', recipe.constraints ?? {}, left, isPoisoned);
-  addEntries(collected.guide_lines, 'guide_lines', recipe.guide_lines ?? {}, left, isPoisoned);
+  for (const collection of COLLECTIONS) {
+    const into = collected[collection] as Map<string, Sided<PrimitiveEntries[Collection]>>;
+    addEntries(into, collection, recipe[collection] ?? {}, left, isPoisoned);
+  }
   return collected;
 }

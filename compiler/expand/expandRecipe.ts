@@ -6,7 +6,15 @@ import { readSceneFrame } from './sceneFrame';
 import { mirrorPoint } from './sides';
 import { specifyChain } from './specifyChain';
 import { specifyControl } from './specifyControl';
-import { specifyConstraint, specifyGuideLine, specifySolver } from './specifyLinks';
+import {
+  specifyConstraint,
+  specifyDriver,
+  specifyGeometry,
+  specifyGuideLine,
+  specifyShape,
+  specifySkin,
+} from './specifyLinks';
+import { specifySolver } from './specifySolver';
 import type { ExpandedRecipe, LandmarkPoints, SceneFrame } from './types';
 
 /** Fills in the defaults of every entry; an entry that is not complete is poisoned. */
@@ -50,6 +58,10 @@ export function expandRecipe(recipe: EvaluatedRecipe, context: StageContext): Ex
     controls: specifyAll('controls', primitives.controls, specifyControl, context),
     solvers: specifyAll('solvers', primitives.solvers, specifySolver, context),
     constraints: specifyAll('constraints', primitives.constraints, specifyConstraint, context),
+    drivers: specifyAll('drivers', primitives.drivers, specifyDriver, context),
+    geometry: specifyAll('geometry', primitives.geometry, specifyGeometry, context),
+    skins: specifyAll('skins', primitives.skins, specifySkin, context),
+    shapes: specifyAll('shapes', primitives.shapes, specifyShape, context),
     guideLines: specifyAll('guide_lines', primitives.guide_lines, specifyGuideLine, context),
     notes: Object.entries(recipe.notes ?? {}).map(([key, value]) => ({ key, value })),
   };

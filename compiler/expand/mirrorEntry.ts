@@ -3,20 +3,54 @@ import type { Collection, PrimitiveEntries } from './primitives';
 import { mirrorId, mirrorPoint } from './sides';
 
 /** Keys that hold a point or direction when their value is three numbers. */
-const POINT_KEYS: ReadonlySet<string> = new Set(['at', 'toward', 'bend']);
+const POINT_KEYS: ReadonlySet<string> = new Set([
+  'at',
+  'toward',
+  'bend',
+  'heel',
+  'ball',
+  'toe',
+  'inner',
+  'outer',
+]);
 /** Keys that hold ids, points by name, or lists of them. */
 const REFERENCE_KEYS: ReadonlySet<string> = new Set([
   'parent',
   'align',
+  'spaces',
   'target',
   'goal',
   'pole',
   'from',
   'to',
-  'blend',
   'joints',
   'points',
   'at',
+  'up',
+  'controls',
+  'bone',
+  'tip',
+  'base',
+  'driver',
+  'foot',
+  'ankle',
+  'toes',
+  'heel',
+  'ball',
+  'toe',
+  'inner',
+  'outer',
+  'geometry',
+  'input',
+  'blend',
+  'stretch',
+  'swing',
+  'bias',
+  'volume',
+  'roll',
+  'bank',
+  'break',
+  'weight',
 ]);
 
 function isPoint(value: unknown): value is Vec3 {

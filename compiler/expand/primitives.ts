@@ -10,6 +10,10 @@ export type ChainEntry = Entry<'chains'>;
 export type ControlEntry = Entry<'controls'>;
 export type SolverEntry = Entry<'solvers'>;
 export type ConstraintEntry = Entry<'constraints'>;
+export type DriverEntry = Entry<'drivers'>;
+export type GeometryEntry = Entry<'geometry'>;
+export type SkinEntry = Entry<'skins'>;
+export type ShapeEntry = Entry<'shapes'>;
 export type GuideLineEntry = Entry<'guide_lines'>;
 export type PartEntry = Entry<'parts'>;
 
@@ -18,6 +22,10 @@ export interface PrimitiveEntries {
   readonly controls: ControlEntry;
   readonly solvers: SolverEntry;
   readonly constraints: ConstraintEntry;
+  readonly drivers: DriverEntry;
+  readonly geometry: GeometryEntry;
+  readonly skins: SkinEntry;
+  readonly shapes: ShapeEntry;
   readonly guide_lines: GuideLineEntry;
 }
 
@@ -28,6 +36,10 @@ export const COLLECTIONS = [
   'controls',
   'solvers',
   'constraints',
+  'drivers',
+  'geometry',
+  'skins',
+  'shapes',
   'guide_lines',
 ] as const satisfies Collection[];
 

@@ -1,11 +1,11 @@
 import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
-import type { Axis } from '../rig/Rig';
+import type { Axis, ValueRange } from '../rig/Rig';
 import { expandFindings } from './findings';
 import { jointCount, jointNames } from './jointIds';
 import type { ChainEntry, Sided } from './primitives';
 import type { StageContext } from './StageContext';
 import { areParallel } from './sceneFrame';
-import type { ChainSpecification } from './types';
+import type { ChainSpecification, JointLimits } from './types';
 
 type OrientEntry = NonNullable<NonNullable<EvaluatedRecipe['chains']>[string]['orient']>;
 
@@ -30,6 +30,29 @@ function specifyOrient(
     up = aim[1] === 'y' ? '+z' : '+y';
   }
   return { rule: orient.rule ?? 'chain', aim, up, toward: orient.toward ?? null };
+}
+
+const TURNS = ['rx', 'ry', 'rz'] as const;
+
+/** The limits of a chain's joints by their names; a name that is no joint's is a finding. */
+function specifyLimits(sided: Sided<ChainEntry>, context: StageContext): ChainSpecification['limits'] {
+  const names = jointNames(sided.entry);
+  const limits: Record<string, JointLimits> = {};
+  for (const [name, entry] of Object.entries(sided.entry.limits ?? {})) {
+    if (!names.includes(name)) {
+      const span = context.document.spanAt([...sided.path, 'limits', name], 'key');
+      const parameters = { id: sided.id, name, names: names.slice(0, 20).join(', ') };
+      context.findings.report(expandFindings, 'limit-joint-unknown', span, parameters);
+      continue;
+    }
+    const ranges: Partial<Record<(typeof TURNS)[number], ValueRange>> = {};
+    for (const turn of TURNS) {
+      const range = entry[turn];
+      if (range) ranges[turn] = { min: range.min ?? null, max: range.max ?? null };
+    }
+    limits[name] = ranges;
+  }
+  return limits;
 }
 
 /** Fills in a chain's defaults; null (with a finding) when it has no points. */
@@ -68,5 +91,6 @@ export function specifyChain(sided: Sided<ChainEntry>, context: StageContext): C
     mirror: entry.mirror ?? 'behaviour',
     orient: specifyOrient(entry.orient ?? {}, sided, context),
     order: entry.rotation_order ?? 'xyz',
+    limits: specifyLimits(sided, context),
   };
 }

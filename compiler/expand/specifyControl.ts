@@ -39,13 +39,40 @@ function specifyChannels(entry: ControlEntry): ControlSpecification['channels'] 
   return channels;
 }
 
-function specifyAttributes(entry: ControlEntry): readonly AttributeSpecification[] {
-  return Object.entries(entry.attributes ?? {}).map(([name, option]) => ({
-    name,
-    default: option.default ?? 0,
-    min: option.min ?? null,
-    max: option.max ?? null,
-  }));
+/** Name of the attribute by which an animator chooses the space. */
+export const SPACE_ATTRIBUTE = 'space';
+
+/** The spaces of a control in the order of the attribute's values: its parent first, unless it is listed. */
+function specifySpaces({ spaces = [], parent }: ControlEntry): readonly string[] {
+  if (spaces.length === 0) return [];
+  return parent === undefined || spaces.includes(parent) ? spaces : [parent, ...spaces];
+}
+
+function specifyAttributes(
+  entry: ControlEntry,
+  spaces: readonly string[],
+): readonly AttributeSpecification[] {
+  const attributes = Object.entries(entry.attributes ?? {}).map(([name, option]) => {
+    const labels = option.labels ?? null;
+    return {
+      name,
+      default: option.default ?? 0,
+      min: option.min ?? (labels ? 0 : null),
+      max: option.max ?? (labels ? labels.length - 1 : null),
+      labels,
+      note: option.note ?? null,
+    };
+  });
+  if (spaces.length < 2) return attributes;
+  const chosen = {
+    name: SPACE_ATTRIBUTE,
+    default: Math.max(0, spaces.indexOf(entry.parent ?? '')),
+    min: 0,
+    max: spaces.length - 1,
+    labels: spaces,
+    note: 'what carries this control',
+  };
+  return [...attributes.filter(({ name }) => name !== SPACE_ATTRIBUTE), chosen];
 }
 
 function specifyPlace(sided: Sided<ControlEntry>, context: StageContext): ControlPlace | null {
@@ -86,6 +113,7 @@ export function specifyControl(
   const { id, entry, side, path, part } = sided;
   const place = specifyPlace(sided, context);
   if (!place) return null;
+  const spaces = specifySpaces(entry);
   return {
     id,
     side,
@@ -99,6 +127,8 @@ export function specifyControl(
     size: entry.size ?? 1,
     order: entry.rotation_order ?? 'xyz',
     channels: specifyChannels(entry),
-    attributes: specifyAttributes(entry),
+    attributes: specifyAttributes(entry, spaces),
+    spaces,
+    spaceFollow: entry.space_follow ?? 'all',
   };
 }

@@ -7,6 +7,8 @@ import type {
   RotationOrder,
   ShapeName,
   Side,
+  TurnChannel,
+  ValueRange,
   Vec3,
 } from '../rig/Rig';
 import type { Path } from '../syntax/types';
@@ -43,7 +45,12 @@ export interface ChainSpecification extends Specification {
     readonly toward: Vec3 | null;
   };
   readonly order: RotationOrder;
+  /** By the joint's name in the chain, in degrees from rest. */
+  readonly limits: Readonly<Record<string, JointLimits>>;
 }
+
+/** How far a joint is meant to turn about its own axes, in degrees from rest. */
+export type JointLimits = Readonly<Partial<Record<TurnChannel, ValueRange>>>;
 
 /** Where a control stands: at a place, or where the pole of three joints belongs. */
 export type ControlPlace =
@@ -61,6 +68,8 @@ export interface AttributeSpecification {
   readonly default: number;
   readonly min: number | null;
   readonly max: number | null;
+  readonly labels: readonly string[] | null;
+  readonly note: string | null;
 }
 
 export interface ControlSpecification extends Specification {
@@ -75,22 +84,123 @@ export interface ControlSpecification extends Specification {
   readonly order: RotationOrder;
   readonly channels: Readonly<Partial<Record<Channel, ChannelRule>>>;
   readonly attributes: readonly AttributeSpecification[];
+  /** Ids of what may carry it, in the order of the attribute's values; empty when there is no choice. */
+  readonly spaces: readonly string[];
+  readonly spaceFollow: 'all' | 'turn';
 }
 
-export interface SolverSpecification extends Specification {
-  readonly kind: 'two_bone';
-  readonly joints: readonly [string, string, string];
+/** A number, or an attribute as `control.attribute`. */
+export type Amount = number | string;
+
+interface ReachSpecification extends Specification {
   readonly goal: string;
   readonly pole: string;
-  readonly blend: number | string;
+  readonly blend: Amount;
+  readonly stretch: Amount;
+  readonly stretchLimit: number;
+  readonly soft: number;
+  readonly swing: Amount;
 }
 
+export interface TwoBoneSpecification extends ReachSpecification {
+  readonly kind: 'two_bone';
+  readonly joints: readonly [string, string, string];
+}
+
+export interface ReachChainSpecification extends ReachSpecification {
+  readonly kind: 'reach';
+  readonly joints: readonly string[];
+  readonly bias: Amount;
+}
+
+export interface SplineSpecification extends Specification {
+  readonly kind: 'spline';
+  readonly joints: readonly string[];
+  readonly controls: readonly string[];
+  readonly stretch: Amount;
+  readonly volume: Amount;
+}
+
+export interface TwistSpecification extends Specification {
+  readonly kind: 'twist';
+  readonly joints: readonly string[];
+  readonly shares: readonly number[];
+  readonly bone: string;
+  readonly tip: string;
+  readonly base: string;
+  readonly driver: string;
+}
+
+export interface AimSpecification extends Specification {
+  readonly kind: 'aim';
+  readonly joints: readonly [string];
+  readonly goal: string;
+  readonly pole: string | null;
+  readonly blend: Amount;
+}
+
+/** Names of the points of a sole. */
+export const SOLE_POINTS = ['heel', 'ball', 'toe', 'inner', 'outer'] as const;
+export type SolePoint = (typeof SOLE_POINTS)[number];
+
+export interface FootRollSpecification extends Specification {
+  readonly kind: 'foot_roll';
+  readonly foot: string;
+  readonly ankle: string;
+  /** Null when the ankle alone is moved. */
+  readonly toes: string | null;
+  readonly sole: Readonly<Record<SolePoint, PlaceReference>>;
+  readonly roll: Amount;
+  readonly bank: Amount;
+  readonly break: Amount;
+}
+
+export type SolverSpecification =
+  | TwoBoneSpecification
+  | ReachChainSpecification
+  | SplineSpecification
+  | TwistSpecification
+  | AimSpecification
+  | FootRollSpecification;
+
 export interface ConstraintSpecification extends Specification {
-  readonly kind: 'parent' | 'point' | 'orient' | 'scale';
+  readonly kind: 'parent' | 'point' | 'orient' | 'scale' | 'aim';
   readonly target: string;
   readonly sources: readonly { readonly node: string; readonly weight: number }[];
-  readonly blend: number | string | null;
+  readonly blend: Amount | null;
   readonly keepOffset: boolean;
+  /** Aim constraints only. */
+  readonly aim: { readonly axis: Axis; readonly upAxis: Axis; readonly up: string | null } | null;
+}
+
+export interface DriverSpecification extends Specification {
+  /** The control, and its attribute or channel. */
+  readonly control: string;
+  readonly input: string;
+  readonly target: string;
+  readonly channel: Channel;
+  readonly inputs: readonly number[];
+  readonly outputs: readonly number[];
+  readonly curve: 'linear' | 'smooth';
+  readonly beyond: 'hold' | 'extend';
+}
+
+export interface GeometrySpecification extends Specification {
+  readonly mesh: string;
+  readonly role: string;
+}
+
+export interface SkinSpecification extends Specification {
+  readonly geometry: string;
+  /** Ids of joints, or of chains for all their joints. */
+  readonly joints: readonly string[];
+  readonly influences: number;
+}
+
+export interface ShapeSpecification extends Specification {
+  readonly geometry: string;
+  readonly morph: string;
+  readonly weight: Amount;
 }
 
 export interface GuideLineSpecification extends Specification {
@@ -124,6 +234,10 @@ export interface ExpandedRecipe {
   readonly controls: readonly ControlSpecification[];
   readonly solvers: readonly SolverSpecification[];
   readonly constraints: readonly ConstraintSpecification[];
+  readonly drivers: readonly DriverSpecification[];
+  readonly geometry: readonly GeometrySpecification[];
+  readonly skins: readonly SkinSpecification[];
+  readonly shapes: readonly ShapeSpecification[];
   readonly guideLines: readonly GuideLineSpecification[];
   readonly notes: readonly { readonly key: string; readonly value: string | number | boolean }[];
 }

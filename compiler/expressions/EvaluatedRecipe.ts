@@ -3,7 +3,7 @@ import type { Recipe } from '../schema/generated/recipeTypes';
 
 /**
  * A value after expressions. Numbers that could be expressions are numbers, points three numbers; names stay names.
- * `blend` keeps its text, because that names an attribute and is no expression.
+ * Amounts keep their text, because that names an attribute and is no expression.
  */
 type Evaluated<T> = [number | string] extends [T]
   ? number
@@ -15,7 +15,9 @@ type Evaluated<T> = [number | string] extends [T]
         ? { readonly [K in keyof T]: EvaluatedField<K, T[K]> }
         : T;
 
-type EvaluatedField<K, V> = K extends 'blend' ? V : K extends 'toward' | 'bend' ? Vec3 : Evaluated<V>;
+type AmountKey = 'blend' | 'stretch' | 'swing' | 'bias' | 'volume' | 'roll' | 'bank' | 'break' | 'weight';
+
+type EvaluatedField<K, V> = K extends AmountKey ? V : K extends 'toward' | 'bend' ? Vec3 : Evaluated<V>;
 
 /** A landmark with its points as numbers. */
 export interface EvaluatedLandmark {

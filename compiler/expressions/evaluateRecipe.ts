@@ -11,11 +11,32 @@ import { expressionFindings } from './findings';
 import { readParameters } from './readParameters';
 
 /** Collections whose entries may hold expressions. */
-const COLLECTIONS = ['parts', 'chains', 'controls', 'solvers', 'constraints', 'guide_lines'] as const;
+const COLLECTIONS = [
+  'parts',
+  'chains',
+  'controls',
+  'solvers',
+  'constraints',
+  'drivers',
+  'geometry',
+  'skins',
+  'shapes',
+  'guide_lines',
+] as const;
 /** Keys whose text value is a point when it is an expression. */
-const POINT_KEYS: ReadonlySet<string> = new Set(['at', 'right', 'toward', 'bend']);
+const POINT_KEYS: ReadonlySet<string> = new Set([
+  'at',
+  'right',
+  'toward',
+  'bend',
+  'heel',
+  'ball',
+  'toe',
+  'inner',
+  'outer',
+]);
 /** Keys with words for people, which are never expressions. */
-const PROSE_KEYS: ReadonlySet<string> = new Set(['note', 'title']);
+const PROSE_KEYS: ReadonlySet<string> = new Set(['note', 'title', 'mesh', 'morph', 'labels']);
 
 class RecipeEvaluator {
   readonly #landmarks = new Map<string, EvaluatedLandmark | null>();

@@ -1,6 +1,15 @@
-import type { ControlNode, Rig, RigConstraint, RigNode, RigScene, RigSolver } from '../rig/Rig';
+import type {
+  ControlNode,
+  JointNode,
+  Rig,
+  RigConstraint,
+  RigNode,
+  RigScene,
+  RigSolver,
+  TurnChannel,
+} from '../rig/Rig';
 import type { Step, StepOf } from '../slipway/Step';
-import { CHANNEL_NAMES } from '../slipway/verbs';
+import { CHANNEL_NAMES, type SolverVerb } from '../slipway/verbs';
 
 function planScene(scene: RigScene): StepOf<'scene'> {
   return {
@@ -36,17 +45,24 @@ function planNode(node: RigNode): Step {
       };
     case 'line':
       return { verb: kind, name, values: { ...place, from: node.from, to: node.to, style: node.style } };
+    case 'geometry':
+      return { verb: kind, name, values: { ...place, mesh: node.mesh } };
     default:
       return kind satisfies never;
   }
 }
 
+const TURNS: readonly TurnChannel[] = ['rx', 'ry', 'rz'];
+
+function planJoint({ name, limits }: JointNode): Step[] {
+  return TURNS.flatMap((channel): Step[] => {
+    const limit = limits[channel];
+    return limit === undefined ? [] : [{ verb: 'limit', name, values: { channel, ...limit } }];
+  });
+}
+
 function planControl({ name, attributes, channels }: ControlNode): Step[] {
-  const steps: Step[] = attributes.map((attribute) => ({
-    verb: 'attr',
-    name,
-    values: { name: attribute.name, default: attribute.default, min: attribute.min, max: attribute.max },
-  }));
+  const steps: Step[] = attributes.map((attribute) => ({ verb: 'attr', name, values: attribute }));
   const listed = CHANNEL_NAMES.filter((channel) => channels[channel] !== undefined);
   const locked = listed.filter((channel) => channels[channel]?.locked);
   if (locked.length > 0) steps.push({ verb: 'lock', name, values: { channels: locked } });
@@ -61,6 +77,7 @@ function planControl({ name, attributes, channels }: ControlNode): Step[] {
 function planDetails(node: RigNode): Step[] {
   const { name, shown, selectable } = node;
   const steps: Step[] = node.kind === 'control' ? planControl(node) : [];
+  if (node.kind === 'joint') steps.push(...planJoint(node));
   if (node.kind === 'note') {
     for (const { key, value } of node.entries) steps.push({ verb: 'entry', name, values: { key, value } });
   }
@@ -80,17 +97,31 @@ function planConstraint(constraint: RigConstraint): StepOf<'constrain'> {
       weights: constraint.sources.map(({ weight }) => weight),
       keep_offset: constraint.keepOffset,
       blend: constraint.blend,
+      axis: constraint.kind === 'aim' ? constraint.axis : null,
+      up_axis: constraint.kind === 'aim' ? constraint.upAxis : null,
+      up: constraint.kind === 'aim' ? constraint.up : null,
     },
   };
 }
 
-function planSolver({ name, id, kind, start, mid, end, goal, pole, blend }: RigSolver): StepOf<'solve'> {
-  return { verb: 'solve', name, values: { id, kind, start, mid, end, goal, pole, blend } };
+function planSolver(solver: RigSolver): StepOf<SolverVerb> {
+  const { kind, name, ...values } = solver;
+  if (!('stretchLimit' in values)) return { verb: kind, name, values } as StepOf<SolverVerb>;
+  const { stretchLimit, ...rest } = values;
+  return { verb: kind, name, values: { ...rest, stretch_limit: stretchLimit } } as StepOf<SolverVerb>;
+}
+
+/** The step of a link whose keys bear the names of its fields. */
+function planLink<V extends 'space' | 'drive' | 'skin' | 'shape'>(
+  verb: V,
+  { name, ...values }: { readonly name: string } & StepOf<V>['values'],
+): Step {
+  return { verb, name, values } as unknown as Step;
 }
 
 /**
  * The steps that build a rig, in an order in which nothing refers forward: scene, then every node in the rig's own
- * order with what belongs to it, then constraints, then solvers. Relies on the rig's order of nodes: parents before
+ * order with what belongs to it, then what links them. Relies on the rig's order of nodes: parents before
  * children, a line after both its ends.
  */
 export function planSteps(rig: Rig): readonly Step[] {
@@ -98,6 +129,10 @@ export function planSteps(rig: Rig): readonly Step[] {
     planScene(rig.scene),
     ...rig.nodes.flatMap((node) => [planNode(node), ...planDetails(node)]),
     ...rig.constraints.map(planConstraint),
+    ...rig.spaces.map((space) => planLink('space', space)),
+    ...rig.drivers.map((driver) => planLink('drive', driver)),
     ...rig.solvers.map(planSolver),
+    ...rig.skins.map((skin) => planLink('skin', skin)),
+    ...rig.shapes.map((shape) => planLink('shape', shape)),
   ];
 }

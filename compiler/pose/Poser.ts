@@ -4,6 +4,8 @@ import type { PoseValues } from '../rig/Rig';
 export interface Poser {
   /** World matrices of the last evaluation: 16 numbers a node in the order of `rig.nodes`, column-major. */
   readonly world: Float64Array;
-  /** Fills `world` for the given control values; without values, for rest. */
+  /** Weights of the morph targets of the last evaluation, in the order of `rig.shapes`. */
+  readonly weights: Float64Array;
+  /** Fills `world` and `weights` for the given control values; without values, for rest. */
   evaluate(pose?: PoseValues): void;
 }

@@ -1,168 +1,200 @@
 import { invariant } from '../findings/invariant';
-import type { Mat4 } from '../math/mat4';
 import {
-  composeMat4,
-  decomposeMat4,
-  IDENTITY_MAT4,
-  invertMat4,
-  multiplyMat4,
-  rotationOf,
-  transformPoint,
-} from '../math/mat4';
-import { conjugateQuat, multiplyQuat } from '../math/quat';
-import { addScaled, ZERO } from '../math/vec3';
-import type { Quat, RigConstraint, Vec3 } from '../rig/Rig';
-import { averageRotation } from './averageRotation';
+  addScaledInto,
+  conjugateInto,
+  copyQuat,
+  type Mutable,
+  makeQuat,
+  makeVec,
+  multiplyQuatInto,
+  normaliseQuatInto,
+  slerpInto,
+} from '../math/inPlace';
+import { IDENTITY_MAT4, invertMat4, multiplyMat4, rotationOf } from '../math/mat4';
+import type { RigConstraint } from '../rig/Rig';
+import { prepareAimConstraint } from './aimConstraint';
+import { type RigMemory, restOf, type Step } from './RigMemory';
 import {
+  axisLengthsInto,
+  composeInto,
   multiplyInto,
-  readMatrix,
-  readPosition,
+  positionInto,
+  rotationInto,
+  transformPointInto,
   turnAxes,
-  writeMatrix,
   writePosition,
 } from './worldMatrices';
 
-/** One source as prepared against rest: what the target is, seen from the source. */
-interface PreparedSource {
-  readonly node: number;
-  readonly offset: Float64Array;
-  readonly point: Vec3;
-  readonly turn: Quat;
-}
+/** Weighs the sources of a constraint: fills `shares`, which sum to one, or says that none takes part. */
+export type Weigh = (shares: Float64Array) => boolean;
 
-interface PreparedConstraint {
-  readonly kind: RigConstraint['kind'];
-  readonly target: number;
-  readonly sources: readonly PreparedSource[];
-  readonly weights: readonly number[];
-}
-
-function prepareSource(node: number, source: Mat4, target: Mat4, keepOffset: boolean): PreparedSource {
-  const inverse = invertMat4(source);
-  invariant(inverse !== undefined, 'rest matrices hold no scale and can be inverted');
-  const offset = keepOffset ? multiplyMat4(inverse, target) : IDENTITY_MAT4;
-  return {
-    node,
-    offset: Float64Array.from(offset),
-    point: [offset[12], offset[13], offset[14]],
-    turn: rotationOf(offset),
+function prepareWeights(constraint: RigConstraint, memory: RigMemory, blendSlot: number | null): Weigh {
+  const { values } = memory;
+  const own = Float64Array.from(constraint.sources, ({ weight }) => Math.max(0, weight));
+  const total = own.reduce((sum, weight) => sum + weight, 0);
+  if (blendSlot === null) {
+    return (shares) => {
+      for (let i = 0; i < own.length; i += 1) shares[i] = (own[i] as number) / total;
+      return total > 0;
+    };
+  }
+  return (shares) => {
+    const share = Math.min(1, Math.max(0, values[blendSlot] as number));
+    shares[0] = share;
+    shares[1] = 1 - share;
+    return true;
   };
 }
 
-function averagePoint(
-  world: Float64Array,
-  sources: readonly PreparedSource[],
-  weights: readonly number[],
-): Vec3 {
-  return sources.reduce<Vec3>(
-    (sum, source, i) =>
-      addScaled(sum, transformPoint(readMatrix(world, source.node), source.point), weights[i] ?? 0),
-    ZERO,
-  );
-}
-
-function averageTurn(
-  world: Float64Array,
-  sources: readonly PreparedSource[],
-  weights: readonly number[],
-): Quat {
-  const turns = sources.map((source) =>
-    multiplyQuat(rotationOf(readMatrix(world, source.node)), source.turn),
-  );
-  return averageRotation(turns, weights);
-}
-
-function averageScale(
-  world: Float64Array,
-  sources: readonly PreparedSource[],
-  weights: readonly number[],
-): Vec3 {
-  return sources.reduce<Vec3>(
-    (sum, source, i) => addScaled(sum, decomposeMat4(readMatrix(world, source.node)).scale, weights[i] ?? 0),
-    ZERO,
-  );
-}
-
-function replacePart(
-  { kind, target }: PreparedConstraint,
-  world: Float64Array,
-  sources: readonly PreparedSource[],
-  weights: readonly number[],
-): void {
-  switch (kind) {
-    case 'parent': {
-      const [only] = sources;
-      if (sources.length === 1 && only !== undefined) {
-        multiplyInto(world, target * 16, world, only.node * 16, only.offset, 0);
-        return;
-      }
-      const at = averagePoint(world, sources, weights);
-      const turn = averageTurn(world, sources, weights);
-      writeMatrix(world, target, composeMat4(at, turn, averageScale(world, sources, weights)));
-      return;
-    }
-    case 'point':
-      writePosition(world, target, averagePoint(world, sources, weights));
-      return;
-    case 'orient': {
-      const own = rotationOf(readMatrix(world, target));
-      turnAxes(world, target, multiplyQuat(averageTurn(world, sources, weights), conjugateQuat(own)));
-      return;
-    }
-    case 'scale': {
-      const own = rotationOf(readMatrix(world, target));
-      const size = averageScale(world, sources, weights);
-      writeMatrix(world, target, composeMat4(readPosition(world, target), own, size));
-      return;
-    }
-    default:
-      kind satisfies never;
-  }
+/** Offset of the target from each source at rest, 16 numbers a source, and its rotation, 4 a source. */
+function prepareOffsets(constraint: RigConstraint, memory: RigMemory) {
+  const target = restOf(memory, memory.indexOf(constraint.target));
+  const matrices = new Float64Array(constraint.sources.length * 16);
+  const turns: Mutable[] = [];
+  constraint.sources.forEach(({ node }, index) => {
+    const inverse = invertMat4(restOf(memory, memory.indexOf(node)));
+    invariant(inverse !== undefined, 'rest matrices hold no scale and can be inverted');
+    const offset = constraint.keepOffset ? multiplyMat4(inverse, target) : IDENTITY_MAT4;
+    matrices.set(offset, index * 16);
+    turns.push(makeQuat(rotationOf(offset)));
+  });
+  return { matrices, turns };
 }
 
 /**
- * Prepares a constraint against rest; the function it returns replaces the target's part of `world` by the weighted
- * sources'. `blend` (0 to 1, or null for the constraint's own weights) weighs the first source, the rest of 1 the
- * second. Sources of weight 0 take no part; with none left the target stays as it is.
+ * Prepares a constraint against rest; the step it returns replaces the target's part of the world matrices by the
+ * weighted sources'. Sources of weight 0 take no part; with none left the target stays as it is.
  */
 export function prepareConstraint(
   constraint: RigConstraint,
-  indexOf: (name: string) => number,
-  restWorld: readonly Mat4[],
-): (world: Float64Array, blend: number | null) => void {
-  const restOf = (node: number): Mat4 => restWorld[node] ?? IDENTITY_MAT4;
-  const target = indexOf(constraint.target);
-  const prepared: PreparedConstraint = {
-    kind: constraint.kind,
-    target,
-    sources: constraint.sources.map(({ node }) =>
-      prepareSource(indexOf(node), restOf(indexOf(node)), restOf(target), constraint.keepOffset),
-    ),
-    weights: constraint.sources.map(({ weight }) => weight),
+  memory: RigMemory,
+  blendSlot: number | null,
+): Step {
+  const weigh = prepareWeights(constraint, memory, blendSlot);
+  if (constraint.kind === 'aim') return prepareAimConstraint(constraint, memory, weigh);
+  const { world } = memory;
+  const t = memory.indexOf(constraint.target) * 16;
+  const sources = Int32Array.from(constraint.sources, ({ node }) => memory.indexOf(node) * 16);
+  const { matrices, turns } = prepareOffsets(constraint, memory);
+  const shares = new Float64Array(Math.max(2, sources.length));
+  const at = makeVec();
+  const turn = makeQuat();
+  const size = makeVec();
+  const one = makeVec();
+  const quat = makeQuat();
+  const first = makeQuat();
+  const sum = makeQuat();
+
+  const averagePoint = (): void => {
+    at.fill(0);
+    for (let i = 0; i < sources.length; i += 1) {
+      const share = shares[i] as number;
+      if (share === 0) continue;
+      positionInto(one, matrices, i * 16);
+      transformPointInto(one, world, sources[i] as number, one);
+      addScaledInto(at, at, one, share);
+    }
   };
-  const [first] = prepared.sources;
-  // The usual case, one source that counts, is kept free of any list made while evaluating.
-  if (first !== undefined && prepared.sources.length === 1 && constraint.blend === null) {
-    const always = [1];
-    const takesPart = (prepared.weights[0] ?? 0) > 0;
-    return (world) => {
-      if (takesPart) replacePart(prepared, world, prepared.sources, always);
-    };
+  const turnOf = (out: Mutable, i: number): void => {
+    rotationInto(out, world, sources[i] as number);
+    multiplyQuatInto(out, out, turns[i] as Mutable);
+  };
+  /** One: itself; two: the shorter arc; more: the sum of quaternions on one half of the sphere. */
+  const averageTurn = (): void => {
+    let count = 0;
+    let last = 0;
+    let leading = 0;
+    for (let i = 0; i < sources.length; i += 1) {
+      if (shares[i] === 0) continue;
+      if (count === 0) leading = i;
+      else last = i;
+      count += 1;
+    }
+    turnOf(first, leading);
+    copyQuat(turn, first);
+    if (count === 1) return;
+    if (count === 2) {
+      turnOf(quat, last);
+      slerpInto(turn, first, quat, shares[last] as number);
+      return;
+    }
+    sum.fill(0);
+    for (let i = leading; i < sources.length; i += 1) {
+      const share = shares[i] as number;
+      if (share === 0) continue;
+      turnOf(quat, i);
+      let dot = 0;
+      for (let c = 0; c < 4; c += 1) dot += (first[c] as number) * (quat[c] as number);
+      const signed = dot < 0 ? -share : share;
+      for (let c = 0; c < 4; c += 1) sum[c] = (sum[c] as number) + (quat[c] as number) * signed;
+    }
+    normaliseQuatInto(turn, sum);
+  };
+  const averageScale = (): void => {
+    size.fill(0);
+    for (let i = 0; i < sources.length; i += 1) {
+      const share = shares[i] as number;
+      if (share === 0) continue;
+      axisLengthsInto(one, world, sources[i] as number);
+      addScaledInto(size, size, one, share);
+    }
+  };
+
+  /** The one source that takes part; −1 when several do. */
+  const onlyShare = (): number => {
+    let only = -1;
+    for (let i = 0; i < sources.length; i += 1) {
+      if (shares[i] === 0) continue;
+      if (only >= 0) return -1;
+      only = i;
+    }
+    return only;
+  };
+
+  switch (constraint.kind) {
+    case 'parent':
+      if (sources.length === 1 && blendSlot === null) {
+        const s = sources[0] as number;
+        return () => {
+          if (weigh(shares)) multiplyInto(world, t, world, s, matrices, 0);
+        };
+      }
+      return () => {
+        if (!weigh(shares)) return;
+        const only = onlyShare();
+        if (only >= 0) {
+          multiplyInto(world, t, world, sources[only] as number, matrices, only * 16);
+          return;
+        }
+        averagePoint();
+        averageTurn();
+        averageScale();
+        composeInto(world, t, at, turn, size);
+      };
+    case 'point':
+      return () => {
+        if (!weigh(shares)) return;
+        averagePoint();
+        writePosition(world, t, at);
+      };
+    case 'orient':
+      return () => {
+        if (!weigh(shares)) return;
+        averageTurn();
+        rotationInto(quat, world, t);
+        conjugateInto(quat, quat);
+        multiplyQuatInto(quat, turn, quat);
+        turnAxes(world, t, quat);
+      };
+    case 'scale':
+      return () => {
+        if (!weigh(shares)) return;
+        averageScale();
+        positionInto(at, world, t);
+        rotationInto(turn, world, t);
+        composeInto(world, t, at, turn, size);
+      };
+    default:
+      return constraint satisfies never;
   }
-  return (world, blend) => {
-    const share = blend === null ? null : Math.min(1, Math.max(0, blend));
-    const weightOf = (i: number): number =>
-      share === null ? (prepared.weights[i] ?? 0) : i === 0 ? share : i === 1 ? 1 - share : 0;
-    const taking = prepared.sources
-      .map((source, i) => ({ source, weight: weightOf(i) }))
-      .filter(({ weight }) => weight > 0);
-    const total = taking.reduce((sum, { weight }) => sum + weight, 0);
-    if (!(total > 0)) return;
-    replacePart(
-      prepared,
-      world,
-      taking.map(({ source }) => source),
-      taking.map(({ weight }) => weight / total),
-    );
-  };
 }

@@ -1,32 +1,19 @@
 import { ORDER_AXES, RADIANS_PER_DEGREE } from '../math/euler';
-import type { ControlNode, PoseValues } from '../rig/Rig';
-import { CHANNELS, channelValue } from './channelValues';
+import type { RotationOrder } from '../rig/Rig';
 
-/** Channel values of one control while it is evaluated; one is reused for all of them. */
-export type ChannelBuffer = Float64Array;
-
-/** Reads all nine channels of a control into `buffer`; false, with the buffer of no use, when all read rest. */
-export function readChannels(control: ControlNode, pose: PoseValues, buffer: ChannelBuffer): boolean {
-  if (!Object.hasOwn(pose, control.name)) return false;
-  let moved = false;
-  for (let i = 0; i < 9; i += 1) {
-    const value = channelValue(control, CHANNELS[i] as (typeof CHANNELS)[number], pose);
-    buffer[i] = value;
-    if (value !== (i < 6 ? 0 : 1)) moved = true;
-  }
-  return moved;
-}
-
-/** Writes translate × rotate × scale of the channel values as a column-major matrix; nothing is allocated. */
-export function writeChannelMatrix(
-  order: ControlNode['order'],
-  values: ChannelBuffer,
-  out: Float64Array,
-): void {
-  const [i, j, k, parity] = ORDER_AXES[order];
-  const a = parity * RADIANS_PER_DEGREE * (values[3 + i] as number);
-  const b = parity * RADIANS_PER_DEGREE * (values[3 + j] as number);
-  const c = parity * RADIANS_PER_DEGREE * (values[3 + k] as number);
+/**
+ * Writes translate × rotate × scale of nine channel values (degrees, scene units, factors) as a column-major matrix;
+ * nothing is allocated.
+ */
+export function writeChannelMatrix(order: RotationOrder, values: Float64Array, out: Float64Array): void {
+  const axes = ORDER_AXES[order];
+  const i = axes[0];
+  const j = axes[1];
+  const k = axes[2];
+  const toRadians = axes[3] * RADIANS_PER_DEGREE;
+  const a = toRadians * (values[3 + i] as number);
+  const b = toRadians * (values[3 + j] as number);
+  const c = toRadians * (values[3 + k] as number);
   const sa = Math.sin(a);
   const ca = Math.cos(a);
   const sb = Math.sin(b);

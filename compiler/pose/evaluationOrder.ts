@@ -1,7 +1,8 @@
 import { invariant } from '../findings/invariant';
 import type { Rig } from '../rig/Rig';
+import { nodesRead, nodesWritten } from '../rig/solverNodes';
 
-/** `own`: parent and constraints of a node; `solve`: a solver turning the joints it steers. */
+/** `own`: parent, space, channels and constraints of a node; `solve`: a solver writing the nodes it steers. */
 export type EvaluationTask =
   | { readonly kind: 'own'; readonly node: number }
   | { readonly kind: 'solve'; readonly solver: number };
@@ -24,32 +25,40 @@ function collectNeeds(rig: Rig): readonly (readonly number[])[] {
     invariant(index !== undefined, `every reference of a rig names a node ("${name}")`);
     return index;
   };
-  // A steered joint is final only after its solver; everyone else waits for that, only the solver itself must not.
+  // A node that a solver writes is final only after it; everyone else waits for that, only the solver itself must not.
   const finalTask = rig.nodes.map((_, index) => index);
   rig.solvers.forEach((solver, index) => {
-    finalTask[indexOf(solver.start)] = rig.nodes.length + index;
-    finalTask[indexOf(solver.mid)] = rig.nodes.length + index;
+    for (const name of nodesWritten(solver)) finalTask[indexOf(name)] = rig.nodes.length + index;
   });
-  const startOfMid = new Map(rig.solvers.map((solver) => [solver.mid, solver.start]));
-  const final = (name: string): number => finalTask[indexOf(name)] as number;
+  const final = (index: number): number => finalTask[index] as number;
 
-  const needs: number[][] = rig.nodes.map((node) => {
+  const needs: number[][] = rig.nodes.map((node, index) => {
     if (node.parent === null) return [];
-    return [startOfMid.get(node.name) === node.parent ? indexOf(node.parent) : final(node.parent)];
+    const parent = indexOf(node.parent);
+    const sharesSolver = final(index) !== index && final(index) === final(parent);
+    return [sharesSolver ? parent : final(parent)];
   });
-  for (const constraint of rig.constraints) {
-    const target = needs[indexOf(constraint.target)] as number[];
-    for (const source of constraint.sources) target.push(final(source.node));
+  for (const { target, sources, ...constraint } of rig.constraints) {
+    const reads = needs[indexOf(target)] as number[];
+    for (const { node } of sources) reads.push(final(indexOf(node)));
+    if (constraint.kind === 'aim' && constraint.up !== null) reads.push(final(indexOf(constraint.up)));
+  }
+  for (const { control, sources } of rig.spaces) {
+    for (const node of sources) (needs[indexOf(control)] as number[]).push(final(indexOf(node)));
   }
   for (const solver of rig.solvers) {
-    needs.push([indexOf(solver.start), indexOf(solver.mid), final(solver.goal), final(solver.pole)]);
+    needs.push([
+      ...nodesWritten(solver).map(indexOf),
+      ...nodesRead(solver).map((name) => final(indexOf(name))),
+    ]);
   }
   return needs;
 }
 
 /**
  * Puts nodes and solvers in an order in which everything is evaluated after what it reads: parents, constraint
- * sources, and goal, pole and own pose of solved joints. The same rig always gives the same order.
+ * sources, spaces, and for solvers their goals and the own transforms of what they steer. The same rig always gives
+ * the same order.
  */
 export function orderEvaluation(rig: Rig): EvaluationOrder {
   const needs = collectNeeds(rig);

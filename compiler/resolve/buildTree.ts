@@ -167,6 +167,14 @@ export function buildTree(input: TreeInput): Tree {
     }
   };
 
+  const addGeometry = (): void => {
+    for (const { id, role, side, path } of linked.geometry) {
+      const container = containerOf(role, path);
+      const parent = containerNodeId(container);
+      drafts.set(id, { id, kind: 'geometry', role, side, container, parent, path });
+    }
+  };
+
   const addLinesAndNotes = (): void => {
     for (const line of linked.guideLines) {
       const container = containerOf('guide_line', line.path);
@@ -216,6 +224,7 @@ export function buildTree(input: TreeInput): Tree {
 
   addContainers();
   addJointsAndControls();
+  addGeometry();
   addLinesAndNotes();
   return { nodes: parentsFirst(drafts).map(resolveNode), seats };
 }

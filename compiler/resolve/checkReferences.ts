@@ -1,9 +1,14 @@
+import { amountsOf, referencesOf, rowOf } from '../expand/solverIds';
+import { CHANNELS } from '../expand/specifyControl';
 import type {
   ChainSpecification,
   ConstraintSpecification,
   ControlSpecification,
+  DriverSpecification,
   ExpandedRecipe,
   GuideLineSpecification,
+  ShapeSpecification,
+  SkinSpecification,
   SolverSpecification,
   Specification,
 } from '../expand/types';
@@ -15,7 +20,15 @@ import type { Things } from './things';
 /** The parts of an expanded recipe whose references all lead somewhere. */
 export type LinkedRecipe = Pick<
   ExpandedRecipe,
-  'chains' | 'controls' | 'solvers' | 'constraints' | 'guideLines'
+  | 'chains'
+  | 'controls'
+  | 'solvers'
+  | 'constraints'
+  | 'drivers'
+  | 'geometry'
+  | 'skins'
+  | 'shapes'
+  | 'guideLines'
 >;
 
 /**
@@ -75,23 +88,66 @@ export function checkReferences(
       ? specification
       : { ...specification, parent: null };
 
+  const reportApart = (solver: SolverSpecification, parent: string, child: string): void => {
+    const span = spanOf(solver, solver.kind === 'foot_roll' ? 'ankle' : 'joints');
+    context.findings.report(resolveFindings, 'solver-joints-apart', span, { parent, child });
+  };
+
+  /** Whether each joint of a solver's row is the next one's parent, and twist joints hang on their bone. */
+  const isConnected = (solver: SolverSpecification): boolean => {
+    const row = rowOf(solver);
+    const broken = row.findIndex(
+      (child, index) => index > 0 && things.joints.get(child)?.before !== row[index - 1],
+    );
+    if (broken > 0) reportApart(solver, row[broken - 1] ?? '', row[broken] ?? '');
+    if (solver.kind !== 'twist') return broken < 0;
+    const parentOf = (id: string): string | null => {
+      const place = things.joints.get(id);
+      return place?.before ?? place?.chain.parent ?? null;
+    };
+    const loose = [...solver.joints, solver.tip].find((id) => parentOf(id) !== solver.bone);
+    if (loose !== undefined) reportApart(solver, solver.bone, loose);
+    return loose === undefined;
+  };
+
   const isSolverSound = (solver: SolverSpecification): boolean => {
-    const found = solver.joints.map((id, index) => isJoint(solver, id, ['joints', index]));
-    const goal = isControl(solver, solver.goal, ['goal']);
-    const pole = isControl(solver, solver.pole, ['pole']);
-    const blend = isAttribute(solver, solver.blend, ['blend']);
-    if (!found.every(Boolean) || !goal || !pole || !blend) return false;
-    const [start, mid, end] = solver.joints;
-    const broken = [
-      [start, mid],
-      [mid, end],
-    ].find(([parent, child]) => things.joints.get(child ?? '')?.before !== parent);
-    if (!broken) return true;
-    context.findings.report(resolveFindings, 'solver-joints-apart', spanOf(solver, 'joints'), {
-      parent: broken[0] ?? '',
-      child: broken[1] ?? '',
-    });
+    const found = referencesOf(solver).map(({ id, wants, keys }) =>
+      wants === 'joint' ? isJoint(solver, id, keys) : isThing(solver, id, keys),
+    );
+    const amounts = amountsOf(solver).map(([key, amount]) => isAttribute(solver, amount, [key]));
+    return found.every(Boolean) && amounts.every(Boolean) && isConnected(solver);
+  };
+
+  const isDriverSound = (driver: DriverSpecification): boolean => {
+    const target = isThing(driver, driver.target, ['target']);
+    const isChannel = CHANNELS.some((channel) => channel === driver.input);
+    const input = isChannel
+      ? isControl(driver, driver.control, ['input'])
+      : isAttribute(driver, `${driver.control}.${driver.input}`, ['input']);
+    return target && input;
+  };
+
+  const geometries = new Set(recipe.geometry.map(({ id }) => id));
+  const isGeometry = (specification: Specification, id: string): boolean => {
+    if (geometries.has(id)) return true;
+    reportUnknown(context, spanOf(specification, 'geometry'), 'mesh', id, geometries);
     return false;
+  };
+
+  const chainIds = new Set(recipe.chains.map(({ id }) => id));
+  const isSkinSound = (skin: SkinSpecification): boolean => {
+    const joints = skin.joints.map((id, index) => {
+      if (chainIds.has(id) || things.joints.has(id)) return true;
+      const candidates = [...chainIds, ...things.joints.keys()];
+      reportUnknown(context, spanOf(skin, 'joints', index), 'joint or chain', id, candidates);
+      return false;
+    });
+    return isGeometry(skin, skin.geometry) && joints.every(Boolean);
+  };
+
+  const isShapeSound = (shape: ShapeSpecification): boolean => {
+    const geometry = isGeometry(shape, shape.geometry);
+    return isAttribute(shape, shape.weight, ['weight']) && geometry;
   };
 
   const isConstraintSound = (constraint: ConstraintSpecification): boolean => {
@@ -118,7 +174,9 @@ export function checkReferences(
       });
       return false;
     }
-    return target && sources.every(Boolean) && blend;
+    const up = constraint.aim?.up ?? null;
+    const isUpright = up === null || isThing(constraint, up, ['up']);
+    return target && sources.every(Boolean) && blend && isUpright;
   };
 
   const isGuideLineSound = (line: GuideLineSpecification): boolean => {
@@ -131,6 +189,10 @@ export function checkReferences(
     if (control.align !== null && !isPoisonedReference(context, control.align)) {
       isThing(control, control.align, ['align']);
     }
+    control.spaces.forEach((id, index) => {
+      if (id === control.parent) return;
+      isThing(control, id, ['spaces', control.spaces[0] === control.parent ? index - 1 : index]);
+    });
     if (control.place.kind === 'pole') {
       control.place.joints.forEach((id, index) => {
         isJoint(control, id, ['pole_of', 'joints', index]);
@@ -147,6 +209,10 @@ export function checkReferences(
       .filter((control) => things.controls.get(control.id) === control)
       .map(withParent),
     solvers: recipe.solvers.filter(isSolverSound),
+    drivers: recipe.drivers.filter(isDriverSound),
+    geometry: recipe.geometry,
+    skins: recipe.skins.filter(isSkinSound),
+    shapes: recipe.shapes.filter(isShapeSound),
     constraints: recipe.constraints.filter(isConstraintSound),
     guideLines: recipe.guideLines.filter(isGuideLineSound),
   };

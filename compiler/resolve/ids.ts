@@ -18,3 +18,16 @@ export function seatId(occupant: string): string {
 export function seatFollowId(seat: string): string {
   return `${seat}_follow`;
 }
+
+/** Id of the link that lets an animator choose a control's space. */
+export function spaceId(control: string): string {
+  return `${control}_space`;
+}
+
+/** Collections of what links nodes; an id is one of its own in each. */
+export type LinkCollection = 'constraints' | 'solvers' | 'spaces' | 'drivers' | 'skins' | 'shapes';
+
+/** Key of a link's name. */
+export function linkKey(collection: LinkCollection, id: string): string {
+  return `${collection}/${id}`;
+}

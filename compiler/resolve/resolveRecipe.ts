@@ -1,10 +1,10 @@
-import type { ExpandedRecipe } from '../expand/types';
+import type { ExpandedRecipe, Specification } from '../expand/types';
 import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import { buildTree } from './buildTree';
 import { checkParentRings } from './checkParentRings';
 import { checkReferences } from './checkReferences';
 import { findCarrier } from './findCarrier';
-import { seatFollowId } from './ids';
+import { type LinkCollection, linkKey, seatFollowId, spaceId } from './ids';
 import { NodeNamer } from './NodeNamer';
 import type { ResolveContext } from './Reporter';
 import { resolveContainers, resolveRoles } from './resolveContainers';
@@ -37,15 +37,26 @@ export function resolveRecipe(
   });
   const nodeById = new Map(nodes.map((node) => [node.id, node]));
   const linkNames = new Map<string, string>();
-  for (const { id, side, path } of linked.constraints)
-    linkNames.set(id, namer.name({ id, role: 'aid', side, path }));
-  for (const { id, side, path } of linked.solvers)
-    linkNames.set(id, namer.name({ id, role: 'solver', side, path }));
+  const nameLinks = (collection: LinkCollection, links: readonly Specification[], role: string): void => {
+    for (const { id, side, path } of links) {
+      linkNames.set(linkKey(collection, id), namer.name({ id, role, side, path }));
+    }
+  };
+  nameLinks('constraints', linked.constraints, 'aid');
+  nameLinks('solvers', linked.solvers, 'solver');
+  nameLinks('drivers', linked.drivers, 'aid');
+  nameLinks('skins', linked.skins, 'aid');
+  nameLinks('shapes', linked.shapes, 'shape');
+  for (const { id, side, path, spaces } of linked.controls) {
+    if (spaces.length < 2) continue;
+    const space = spaceId(id);
+    linkNames.set(linkKey('spaces', space), namer.name({ id: space, role: 'aid', side, path }));
+  }
   for (const { id, occupant } of seats) {
     const node = nodeById.get(occupant);
     const follow = seatFollowId(id);
     linkNames.set(
-      follow,
+      linkKey('constraints', follow),
       namer.name({ id: follow, role: 'aid', side: node?.side ?? 'centre', path: node?.path ?? [] }),
     );
   }

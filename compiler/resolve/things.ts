@@ -54,6 +54,7 @@ export function collectThings(recipe: ExpandedRecipe, context: ResolveContext): 
     if (claim(control.id, 'control', control.path)) controls.set(control.id, control);
   }
   for (const line of recipe.guideLines) claim(line.id, 'guide line', line.path);
+  for (const mesh of recipe.geometry) claim(mesh.id, 'mesh', mesh.path);
 
   return {
     joints,

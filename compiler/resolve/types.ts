@@ -31,7 +31,7 @@ export interface ResolvedRole {
 export interface ResolvedNode {
   readonly id: string;
   readonly name: string;
-  readonly kind: 'group' | 'joint' | 'control' | 'line' | 'note';
+  readonly kind: 'group' | 'joint' | 'control' | 'line' | 'note' | 'geometry';
   /** Node id; null for the rig's own group. */
   readonly parent: string | null;
   readonly container: string;
@@ -59,6 +59,6 @@ export interface ResolvedRecipe extends ExpandedRecipe {
   /** Parents come before children. */
   readonly nodes: readonly ResolvedNode[];
   readonly nodeById: ReadonlyMap<string, ResolvedNode>;
-  /** Names of constraints and solvers, by id. */
+  /** Names of what links nodes (constraints, spaces, drivers, solvers, skins, shapes), by `linkKey`. */
   readonly linkNames: ReadonlyMap<string, string>;
 }

@@ -63,9 +63,18 @@ export interface GroupNode extends NodeBase {
   readonly kind: 'group';
 }
 
+export type TurnChannel = 'rx' | 'ry' | 'rz';
+
+export interface ValueRange {
+  readonly min: number | null;
+  readonly max: number | null;
+}
+
 export interface JointNode extends NodeBase {
   readonly kind: 'joint';
   readonly order: RotationOrder;
+  /** How far the joint is meant to turn from rest, in degrees; controls enforce it, evaluation does not. */
+  readonly limits: Readonly<Partial<Record<TurnChannel, ValueRange>>>;
 }
 
 export interface ChannelRule {
@@ -79,6 +88,10 @@ export interface RigAttribute {
   readonly default: number;
   readonly min: number | null;
   readonly max: number | null;
+  /** Words for the values 0, 1, 2 …; null for a plain number. */
+  readonly labels: readonly string[] | null;
+  /** What it does, for the animator. */
+  readonly note: string | null;
 }
 
 export interface ControlNode extends NodeBase {
@@ -106,20 +119,21 @@ export interface NoteNode extends NodeBase {
   readonly entries: readonly { readonly key: string; readonly value: string | number | boolean }[];
 }
 
-export type RigNode = GroupNode | JointNode | ControlNode | LineNode | NoteNode;
+/** Stands for a mesh of the model; draws nothing by itself. */
+export interface GeometryNode extends NodeBase {
+  readonly kind: 'geometry';
+  /** Name of the mesh in the model's file. */
+  readonly mesh: string;
+}
+
+export type RigNode = GroupNode | JointNode | ControlNode | LineNode | NoteNode | GeometryNode;
 
 /** A number, or the value of `control`.`attribute`. */
 export type NumberOrAttribute = number | { readonly control: string; readonly attribute: string };
 
-/**
- * Replaces part of the target's world transform by the weighted sources'. `parent`: everything; `point`:
- * position; `orient`: rotation; `scale`: scale. With `keepOffset` each source carries the target's rest
- * transform relative to its own, so nothing moves at rest.
- */
-export interface RigConstraint {
+interface ConstraintBase {
   readonly id: string;
   readonly name: string;
-  readonly kind: 'parent' | 'point' | 'orient' | 'scale';
   readonly target: string;
   readonly sources: readonly { readonly node: string; readonly weight: number }[];
   /** Two sources only: the first weighs `blend`, the second 1 − `blend`, in place of their weights. */
@@ -127,21 +141,171 @@ export interface RigConstraint {
   readonly keepOffset: boolean;
 }
 
-/** Closed-form inverse kinematics of three joints in a row. */
-export interface TwoBoneSolver {
-  readonly kind: 'two_bone';
+/**
+ * Replaces part of the target's world transform by the weighted sources'. `parent`: everything; `point`:
+ * position; `orient`: rotation; `scale`: scale. With `keepOffset` each source carries the target's rest
+ * transform relative to its own, so nothing moves at rest.
+ */
+export interface FollowConstraint extends ConstraintBase {
+  readonly kind: 'parent' | 'point' | 'orient' | 'scale';
+}
+
+/** Turns the target so that one of its axes points at the weighted sources. */
+export interface AimConstraint extends ConstraintBase {
+  readonly kind: 'aim';
+  /** Axis of the target that points; with `keepOffset`, the direction that it has at rest is used instead. */
+  readonly axis: Axis;
+  readonly upAxis: Axis;
+  /** Node whose rotation carries the up axis; null turns the target along the shortest arc. */
+  readonly up: string | null;
+}
+
+export type RigConstraint = FollowConstraint | AimConstraint;
+
+interface SolverBase {
   readonly id: string;
   readonly name: string;
-  readonly start: string;
-  readonly mid: string;
-  readonly end: string;
+}
+
+/** What solvers share that make a chain's end meet a goal. */
+interface ReachBase extends SolverBase {
   readonly goal: string;
   readonly pole: string;
   /** 0: the joints' own rotations; 1: the solved ones; between: shortest arc on local rotations. */
   readonly blend: NumberOrAttribute;
+  /** 0: bones keep their lengths; 1: they grow until the end meets the goal, up to `stretchLimit`. */
+  readonly stretch: NumberOrAttribute;
+  /** Greatest factor on the bones' length; 1 or more. */
+  readonly stretchLimit: number;
+  /** Part of the chain's length over which the end slows down before full reach; 0 to 1. */
+  readonly soft: number;
+  /** Degrees by which the bend is swung about the line from start to goal. */
+  readonly swing: NumberOrAttribute;
 }
 
-export type RigSolver = TwoBoneSolver;
+/** Closed-form inverse kinematics of three joints in a row. */
+export interface TwoBoneSolver extends ReachBase {
+  readonly kind: 'two_bone';
+  readonly start: string;
+  readonly mid: string;
+  readonly end: string;
+}
+
+/** Folds four or more joints in a row evenly until the last meets the goal. */
+export interface ReachSolver extends ReachBase {
+  readonly kind: 'reach';
+  readonly joints: readonly string[];
+  /** −1 to 1: moves the fold from the last bends to the first. */
+  readonly bias: NumberOrAttribute;
+}
+
+/** Lays joints along a curve through controls. */
+export interface SplineSolver extends SolverBase {
+  readonly kind: 'spline';
+  readonly joints: readonly string[];
+  readonly controls: readonly string[];
+  /** 0: joints keep their distances; 1: they spread over the whole curve. */
+  readonly stretch: NumberOrAttribute;
+  /** 0 to 1: how far joints thicken and thin to keep the volume. */
+  readonly volume: NumberOrAttribute;
+}
+
+/** Spreads the twist of `driver` against `base` about a bone over joints that lie along it. */
+export interface TwistSolver extends SolverBase {
+  readonly kind: 'twist';
+  readonly joints: readonly string[];
+  /** Share of the twist that each joint takes. */
+  readonly shares: readonly number[];
+  /** The bone's joint, parent of every twist joint, and the joint at its other end. */
+  readonly bone: string;
+  readonly tip: string;
+  readonly base: string;
+  readonly driver: string;
+}
+
+/** Turns one joint so that it points at a goal. */
+export interface AimSolver extends SolverBase {
+  readonly kind: 'aim';
+  readonly joint: string;
+  readonly goal: string;
+  /** Node whose position says which way is up; null turns the joint along the shortest arc. */
+  readonly pole: string | null;
+  readonly blend: NumberOrAttribute;
+}
+
+/** Rolls and banks a foot over points of its sole. */
+export interface FootRollSolver extends SolverBase {
+  readonly kind: 'foot_roll';
+  readonly foot: string;
+  /** Moved by every pivot. */
+  readonly ankle: string;
+  /** Moved by every pivot but the ball. */
+  readonly toes: string;
+  /** Points in the rest frame of `foot`. */
+  readonly heel: Vec3;
+  readonly ball: Vec3;
+  readonly toe: Vec3;
+  readonly inner: Vec3;
+  readonly outer: Vec3;
+  /** Unit directions in the rest frame of `foot`: positive roll turns about `hinge`, positive bank about `forward`. */
+  readonly hinge: Vec3;
+  readonly forward: Vec3;
+  /** Degrees. */
+  readonly roll: NumberOrAttribute;
+  readonly bank: NumberOrAttribute;
+  readonly break: NumberOrAttribute;
+}
+
+export type RigSolver = TwoBoneSolver | ReachSolver | SplineSolver | TwistSolver | AimSolver | FootRollSolver;
+
+/** Lets the animator choose what carries a control. */
+export interface RigSpace {
+  readonly id: string;
+  readonly name: string;
+  readonly control: string;
+  /** Attribute of the control whose value, rounded, picks a source by its place in the list. */
+  readonly attribute: string;
+  readonly sources: readonly string[];
+  /** `all`: the source carries the control; `turn`: it only turns it. */
+  readonly follow: 'all' | 'turn';
+}
+
+/** Adds a value that follows an attribute or channel of a control to a channel of any node. */
+export interface RigDriver {
+  readonly id: string;
+  readonly name: string;
+  readonly control: string;
+  /** An attribute or a channel of the control. */
+  readonly input: string;
+  readonly target: string;
+  readonly channel: Channel;
+  /** Keys of the curve, inputs ascending. */
+  readonly inputs: readonly number[];
+  readonly outputs: readonly number[];
+  readonly curve: 'linear' | 'smooth';
+  /** `hold`: the end keys' outputs beyond them; `extend`: the end pieces run on straight. */
+  readonly beyond: 'hold' | 'extend';
+}
+
+/** Which joints deform a mesh. */
+export interface RigSkin {
+  readonly id: string;
+  readonly name: string;
+  readonly geometry: string;
+  readonly joints: readonly string[];
+  /** Joints that a vertex may follow at most. */
+  readonly influences: number;
+}
+
+/** A morph target of a mesh with its weight. */
+export interface RigShape {
+  readonly id: string;
+  readonly name: string;
+  readonly geometry: string;
+  /** Name of the morph target in the model's file. */
+  readonly morph: string;
+  readonly weight: NumberOrAttribute;
+}
 
 export interface Rig {
   readonly scene: RigScene;
@@ -149,6 +313,10 @@ export interface Rig {
   readonly nodes: readonly RigNode[];
   readonly constraints: readonly RigConstraint[];
   readonly solvers: readonly RigSolver[];
+  readonly spaces: readonly RigSpace[];
+  readonly drivers: readonly RigDriver[];
+  readonly skins: readonly RigSkin[];
+  readonly shapes: readonly RigShape[];
 }
 
 /** Control values by control name: degrees, scene units, attribute values. Missing ones read their default. */

@@ -1,13 +1,24 @@
-import type { Channel, ChannelRule, ControlNode, NoteNode, RigAttribute, RigNode } from '../rig/Rig';
+import type {
+  Channel,
+  ChannelRule,
+  ControlNode,
+  JointNode,
+  NoteNode,
+  RigAttribute,
+  RigNode,
+  TurnChannel,
+  ValueRange,
+} from '../rig/Rig';
 import type { StepOf } from './Step';
 
-export type NodeStep = StepOf<'group' | 'joint' | 'control' | 'note' | 'line'>;
+export type NodeStep = StepOf<'group' | 'joint' | 'control' | 'note' | 'line' | 'geometry'>;
 
 /** A node while later steps may still add to it. */
 export interface NodeDraft {
   readonly step: NodeStep;
   readonly attributes: RigAttribute[];
   readonly channels: Map<Channel, ChannelRule>;
+  readonly limits: Map<TurnChannel, ValueRange>;
   readonly limited: Set<Channel>;
   readonly entries: NoteNode['entries'][number][];
   shown: boolean;
@@ -22,6 +33,7 @@ export function draftNode(step: NodeStep): NodeDraft {
     step,
     attributes: [],
     channels: new Map(),
+    limits: new Map(),
     limited: new Set(),
     entries: [],
     shown: true,
@@ -39,7 +51,12 @@ export function finishNode(draft: NodeDraft): RigNode {
     case 'group':
       return { ...base, kind: 'group' };
     case 'joint':
-      return { ...base, kind: 'joint', order: step.values.order };
+      return {
+        ...base,
+        kind: 'joint',
+        order: step.values.order,
+        limits: Object.fromEntries(draft.limits) as JointNode['limits'],
+      };
     case 'control': {
       const { order, shape, size } = step.values;
       const channels: ControlNode['channels'] = Object.fromEntries(draft.channels);
@@ -51,6 +68,8 @@ export function finishNode(draft: NodeDraft): RigNode {
       const { from, to, style } = step.values;
       return { ...base, kind: 'line', from, to, style };
     }
+    case 'geometry':
+      return { ...base, kind: 'geometry', mesh: step.values.mesh };
     default:
       return step satisfies never;
   }

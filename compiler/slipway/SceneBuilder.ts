@@ -1,5 +1,5 @@
 import type { FindingList } from '../findings/FindingList';
-import type { Rig, RigConstraint, RigScene, RigSolver } from '../rig/Rig';
+import type { Rig, RigScene, TurnChannel } from '../rig/Rig';
 import type { Span } from '../source/SourceText';
 import { checkRange, checkTurn, type RangedStep } from './checkNumbers';
 import { slipwayFindings } from './findings';
@@ -7,6 +7,9 @@ import { draftNode, finishNode, type NodeDraft, type NodeStep } from './NodeDraf
 import type { PlacedStep } from './readStep';
 import type { SceneNames } from './SceneNames';
 import type { Step, StepOf } from './Step';
+
+/** What links the nodes of a rig. */
+export type RigLinks = Pick<Rig, 'constraints' | 'solvers' | 'spaces' | 'drivers' | 'skins' | 'shapes'>;
 
 type Placed<V extends Step['verb']> = PlacedStep<StepOf<V>>;
 
@@ -48,20 +51,28 @@ export class SceneBuilder {
   }
 
   addAttribute(placed: Placed<'attr'>): void {
-    const { name, default: initial, min, max } = placed.step.values;
+    const { name, default: initial, min, max, labels, note } = placed.step.values;
     const inRange = checkRange(placed as PlacedStep<RangedStep>, this.#findings);
     const draft = this.#draftOf(placed, 'control');
     if (draft === undefined || !inRange) return;
     if (draft.attributes.some((attribute) => attribute.name === name)) {
       this.#reportRepeated(placed, `The attribute "${name}"`, placed.spanOf('name'));
-    } else draft.attributes.push({ name, default: initial, min, max });
+    } else draft.attributes.push({ name, default: initial, min, max, labels, note });
   }
 
   limitChannel(placed: Placed<'limit'>): void {
     const { channel, min, max } = placed.step.values;
     const inRange = checkRange(placed as PlacedStep<RangedStep>, this.#findings);
-    const draft = this.#draftOf(placed, 'control');
+    const draft = this.#draftOf(placed, null);
     if (draft === undefined || !inRange) return;
+    if (draft.step.verb === 'joint' && isTurn(channel)) {
+      if (draft.limits.has(channel)) {
+        this.#reportRepeated(placed, `The limit of "${channel}"`, placed.spanOf('channel'));
+      } else draft.limits.set(channel, { min, max });
+      return;
+    }
+    // Anything but a control, or a joint's turn, has no such channel.
+    if (this.#draftOf(placed, 'control') === undefined) return;
     if (draft.limited.has(channel)) {
       this.#reportRepeated(placed, `The limit of "${channel}"`, placed.spanOf('channel'));
       return;
@@ -109,9 +120,10 @@ export class SceneBuilder {
   }
 
   /** The rig of all steps carried out; null without a scene. Sound only when nothing was reported. */
-  finish(constraints: readonly RigConstraint[], solvers: readonly RigSolver[]): Rig | null {
+  finish({ constraints, solvers, spaces, drivers, skins, shapes }: RigLinks): Rig | null {
     if (this.#scene === null) return null;
-    return { scene: this.#scene, nodes: [...this.#drafts.values()].map(finishNode), constraints, solvers };
+    const nodes = [...this.#drafts.values()].map(finishNode);
+    return { scene: this.#scene, nodes, constraints, solvers, spaces, drivers, skins, shapes };
   }
 
   #isNode(placed: PlacedStep, key: string, name: string): boolean {
@@ -127,4 +139,8 @@ export class SceneBuilder {
     const parameters = { what, name: placed.step.name };
     this.#findings.report(slipwayFindings, 'script-statement-repeated', span, parameters);
   }
+}
+
+function isTurn(channel: string): channel is TurnChannel {
+  return channel === 'rx' || channel === 'ry' || channel === 'rz';
 }

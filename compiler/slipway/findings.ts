@@ -122,6 +122,12 @@ export const slipwayFindings = declareFindings({
     message: '{fact}',
     help: 'Give one weight of at least 0 for each source; a blend needs exactly two sources.',
   },
+  'script-link-wrong': {
+    severity: 'error',
+    summary: 'The lists or numbers of a link do not fit together.',
+    message: '{fact}',
+    help: 'Compare the line with the table of its verb in the Slipway reference.',
+  },
   'script-joints-not-in-row': {
     severity: 'error',
     summary: 'The three joints of a solver do not hang below one another.',

@@ -1,4 +1,4 @@
-import type { Channel } from '../rig/Rig';
+import type { Channel, NumberOrAttribute } from '../rig/Rig';
 import type { Value } from './Value';
 import { CHANNEL_NAMES, type KeyKind, type ValueKinds } from './verbs';
 
@@ -39,6 +39,13 @@ function readChannel(value: Value): Channel | undefined {
   return value.kind === 'word' ? CHANNEL_NAMES.find((channel) => channel === value.value) : undefined;
 }
 
+function readAmount(value: Value): NumberOrAttribute | undefined {
+  if (value.kind !== 'attribute') return readNumber(value);
+  const control = readText(value.control);
+  const attribute = readText(value.attribute);
+  return control === undefined || attribute === undefined ? undefined : { control, attribute };
+}
+
 const READERS: Readers = {
   text: readText,
   number: readNumber,
@@ -49,13 +56,11 @@ const READERS: Readers = {
   vector: (value) => readNumbers(value, 3) as ValueKinds['vector'] | undefined,
   quaternion: (value) => readNumbers(value, 4) as ValueKinds['quaternion'] | undefined,
   weights: (value) => readList(value, readNumber),
+  numbers: (value) => readList(value, readNumber),
+  texts: (value) => readList(value, readText),
   channels: (value) => readList(value, readChannel),
-  blend: (value) => {
-    if (value.kind !== 'attribute') return readNumber(value);
-    const control = readText(value.control);
-    const attribute = readText(value.attribute);
-    return control === undefined || attribute === undefined ? undefined : { control, attribute };
-  },
+  blend: readAmount,
+  amount: readAmount,
   scalar: (value) => readText(value) ?? readNumber(value) ?? readFlag(value),
 };
 
@@ -69,8 +74,11 @@ const DESCRIPTIONS: { readonly [K in keyof ValueKinds]: string } = {
   vector: 'three numbers in parentheses',
   quaternion: 'four numbers in parentheses',
   weights: 'numbers in parentheses',
+  numbers: 'numbers in parentheses',
+  texts: 'texts in quotes between parentheses',
   channels: 'channels in parentheses',
   blend: 'a number or attr("control" "attribute")',
+  amount: 'a number or attr("control" "attribute")',
   scalar: 'a text in quotes, a number, true or false',
 };
 

@@ -63,6 +63,7 @@ function runStep(placed: PlacedStep, scene: SceneBuilder, links: LinkBuilder): v
     case 'control':
     case 'note':
     case 'line':
+    case 'geometry':
       scene.addNode(as(step));
       break;
     case 'attr':
@@ -83,7 +84,24 @@ function runStep(placed: PlacedStep, scene: SceneBuilder, links: LinkBuilder): v
     case 'constrain':
       links.constrain(as(step));
       break;
-    case 'solve':
+    case 'space':
+      links.space(as(step));
+      break;
+    case 'drive':
+      links.drive(as(step));
+      break;
+    case 'skin':
+      links.skin(as(step));
+      break;
+    case 'shape':
+      links.shape(as(step));
+      break;
+    case 'two_bone':
+    case 'reach':
+    case 'spline':
+    case 'twist':
+    case 'aim':
+    case 'foot_roll':
       links.solve(as(step));
       break;
     default:
@@ -132,7 +150,7 @@ export function runScript(source: SourceText): ScriptRun {
     if (placed !== null) runStep(placed, scene, links);
     if (findings.all.length > MAXIMUM_FINDINGS) break;
   }
-  const rig = scene.finish(links.constraints, links.solvers);
+  const rig = scene.finish(links);
   if (!findings.hasErrors && rig !== null) checkRing(rig, names, first, findings);
   return { rig: findings.hasErrors ? null : rig, findings: finishFindings(findings.all) };
 }

@@ -6,6 +6,8 @@ import type {
   NumberOrAttribute,
   Quat,
   RigConstraint,
+  RigDriver,
+  RigSpace,
   RotationOrder,
   ShapeName,
   Side,
@@ -20,8 +22,10 @@ const UNITS = words<LengthUnit>('mm', 'cm', 'm');
 const SIDES = words<Side>('left', 'right', 'centre');
 const ORDERS = words<RotationOrder>('xyz', 'xzy', 'yxz', 'yzx', 'zxy', 'zyx');
 const STYLES = words<LineStyle>('dotted', 'dashed', 'solid');
-const KINDS = words<RigConstraint['kind']>('parent', 'point', 'orient', 'scale');
-const SOLVERS = words('two_bone');
+const KINDS = words<RigConstraint['kind']>('parent', 'point', 'orient', 'scale', 'aim');
+const FOLLOWS = words<RigSpace['follow']>('all', 'turn');
+const CURVES = words<RigDriver['curve']>('linear', 'smooth');
+const BEYONDS = words<RigDriver['beyond']>('hold', 'extend');
 
 export const SHAPE_NAMES = words<ShapeName>(
   'ring',
@@ -49,8 +53,13 @@ export interface ValueKinds {
   readonly vector: Vec3;
   readonly quaternion: Quat;
   readonly weights: readonly number[];
+  readonly numbers: readonly number[];
+  readonly texts: readonly string[];
   readonly channels: readonly Channel[];
+  /** A number, or an attribute that gives one between 0 and 1. */
   readonly blend: NumberOrAttribute;
+  /** A number, or an attribute that gives one. */
+  readonly amount: NumberOrAttribute;
   readonly scalar: string | number | boolean;
 }
 
@@ -79,6 +88,17 @@ const NODE_KEYS = {
   side: { kind: SIDES },
   at: { kind: 'vector' },
   turn: { kind: 'quaternion' },
+} as const;
+
+/** Keys of the solvers that make the end of a chain meet a goal. */
+const REACH_KEYS = {
+  goal: { kind: 'reference' },
+  pole: { kind: 'reference' },
+  blend: { kind: 'blend' },
+  stretch: { kind: 'blend' },
+  stretch_limit: { kind: 'number' },
+  soft: { kind: 'number' },
+  swing: { kind: 'amount' },
 } as const;
 
 const RANGE_KEYS = {
@@ -122,13 +142,24 @@ export const VERBS = {
     name: 'new',
     keys: { ...NODE_KEYS, from: { kind: 'reference' }, to: { kind: 'reference' }, style: { kind: STYLES } },
   },
+  geometry: {
+    summary: 'Makes the node that stands for a mesh of the model.',
+    name: 'new',
+    keys: { ...NODE_KEYS, mesh: { kind: 'text' } },
+  },
   attr: {
     summary: 'Adds a number of its own to a control.',
     name: 'existing',
-    keys: { name: { kind: 'text' }, default: { kind: 'number' }, ...RANGE_KEYS },
+    keys: {
+      name: { kind: 'text' },
+      default: { kind: 'number' },
+      ...RANGE_KEYS,
+      labels: { kind: 'texts', optional: true },
+      note: { kind: 'text', optional: true },
+    },
   },
   limit: {
-    summary: 'Limits one channel of a control.',
+    summary: 'Limits one channel of a control, or says how far a joint is meant to turn.',
     name: 'existing',
     keys: { channel: { kind: CHANNEL_NAMES }, ...RANGE_KEYS },
   },
@@ -158,22 +189,145 @@ export const VERBS = {
       weights: { kind: 'weights' },
       keep_offset: { kind: 'flag' },
       blend: { kind: 'blend', optional: true },
+      axis: { kind: AXES, optional: true },
+      up_axis: { kind: AXES, optional: true },
+      up: { kind: 'reference', optional: true },
     },
   },
-  solve: {
+  space: {
+    summary: 'Lets an attribute choose what carries a control.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      control: { kind: 'reference' },
+      attribute: { kind: 'text' },
+      sources: { kind: 'references' },
+      follow: { kind: FOLLOWS },
+    },
+  },
+  drive: {
+    summary: 'Adds a value that follows a control to a channel of a node.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      control: { kind: 'reference' },
+      input: { kind: 'text' },
+      target: { kind: 'reference' },
+      channel: { kind: CHANNEL_NAMES },
+      inputs: { kind: 'numbers' },
+      outputs: { kind: 'numbers' },
+      curve: { kind: CURVES },
+      beyond: { kind: BEYONDS },
+    },
+  },
+  two_bone: {
     summary: 'Makes three joints reach for a goal.',
     name: 'new',
     keys: {
       id: { kind: 'text' },
-      kind: { kind: SOLVERS },
       start: { kind: 'reference' },
       mid: { kind: 'reference' },
       end: { kind: 'reference' },
+      ...REACH_KEYS,
+    },
+  },
+  reach: {
+    summary: 'Makes four or more joints reach for a goal, folding evenly.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      joints: { kind: 'references' },
+      ...REACH_KEYS,
+      bias: { kind: 'amount' },
+    },
+  },
+  spline: {
+    summary: 'Lays joints along a curve through controls.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      joints: { kind: 'references' },
+      controls: { kind: 'references' },
+      stretch: { kind: 'blend' },
+      volume: { kind: 'blend' },
+    },
+  },
+  twist: {
+    summary: 'Spreads the twist of one joint over joints along a bone.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      joints: { kind: 'references' },
+      shares: { kind: 'numbers' },
+      bone: { kind: 'reference' },
+      tip: { kind: 'reference' },
+      base: { kind: 'reference' },
+      driver: { kind: 'reference' },
+    },
+  },
+  aim: {
+    summary: 'Makes one joint point at a goal.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      joint: { kind: 'reference' },
       goal: { kind: 'reference' },
-      pole: { kind: 'reference' },
+      pole: { kind: 'reference', optional: true },
       blend: { kind: 'blend' },
+    },
+  },
+  foot_roll: {
+    summary: 'Rolls and banks a foot over points of its sole.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      foot: { kind: 'reference' },
+      ankle: { kind: 'reference' },
+      toes: { kind: 'reference' },
+      heel: { kind: 'vector' },
+      ball: { kind: 'vector' },
+      toe: { kind: 'vector' },
+      inner: { kind: 'vector' },
+      outer: { kind: 'vector' },
+      hinge: { kind: 'vector' },
+      forward: { kind: 'vector' },
+      roll: { kind: 'amount' },
+      bank: { kind: 'amount' },
+      break: { kind: 'amount' },
+    },
+  },
+  skin: {
+    summary: 'Says which joints deform a mesh.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      geometry: { kind: 'reference' },
+      joints: { kind: 'references' },
+      influences: { kind: 'number' },
+    },
+  },
+  shape: {
+    summary: 'Says what weighs a morph target of a mesh.',
+    name: 'new',
+    keys: {
+      id: { kind: 'text' },
+      geometry: { kind: 'reference' },
+      morph: { kind: 'text' },
+      weight: { kind: 'blend' },
     },
   },
 } as const satisfies Readonly<Record<string, VerbRule>>;
 
 export type Verb = keyof typeof VERBS;
+
+/** The verbs that make solvers; each is the kind of the solver it makes. */
+export const SOLVER_VERBS = [
+  'two_bone',
+  'reach',
+  'spline',
+  'twist',
+  'aim',
+  'foot_roll',
+] as const satisfies Verb[];
+
+export type SolverVerb = (typeof SOLVER_VERBS)[number];

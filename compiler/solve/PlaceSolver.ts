@@ -1,8 +1,11 @@
-import type {
-  ChainSpecification,
-  ControlSpecification,
-  PlaceReference,
-  Specification,
+import {
+  type ChainSpecification,
+  type ControlSpecification,
+  type FootRollSpecification,
+  type PlaceReference,
+  SOLE_POINTS,
+  type SolePoint,
+  type Specification,
 } from '../expand/types';
 import { IDENTITY_QUAT } from '../math/quat';
 import { distance } from '../math/vec3';
@@ -14,8 +17,9 @@ import type { Path } from '../syntax/types';
 import { spreadByArcLength } from './arcLength';
 import { chainFrames } from './chainFrames';
 import { solveFindings } from './findings';
+import { footPoints } from './footPoints';
 import { polePosition } from './polePosition';
-import type { RestPlace } from './types';
+import type { FootPoints, RestPlace } from './types';
 
 type Owner = ChainSpecification | ControlSpecification;
 
@@ -25,6 +29,7 @@ type Owner = ChainSpecification | ControlSpecification;
  */
 export class PlaceSolver {
   readonly places = new Map<string, RestPlace>();
+  readonly feet = new Map<string, FootPoints>();
   readonly #chainOfJoint = new Map<string, ChainSpecification>();
   readonly #controls: ReadonlyMap<string, ControlSpecification>;
 
@@ -48,6 +53,18 @@ export class PlaceSolver {
       if ('jointIds' in owner) this.#placeChain(owner);
       else this.#placeControl(owner);
     }
+    for (const solver of this.recipe.solvers) if (solver.kind === 'foot_roll') this.#placeFoot(solver);
+  }
+
+  #placeFoot(solver: FootRollSpecification): void {
+    const foot = this.places.get(solver.foot);
+    const points = SOLE_POINTS.map((name) => this.#positionOf(solver.sole[name], solver, [name]));
+    if (!foot || points.some((point) => point === null)) return;
+    const sole = Object.fromEntries(
+      SOLE_POINTS.map((name, index) => [name, points[index]]),
+    ) as unknown as Readonly<Record<SolePoint, Vec3>>;
+    const placed = footPoints(solver, sole, foot, this.recipe.scene.up, this.context);
+    if (placed) this.feet.set(solver.id, placed);
   }
 
   /** The chains and controls that must be placed before this one. */

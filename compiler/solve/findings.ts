@@ -26,6 +26,12 @@ export const solveFindings = declareFindings({
     message: 'The bend direction of "{mid}" lies along the line from "{start}" to "{end}".',
     help: 'Give a direction that points sideways from the limb.',
   },
+  'sole-points-together': {
+    severity: 'error',
+    summary: 'Points of a sole do not lie apart.',
+    message: 'The points {first} and {second} of "{id}" do not lie apart along the floor.',
+    help: 'Heel and toe must lie apart from back to front, inner and outer from side to side.',
+  },
   'place-ring': {
     severity: 'error',
     summary: 'Places depend on one another in a ring.',

@@ -8,7 +8,7 @@ import type { SolvedRecipe } from './types';
 export function solveRecipe(recipe: ResolvedRecipe, context: ResolveContext): SolvedRecipe {
   const solver = new PlaceSolver(recipe, context);
   solver.solveAll();
-  const { places } = solver;
+  const { places, feet } = solver;
   const extent = measureExtent(
     [...places.values()].map(({ position }) => position),
     recipe.scene.up,
@@ -18,5 +18,5 @@ export function solveRecipe(recipe: ResolvedRecipe, context: ResolveContext): So
     const place = places.get(occupant);
     if (place) places.set(id, place);
   }
-  return { places, sizes };
+  return { places, feet, sizes };
 }

@@ -19,7 +19,7 @@ function base(name: string, parent: string | null, at: Vec3) {
 }
 
 function joint(name: string, parent: string | null, at: Vec3): JointNode {
-  return { ...base(name, parent, at), kind: 'joint', order: 'xyz' };
+  return { ...base(name, parent, at), kind: 'joint', order: 'xyz', limits: {} };
 }
 
 function control(name: string, parent: string | null, at: Vec3): ControlNode {
@@ -78,7 +78,21 @@ export function makeLargeRig(): { readonly rig: Rig; readonly pose: PoseValues }
       joint(end, mid, [0, -20, -3]),
     );
     const [goal, pole] = [`limb_${limb}_goal`, `limb_${limb}_pole`];
-    solvers.push({ kind: 'two_bone', id: start, name: `${start}_ik`, start, mid, end, goal, pole, blend: 1 });
+    solvers.push({
+      kind: 'two_bone',
+      id: start,
+      name: `${start}_ik`,
+      start,
+      mid,
+      end,
+      goal,
+      pole,
+      blend: 1,
+      stretch: 0,
+      stretchLimit: 1,
+      soft: 0,
+      swing: 0,
+    });
   }
   const scene = {
     character: 'bench',
@@ -96,5 +110,8 @@ export function makeLargeRig(): { readonly rig: Rig; readonly pose: PoseValues }
       .filter(({ kind }) => kind === 'control')
       .map(({ name }, index) => [name, { ty: 1 + (index % 3), rx: index % 30, rz: 5 }]),
   );
-  return { rig: { scene, nodes, constraints, solvers }, pose };
+  return {
+    rig: { scene, nodes, constraints, solvers, spaces: [], drivers: [], skins: [], shapes: [] },
+    pose,
+  };
 }

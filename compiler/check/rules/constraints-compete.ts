@@ -6,6 +6,7 @@ const WRITES: Readonly<Record<ConstraintSpecification['kind'], readonly string[]
   point: ['position'],
   orient: ['rotation'],
   scale: ['scale'],
+  aim: ['rotation'],
 };
 
 /** When two constraints write the same thing, the later silently undoes the earlier. */

@@ -1,3 +1,4 @@
+import { amountsOf, controlOfAmount, idsRead } from '../../expand/solverIds';
 import { CARRIER_ROLE } from '../../resolve/findCarrier';
 import type { Rule } from '../Rule';
 
@@ -14,20 +15,22 @@ export const controlSteersNothing: Rule = {
     const follow = (id: string | null): void => {
       if (id !== null) followed.add(id);
     };
-    const followAttribute = (blend: number | string | null): void => {
-      if (typeof blend === 'string') follow(blend.slice(0, blend.lastIndexOf('.')));
-    };
     return {
       chain: ({ parent }) => follow(parent),
-      control: ({ parent }) => follow(parent),
-      solver(solver) {
-        follow(solver.goal);
-        follow(solver.pole);
-        followAttribute(solver.blend);
+      control({ parent, spaces }) {
+        follow(parent);
+        for (const space of spaces) follow(space);
       },
+      solver(solver) {
+        for (const id of idsRead(solver)) follow(id);
+        for (const [, amount] of amountsOf(solver)) follow(controlOfAmount(amount));
+      },
+      driver: ({ control }) => follow(control),
+      shape: ({ weight }) => follow(controlOfAmount(weight)),
       constraint(constraint) {
         for (const { node } of constraint.sources) follow(node);
-        followAttribute(constraint.blend);
+        follow(controlOfAmount(constraint.blend));
+        follow(constraint.aim?.up ?? null);
       },
       finish() {
         if (!context.isWhole) return;

@@ -1,3 +1,4 @@
+import { idsWritten } from '../../expand/solverIds';
 import type { SolverSpecification } from '../../expand/types';
 import type { Rule } from '../Rule';
 
@@ -13,7 +14,7 @@ export const solversShareJoint: Rule = {
     const solverOf = new Map<string, SolverSpecification>();
     return {
       solver(solver) {
-        for (const joint of solver.joints.slice(0, 2)) {
+        for (const joint of idsWritten(solver)) {
           const other = solverOf.get(joint);
           if (other) {
             context.report(

@@ -237,6 +237,36 @@ export const recipeSchema = {
         }
       ]
     },
+    "drivers": {
+      "description": "Drivers: what follows an attribute or channel of a control through a curve and is added to a channel of another thing.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Driver"
+      },
+      "default": {},
+      "examples": [
+        {
+          "claw_open": {
+            "input": "claw.open",
+            "target": "claw_upper.hinge",
+            "channel": "rz",
+            "keys": [
+              [
+                0,
+                0
+              ],
+              [
+                1,
+                35
+              ]
+            ]
+          }
+        }
+      ]
+    },
     "guide_lines": {
       "description": "Guide lines: drawn, never selectable, from a control to the thing it steers.",
       "type": "object",
@@ -252,6 +282,68 @@ export const recipeSchema = {
           "knee_line": {
             "from": "knee_pole",
             "to": "leg.left.knee"
+          }
+        }
+      ]
+    },
+    "geometry": {
+      "description": "Meshes of the model that the rig carries.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Geometry"
+      },
+      "default": {},
+      "examples": [
+        {
+          "body": {
+            "mesh": "hare_body"
+          }
+        }
+      ]
+    },
+    "skins": {
+      "description": "Which joints deform which mesh.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Skin"
+      },
+      "default": {},
+      "examples": [
+        {
+          "body_skin": {
+            "geometry": "body",
+            "joints": [
+              "spine",
+              "arm.left",
+              "arm.right"
+            ],
+            "influences": 4
+          }
+        }
+      ]
+    },
+    "shapes": {
+      "description": "Morph targets of meshes, each with what weighs it.",
+      "type": "object",
+      "propertyNames": {
+        "$ref": "#/$defs/id"
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/Shape"
+      },
+      "default": {},
+      "examples": [
+        {
+          "smile": {
+            "geometry": "body",
+            "morph": "smile",
+            "weight": "head.smile"
           }
         }
       ]
@@ -851,6 +943,29 @@ export const recipeSchema = {
         },
         "rotation_order": {
           "$ref": "#/$defs/RotationOrderOption"
+        },
+        "limits": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/JointLimits"
+          },
+          "default": {},
+          "description": "How far joints are meant to turn, by the joint's name in the chain.",
+          "examples": [
+            {
+              "elbow": {
+                "rz": {
+                  "min": 0,
+                  "max": 140
+                }
+              }
+            }
+          ]
         }
       }
     },
@@ -977,6 +1092,23 @@ export const recipeSchema = {
           "examples": [
             "0 turns joint by joint, 1 follows the hand"
           ]
+        },
+        "labels": {
+          "type": "array",
+          "items": {
+            "type": "string",
+            "minLength": 1,
+            "maxLength": 80
+          },
+          "minItems": 2,
+          "maxItems": 100,
+          "description": "Words for the values 0, 1, 2 …, for a choice in place of a number.",
+          "examples": [
+            [
+              "arm",
+              "world"
+            ]
+          ]
         }
       }
     },
@@ -1101,6 +1233,33 @@ export const recipeSchema = {
               }
             }
           ]
+        },
+        "spaces": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/id"
+          },
+          "minItems": 1,
+          "maxItems": 40,
+          "description": "Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.",
+          "examples": [
+            [
+              "root",
+              "spine.chest",
+              "hips"
+            ]
+          ]
+        },
+        "space_follow": {
+          "enum": [
+            "all",
+            "turn"
+          ],
+          "default": "all",
+          "description": "all: the chosen space carries the control. turn: it only turns it; place stays with the parent.",
+          "examples": [
+            "turn"
+          ]
         }
       }
     },
@@ -1120,7 +1279,7 @@ export const recipeSchema = {
     },
     "Solver": {
       "title": "Solver",
-      "description": "Computes the rotation of several joints at once.",
+      "description": "Computes the transform of several joints at once. Which keys it takes depends on its kind.",
       "type": "object",
       "additionalProperties": false,
       "properties": {
@@ -1134,9 +1293,14 @@ export const recipeSchema = {
         },
         "kind": {
           "enum": [
-            "two_bone"
+            "two_bone",
+            "reach",
+            "spline",
+            "twist",
+            "aim",
+            "foot_roll"
           ],
-          "description": "two_bone: three joints in a row bend so that the last meets the goal.",
+          "description": "two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.",
           "examples": [
             "two_bone"
           ]
@@ -1146,9 +1310,9 @@ export const recipeSchema = {
           "items": {
             "$ref": "#/$defs/id"
           },
-          "minItems": 3,
-          "maxItems": 3,
-          "description": "The three joints, from root to tip, each the parent of the next.",
+          "minItems": 1,
+          "maxItems": 500,
+          "description": "two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.",
           "examples": [
             [
               "arm.left.shoulder",
@@ -1159,14 +1323,14 @@ export const recipeSchema = {
         },
         "goal": {
           "$ref": "#/$defs/id",
-          "description": "Control that the last joint follows.",
+          "description": "two_bone, reach: joint or control that the last joint follows. aim: what the joint points at.",
           "examples": [
             "arm.left.hand"
           ]
         },
         "pole": {
           "$ref": "#/$defs/id",
-          "description": "Control that the middle joint points at.",
+          "description": "two_bone, reach: control toward which the chain bends. aim: thing that says which way is up; without it the joint turns along the shortest arc.",
           "examples": [
             "arm.left.pole"
           ]
@@ -1174,10 +1338,204 @@ export const recipeSchema = {
         "blend": {
           "$ref": "#/$defs/NumberOrAttribute",
           "default": 1,
-          "description": "0: joints keep their own rotation. 1: solved.",
+          "description": "two_bone, reach, aim: 0: joints keep their own rotation. 1: solved.",
           "examples": [
             "arm.left.hand.reach"
           ]
+        },
+        "stretch": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 0,
+          "description": "two_bone, reach: 0: bones keep their length, 1: they grow until the end meets the goal. spline: 0: joints keep their distances, 1: they spread over the whole curve.",
+          "examples": [
+            "arm.left.hand.stretch"
+          ]
+        },
+        "stretch_limit": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1.5,
+          "description": "two_bone, reach: greatest factor on the bones' length.",
+          "x-unit": "factor",
+          "examples": [
+            1.5
+          ]
+        },
+        "soft": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0,
+          "description": "two_bone, reach: share of the chain's length over which the end slows down before full reach. The zone never begins before the reach at rest.",
+          "x-unit": "chain lengths",
+          "examples": [
+            0.05
+          ]
+        },
+        "swing": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 0,
+          "description": "two_bone, reach: angle by which the bend is swung about the line from start to goal.",
+          "examples": [
+            "arm.left.hand.swing"
+          ],
+          "x-unit": "degrees"
+        },
+        "bias": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 0,
+          "description": "reach: −1 to 1: moves the fold from the last bends to the first.",
+          "examples": [
+            "leg.left.foot.lead"
+          ]
+        },
+        "controls": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/id"
+          },
+          "minItems": 2,
+          "maxItems": 100,
+          "description": "spline: the controls whose places shape the curve, from root to tip.",
+          "examples": [
+            [
+              "spine.low",
+              "spine.middle",
+              "spine.high"
+            ]
+          ]
+        },
+        "volume": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 0,
+          "description": "spline: 0 to 1: how far joints thicken and thin to keep the volume.",
+          "examples": [
+            "spine.high.volume"
+          ]
+        },
+        "shares": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/NumberOrExpression"
+          },
+          "minItems": 1,
+          "maxItems": 100,
+          "description": "twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).",
+          "examples": [
+            [
+              0.25,
+              0.5,
+              0.75
+            ]
+          ]
+        },
+        "bone": {
+          "$ref": "#/$defs/id",
+          "description": "twist: joint at the root of the bone, the parent of the twist joints.",
+          "examples": [
+            "arm.left.elbow"
+          ]
+        },
+        "tip": {
+          "$ref": "#/$defs/id",
+          "description": "twist: joint at the other end of the bone.",
+          "examples": [
+            "arm.left.wrist"
+          ]
+        },
+        "base": {
+          "$ref": "#/$defs/id",
+          "description": "twist: joint or control against which the driver's twist is measured.",
+          "examples": [
+            "arm.left.elbow"
+          ]
+        },
+        "driver": {
+          "$ref": "#/$defs/id",
+          "description": "twist: joint whose twist is spread.",
+          "examples": [
+            "arm.left.wrist"
+          ]
+        },
+        "foot": {
+          "$ref": "#/$defs/id",
+          "description": "foot_roll: control that carries the foot.",
+          "examples": [
+            "leg.left.foot"
+          ]
+        },
+        "ankle": {
+          "$ref": "#/$defs/id",
+          "description": "foot_roll: joint that every pivot moves.",
+          "examples": [
+            "leg.left_roll.ankle"
+          ]
+        },
+        "toes": {
+          "$ref": "#/$defs/id",
+          "description": "foot_roll: joint that every pivot but the ball moves; without it the ankle alone is moved.",
+          "examples": [
+            "leg.left_roll.toes"
+          ]
+        },
+        "heel": {
+          "$ref": "#/$defs/Place",
+          "description": "foot_roll: back of the sole, about which negative roll turns.",
+          "examples": [
+            "heel"
+          ]
+        },
+        "ball": {
+          "$ref": "#/$defs/Place",
+          "description": "foot_roll: ball of the foot, about which roll turns up to the break angle.",
+          "examples": [
+            "ball"
+          ]
+        },
+        "toe": {
+          "$ref": "#/$defs/Place",
+          "description": "foot_roll: tip of the toes, about which roll turns beyond the break angle.",
+          "examples": [
+            "toe"
+          ]
+        },
+        "inner": {
+          "$ref": "#/$defs/Place",
+          "description": "foot_roll: inner edge of the sole, about which negative bank turns.",
+          "examples": [
+            "inner"
+          ]
+        },
+        "outer": {
+          "$ref": "#/$defs/Place",
+          "description": "foot_roll: outer edge of the sole, about which positive bank turns.",
+          "examples": [
+            "outer"
+          ]
+        },
+        "roll": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 0,
+          "description": "foot_roll: angle, positive forward.",
+          "examples": [
+            "leg.left.foot.roll"
+          ],
+          "x-unit": "degrees"
+        },
+        "bank": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 0,
+          "description": "foot_roll: angle, positive outward.",
+          "examples": [
+            "leg.left.foot.bank"
+          ],
+          "x-unit": "degrees"
+        },
+        "break": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "default": 30,
+          "description": "foot_roll: roll at which the toes begin to lift.",
+          "examples": [
+            30
+          ],
+          "x-unit": "degrees"
         },
         "side": {
           "$ref": "#/$defs/SideOption"
@@ -1203,9 +1561,10 @@ export const recipeSchema = {
             "parent",
             "point",
             "orient",
-            "scale"
+            "scale",
+            "aim"
           ],
-          "description": "What is followed: everything, position, rotation or scale.",
+          "description": "What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.",
           "examples": [
             "orient"
           ]
@@ -1246,6 +1605,29 @@ export const recipeSchema = {
           "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.",
           "examples": [
             true
+          ]
+        },
+        "axis": {
+          "$ref": "#/$defs/AxisName",
+          "default": "+x",
+          "description": "aim: axis of the target that points at the sources, when no offset is kept.",
+          "examples": [
+            "+x"
+          ]
+        },
+        "up_axis": {
+          "$ref": "#/$defs/AxisName",
+          "default": "+y",
+          "description": "aim: axis of the target that keeps its direction against up.",
+          "examples": [
+            "+y"
+          ]
+        },
+        "up": {
+          "$ref": "#/$defs/id",
+          "description": "aim: joint or control whose rotation carries the up axis; without it the target turns along the shortest arc.",
+          "examples": [
+            "head.chin"
           ]
         },
         "side": {
@@ -1291,6 +1673,312 @@ export const recipeSchema = {
           "description": "How it is drawn.",
           "examples": [
             "dotted"
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        }
+      }
+    },
+    "Range": {
+      "title": "Range",
+      "description": "Smallest and largest value, from rest.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "min": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "description": "Smallest value.",
+          "x-unit": "degrees",
+          "examples": [
+            -40
+          ]
+        },
+        "max": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "description": "Largest value.",
+          "x-unit": "degrees",
+          "examples": [
+            40
+          ]
+        }
+      },
+      "examples": [
+        {
+          "min": -10,
+          "max": 140
+        }
+      ]
+    },
+    "JointLimits": {
+      "title": "JointLimits",
+      "description": "How far a joint is meant to turn from rest, by axis. Controls enforce it; the joint itself does not.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "rx": {
+          "$ref": "#/$defs/Range",
+          "description": "About its own x axis.",
+          "examples": [
+            {
+              "min": 0,
+              "max": 140
+            }
+          ]
+        },
+        "ry": {
+          "$ref": "#/$defs/Range",
+          "description": "About its own y axis.",
+          "examples": [
+            {
+              "min": 0,
+              "max": 140
+            }
+          ]
+        },
+        "rz": {
+          "$ref": "#/$defs/Range",
+          "description": "About its own z axis.",
+          "examples": [
+            {
+              "min": 0,
+              "max": 140
+            }
+          ]
+        }
+      },
+      "examples": [
+        {
+          "rz": {
+            "min": 0,
+            "max": 140
+          }
+        }
+      ]
+    },
+    "Driver": {
+      "title": "Driver",
+      "description": "Adds a value that follows a control to a channel of a joint or control.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "input": {
+          "type": "string",
+          "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$",
+          "maxLength": 180,
+          "description": "Attribute or channel of a control, as control.attribute.",
+          "examples": [
+            "jaw.open",
+            "leg.left.foot.ty"
+          ]
+        },
+        "target": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control whose channel it moves.",
+          "examples": [
+            "jaw.hinge"
+          ]
+        },
+        "channel": {
+          "enum": [
+            "tx",
+            "ty",
+            "tz",
+            "rx",
+            "ry",
+            "rz",
+            "sx",
+            "sy",
+            "sz"
+          ],
+          "description": "Channel that it is added to.",
+          "examples": [
+            "rz"
+          ]
+        },
+        "keys": {
+          "type": "array",
+          "items": {
+            "type": "array",
+            "items": {
+              "$ref": "#/$defs/NumberOrExpression"
+            },
+            "minItems": 2,
+            "maxItems": 2
+          },
+          "minItems": 2,
+          "maxItems": 100,
+          "description": "Curve as pairs of input and output, inputs ascending.",
+          "examples": [
+            [
+              [
+                0,
+                0
+              ],
+              [
+                1,
+                30
+              ]
+            ]
+          ]
+        },
+        "curve": {
+          "enum": [
+            "linear",
+            "smooth"
+          ],
+          "default": "linear",
+          "description": "How outputs run between keys: straight, or level at each key.",
+          "examples": [
+            "smooth"
+          ]
+        },
+        "beyond": {
+          "enum": [
+            "hold",
+            "extend"
+          ],
+          "default": "hold",
+          "description": "Beyond the end keys: hold the last output, or run on straight.",
+          "examples": [
+            "extend"
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        }
+      }
+    },
+    "Geometry": {
+      "title": "Geometry",
+      "description": "A mesh of the model.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "mesh": {
+          "type": "string",
+          "minLength": 1,
+          "maxLength": 200,
+          "description": "Name of the mesh in the model's file; without it, the id.",
+          "examples": [
+            "hare_body"
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "geometry",
+          "description": "Role; decides the container.",
+          "examples": [
+            "geometry"
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        }
+      }
+    },
+    "Skin": {
+      "title": "Skin",
+      "description": "Which joints deform a mesh.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "geometry": {
+          "$ref": "#/$defs/id",
+          "description": "The mesh.",
+          "examples": [
+            "body"
+          ]
+        },
+        "joints": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/id"
+          },
+          "minItems": 1,
+          "maxItems": 2000,
+          "description": "Joints, or chains for all of their joints.",
+          "examples": [
+            [
+              "spine",
+              "arm.left"
+            ]
+          ]
+        },
+        "influences": {
+          "type": "integer",
+          "minimum": 1,
+          "maximum": 16,
+          "default": 4,
+          "description": "Joints that a vertex may follow at most.",
+          "examples": [
+            4
+          ]
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        }
+      }
+    },
+    "Shape": {
+      "title": "Shape",
+      "description": "A morph target of a mesh with what weighs it.",
+      "type": "object",
+      "additionalProperties": false,
+      "properties": {
+        "omit": {
+          "type": "boolean",
+          "default": false,
+          "description": "Leaves out what a part made under this id.",
+          "examples": [
+            true
+          ]
+        },
+        "geometry": {
+          "$ref": "#/$defs/id",
+          "description": "The mesh.",
+          "examples": [
+            "body"
+          ]
+        },
+        "morph": {
+          "type": "string",
+          "minLength": 1,
+          "maxLength": 200,
+          "description": "Name of the morph target in the model's file; without it, the id.",
+          "examples": [
+            "smile"
+          ]
+        },
+        "weight": {
+          "$ref": "#/$defs/NumberOrAttribute",
+          "description": "Its weight, 0 to 1: a number or an attribute of a control.",
+          "examples": [
+            "head.smile"
           ]
         },
         "side": {

@@ -161,10 +161,34 @@ export interface Recipe {
     [k: string]: Constraint;
   };
   /**
+   * Drivers: what follows an attribute or channel of a control through a curve and is added to a channel of another thing.
+   */
+  drivers?: {
+    [k: string]: Driver;
+  };
+  /**
    * Guide lines: drawn, never selectable, from a control to the thing it steers.
    */
   guide_lines?: {
     [k: string]: GuideLine;
+  };
+  /**
+   * Meshes of the model that the rig carries.
+   */
+  geometry?: {
+    [k: string]: Geometry;
+  };
+  /**
+   * Which joints deform which mesh.
+   */
+  skins?: {
+    [k: string]: Skin;
+  };
+  /**
+   * Morph targets of meshes, each with what weighs it.
+   */
+  shapes?: {
+    [k: string]: Shape;
   };
   /**
    * Custom metadata carried on the rig's note node.
@@ -408,6 +432,33 @@ export interface Chain {
   mirror?: MirrorRule;
   orient?: Orient;
   rotation_order?: RotationOrderOption;
+  /**
+   * How far joints are meant to turn, by the joint's name in the chain.
+   */
+  limits?: {
+    [k: string]: JointLimits;
+  };
+}
+/**
+ * How far a joint is meant to turn from rest, by axis. Controls enforce it; the joint itself does not.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "JointLimits".
+ */
+export interface JointLimits {
+  rx?: Range;
+  ry?: Range;
+  rz?: Range;
+}
+/**
+ * Smallest and largest value, from rest.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Range".
+ */
+export interface Range {
+  min?: NumberOrExpression;
+  max?: NumberOrExpression;
 }
 /**
  * What the animator takes hold of.
@@ -447,6 +498,14 @@ export interface Control {
   attributes?: {
     [k: string]: AttributeOption;
   };
+  /**
+   * Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.
+   */
+  spaces?: Id[];
+  /**
+   * all: the chosen space carries the control. turn: it only turns it; place stays with the parent.
+   */
+  space_follow?: 'all' | 'turn';
 }
 /**
  * Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.
@@ -487,9 +546,13 @@ export interface AttributeOption {
   min?: NumberOrExpression;
   max?: NumberOrExpression;
   note?: Line;
+  /**
+   * Words for the values 0, 1, 2 …, for a choice in place of a number.
+   */
+  labels?: string[];
 }
 /**
- * Computes the rotation of several joints at once.
+ * Computes the transform of several joints at once. Which keys it takes depends on its kind.
  *
  * This interface was referenced by `Recipe`'s JSON-Schema
  * via the `definition` "Solver".
@@ -500,16 +563,45 @@ export interface Solver {
    */
   omit?: boolean;
   /**
-   * two_bone: three joints in a row bend so that the last meets the goal.
+   * two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.
    */
-  kind?: 'two_bone';
+  kind?: 'two_bone' | 'reach' | 'spline' | 'twist' | 'aim' | 'foot_roll';
   /**
-   * The three joints, from root to tip, each the parent of the next.
+   * two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.
    */
   joints?: Id[];
   goal?: Id;
   pole?: Id;
   blend?: NumberOrAttribute;
+  stretch?: NumberOrAttribute;
+  stretch_limit?: NumberOrExpression;
+  soft?: NumberOrExpression;
+  swing?: NumberOrAttribute;
+  bias?: NumberOrAttribute;
+  /**
+   * spline: the controls whose places shape the curve, from root to tip.
+   */
+  controls?: Id[];
+  volume?: NumberOrAttribute;
+  /**
+   * twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).
+   */
+  shares?: NumberOrExpression[];
+  bone?: Id;
+  tip?: Id;
+  base?: Id;
+  driver?: Id;
+  foot?: Id;
+  ankle?: Id;
+  toes?: Id;
+  heel?: Place;
+  ball?: Place;
+  toe?: Place;
+  inner?: Place;
+  outer?: Place;
+  roll?: NumberOrAttribute;
+  bank?: NumberOrAttribute;
+  break?: NumberOrAttribute;
   side?: SideOption;
 }
 /**
@@ -524,9 +616,9 @@ export interface Constraint {
    */
   omit?: boolean;
   /**
-   * What is followed: everything, position, rotation or scale.
+   * What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.
    */
-  kind?: 'parent' | 'point' | 'orient' | 'scale';
+  kind?: 'parent' | 'point' | 'orient' | 'scale' | 'aim';
   target?: Id;
   /**
    * What is followed, each with its weight; weights are taken as shares of their sum.
@@ -539,6 +631,43 @@ export interface Constraint {
    * Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.
    */
   keep_offset?: boolean;
+  axis?: AxisName;
+  up_axis?: AxisName;
+  up?: Id;
+  side?: SideOption;
+}
+/**
+ * Adds a value that follows a control to a channel of a joint or control.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Driver".
+ */
+export interface Driver {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  /**
+   * Attribute or channel of a control, as control.attribute.
+   */
+  input?: string;
+  target?: Id;
+  /**
+   * Channel that it is added to.
+   */
+  channel?: 'tx' | 'ty' | 'tz' | 'rx' | 'ry' | 'rz' | 'sx' | 'sy' | 'sz';
+  /**
+   * Curve as pairs of input and output, inputs ascending.
+   */
+  keys?: NumberOrExpression[][];
+  /**
+   * How outputs run between keys: straight, or level at each key.
+   */
+  curve?: 'linear' | 'smooth';
+  /**
+   * Beyond the end keys: hold the last output, or run on straight.
+   */
+  beyond?: 'hold' | 'extend';
   side?: SideOption;
 }
 /**
@@ -558,5 +687,64 @@ export interface GuideLine {
    * How it is drawn.
    */
   style?: 'dotted' | 'dashed' | 'solid';
+  side?: SideOption;
+}
+/**
+ * A mesh of the model.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Geometry".
+ */
+export interface Geometry {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  /**
+   * Name of the mesh in the model's file; without it, the id.
+   */
+  mesh?: string;
+  role?: Word;
+  side?: SideOption;
+}
+/**
+ * Which joints deform a mesh.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Skin".
+ */
+export interface Skin {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  geometry?: Id;
+  /**
+   * Joints, or chains for all of their joints.
+   */
+  joints?: Id[];
+  /**
+   * Joints that a vertex may follow at most.
+   */
+  influences?: number;
+  side?: SideOption;
+}
+/**
+ * A morph target of a mesh with what weighs it.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Shape".
+ */
+export interface Shape {
+  /**
+   * Leaves out what a part made under this id.
+   */
+  omit?: boolean;
+  geometry?: Id;
+  /**
+   * Name of the morph target in the model's file; without it, the id.
+   */
+  morph?: string;
+  weight?: NumberOrAttribute;
   side?: SideOption;
 }

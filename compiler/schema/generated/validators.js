@@ -36,7 +36,7 @@ var require_ucs2length = __commonJS({
 
 // <stdin>
 var validateRecipe = validate52;
-var schema19 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/recipe/1", "title": "Recipe", "description": "A rig recipe, format 1: everything Pintle needs to make one character movable.", "type": "object", "required": ["format", "recipe"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the recipe language.", "examples": [1] }, "recipe": { "$ref": "#/$defs/word", "description": "Name of the recipe: lower-case letters, digits and underscores. Also the character's name unless one is given when compiling.", "examples": ["hare"] }, "title": { "$ref": "#/$defs/line", "description": "What people call the rig.", "examples": ["Upright hare"] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "House rules to follow, as name@version.", "default": "standard@1", "examples": ["tidewrack@1"] }, "extends": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "Recipe version this one changes, as name@version. This document is merged onto it by RFC 7396: maps merge key by key, null removes, anything else replaces.", "examples": ["walker@4"] }, "params": { "description": "Parameters: the numbers that vary from character to character.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Parameter" }, "default": {}, "examples": [{ "stature": { "unit": "cm", "default": 96, "min": 30, "max": 260 } }] }, "scene": { "$ref": "#/$defs/Scene" }, "landmarks": { "description": "Named measured points on the model. Those with side left have a mirrored right twin.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Landmark" }, "default": {}, "examples": [{ "hips": { "at": [0, 51, 0] } }] }, "roles": { "description": "Adds to or adjusts the roles of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Role" }, "default": {}, "examples": [{ "skin": { "token": "sk" } }] }, "containers": { "description": "Adds to or adjusts the containers of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Container" }, "default": {}, "examples": [{ "whiskers": { "parent": "carry" } }] }, "parts": { "description": "Building blocks that expand into chains, controls, solvers, constraints and guide lines. Whatever a part makes can be adjusted by id in those maps.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Part" }, "default": {}, "examples": [{ "root": { "kind": "root" } }] }, "chains": { "description": "Joint chains.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Chain" }, "default": {}, "examples": [{ "spine": { "points": ["hips", "chest"], "joints": 4 } }] }, "controls": { "description": "Controls: what the animator takes hold of. An entry whose id a part has made adjusts that control.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Control" }, "default": {}, "examples": [{ "hips": { "at": "hips", "shape": "square" } }] }, "solvers": { "description": "Solvers: what computes the rotation of several joints at once.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Solver" }, "default": {}, "examples": [{ "boom": { "kind": "two_bone", "joints": ["boom.base", "boom.knee", "boom.tip"], "goal": "hook", "pole": "boom_pole" } }] }, "constraints": { "description": "Constraints: what makes one thing follow others.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Constraint" }, "default": {}, "examples": [{ "neck_turn": { "kind": "orient", "target": "spine.04", "sources": { "head": 1 } } }] }, "guide_lines": { "description": "Guide lines: drawn, never selectable, from a control to the thing it steers.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/GuideLine" }, "default": {}, "examples": [{ "knee_line": { "from": "knee_pole", "to": "leg.left.knee" } }] }, "notes": { "description": "Custom metadata carried on the rig's note node.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": ["string", "number", "boolean"], "maxLength": 2e3 }, "default": {}, "examples": [{ "sequence": "Marsh at dawn" }] } }, "$defs": { "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "id": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "maxLength": 120 }, "line": { "type": "string", "maxLength": 200 }, "NumberOrExpression": { "title": "NumberOrExpression", "description": "A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.", "type": ["number", "string"], "pattern": "^=", "maxLength": 2e3, "examples": [12.5, "=params.stature * 0.53"] }, "Point": { "title": "Point", "description": "Three numbers in the scene's unit and axes, or an expression that gives a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^=", "maxLength": 2e3 }], "examples": [[0, 51, 0], "=mid(landmarks.hip, landmarks.ankle)"] }, "Place": { "title": "Place", "description": "A landmark or joint by name, or a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)", "maxLength": 2e3 }], "examples": ["wrist", [0, 51, 0]] }, "SideOption": { "title": "SideOption", "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.", "enum": ["left", "right", "both", "centre"], "default": "centre", "examples": ["both"] }, "MirrorRule": { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] }, "RotationOrderOption": { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] }, "AxisName": { "title": "AxisName", "enum": ["+x", "-x", "+y", "-y", "+z", "-z"], "description": "One of the six axis directions.", "examples": ["+x"] }, "ChannelName": { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." }, "Parameter": { "title": "Parameter", "description": "A number that varies from character to character.", "type": "object", "required": ["default"], "additionalProperties": false, "properties": { "default": { "type": "number", "description": "Value when a character gives none.", "examples": [96] }, "min": { "type": "number", "description": "Smallest value allowed.", "examples": [30] }, "max": { "type": "number", "description": "Largest value allowed.", "examples": [260] }, "unit": { "$ref": "#/$defs/line", "description": "Unit, for people; nothing is converted.", "examples": ["cm"] }, "whole": { "type": "boolean", "default": false, "description": "Only whole numbers are allowed.", "examples": [true] }, "note": { "$ref": "#/$defs/line", "description": "What the number measures.", "examples": ["floor to crown"] } } }, "Scene": { "title": "Scene", "description": "Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.", "type": "object", "additionalProperties": false, "default": { "up": "+y", "forward": "+z", "unit": "cm" }, "properties": { "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis that points up.", "examples": ["+z"] }, "forward": { "$ref": "#/$defs/AxisName", "default": "+z", "description": "Axis the character faces along. Left is up \xD7 forward.", "examples": ["-y"] }, "unit": { "enum": ["mm", "cm", "m"], "default": "cm", "description": "Unit of length.", "examples": ["m"] } }, "examples": [{ "up": "+z", "forward": "-y", "unit": "m" }] }, "Landmark": { "title": "Landmark", "description": "A named measured point on the model.", "type": "object", "required": ["at"], "additionalProperties": false, "properties": { "at": { "$ref": "#/$defs/Point", "description": "Where it is. For side left: the left point.", "x-unit": "scene unit" }, "side": { "enum": ["left", "centre"], "default": "centre", "description": "left: a mirrored right twin exists.", "examples": ["left"] }, "right": { "$ref": "#/$defs/Point", "description": "The right point, where the model is not symmetrical.", "x-unit": "scene unit" }, "note": { "$ref": "#/$defs/line", "description": "How to find it on the model.", "examples": ["bony tip of the elbow"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Part": { "title": "Part", "description": "A building block; kind decides which.", "type": "object", "required": ["kind"], "discriminator": { "propertyName": "kind" }, "oneOf": [{ "$ref": "#/$defs/LimbPart" }, { "$ref": "#/$defs/RootPart" }, { "$ref": "#/$defs/StrandPart" }] }, "Orient": { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] } }, "examples": [{ "aim": "+y", "up": "+z" }] }, "Chain": { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "PolePlace": { "title": "PolePlace", "description": "Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.", "type": "object", "required": ["joints"], "additionalProperties": false, "properties": { "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "Start, middle and end joint.", "examples": [["leg.left.hip", "leg.left.knee", "leg.left.ankle"]] }, "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end, as a factor on the length of both bones.", "x-unit": "limb lengths", "examples": [1] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the three joints lie on one line.", "examples": [[0, 0, 1]] } }, "examples": [{ "joints": ["leg.left.hip", "leg.left.knee", "leg.left.ankle"], "distance": 0.8 }] }, "ChannelOption": { "title": "ChannelOption", "description": "What an animator may do with a channel.", "type": "object", "additionalProperties": false, "properties": { "locked": { "type": "boolean", "default": false, "description": "The channel cannot be changed.", "examples": [true] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees, scene unit or factor", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees, scene unit or factor", "examples": [40] } } }, "AttributeOption": { "title": "AttributeOption", "description": "A value of its own on a control, beside the nine channels.", "type": "object", "additionalProperties": false, "properties": { "default": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest.", "examples": [1] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "examples": [0] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "examples": [1] }, "note": { "$ref": "#/$defs/line", "description": "What it does, for the animator.", "examples": ["0 turns joint by joint, 1 follows the hand"] } } }, "Control": { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] } } }, "NumberOrAttribute": { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] }, "Solver": { "title": "Solver", "description": "Computes the rotation of several joints at once.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone"], "description": "two_bone: three joints in a row bend so that the last meets the goal.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "The three joints, from root to tip, each the parent of the next.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "Control that the last joint follows.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "Control that the middle joint points at.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Constraint": { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale"], "description": "What is followed: everything, position, rotation or scale.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "side": { "$ref": "#/$defs/SideOption" } } }, "GuideLine": { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "LimbPart": { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "default": { "distance": 1, "guide_line": true }, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "x-unit": "limb lengths", "examples": [1] }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the middle joint.", "examples": [true] } }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "RootPart": { "title": "RootPart", "description": "The root control: it carries everything in the carried containers and lies at the origin.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The root control that carries the whole rig." }, "at": { "$ref": "#/$defs/Place", "default": [0, 0, 0], "description": "Where the root control stands.", "x-unit": "scene unit", "examples": [[0, 0, 0]] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Drawn shape.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size taken from the whole rig.", "examples": [1.2] } } }, "StrandPart": { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints, each with its own control." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } } } };
+var schema19 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/recipe/1", "title": "Recipe", "description": "A rig recipe, format 1: everything Pintle needs to make one character movable.", "type": "object", "required": ["format", "recipe"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the recipe language.", "examples": [1] }, "recipe": { "$ref": "#/$defs/word", "description": "Name of the recipe: lower-case letters, digits and underscores. Also the character's name unless one is given when compiling.", "examples": ["hare"] }, "title": { "$ref": "#/$defs/line", "description": "What people call the rig.", "examples": ["Upright hare"] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "House rules to follow, as name@version.", "default": "standard@1", "examples": ["tidewrack@1"] }, "extends": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "Recipe version this one changes, as name@version. This document is merged onto it by RFC 7396: maps merge key by key, null removes, anything else replaces.", "examples": ["walker@4"] }, "params": { "description": "Parameters: the numbers that vary from character to character.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Parameter" }, "default": {}, "examples": [{ "stature": { "unit": "cm", "default": 96, "min": 30, "max": 260 } }] }, "scene": { "$ref": "#/$defs/Scene" }, "landmarks": { "description": "Named measured points on the model. Those with side left have a mirrored right twin.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Landmark" }, "default": {}, "examples": [{ "hips": { "at": [0, 51, 0] } }] }, "roles": { "description": "Adds to or adjusts the roles of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Role" }, "default": {}, "examples": [{ "skin": { "token": "sk" } }] }, "containers": { "description": "Adds to or adjusts the containers of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Container" }, "default": {}, "examples": [{ "whiskers": { "parent": "carry" } }] }, "parts": { "description": "Building blocks that expand into chains, controls, solvers, constraints and guide lines. Whatever a part makes can be adjusted by id in those maps.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Part" }, "default": {}, "examples": [{ "root": { "kind": "root" } }] }, "chains": { "description": "Joint chains.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Chain" }, "default": {}, "examples": [{ "spine": { "points": ["hips", "chest"], "joints": 4 } }] }, "controls": { "description": "Controls: what the animator takes hold of. An entry whose id a part has made adjusts that control.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Control" }, "default": {}, "examples": [{ "hips": { "at": "hips", "shape": "square" } }] }, "solvers": { "description": "Solvers: what computes the rotation of several joints at once.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Solver" }, "default": {}, "examples": [{ "boom": { "kind": "two_bone", "joints": ["boom.base", "boom.knee", "boom.tip"], "goal": "hook", "pole": "boom_pole" } }] }, "constraints": { "description": "Constraints: what makes one thing follow others.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Constraint" }, "default": {}, "examples": [{ "neck_turn": { "kind": "orient", "target": "spine.04", "sources": { "head": 1 } } }] }, "drivers": { "description": "Drivers: what follows an attribute or channel of a control through a curve and is added to a channel of another thing.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Driver" }, "default": {}, "examples": [{ "claw_open": { "input": "claw.open", "target": "claw_upper.hinge", "channel": "rz", "keys": [[0, 0], [1, 35]] } }] }, "guide_lines": { "description": "Guide lines: drawn, never selectable, from a control to the thing it steers.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/GuideLine" }, "default": {}, "examples": [{ "knee_line": { "from": "knee_pole", "to": "leg.left.knee" } }] }, "geometry": { "description": "Meshes of the model that the rig carries.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Geometry" }, "default": {}, "examples": [{ "body": { "mesh": "hare_body" } }] }, "skins": { "description": "Which joints deform which mesh.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Skin" }, "default": {}, "examples": [{ "body_skin": { "geometry": "body", "joints": ["spine", "arm.left", "arm.right"], "influences": 4 } }] }, "shapes": { "description": "Morph targets of meshes, each with what weighs it.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Shape" }, "default": {}, "examples": [{ "smile": { "geometry": "body", "morph": "smile", "weight": "head.smile" } }] }, "notes": { "description": "Custom metadata carried on the rig's note node.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": ["string", "number", "boolean"], "maxLength": 2e3 }, "default": {}, "examples": [{ "sequence": "Marsh at dawn" }] } }, "$defs": { "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "id": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "maxLength": 120 }, "line": { "type": "string", "maxLength": 200 }, "NumberOrExpression": { "title": "NumberOrExpression", "description": "A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.", "type": ["number", "string"], "pattern": "^=", "maxLength": 2e3, "examples": [12.5, "=params.stature * 0.53"] }, "Point": { "title": "Point", "description": "Three numbers in the scene's unit and axes, or an expression that gives a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^=", "maxLength": 2e3 }], "examples": [[0, 51, 0], "=mid(landmarks.hip, landmarks.ankle)"] }, "Place": { "title": "Place", "description": "A landmark or joint by name, or a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)", "maxLength": 2e3 }], "examples": ["wrist", [0, 51, 0]] }, "SideOption": { "title": "SideOption", "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.", "enum": ["left", "right", "both", "centre"], "default": "centre", "examples": ["both"] }, "MirrorRule": { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] }, "RotationOrderOption": { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] }, "AxisName": { "title": "AxisName", "enum": ["+x", "-x", "+y", "-y", "+z", "-z"], "description": "One of the six axis directions.", "examples": ["+x"] }, "ChannelName": { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." }, "Parameter": { "title": "Parameter", "description": "A number that varies from character to character.", "type": "object", "required": ["default"], "additionalProperties": false, "properties": { "default": { "type": "number", "description": "Value when a character gives none.", "examples": [96] }, "min": { "type": "number", "description": "Smallest value allowed.", "examples": [30] }, "max": { "type": "number", "description": "Largest value allowed.", "examples": [260] }, "unit": { "$ref": "#/$defs/line", "description": "Unit, for people; nothing is converted.", "examples": ["cm"] }, "whole": { "type": "boolean", "default": false, "description": "Only whole numbers are allowed.", "examples": [true] }, "note": { "$ref": "#/$defs/line", "description": "What the number measures.", "examples": ["floor to crown"] } } }, "Scene": { "title": "Scene", "description": "Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.", "type": "object", "additionalProperties": false, "default": { "up": "+y", "forward": "+z", "unit": "cm" }, "properties": { "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis that points up.", "examples": ["+z"] }, "forward": { "$ref": "#/$defs/AxisName", "default": "+z", "description": "Axis the character faces along. Left is up \xD7 forward.", "examples": ["-y"] }, "unit": { "enum": ["mm", "cm", "m"], "default": "cm", "description": "Unit of length.", "examples": ["m"] } }, "examples": [{ "up": "+z", "forward": "-y", "unit": "m" }] }, "Landmark": { "title": "Landmark", "description": "A named measured point on the model.", "type": "object", "required": ["at"], "additionalProperties": false, "properties": { "at": { "$ref": "#/$defs/Point", "description": "Where it is. For side left: the left point.", "x-unit": "scene unit" }, "side": { "enum": ["left", "centre"], "default": "centre", "description": "left: a mirrored right twin exists.", "examples": ["left"] }, "right": { "$ref": "#/$defs/Point", "description": "The right point, where the model is not symmetrical.", "x-unit": "scene unit" }, "note": { "$ref": "#/$defs/line", "description": "How to find it on the model.", "examples": ["bony tip of the elbow"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Part": { "title": "Part", "description": "A building block; kind decides which.", "type": "object", "required": ["kind"], "discriminator": { "propertyName": "kind" }, "oneOf": [{ "$ref": "#/$defs/LimbPart" }, { "$ref": "#/$defs/RootPart" }, { "$ref": "#/$defs/StrandPart" }] }, "Orient": { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] } }, "examples": [{ "aim": "+y", "up": "+z" }] }, "Chain": { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far joints are meant to turn, by the joint's name in the chain.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] } } }, "PolePlace": { "title": "PolePlace", "description": "Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.", "type": "object", "required": ["joints"], "additionalProperties": false, "properties": { "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "Start, middle and end joint.", "examples": [["leg.left.hip", "leg.left.knee", "leg.left.ankle"]] }, "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end, as a factor on the length of both bones.", "x-unit": "limb lengths", "examples": [1] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the three joints lie on one line.", "examples": [[0, 0, 1]] } }, "examples": [{ "joints": ["leg.left.hip", "leg.left.knee", "leg.left.ankle"], "distance": 0.8 }] }, "ChannelOption": { "title": "ChannelOption", "description": "What an animator may do with a channel.", "type": "object", "additionalProperties": false, "properties": { "locked": { "type": "boolean", "default": false, "description": "The channel cannot be changed.", "examples": [true] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees, scene unit or factor", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees, scene unit or factor", "examples": [40] } } }, "AttributeOption": { "title": "AttributeOption", "description": "A value of its own on a control, beside the nine channels.", "type": "object", "additionalProperties": false, "properties": { "default": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest.", "examples": [1] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "examples": [0] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "examples": [1] }, "note": { "$ref": "#/$defs/line", "description": "What it does, for the animator.", "examples": ["0 turns joint by joint, 1 follows the hand"] }, "labels": { "type": "array", "items": { "type": "string", "minLength": 1, "maxLength": 80 }, "minItems": 2, "maxItems": 100, "description": "Words for the values 0, 1, 2 \u2026, for a choice in place of a number.", "examples": [["arm", "world"]] } } }, "Control": { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.", "examples": [["root", "spine.chest", "hips"]] }, "space_follow": { "enum": ["all", "turn"], "default": "all", "description": "all: the chosen space carries the control. turn: it only turns it; place stays with the parent.", "examples": ["turn"] } } }, "NumberOrAttribute": { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] }, "Solver": { "title": "Solver", "description": "Computes the transform of several joints at once. Which keys it takes depends on its kind.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone", "reach", "spline", "twist", "aim", "foot_roll"], "description": "two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 500, "description": "two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "two_bone, reach: joint or control that the last joint follows. aim: what the joint points at.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "two_bone, reach: control toward which the chain bends. aim: thing that says which way is up; without it the joint turns along the shortest arc.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "two_bone, reach, aim: 0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "stretch": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: 0: bones keep their length, 1: they grow until the end meets the goal. spline: 0: joints keep their distances, 1: they spread over the whole curve.", "examples": ["arm.left.hand.stretch"] }, "stretch_limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "two_bone, reach: greatest factor on the bones' length.", "x-unit": "factor", "examples": [1.5] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "two_bone, reach: share of the chain's length over which the end slows down before full reach. The zone never begins before the reach at rest.", "x-unit": "chain lengths", "examples": [0.05] }, "swing": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: angle by which the bend is swung about the line from start to goal.", "examples": ["arm.left.hand.swing"], "x-unit": "degrees" }, "bias": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "reach: \u22121 to 1: moves the fold from the last bends to the first.", "examples": ["leg.left.foot.lead"] }, "controls": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 2, "maxItems": 100, "description": "spline: the controls whose places shape the curve, from root to tip.", "examples": [["spine.low", "spine.middle", "spine.high"]] }, "volume": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "spline: 0 to 1: how far joints thicken and thin to keep the volume.", "examples": ["spine.high.volume"] }, "shares": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 1, "maxItems": 100, "description": "twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).", "examples": [[0.25, 0.5, 0.75]] }, "bone": { "$ref": "#/$defs/id", "description": "twist: joint at the root of the bone, the parent of the twist joints.", "examples": ["arm.left.elbow"] }, "tip": { "$ref": "#/$defs/id", "description": "twist: joint at the other end of the bone.", "examples": ["arm.left.wrist"] }, "base": { "$ref": "#/$defs/id", "description": "twist: joint or control against which the driver's twist is measured.", "examples": ["arm.left.elbow"] }, "driver": { "$ref": "#/$defs/id", "description": "twist: joint whose twist is spread.", "examples": ["arm.left.wrist"] }, "foot": { "$ref": "#/$defs/id", "description": "foot_roll: control that carries the foot.", "examples": ["leg.left.foot"] }, "ankle": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot moves.", "examples": ["leg.left_roll.ankle"] }, "toes": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot but the ball moves; without it the ankle alone is moved.", "examples": ["leg.left_roll.toes"] }, "heel": { "$ref": "#/$defs/Place", "description": "foot_roll: back of the sole, about which negative roll turns.", "examples": ["heel"] }, "ball": { "$ref": "#/$defs/Place", "description": "foot_roll: ball of the foot, about which roll turns up to the break angle.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "foot_roll: tip of the toes, about which roll turns beyond the break angle.", "examples": ["toe"] }, "inner": { "$ref": "#/$defs/Place", "description": "foot_roll: inner edge of the sole, about which negative bank turns.", "examples": ["inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "foot_roll: outer edge of the sole, about which positive bank turns.", "examples": ["outer"] }, "roll": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive forward.", "examples": ["leg.left.foot.roll"], "x-unit": "degrees" }, "bank": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive outward.", "examples": ["leg.left.foot.bank"], "x-unit": "degrees" }, "break": { "$ref": "#/$defs/NumberOrAttribute", "default": 30, "description": "foot_roll: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "side": { "$ref": "#/$defs/SideOption" } } }, "Constraint": { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale", "aim"], "description": "What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "axis": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "aim: axis of the target that points at the sources, when no offset is kept.", "examples": ["+x"] }, "up_axis": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "aim: axis of the target that keeps its direction against up.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/id", "description": "aim: joint or control whose rotation carries the up axis; without it the target turns along the shortest arc.", "examples": ["head.chin"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "GuideLine": { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Range": { "title": "Range", "description": "Smallest and largest value, from rest.", "type": "object", "additionalProperties": false, "properties": { "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees", "examples": [40] } }, "examples": [{ "min": -10, "max": 140 }] }, "JointLimits": { "title": "JointLimits", "description": "How far a joint is meant to turn from rest, by axis. Controls enforce it; the joint itself does not.", "type": "object", "additionalProperties": false, "properties": { "rx": { "$ref": "#/$defs/Range", "description": "About its own x axis.", "examples": [{ "min": 0, "max": 140 }] }, "ry": { "$ref": "#/$defs/Range", "description": "About its own y axis.", "examples": [{ "min": 0, "max": 140 }] }, "rz": { "$ref": "#/$defs/Range", "description": "About its own z axis.", "examples": [{ "min": 0, "max": 140 }] } }, "examples": [{ "rz": { "min": 0, "max": 140 } }] }, "Driver": { "title": "Driver", "description": "Adds a value that follows a control to a channel of a joint or control.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "input": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "Attribute or channel of a control, as control.attribute.", "examples": ["jaw.open", "leg.left.foot.ty"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control whose channel it moves.", "examples": ["jaw.hinge"] }, "channel": { "enum": ["tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "Channel that it is added to.", "examples": ["rz"] }, "keys": { "type": "array", "items": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 2, "maxItems": 2 }, "minItems": 2, "maxItems": 100, "description": "Curve as pairs of input and output, inputs ascending.", "examples": [[[0, 0], [1, 30]]] }, "curve": { "enum": ["linear", "smooth"], "default": "linear", "description": "How outputs run between keys: straight, or level at each key.", "examples": ["smooth"] }, "beyond": { "enum": ["hold", "extend"], "default": "hold", "description": "Beyond the end keys: hold the last output, or run on straight.", "examples": ["extend"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Geometry": { "title": "Geometry", "description": "A mesh of the model.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "mesh": { "type": "string", "minLength": 1, "maxLength": 200, "description": "Name of the mesh in the model's file; without it, the id.", "examples": ["hare_body"] }, "role": { "$ref": "#/$defs/word", "default": "geometry", "description": "Role; decides the container.", "examples": ["geometry"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Skin": { "title": "Skin", "description": "Which joints deform a mesh.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "geometry": { "$ref": "#/$defs/id", "description": "The mesh.", "examples": ["body"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 2e3, "description": "Joints, or chains for all of their joints.", "examples": [["spine", "arm.left"]] }, "influences": { "type": "integer", "minimum": 1, "maximum": 16, "default": 4, "description": "Joints that a vertex may follow at most.", "examples": [4] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Shape": { "title": "Shape", "description": "A morph target of a mesh with what weighs it.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "geometry": { "$ref": "#/$defs/id", "description": "The mesh.", "examples": ["body"] }, "morph": { "type": "string", "minLength": 1, "maxLength": 200, "description": "Name of the morph target in the model's file; without it, the id.", "examples": ["smile"] }, "weight": { "$ref": "#/$defs/NumberOrAttribute", "description": "Its weight, 0 to 1: a number or an attribute of a control.", "examples": ["head.smile"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "LimbPart": { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "default": { "distance": 1, "guide_line": true }, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "x-unit": "limb lengths", "examples": [1] }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the middle joint.", "examples": [true] } }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "RootPart": { "title": "RootPart", "description": "The root control: it carries everything in the carried containers and lies at the origin.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The root control that carries the whole rig." }, "at": { "$ref": "#/$defs/Place", "default": [0, 0, 0], "description": "Where the root control stands.", "x-unit": "scene unit", "examples": [[0, 0, 0]] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Drawn shape.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size taken from the whole rig.", "examples": [1.2] } } }, "StrandPart": { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints, each with its own control." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } } } };
 var func1 = Object.prototype.hasOwnProperty;
 var func2 = require_ucs2length().default;
 var pattern3 = new RegExp("^[a-z][a-z0-9_]*$", "u");
@@ -1643,7 +1643,107 @@ function validate90(data, { instancePath = "", parentData, parentDataProperty, r
   return errors === 0;
 }
 validate90.evaluated = { "dynamicProps": true, "dynamicItems": false };
-var schema40 = { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+var schema40 = { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far joints are meant to turn, by the joint's name in the chain.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] } } };
+function validate140(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate140.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "min" || key0 === "max")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.min !== void 0) {
+      if (!validate70(data.min, { instancePath: instancePath + "/min", parentData: data, parentDataProperty: "min", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.max !== void 0) {
+      if (!validate70(data.max, { instancePath: instancePath + "/max", parentData: data, parentDataProperty: "max", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err1];
+    } else {
+      vErrors.push(err1);
+    }
+    errors++;
+  }
+  validate140.errors = vErrors;
+  return errors === 0;
+}
+validate140.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate139(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate139.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "rx" || key0 === "ry" || key0 === "rz")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.rx !== void 0) {
+      if (!validate140(data.rx, { instancePath: instancePath + "/rx", parentData: data, parentDataProperty: "rx", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate140.errors : vErrors.concat(validate140.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.ry !== void 0) {
+      if (!validate140(data.ry, { instancePath: instancePath + "/ry", parentData: data, parentDataProperty: "ry", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate140.errors : vErrors.concat(validate140.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rz !== void 0) {
+      if (!validate140(data.rz, { instancePath: instancePath + "/rz", parentData: data, parentDataProperty: "rz", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate140.errors : vErrors.concat(validate140.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err1];
+    } else {
+      vErrors.push(err1);
+    }
+    errors++;
+  }
+  validate139.errors = vErrors;
+  return errors === 0;
+}
+validate139.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
 var pattern12 = new RegExp("^[a-z0-9_]+$", "u");
 function validate131(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
@@ -1841,12 +1941,72 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
         errors = vErrors.length;
       }
     }
+    if (data.limits !== void 0) {
+      let data13 = data.limits;
+      if (data13 && typeof data13 == "object" && !Array.isArray(data13)) {
+        for (const key1 in data13) {
+          const _errs22 = errors;
+          if (typeof key1 === "string") {
+            if (func2(key1) > 60) {
+              const err13 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters", propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err13];
+              } else {
+                vErrors.push(err13);
+              }
+              errors++;
+            }
+            if (!pattern12.test(key1)) {
+              const err14 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err14];
+              } else {
+                vErrors.push(err14);
+              }
+              errors++;
+            }
+          } else {
+            const err15 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key1 };
+            if (vErrors === null) {
+              vErrors = [err15];
+            } else {
+              vErrors.push(err15);
+            }
+            errors++;
+          }
+          var valid5 = _errs22 === errors;
+          if (!valid5) {
+            const err16 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err16];
+            } else {
+              vErrors.push(err16);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data13) {
+          if (!validate139(data13[key2], { instancePath: instancePath + "/limits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data13, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate139.errors : vErrors.concat(validate139.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err17 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err17];
+        } else {
+          vErrors.push(err17);
+        }
+        errors++;
+      }
+    }
   } else {
-    const err13 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err18 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err13];
+      vErrors = [err18];
     } else {
-      vErrors.push(err13);
+      vErrors.push(err18);
     }
     errors++;
   }
@@ -1854,11 +2014,11 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
   return errors === 0;
 }
 validate131.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema41 = { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] } } };
-function validate144(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+var schema43 = { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.", "examples": [["root", "spine.chest", "hips"]] }, "space_follow": { "enum": ["all", "turn"], "default": "all", "description": "all: the chosen space carries the control. turn: it only turns it; place stays with the parent.", "examples": ["turn"] } } };
+function validate152(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate144.evaluated;
+  const evaluated0 = validate152.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -1945,15 +2105,15 @@ function validate144(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate144.errors = vErrors;
+  validate152.errors = vErrors;
   return errors === 0;
 }
-validate144.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema43 = { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." };
-function validate153(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate152.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema45 = { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." };
+function validate161(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate153.evaluated;
+  const evaluated0 = validate161.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -1961,7 +2121,7 @@ function validate153(data, { instancePath = "", parentData, parentDataProperty, 
     evaluated0.items = void 0;
   }
   if (!(data === "move" || data === "turn" || data === "scale" || data === "tx" || data === "ty" || data === "tz" || data === "rx" || data === "ry" || data === "rz" || data === "sx" || data === "sy" || data === "sz")) {
-    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema43.enum }, message: "must be equal to one of the allowed values" };
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema45.enum }, message: "must be equal to one of the allowed values" };
     if (vErrors === null) {
       vErrors = [err0];
     } else {
@@ -1969,14 +2129,14 @@ function validate153(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate153.errors = vErrors;
+  validate161.errors = vErrors;
   return errors === 0;
 }
-validate153.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate155(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate161.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate163(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate155.evaluated;
+  const evaluated0 = validate163.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2027,14 +2187,14 @@ function validate155(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate155.errors = vErrors;
+  validate163.errors = vErrors;
   return errors === 0;
 }
-validate155.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate160(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate163.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate168(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate160.evaluated;
+  const evaluated0 = validate168.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2043,7 +2203,7 @@ function validate160(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!(key0 === "default" || key0 === "min" || key0 === "max" || key0 === "note")) {
+      if (!(key0 === "default" || key0 === "min" || key0 === "max" || key0 === "note" || key0 === "labels")) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -2077,23 +2237,86 @@ function validate160(data, { instancePath = "", parentData, parentDataProperty, 
         errors = vErrors.length;
       }
     }
+    if (data.labels !== void 0) {
+      let data4 = data.labels;
+      if (Array.isArray(data4)) {
+        if (data4.length > 100) {
+          const err1 = { instancePath: instancePath + "/labels", schemaPath: "#/properties/labels/maxItems", keyword: "maxItems", params: { limit: 100 }, message: "must NOT have more than 100 items" };
+          if (vErrors === null) {
+            vErrors = [err1];
+          } else {
+            vErrors.push(err1);
+          }
+          errors++;
+        }
+        if (data4.length < 2) {
+          const err2 = { instancePath: instancePath + "/labels", schemaPath: "#/properties/labels/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+        const len0 = data4.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          let data5 = data4[i0];
+          if (typeof data5 === "string") {
+            if (func2(data5) > 80) {
+              const err3 = { instancePath: instancePath + "/labels/" + i0, schemaPath: "#/properties/labels/items/maxLength", keyword: "maxLength", params: { limit: 80 }, message: "must NOT have more than 80 characters" };
+              if (vErrors === null) {
+                vErrors = [err3];
+              } else {
+                vErrors.push(err3);
+              }
+              errors++;
+            }
+            if (func2(data5) < 1) {
+              const err4 = { instancePath: instancePath + "/labels/" + i0, schemaPath: "#/properties/labels/items/minLength", keyword: "minLength", params: { limit: 1 }, message: "must NOT have fewer than 1 characters" };
+              if (vErrors === null) {
+                vErrors = [err4];
+              } else {
+                vErrors.push(err4);
+              }
+              errors++;
+            }
+          } else {
+            const err5 = { instancePath: instancePath + "/labels/" + i0, schemaPath: "#/properties/labels/items/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err5];
+            } else {
+              vErrors.push(err5);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err6 = { instancePath: instancePath + "/labels", schemaPath: "#/properties/labels/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
   } else {
-    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err7 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err1];
+      vErrors = [err7];
     } else {
-      vErrors.push(err1);
+      vErrors.push(err7);
     }
     errors++;
   }
-  validate160.errors = vErrors;
+  validate168.errors = vErrors;
   return errors === 0;
 }
-validate160.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate141(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate168.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate149(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate141.evaluated;
+  const evaluated0 = validate149.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2102,7 +2325,7 @@ function validate141(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!func1.call(schema41.properties, key0)) {
+      if (!func1.call(schema43.properties, key0)) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -2136,8 +2359,8 @@ function validate141(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.pole_of !== void 0) {
-      if (!validate144(data.pole_of, { instancePath: instancePath + "/pole_of", parentData: data, parentDataProperty: "pole_of", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate144.errors : vErrors.concat(validate144.errors);
+      if (!validate152(data.pole_of, { instancePath: instancePath + "/pole_of", parentData: data, parentDataProperty: "pole_of", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate152.errors : vErrors.concat(validate152.errors);
         errors = vErrors.length;
       }
     }
@@ -2172,7 +2395,7 @@ function validate141(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.shape !== void 0) {
       let data6 = data.shape;
       if (!(data6 === "ring" || data6 === "square" || data6 === "diamond" || data6 === "cross" || data6 === "arrow" || data6 === "ball" || data6 === "box" || data6 === "pin" || data6 === "compass")) {
-        const err4 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema41.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+        const err4 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema43.properties.shape.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err4];
         } else {
@@ -2204,8 +2427,8 @@ function validate141(data, { instancePath = "", parentData, parentDataProperty, 
       if (data10 && typeof data10 == "object" && !Array.isArray(data10)) {
         for (const key1 in data10) {
           const _errs16 = errors;
-          if (!validate153(key1, { instancePath: instancePath + "/channels", parentData: data10, parentDataProperty: "channels", rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate153.errors : vErrors.concat(validate153.errors);
+          if (!validate161(key1, { instancePath: instancePath + "/channels", parentData: data10, parentDataProperty: "channels", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate161.errors : vErrors.concat(validate161.errors);
             errors = vErrors.length;
           }
           var valid1 = _errs16 === errors;
@@ -2220,8 +2443,8 @@ function validate141(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key2 in data10) {
-          if (!validate155(data10[key2], { instancePath: instancePath + "/channels/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data10, parentDataProperty: key2, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate155.errors : vErrors.concat(validate155.errors);
+          if (!validate163(data10[key2], { instancePath: instancePath + "/channels/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data10, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate163.errors : vErrors.concat(validate163.errors);
             errors = vErrors.length;
           }
         }
@@ -2256,8 +2479,8 @@ function validate141(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key4 in data12) {
-          if (!validate160(data12[key4], { instancePath: instancePath + "/attributes/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data12, parentDataProperty: key4, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate160.errors : vErrors.concat(validate160.errors);
+          if (!validate168(data12[key4], { instancePath: instancePath + "/attributes/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data12, parentDataProperty: key4, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate168.errors : vErrors.concat(validate168.errors);
             errors = vErrors.length;
           }
         }
@@ -2271,26 +2494,76 @@ function validate141(data, { instancePath = "", parentData, parentDataProperty, 
         errors++;
       }
     }
+    if (data.spaces !== void 0) {
+      let data14 = data.spaces;
+      if (Array.isArray(data14)) {
+        if (data14.length > 40) {
+          const err9 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/maxItems", keyword: "maxItems", params: { limit: 40 }, message: "must NOT have more than 40 items" };
+          if (vErrors === null) {
+            vErrors = [err9];
+          } else {
+            vErrors.push(err9);
+          }
+          errors++;
+        }
+        if (data14.length < 1) {
+          const err10 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+          if (vErrors === null) {
+            vErrors = [err10];
+          } else {
+            vErrors.push(err10);
+          }
+          errors++;
+        }
+        const len0 = data14.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate88(data14[i0], { instancePath: instancePath + "/spaces/" + i0, parentData: data14, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err11 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err11];
+        } else {
+          vErrors.push(err11);
+        }
+        errors++;
+      }
+    }
+    if (data.space_follow !== void 0) {
+      let data16 = data.space_follow;
+      if (!(data16 === "all" || data16 === "turn")) {
+        const err12 = { instancePath: instancePath + "/space_follow", schemaPath: "#/properties/space_follow/enum", keyword: "enum", params: { allowedValues: schema43.properties.space_follow.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
   } else {
-    const err9 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err13 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err9];
+      vErrors = [err13];
     } else {
-      vErrors.push(err9);
+      vErrors.push(err13);
     }
     errors++;
   }
-  validate141.errors = vErrors;
+  validate149.errors = vErrors;
   return errors === 0;
 }
-validate141.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema46 = { "title": "Solver", "description": "Computes the rotation of several joints at once.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone"], "description": "two_bone: three joints in a row bend so that the last meets the goal.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "The three joints, from root to tip, each the parent of the next.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "Control that the last joint follows.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "Control that the middle joint points at.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "side": { "$ref": "#/$defs/SideOption" } } };
-var schema47 = { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] };
-var pattern14 = new RegExp("^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "u");
-function validate172(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate149.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema48 = { "title": "Solver", "description": "Computes the transform of several joints at once. Which keys it takes depends on its kind.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone", "reach", "spline", "twist", "aim", "foot_roll"], "description": "two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 500, "description": "two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "two_bone, reach: joint or control that the last joint follows. aim: what the joint points at.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "two_bone, reach: control toward which the chain bends. aim: thing that says which way is up; without it the joint turns along the shortest arc.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "two_bone, reach, aim: 0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "stretch": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: 0: bones keep their length, 1: they grow until the end meets the goal. spline: 0: joints keep their distances, 1: they spread over the whole curve.", "examples": ["arm.left.hand.stretch"] }, "stretch_limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "two_bone, reach: greatest factor on the bones' length.", "x-unit": "factor", "examples": [1.5] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "two_bone, reach: share of the chain's length over which the end slows down before full reach. The zone never begins before the reach at rest.", "x-unit": "chain lengths", "examples": [0.05] }, "swing": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: angle by which the bend is swung about the line from start to goal.", "examples": ["arm.left.hand.swing"], "x-unit": "degrees" }, "bias": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "reach: \u22121 to 1: moves the fold from the last bends to the first.", "examples": ["leg.left.foot.lead"] }, "controls": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 2, "maxItems": 100, "description": "spline: the controls whose places shape the curve, from root to tip.", "examples": [["spine.low", "spine.middle", "spine.high"]] }, "volume": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "spline: 0 to 1: how far joints thicken and thin to keep the volume.", "examples": ["spine.high.volume"] }, "shares": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 1, "maxItems": 100, "description": "twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).", "examples": [[0.25, 0.5, 0.75]] }, "bone": { "$ref": "#/$defs/id", "description": "twist: joint at the root of the bone, the parent of the twist joints.", "examples": ["arm.left.elbow"] }, "tip": { "$ref": "#/$defs/id", "description": "twist: joint at the other end of the bone.", "examples": ["arm.left.wrist"] }, "base": { "$ref": "#/$defs/id", "description": "twist: joint or control against which the driver's twist is measured.", "examples": ["arm.left.elbow"] }, "driver": { "$ref": "#/$defs/id", "description": "twist: joint whose twist is spread.", "examples": ["arm.left.wrist"] }, "foot": { "$ref": "#/$defs/id", "description": "foot_roll: control that carries the foot.", "examples": ["leg.left.foot"] }, "ankle": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot moves.", "examples": ["leg.left_roll.ankle"] }, "toes": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot but the ball moves; without it the ankle alone is moved.", "examples": ["leg.left_roll.toes"] }, "heel": { "$ref": "#/$defs/Place", "description": "foot_roll: back of the sole, about which negative roll turns.", "examples": ["heel"] }, "ball": { "$ref": "#/$defs/Place", "description": "foot_roll: ball of the foot, about which roll turns up to the break angle.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "foot_roll: tip of the toes, about which roll turns beyond the break angle.", "examples": ["toe"] }, "inner": { "$ref": "#/$defs/Place", "description": "foot_roll: inner edge of the sole, about which negative bank turns.", "examples": ["inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "foot_roll: outer edge of the sole, about which positive bank turns.", "examples": ["outer"] }, "roll": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive forward.", "examples": ["leg.left.foot.roll"], "x-unit": "degrees" }, "bank": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive outward.", "examples": ["leg.left.foot.bank"], "x-unit": "degrees" }, "break": { "$ref": "#/$defs/NumberOrAttribute", "default": 30, "description": "foot_roll: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "side": { "$ref": "#/$defs/SideOption" } } };
+var schema49 = { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] };
+var pattern15 = new RegExp("^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "u");
+function validate181(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate172.evaluated;
+  const evaluated0 = validate181.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2298,7 +2571,7 @@ function validate172(data, { instancePath = "", parentData, parentDataProperty, 
     evaluated0.items = void 0;
   }
   if (!(typeof data == "number" && isFinite(data)) && typeof data !== "string") {
-    const err0 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: schema47.type }, message: "must be number,string" };
+    const err0 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: schema49.type }, message: "must be number,string" };
     if (vErrors === null) {
       vErrors = [err0];
     } else {
@@ -2316,7 +2589,7 @@ function validate172(data, { instancePath = "", parentData, parentDataProperty, 
       }
       errors++;
     }
-    if (!pattern14.test(data)) {
+    if (!pattern15.test(data)) {
       const err2 = { instancePath, schemaPath: "#/pattern", keyword: "pattern", params: { pattern: "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)" }, message: 'must match pattern "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)"' };
       if (vErrors === null) {
         vErrors = [err2];
@@ -2326,14 +2599,14 @@ function validate172(data, { instancePath = "", parentData, parentDataProperty, 
       errors++;
     }
   }
-  validate172.errors = vErrors;
+  validate181.errors = vErrors;
   return errors === 0;
 }
-validate172.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate168(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate181.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate177(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate168.evaluated;
+  const evaluated0 = validate177.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2342,7 +2615,7 @@ function validate168(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!(key0 === "omit" || key0 === "kind" || key0 === "joints" || key0 === "goal" || key0 === "pole" || key0 === "blend" || key0 === "side")) {
+      if (!func1.call(schema48.properties, key0)) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -2364,8 +2637,9 @@ function validate168(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.kind !== void 0) {
-      if (!(data.kind === "two_bone")) {
-        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema46.properties.kind.enum }, message: "must be equal to one of the allowed values" };
+      let data1 = data.kind;
+      if (!(data1 === "two_bone" || data1 === "reach" || data1 === "spline" || data1 === "twist" || data1 === "aim" || data1 === "foot_roll")) {
+        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema48.properties.kind.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err2];
         } else {
@@ -2377,8 +2651,8 @@ function validate168(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.joints !== void 0) {
       let data2 = data.joints;
       if (Array.isArray(data2)) {
-        if (data2.length > 3) {
-          const err3 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maxItems", keyword: "maxItems", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+        if (data2.length > 500) {
+          const err3 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maxItems", keyword: "maxItems", params: { limit: 500 }, message: "must NOT have more than 500 items" };
           if (vErrors === null) {
             vErrors = [err3];
           } else {
@@ -2386,8 +2660,8 @@ function validate168(data, { instancePath = "", parentData, parentDataProperty, 
           }
           errors++;
         }
-        if (data2.length < 3) {
-          const err4 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+        if (data2.length < 1) {
+          const err4 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
           if (vErrors === null) {
             vErrors = [err4];
           } else {
@@ -2425,8 +2699,210 @@ function validate168(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.blend !== void 0) {
-      if (!validate172(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate172.errors : vErrors.concat(validate172.errors);
+      if (!validate181(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.stretch !== void 0) {
+      if (!validate181(data.stretch, { instancePath: instancePath + "/stretch", parentData: data, parentDataProperty: "stretch", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.stretch_limit !== void 0) {
+      if (!validate70(data.stretch_limit, { instancePath: instancePath + "/stretch_limit", parentData: data, parentDataProperty: "stretch_limit", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.soft !== void 0) {
+      if (!validate70(data.soft, { instancePath: instancePath + "/soft", parentData: data, parentDataProperty: "soft", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.swing !== void 0) {
+      if (!validate181(data.swing, { instancePath: instancePath + "/swing", parentData: data, parentDataProperty: "swing", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.bias !== void 0) {
+      if (!validate181(data.bias, { instancePath: instancePath + "/bias", parentData: data, parentDataProperty: "bias", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.controls !== void 0) {
+      let data12 = data.controls;
+      if (Array.isArray(data12)) {
+        if (data12.length > 100) {
+          const err6 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/maxItems", keyword: "maxItems", params: { limit: 100 }, message: "must NOT have more than 100 items" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        if (data12.length < 2) {
+          const err7 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        const len1 = data12.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          if (!validate88(data12[i1], { instancePath: instancePath + "/controls/" + i1, parentData: data12, parentDataProperty: i1, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err8 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+    }
+    if (data.volume !== void 0) {
+      if (!validate181(data.volume, { instancePath: instancePath + "/volume", parentData: data, parentDataProperty: "volume", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.shares !== void 0) {
+      let data15 = data.shares;
+      if (Array.isArray(data15)) {
+        if (data15.length > 100) {
+          const err9 = { instancePath: instancePath + "/shares", schemaPath: "#/properties/shares/maxItems", keyword: "maxItems", params: { limit: 100 }, message: "must NOT have more than 100 items" };
+          if (vErrors === null) {
+            vErrors = [err9];
+          } else {
+            vErrors.push(err9);
+          }
+          errors++;
+        }
+        if (data15.length < 1) {
+          const err10 = { instancePath: instancePath + "/shares", schemaPath: "#/properties/shares/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+          if (vErrors === null) {
+            vErrors = [err10];
+          } else {
+            vErrors.push(err10);
+          }
+          errors++;
+        }
+        const len2 = data15.length;
+        for (let i2 = 0; i2 < len2; i2++) {
+          if (!validate70(data15[i2], { instancePath: instancePath + "/shares/" + i2, parentData: data15, parentDataProperty: i2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err11 = { instancePath: instancePath + "/shares", schemaPath: "#/properties/shares/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err11];
+        } else {
+          vErrors.push(err11);
+        }
+        errors++;
+      }
+    }
+    if (data.bone !== void 0) {
+      if (!validate88(data.bone, { instancePath: instancePath + "/bone", parentData: data, parentDataProperty: "bone", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.tip !== void 0) {
+      if (!validate88(data.tip, { instancePath: instancePath + "/tip", parentData: data, parentDataProperty: "tip", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.base !== void 0) {
+      if (!validate88(data.base, { instancePath: instancePath + "/base", parentData: data, parentDataProperty: "base", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.driver !== void 0) {
+      if (!validate88(data.driver, { instancePath: instancePath + "/driver", parentData: data, parentDataProperty: "driver", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.foot !== void 0) {
+      if (!validate88(data.foot, { instancePath: instancePath + "/foot", parentData: data, parentDataProperty: "foot", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.ankle !== void 0) {
+      if (!validate88(data.ankle, { instancePath: instancePath + "/ankle", parentData: data, parentDataProperty: "ankle", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.toes !== void 0) {
+      if (!validate88(data.toes, { instancePath: instancePath + "/toes", parentData: data, parentDataProperty: "toes", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.heel !== void 0) {
+      if (!validate95(data.heel, { instancePath: instancePath + "/heel", parentData: data, parentDataProperty: "heel", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.ball !== void 0) {
+      if (!validate95(data.ball, { instancePath: instancePath + "/ball", parentData: data, parentDataProperty: "ball", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.toe !== void 0) {
+      if (!validate95(data.toe, { instancePath: instancePath + "/toe", parentData: data, parentDataProperty: "toe", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.inner !== void 0) {
+      if (!validate95(data.inner, { instancePath: instancePath + "/inner", parentData: data, parentDataProperty: "inner", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.outer !== void 0) {
+      if (!validate95(data.outer, { instancePath: instancePath + "/outer", parentData: data, parentDataProperty: "outer", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.roll !== void 0) {
+      if (!validate181(data.roll, { instancePath: instancePath + "/roll", parentData: data, parentDataProperty: "roll", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.bank !== void 0) {
+      if (!validate181(data.bank, { instancePath: instancePath + "/bank", parentData: data, parentDataProperty: "bank", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.break !== void 0) {
+      if (!validate181(data.break, { instancePath: instancePath + "/break", parentData: data, parentDataProperty: "break", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
         errors = vErrors.length;
       }
     }
@@ -2437,23 +2913,23 @@ function validate168(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
   } else {
-    const err6 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err12 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err6];
+      vErrors = [err12];
     } else {
-      vErrors.push(err6);
+      vErrors.push(err12);
     }
     errors++;
   }
-  validate168.errors = vErrors;
+  validate177.errors = vErrors;
   return errors === 0;
 }
-validate168.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema48 = { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale"], "description": "What is followed: everything, position, rotation or scale.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "side": { "$ref": "#/$defs/SideOption" } } };
-function validate177(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate177.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema50 = { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale", "aim"], "description": "What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "axis": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "aim: axis of the target that points at the sources, when no offset is kept.", "examples": ["+x"] }, "up_axis": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "aim: axis of the target that keeps its direction against up.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/id", "description": "aim: joint or control whose rotation carries the up axis; without it the target turns along the shortest arc.", "examples": ["head.chin"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+function validate209(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate177.evaluated;
+  const evaluated0 = validate209.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2462,7 +2938,7 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!(key0 === "omit" || key0 === "kind" || key0 === "target" || key0 === "sources" || key0 === "blend" || key0 === "keep_offset" || key0 === "side")) {
+      if (!func1.call(schema50.properties, key0)) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -2485,8 +2961,8 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
     }
     if (data.kind !== void 0) {
       let data1 = data.kind;
-      if (!(data1 === "parent" || data1 === "point" || data1 === "orient" || data1 === "scale")) {
-        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema48.properties.kind.enum }, message: "must be equal to one of the allowed values" };
+      if (!(data1 === "parent" || data1 === "point" || data1 === "orient" || data1 === "scale" || data1 === "aim")) {
+        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema50.properties.kind.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err2];
         } else {
@@ -2547,8 +3023,8 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.blend !== void 0) {
-      if (!validate172(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate172.errors : vErrors.concat(validate172.errors);
+      if (!validate181(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
         errors = vErrors.length;
       }
     }
@@ -2561,6 +3037,24 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
           vErrors.push(err6);
         }
         errors++;
+      }
+    }
+    if (data.axis !== void 0) {
+      if (!validate63(data.axis, { instancePath: instancePath + "/axis", parentData: data, parentDataProperty: "axis", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.up_axis !== void 0) {
+      if (!validate63(data.up_axis, { instancePath: instancePath + "/up_axis", parentData: data, parentDataProperty: "up_axis", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.up !== void 0) {
+      if (!validate88(data.up, { instancePath: instancePath + "/up", parentData: data, parentDataProperty: "up", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
       }
     }
     if (data.side !== void 0) {
@@ -2578,15 +3072,212 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate177.errors = vErrors;
+  validate209.errors = vErrors;
   return errors === 0;
 }
-validate177.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema49 = { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } };
-function validate185(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate209.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema51 = { "title": "Driver", "description": "Adds a value that follows a control to a channel of a joint or control.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "input": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "Attribute or channel of a control, as control.attribute.", "examples": ["jaw.open", "leg.left.foot.ty"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control whose channel it moves.", "examples": ["jaw.hinge"] }, "channel": { "enum": ["tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "Channel that it is added to.", "examples": ["rz"] }, "keys": { "type": "array", "items": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 2, "maxItems": 2 }, "minItems": 2, "maxItems": 100, "description": "Curve as pairs of input and output, inputs ascending.", "examples": [[[0, 0], [1, 30]]] }, "curve": { "enum": ["linear", "smooth"], "default": "linear", "description": "How outputs run between keys: straight, or level at each key.", "examples": ["smooth"] }, "beyond": { "enum": ["hold", "extend"], "default": "hold", "description": "Beyond the end keys: hold the last output, or run on straight.", "examples": ["extend"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+var pattern16 = new RegExp("^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "u");
+function validate220(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate185.evaluated;
+  const evaluated0 = validate220.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "omit" || key0 === "input" || key0 === "target" || key0 === "channel" || key0 === "keys" || key0 === "curve" || key0 === "beyond" || key0 === "side")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.input !== void 0) {
+      let data1 = data.input;
+      if (typeof data1 === "string") {
+        if (func2(data1) > 180) {
+          const err2 = { instancePath: instancePath + "/input", schemaPath: "#/properties/input/maxLength", keyword: "maxLength", params: { limit: 180 }, message: "must NOT have more than 180 characters" };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+        if (!pattern16.test(data1)) {
+          const err3 = { instancePath: instancePath + "/input", schemaPath: "#/properties/input/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$" }, message: 'must match pattern "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$"' };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+      } else {
+        const err4 = { instancePath: instancePath + "/input", schemaPath: "#/properties/input/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.target !== void 0) {
+      if (!validate88(data.target, { instancePath: instancePath + "/target", parentData: data, parentDataProperty: "target", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.channel !== void 0) {
+      let data3 = data.channel;
+      if (!(data3 === "tx" || data3 === "ty" || data3 === "tz" || data3 === "rx" || data3 === "ry" || data3 === "rz" || data3 === "sx" || data3 === "sy" || data3 === "sz")) {
+        const err5 = { instancePath: instancePath + "/channel", schemaPath: "#/properties/channel/enum", keyword: "enum", params: { allowedValues: schema51.properties.channel.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.keys !== void 0) {
+      let data4 = data.keys;
+      if (Array.isArray(data4)) {
+        if (data4.length > 100) {
+          const err6 = { instancePath: instancePath + "/keys", schemaPath: "#/properties/keys/maxItems", keyword: "maxItems", params: { limit: 100 }, message: "must NOT have more than 100 items" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        if (data4.length < 2) {
+          const err7 = { instancePath: instancePath + "/keys", schemaPath: "#/properties/keys/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        const len0 = data4.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          let data5 = data4[i0];
+          if (Array.isArray(data5)) {
+            if (data5.length > 2) {
+              const err8 = { instancePath: instancePath + "/keys/" + i0, schemaPath: "#/properties/keys/items/maxItems", keyword: "maxItems", params: { limit: 2 }, message: "must NOT have more than 2 items" };
+              if (vErrors === null) {
+                vErrors = [err8];
+              } else {
+                vErrors.push(err8);
+              }
+              errors++;
+            }
+            if (data5.length < 2) {
+              const err9 = { instancePath: instancePath + "/keys/" + i0, schemaPath: "#/properties/keys/items/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+              if (vErrors === null) {
+                vErrors = [err9];
+              } else {
+                vErrors.push(err9);
+              }
+              errors++;
+            }
+            const len1 = data5.length;
+            for (let i1 = 0; i1 < len1; i1++) {
+              if (!validate70(data5[i1], { instancePath: instancePath + "/keys/" + i0 + "/" + i1, parentData: data5, parentDataProperty: i1, rootData, dynamicAnchors })) {
+                vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+                errors = vErrors.length;
+              }
+            }
+          } else {
+            const err10 = { instancePath: instancePath + "/keys/" + i0, schemaPath: "#/properties/keys/items/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+            if (vErrors === null) {
+              vErrors = [err10];
+            } else {
+              vErrors.push(err10);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err11 = { instancePath: instancePath + "/keys", schemaPath: "#/properties/keys/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err11];
+        } else {
+          vErrors.push(err11);
+        }
+        errors++;
+      }
+    }
+    if (data.curve !== void 0) {
+      let data7 = data.curve;
+      if (!(data7 === "linear" || data7 === "smooth")) {
+        const err12 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema51.properties.curve.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.beyond !== void 0) {
+      let data8 = data.beyond;
+      if (!(data8 === "hold" || data8 === "extend")) {
+        const err13 = { instancePath: instancePath + "/beyond", schemaPath: "#/properties/beyond/enum", keyword: "enum", params: { allowedValues: schema51.properties.beyond.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err13];
+        } else {
+          vErrors.push(err13);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err14 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err14];
+    } else {
+      vErrors.push(err14);
+    }
+    errors++;
+  }
+  validate220.errors = vErrors;
+  return errors === 0;
+}
+validate220.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema52 = { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+function validate226(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate226.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2631,7 +3322,7 @@ function validate185(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.style !== void 0) {
       let data3 = data.style;
       if (!(data3 === "dotted" || data3 === "dashed" || data3 === "solid")) {
-        const err2 = { instancePath: instancePath + "/style", schemaPath: "#/properties/style/enum", keyword: "enum", params: { allowedValues: schema49.properties.style.enum }, message: "must be equal to one of the allowed values" };
+        const err2 = { instancePath: instancePath + "/style", schemaPath: "#/properties/style/enum", keyword: "enum", params: { allowedValues: schema52.properties.style.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err2];
         } else {
@@ -2655,10 +3346,322 @@ function validate185(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate185.errors = vErrors;
+  validate226.errors = vErrors;
   return errors === 0;
 }
-validate185.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+validate226.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate232(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate232.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "omit" || key0 === "mesh" || key0 === "role" || key0 === "side")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.mesh !== void 0) {
+      let data1 = data.mesh;
+      if (typeof data1 === "string") {
+        if (func2(data1) > 200) {
+          const err2 = { instancePath: instancePath + "/mesh", schemaPath: "#/properties/mesh/maxLength", keyword: "maxLength", params: { limit: 200 }, message: "must NOT have more than 200 characters" };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+        if (func2(data1) < 1) {
+          const err3 = { instancePath: instancePath + "/mesh", schemaPath: "#/properties/mesh/minLength", keyword: "minLength", params: { limit: 1 }, message: "must NOT have fewer than 1 characters" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+      } else {
+        const err4 = { instancePath: instancePath + "/mesh", schemaPath: "#/properties/mesh/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err5 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err5];
+    } else {
+      vErrors.push(err5);
+    }
+    errors++;
+  }
+  validate232.errors = vErrors;
+  return errors === 0;
+}
+validate232.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate237(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate237.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "omit" || key0 === "geometry" || key0 === "joints" || key0 === "influences" || key0 === "side")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.geometry !== void 0) {
+      if (!validate88(data.geometry, { instancePath: instancePath + "/geometry", parentData: data, parentDataProperty: "geometry", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.joints !== void 0) {
+      let data2 = data.joints;
+      if (Array.isArray(data2)) {
+        if (data2.length > 2e3) {
+          const err2 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maxItems", keyword: "maxItems", params: { limit: 2e3 }, message: "must NOT have more than 2000 items" };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+        if (data2.length < 1) {
+          const err3 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+        const len0 = data2.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate88(data2[i0], { instancePath: instancePath + "/joints/" + i0, parentData: data2, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err4 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.influences !== void 0) {
+      let data4 = data.influences;
+      if (!(typeof data4 == "number" && (!(data4 % 1) && !isNaN(data4)) && isFinite(data4))) {
+        const err5 = { instancePath: instancePath + "/influences", schemaPath: "#/properties/influences/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+      if (typeof data4 == "number" && isFinite(data4)) {
+        if (data4 > 16 || isNaN(data4)) {
+          const err6 = { instancePath: instancePath + "/influences", schemaPath: "#/properties/influences/maximum", keyword: "maximum", params: { comparison: "<=", limit: 16 }, message: "must be <= 16" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        if (data4 < 1 || isNaN(data4)) {
+          const err7 = { instancePath: instancePath + "/influences", schemaPath: "#/properties/influences/minimum", keyword: "minimum", params: { comparison: ">=", limit: 1 }, message: "must be >= 1" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err8 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err8];
+    } else {
+      vErrors.push(err8);
+    }
+    errors++;
+  }
+  validate237.errors = vErrors;
+  return errors === 0;
+}
+validate237.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate243(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate243.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "omit" || key0 === "geometry" || key0 === "morph" || key0 === "weight" || key0 === "side")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.omit !== void 0) {
+      if (typeof data.omit !== "boolean") {
+        const err1 = { instancePath: instancePath + "/omit", schemaPath: "#/properties/omit/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.geometry !== void 0) {
+      if (!validate88(data.geometry, { instancePath: instancePath + "/geometry", parentData: data, parentDataProperty: "geometry", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.morph !== void 0) {
+      let data2 = data.morph;
+      if (typeof data2 === "string") {
+        if (func2(data2) > 200) {
+          const err2 = { instancePath: instancePath + "/morph", schemaPath: "#/properties/morph/maxLength", keyword: "maxLength", params: { limit: 200 }, message: "must NOT have more than 200 characters" };
+          if (vErrors === null) {
+            vErrors = [err2];
+          } else {
+            vErrors.push(err2);
+          }
+          errors++;
+        }
+        if (func2(data2) < 1) {
+          const err3 = { instancePath: instancePath + "/morph", schemaPath: "#/properties/morph/minLength", keyword: "minLength", params: { limit: 1 }, message: "must NOT have fewer than 1 characters" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+      } else {
+        const err4 = { instancePath: instancePath + "/morph", schemaPath: "#/properties/morph/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.weight !== void 0) {
+      if (!validate181(data.weight, { instancePath: instancePath + "/weight", parentData: data, parentDataProperty: "weight", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err5 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err5];
+    } else {
+      vErrors.push(err5);
+    }
+    errors++;
+  }
+  validate243.errors = vErrors;
+  return errors === 0;
+}
+validate243.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
 var pattern4 = new RegExp("^[a-z][a-z0-9_]*@[1-9][0-9]*$", "u");
 function validate52(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   ;
@@ -3011,8 +4014,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key14 in data18) {
-          if (!validate141(data18[key14], { instancePath: instancePath + "/controls/" + key14.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data18, parentDataProperty: key14, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate141.errors : vErrors.concat(validate141.errors);
+          if (!validate149(data18[key14], { instancePath: instancePath + "/controls/" + key14.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data18, parentDataProperty: key14, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate149.errors : vErrors.concat(validate149.errors);
             errors = vErrors.length;
           }
         }
@@ -3047,8 +4050,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key16 in data20) {
-          if (!validate168(data20[key16], { instancePath: instancePath + "/solvers/" + key16.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data20, parentDataProperty: key16, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate168.errors : vErrors.concat(validate168.errors);
+          if (!validate177(data20[key16], { instancePath: instancePath + "/solvers/" + key16.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data20, parentDataProperty: key16, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate177.errors : vErrors.concat(validate177.errors);
             errors = vErrors.length;
           }
         }
@@ -3083,8 +4086,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key18 in data22) {
-          if (!validate177(data22[key18], { instancePath: instancePath + "/constraints/" + key18.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data22, parentDataProperty: key18, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate177.errors : vErrors.concat(validate177.errors);
+          if (!validate209(data22[key18], { instancePath: instancePath + "/constraints/" + key18.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data22, parentDataProperty: key18, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate209.errors : vErrors.concat(validate209.errors);
             errors = vErrors.length;
           }
         }
@@ -3098,18 +4101,18 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
         errors++;
       }
     }
-    if (data.guide_lines !== void 0) {
-      let data24 = data.guide_lines;
+    if (data.drivers !== void 0) {
+      let data24 = data.drivers;
       if (data24 && typeof data24 == "object" && !Array.isArray(data24)) {
         for (const key19 in data24) {
           const _errs57 = errors;
-          if (!validate88(key19, { instancePath: instancePath + "/guide_lines", parentData: data24, parentDataProperty: "guide_lines", rootData, dynamicAnchors })) {
+          if (!validate88(key19, { instancePath: instancePath + "/drivers", parentData: data24, parentDataProperty: "drivers", rootData, dynamicAnchors })) {
             vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
             errors = vErrors.length;
           }
           var valid19 = _errs57 === errors;
           if (!valid19) {
-            const err26 = { instancePath: instancePath + "/guide_lines", schemaPath: "#/properties/guide_lines/propertyNames", keyword: "propertyNames", params: { propertyName: key19 }, message: "property name must be valid" };
+            const err26 = { instancePath: instancePath + "/drivers", schemaPath: "#/properties/drivers/propertyNames", keyword: "propertyNames", params: { propertyName: key19 }, message: "property name must be valid" };
             if (vErrors === null) {
               vErrors = [err26];
             } else {
@@ -3119,13 +4122,13 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key20 in data24) {
-          if (!validate185(data24[key20], { instancePath: instancePath + "/guide_lines/" + key20.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data24, parentDataProperty: key20, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate185.errors : vErrors.concat(validate185.errors);
+          if (!validate220(data24[key20], { instancePath: instancePath + "/drivers/" + key20.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data24, parentDataProperty: key20, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate220.errors : vErrors.concat(validate220.errors);
             errors = vErrors.length;
           }
         }
       } else {
-        const err27 = { instancePath: instancePath + "/guide_lines", schemaPath: "#/properties/guide_lines/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        const err27 = { instancePath: instancePath + "/drivers", schemaPath: "#/properties/drivers/type", keyword: "type", params: { type: "object" }, message: "must be object" };
         if (vErrors === null) {
           vErrors = [err27];
         } else {
@@ -3134,18 +4137,18 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
         errors++;
       }
     }
-    if (data.notes !== void 0) {
-      let data26 = data.notes;
+    if (data.guide_lines !== void 0) {
+      let data26 = data.guide_lines;
       if (data26 && typeof data26 == "object" && !Array.isArray(data26)) {
         for (const key21 in data26) {
           const _errs62 = errors;
-          if (!validate53(key21, { instancePath: instancePath + "/notes", parentData: data26, parentDataProperty: "notes", rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+          if (!validate88(key21, { instancePath: instancePath + "/guide_lines", parentData: data26, parentDataProperty: "guide_lines", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
             errors = vErrors.length;
           }
           var valid21 = _errs62 === errors;
           if (!valid21) {
-            const err28 = { instancePath: instancePath + "/notes", schemaPath: "#/properties/notes/propertyNames", keyword: "propertyNames", params: { propertyName: key21 }, message: "property name must be valid" };
+            const err28 = { instancePath: instancePath + "/guide_lines", schemaPath: "#/properties/guide_lines/propertyNames", keyword: "propertyNames", params: { propertyName: key21 }, message: "property name must be valid" };
             if (vErrors === null) {
               vErrors = [err28];
             } else {
@@ -3155,30 +4158,49 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key22 in data26) {
-          let data27 = data26[key22];
-          if (typeof data27 !== "string" && !(typeof data27 == "number" && isFinite(data27)) && typeof data27 !== "boolean") {
-            const err29 = { instancePath: instancePath + "/notes/" + key22.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/notes/additionalProperties/type", keyword: "type", params: { type: schema19.properties.notes.additionalProperties.type }, message: "must be string,number,boolean" };
-            if (vErrors === null) {
-              vErrors = [err29];
-            } else {
-              vErrors.push(err29);
-            }
-            errors++;
-          }
-          if (typeof data27 === "string") {
-            if (func2(data27) > 2e3) {
-              const err30 = { instancePath: instancePath + "/notes/" + key22.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/notes/additionalProperties/maxLength", keyword: "maxLength", params: { limit: 2e3 }, message: "must NOT have more than 2000 characters" };
-              if (vErrors === null) {
-                vErrors = [err30];
-              } else {
-                vErrors.push(err30);
-              }
-              errors++;
-            }
+          if (!validate226(data26[key22], { instancePath: instancePath + "/guide_lines/" + key22.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data26, parentDataProperty: key22, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate226.errors : vErrors.concat(validate226.errors);
+            errors = vErrors.length;
           }
         }
       } else {
-        const err31 = { instancePath: instancePath + "/notes", schemaPath: "#/properties/notes/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        const err29 = { instancePath: instancePath + "/guide_lines", schemaPath: "#/properties/guide_lines/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err29];
+        } else {
+          vErrors.push(err29);
+        }
+        errors++;
+      }
+    }
+    if (data.geometry !== void 0) {
+      let data28 = data.geometry;
+      if (data28 && typeof data28 == "object" && !Array.isArray(data28)) {
+        for (const key23 in data28) {
+          const _errs67 = errors;
+          if (!validate88(key23, { instancePath: instancePath + "/geometry", parentData: data28, parentDataProperty: "geometry", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid23 = _errs67 === errors;
+          if (!valid23) {
+            const err30 = { instancePath: instancePath + "/geometry", schemaPath: "#/properties/geometry/propertyNames", keyword: "propertyNames", params: { propertyName: key23 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err30];
+            } else {
+              vErrors.push(err30);
+            }
+            errors++;
+          }
+        }
+        for (const key24 in data28) {
+          if (!validate232(data28[key24], { instancePath: instancePath + "/geometry/" + key24.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data28, parentDataProperty: key24, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate232.errors : vErrors.concat(validate232.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err31 = { instancePath: instancePath + "/geometry", schemaPath: "#/properties/geometry/type", keyword: "type", params: { type: "object" }, message: "must be object" };
         if (vErrors === null) {
           vErrors = [err31];
         } else {
@@ -3187,12 +4209,137 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
         errors++;
       }
     }
+    if (data.skins !== void 0) {
+      let data30 = data.skins;
+      if (data30 && typeof data30 == "object" && !Array.isArray(data30)) {
+        for (const key25 in data30) {
+          const _errs72 = errors;
+          if (!validate88(key25, { instancePath: instancePath + "/skins", parentData: data30, parentDataProperty: "skins", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid25 = _errs72 === errors;
+          if (!valid25) {
+            const err32 = { instancePath: instancePath + "/skins", schemaPath: "#/properties/skins/propertyNames", keyword: "propertyNames", params: { propertyName: key25 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err32];
+            } else {
+              vErrors.push(err32);
+            }
+            errors++;
+          }
+        }
+        for (const key26 in data30) {
+          if (!validate237(data30[key26], { instancePath: instancePath + "/skins/" + key26.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data30, parentDataProperty: key26, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate237.errors : vErrors.concat(validate237.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err33 = { instancePath: instancePath + "/skins", schemaPath: "#/properties/skins/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err33];
+        } else {
+          vErrors.push(err33);
+        }
+        errors++;
+      }
+    }
+    if (data.shapes !== void 0) {
+      let data32 = data.shapes;
+      if (data32 && typeof data32 == "object" && !Array.isArray(data32)) {
+        for (const key27 in data32) {
+          const _errs77 = errors;
+          if (!validate88(key27, { instancePath: instancePath + "/shapes", parentData: data32, parentDataProperty: "shapes", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+          var valid27 = _errs77 === errors;
+          if (!valid27) {
+            const err34 = { instancePath: instancePath + "/shapes", schemaPath: "#/properties/shapes/propertyNames", keyword: "propertyNames", params: { propertyName: key27 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err34];
+            } else {
+              vErrors.push(err34);
+            }
+            errors++;
+          }
+        }
+        for (const key28 in data32) {
+          if (!validate243(data32[key28], { instancePath: instancePath + "/shapes/" + key28.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data32, parentDataProperty: key28, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate243.errors : vErrors.concat(validate243.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err35 = { instancePath: instancePath + "/shapes", schemaPath: "#/properties/shapes/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err35];
+        } else {
+          vErrors.push(err35);
+        }
+        errors++;
+      }
+    }
+    if (data.notes !== void 0) {
+      let data34 = data.notes;
+      if (data34 && typeof data34 == "object" && !Array.isArray(data34)) {
+        for (const key29 in data34) {
+          const _errs82 = errors;
+          if (!validate53(key29, { instancePath: instancePath + "/notes", parentData: data34, parentDataProperty: "notes", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid29 = _errs82 === errors;
+          if (!valid29) {
+            const err36 = { instancePath: instancePath + "/notes", schemaPath: "#/properties/notes/propertyNames", keyword: "propertyNames", params: { propertyName: key29 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err36];
+            } else {
+              vErrors.push(err36);
+            }
+            errors++;
+          }
+        }
+        for (const key30 in data34) {
+          let data35 = data34[key30];
+          if (typeof data35 !== "string" && !(typeof data35 == "number" && isFinite(data35)) && typeof data35 !== "boolean") {
+            const err37 = { instancePath: instancePath + "/notes/" + key30.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/notes/additionalProperties/type", keyword: "type", params: { type: schema19.properties.notes.additionalProperties.type }, message: "must be string,number,boolean" };
+            if (vErrors === null) {
+              vErrors = [err37];
+            } else {
+              vErrors.push(err37);
+            }
+            errors++;
+          }
+          if (typeof data35 === "string") {
+            if (func2(data35) > 2e3) {
+              const err38 = { instancePath: instancePath + "/notes/" + key30.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/notes/additionalProperties/maxLength", keyword: "maxLength", params: { limit: 2e3 }, message: "must NOT have more than 2000 characters" };
+              if (vErrors === null) {
+                vErrors = [err38];
+              } else {
+                vErrors.push(err38);
+              }
+              errors++;
+            }
+          }
+        }
+      } else {
+        const err39 = { instancePath: instancePath + "/notes", schemaPath: "#/properties/notes/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err39];
+        } else {
+          vErrors.push(err39);
+        }
+        errors++;
+      }
+    }
   } else {
-    const err32 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err40 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err32];
+      vErrors = [err40];
     } else {
-      vErrors.push(err32);
+      vErrors.push(err40);
     }
     errors++;
   }
@@ -3200,13 +4347,13 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
   return errors === 0;
 }
 validate52.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var validateHouse = validate191;
-var schema50 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/house/1", "title": "HouseRules", "description": "House rules, format 1: a studio's own standard for containers, roles, names and severities.", "type": "object", "required": ["format", "house", "naming", "roles", "containers"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the house-rules language.", "examples": [1] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60, "description": "Name of the house rules.", "examples": ["tidewrack"] }, "version": { "type": "integer", "minimum": 1, "default": 1, "description": "Version of the house rules.", "examples": [1] }, "title": { "type": "string", "maxLength": 200, "description": "What people call them.", "examples": ["Tidewrack house rules"] }, "naming": { "title": "NamingRules", "description": "How names in the scene are made from ids.", "type": "object", "required": ["pattern"], "additionalProperties": false, "properties": { "pattern": { "type": "array", "minItems": 1, "items": { "enum": ["character", "role", "side", "path", "leaf", "index"] }, "description": "Parts of a name in order; empty ones are left out. path: the id without its side and index. leaf: the last segment of the id. index: the padded number of a counted joint.", "examples": [["character", "side", "path", "index", "role"]] }, "separator": { "type": "string", "pattern": "^[A-Za-z0-9_]{0,3}$", "default": "_", "description": "Text between the parts.", "examples": ["_"] }, "index_digits": { "type": "integer", "minimum": 2, "maximum": 6, "default": 2, "description": "Least count of digits in an index.", "examples": [2] }, "sides": { "type": "object", "additionalProperties": false, "description": "Text for each side.", "properties": { "left": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "l", "description": "Text for the left side.", "examples": ["l"] }, "right": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "r", "description": "Text for the right side.", "examples": ["r"] }, "centre": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "", "description": "Text for the centre.", "examples": ["c"] } }, "examples": [{ "left": "l", "right": "r", "centre": "c" }] }, "longest": { "type": "integer", "minimum": 8, "maximum": 255, "default": 64, "description": "Longest name allowed, in characters.", "examples": [64] } } }, "roles": { "description": "What things are for. The compiler itself uses carrier, control, skin, guide_line and note.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Role" } }, "containers": { "description": "The container tree.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Container" } }, "severities": { "description": "Changes the severity of findings, by code. An error of the language itself stays an error.", "type": "object", "additionalProperties": { "enum": ["error", "warning", "info", "off"] }, "default": {}, "examples": [{ "landmark-unused": "off" }] } }, "$defs": { "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "line": { "type": "string", "maxLength": 200 }, "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 } } };
-var pattern16 = new RegExp("^[A-Za-z0-9_]{0,3}$", "u");
-function validate193(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+var validateHouse = validate249;
+var schema56 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/house/1", "title": "HouseRules", "description": "House rules, format 1: a studio's own standard for containers, roles, names and severities.", "type": "object", "required": ["format", "house", "naming", "roles", "containers"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the house-rules language.", "examples": [1] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60, "description": "Name of the house rules.", "examples": ["tidewrack"] }, "version": { "type": "integer", "minimum": 1, "default": 1, "description": "Version of the house rules.", "examples": [1] }, "title": { "type": "string", "maxLength": 200, "description": "What people call them.", "examples": ["Tidewrack house rules"] }, "naming": { "title": "NamingRules", "description": "How names in the scene are made from ids.", "type": "object", "required": ["pattern"], "additionalProperties": false, "properties": { "pattern": { "type": "array", "minItems": 1, "items": { "enum": ["character", "role", "side", "path", "leaf", "index"] }, "description": "Parts of a name in order; empty ones are left out. path: the id without its side and index. leaf: the last segment of the id. index: the padded number of a counted joint.", "examples": [["character", "side", "path", "index", "role"]] }, "separator": { "type": "string", "pattern": "^[A-Za-z0-9_]{0,3}$", "default": "_", "description": "Text between the parts.", "examples": ["_"] }, "index_digits": { "type": "integer", "minimum": 2, "maximum": 6, "default": 2, "description": "Least count of digits in an index.", "examples": [2] }, "sides": { "type": "object", "additionalProperties": false, "description": "Text for each side.", "properties": { "left": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "l", "description": "Text for the left side.", "examples": ["l"] }, "right": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "r", "description": "Text for the right side.", "examples": ["r"] }, "centre": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "", "description": "Text for the centre.", "examples": ["c"] } }, "examples": [{ "left": "l", "right": "r", "centre": "c" }] }, "longest": { "type": "integer", "minimum": 8, "maximum": 255, "default": 64, "description": "Longest name allowed, in characters.", "examples": [64] } } }, "roles": { "description": "What things are for. The compiler itself uses carrier, control, skin, guide_line and note.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Role" } }, "containers": { "description": "The container tree.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Container" } }, "severities": { "description": "Changes the severity of findings, by code. An error of the language itself stays an error.", "type": "object", "additionalProperties": { "enum": ["error", "warning", "info", "off"] }, "default": {}, "examples": [{ "landmark-unused": "off" }] } }, "$defs": { "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "line": { "type": "string", "maxLength": 200 }, "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 } } };
+var pattern18 = new RegExp("^[A-Za-z0-9_]{0,3}$", "u");
+function validate251(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate193.evaluated;
+  const evaluated0 = validate251.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3241,14 +4388,14 @@ function validate193(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate193.errors = vErrors;
+  validate251.errors = vErrors;
   return errors === 0;
 }
-validate193.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate195(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate251.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate253(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate195.evaluated;
+  const evaluated0 = validate253.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3274,14 +4421,14 @@ function validate195(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate195.errors = vErrors;
+  validate253.errors = vErrors;
   return errors === 0;
 }
-validate195.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate192(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate253.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate250(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate192.evaluated;
+  const evaluated0 = validate250.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3332,8 +4479,8 @@ function validate192(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.container !== void 0) {
-      if (!validate193(data.container, { instancePath: instancePath + "/container", parentData: data, parentDataProperty: "container", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate193.errors : vErrors.concat(validate193.errors);
+      if (!validate251(data.container, { instancePath: instancePath + "/container", parentData: data, parentDataProperty: "container", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate251.errors : vErrors.concat(validate251.errors);
         errors = vErrors.length;
       }
     }
@@ -3360,8 +4507,8 @@ function validate192(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.title !== void 0) {
-      if (!validate195(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate195.errors : vErrors.concat(validate195.errors);
+      if (!validate253(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate253.errors : vErrors.concat(validate253.errors);
         errors = vErrors.length;
       }
     }
@@ -3374,14 +4521,14 @@ function validate192(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate192.errors = vErrors;
+  validate250.errors = vErrors;
   return errors === 0;
 }
-validate192.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate198(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate250.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate256(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate198.evaluated;
+  const evaluated0 = validate256.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3401,8 +4548,8 @@ function validate198(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.parent !== void 0) {
-      if (!validate193(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate193.errors : vErrors.concat(validate193.errors);
+      if (!validate251(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate251.errors : vErrors.concat(validate251.errors);
         errors = vErrors.length;
       }
     }
@@ -3430,8 +4577,8 @@ function validate198(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.title !== void 0) {
-      if (!validate195(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate195.errors : vErrors.concat(validate195.errors);
+      if (!validate253(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate253.errors : vErrors.concat(validate253.errors);
         errors = vErrors.length;
       }
     }
@@ -3444,15 +4591,15 @@ function validate198(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate198.errors = vErrors;
+  validate256.errors = vErrors;
   return errors === 0;
 }
-validate198.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate191(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate256.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate249(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   ;
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate191.evaluated;
+  const evaluated0 = validate249.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3642,7 +4789,7 @@ function validate191(data, { instancePath = "", parentData, parentDataProperty, 
             for (let i0 = 0; i0 < len0; i0++) {
               let data6 = data5[i0];
               if (!(data6 === "character" || data6 === "role" || data6 === "side" || data6 === "path" || data6 === "leaf" || data6 === "index")) {
-                const err17 = { instancePath: instancePath + "/naming/pattern/" + i0, schemaPath: "#/properties/naming/properties/pattern/items/enum", keyword: "enum", params: { allowedValues: schema50.properties.naming.properties.pattern.items.enum }, message: "must be equal to one of the allowed values" };
+                const err17 = { instancePath: instancePath + "/naming/pattern/" + i0, schemaPath: "#/properties/naming/properties/pattern/items/enum", keyword: "enum", params: { allowedValues: schema56.properties.naming.properties.pattern.items.enum }, message: "must be equal to one of the allowed values" };
                 if (vErrors === null) {
                   vErrors = [err17];
                 } else {
@@ -3664,7 +4811,7 @@ function validate191(data, { instancePath = "", parentData, parentDataProperty, 
         if (data4.separator !== void 0) {
           let data7 = data4.separator;
           if (typeof data7 === "string") {
-            if (!pattern16.test(data7)) {
+            if (!pattern18.test(data7)) {
               const err19 = { instancePath: instancePath + "/naming/separator", schemaPath: "#/properties/naming/properties/separator/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]{0,3}$" }, message: 'must match pattern "^[A-Za-z0-9_]{0,3}$"' };
               if (vErrors === null) {
                 vErrors = [err19];
@@ -3910,8 +5057,8 @@ function validate191(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key4 in data14) {
-          if (!validate192(data14[key4], { instancePath: instancePath + "/roles/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data14, parentDataProperty: key4, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate192.errors : vErrors.concat(validate192.errors);
+          if (!validate250(data14[key4], { instancePath: instancePath + "/roles/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data14, parentDataProperty: key4, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate250.errors : vErrors.concat(validate250.errors);
             errors = vErrors.length;
           }
         }
@@ -3961,8 +5108,8 @@ function validate191(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key6 in data16) {
-          if (!validate198(data16[key6], { instancePath: instancePath + "/containers/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key6, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate198.errors : vErrors.concat(validate198.errors);
+          if (!validate256(data16[key6], { instancePath: instancePath + "/containers/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key6, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate256.errors : vErrors.concat(validate256.errors);
             errors = vErrors.length;
           }
         }
@@ -3982,7 +5129,7 @@ function validate191(data, { instancePath = "", parentData, parentDataProperty, 
         for (const key7 in data18) {
           let data19 = data18[key7];
           if (!(data19 === "error" || data19 === "warning" || data19 === "info" || data19 === "off")) {
-            const err47 = { instancePath: instancePath + "/severities/" + key7.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/severities/additionalProperties/enum", keyword: "enum", params: { allowedValues: schema50.properties.severities.additionalProperties.enum }, message: "must be equal to one of the allowed values" };
+            const err47 = { instancePath: instancePath + "/severities/" + key7.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/severities/additionalProperties/enum", keyword: "enum", params: { allowedValues: schema56.properties.severities.additionalProperties.enum }, message: "must be equal to one of the allowed values" };
             if (vErrors === null) {
               vErrors = [err47];
             } else {
@@ -4010,10 +5157,10 @@ function validate191(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate191.errors = vErrors;
+  validate249.errors = vErrors;
   return errors === 0;
 }
-validate191.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+validate249.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
 export {
   validateHouse,
   validateRecipe

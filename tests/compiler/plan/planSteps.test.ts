@@ -46,10 +46,14 @@ describe('planSteps', () => {
         tx: { locked: true, min: null, max: 4 },
         ry: { locked: false, min: -10, max: 10 },
       },
-      attributes: [{ name: 'reach', default: 1, min: 0, max: 1 }],
+      attributes: [{ name: 'reach', default: 1, min: 0, max: 1, labels: null, note: null }],
     });
     expect(planSteps(rigOf([knob])).slice(2)).toEqual([
-      { verb: 'attr', name: 'a', values: { name: 'reach', default: 1, min: 0, max: 1 } },
+      {
+        verb: 'attr',
+        name: 'a',
+        values: { name: 'reach', default: 1, min: 0, max: 1, labels: null, note: null },
+      },
       { verb: 'lock', name: 'a', values: { channels: ['tx', 'sx'] } },
       { verb: 'limit', name: 'a', values: { channel: 'tx', min: null, max: 4 } },
       { verb: 'limit', name: 'a', values: { channel: 'ry', min: -10, max: 10 } },

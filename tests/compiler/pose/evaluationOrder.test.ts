@@ -28,6 +28,10 @@ const solver: RigSolver = {
   goal: 'goal',
   pole: 'pole',
   blend: 1,
+  stretch: 0,
+  stretchLimit: 1,
+  soft: 0,
+  swing: 0,
 };
 
 const limb = [

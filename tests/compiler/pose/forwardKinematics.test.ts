@@ -151,7 +151,9 @@ describe('channels and attributes', () => {
 
   it('are not fooled by names that every object knows', () => {
     const rig = rigOf([
-      control('constructor', { attributes: [{ name: 'length', default: 0, min: null, max: null }] }),
+      control('constructor', {
+        attributes: [{ name: 'length', default: 0, min: null, max: null, labels: null, note: null }],
+      }),
     ]);
     expect((worldOf(rig, {}).get('constructor') ?? []).slice(12, 15)).toEqual([0, 0, 0]);
     expect((worldOf(rig, JSON.parse('{"__proto__": {"tx": 3}}')).get('constructor') ?? [])[12]).toBe(0);

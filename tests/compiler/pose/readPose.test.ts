@@ -11,7 +11,7 @@ const rig = rigOf([
       tx: { locked: false, min: -1, max: null },
       sy: { locked: true, min: null, max: null },
     },
-    attributes: [{ name: 'reach', default: 1, min: 0, max: 1 }],
+    attributes: [{ name: 'reach', default: 1, min: 0, max: 1, labels: null, note: null }],
   }),
   joint('wrist'),
 ]);

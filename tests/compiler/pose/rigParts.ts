@@ -25,7 +25,7 @@ export function group(name: string, options: NodeOptions = {}): GroupNode {
 }
 
 export function joint(name: string, options: NodeOptions = {}): JointNode {
-  return { ...base(name, options), kind: 'joint', order: 'xyz' };
+  return { ...base(name, options), kind: 'joint', order: 'xyz', limits: {} };
 }
 
 export function control(
@@ -41,10 +41,7 @@ export function line(name: string, from: string, to: string, options: NodeOption
 }
 
 /** A sound rig of the given nodes and links, in an upright scene. */
-export function rigOf(
-  nodes: readonly RigNode[],
-  links: Partial<Pick<Rig, 'constraints' | 'solvers'>> = {},
-): Rig {
+export function rigOf(nodes: readonly RigNode[], links: Partial<Omit<Rig, 'scene' | 'nodes'>> = {}): Rig {
   return {
     scene: {
       character: 'test',
@@ -60,5 +57,9 @@ export function rigOf(
     nodes,
     constraints: links.constraints ?? [],
     solvers: links.solvers ?? [],
+    spaces: links.spaces ?? [],
+    drivers: links.drivers ?? [],
+    skins: links.skins ?? [],
+    shapes: links.shapes ?? [],
   };
 }

@@ -1,11 +1,43 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { add, cross, distance, dot, length, normalise, rejectFrom, scale, sub } from '@/compiler/math/vec3';
-import { solveTwoBone, type TwoBoneInput } from '@/compiler/pose/twoBone';
+import { type RestReach, solveTwoBone } from '@/compiler/pose/twoBone';
 import type { Vec3 } from '@/compiler/rig/Rig';
 import { direction } from '../math/arbitraries';
 import { expectNear } from '../math/expectNear';
 import { readReference } from '../math/readReference';
+
+interface Input {
+  readonly start: Vec3;
+  readonly goal: Vec3;
+  readonly pole: Vec3;
+  readonly upper: number;
+  readonly lower: number;
+  readonly restReach: RestReach | null;
+  readonly swivel: number;
+  readonly restDirection: Vec3;
+  readonly restBend: Vec3;
+}
+
+/** The solver works in place; the tests read plain tuples. */
+function solve(input: Input): { readonly mid: Vec3; readonly end: Vec3; readonly normal: Vec3 } {
+  const out = { mid: new Float64Array(3), end: new Float64Array(3), normal: new Float64Array(3) };
+  const vec = (v: Vec3): Float64Array => Float64Array.from(v);
+  solveTwoBone(
+    {
+      ...input,
+      start: vec(input.start),
+      goal: vec(input.goal),
+      pole: vec(input.pole),
+      restDirection: vec(input.restDirection),
+      restBend: vec(input.restBend),
+      asked: distance(input.start, input.goal),
+    },
+    out,
+  );
+  const tuple = (v: Float64Array): Vec3 => [v[0] as number, v[1] as number, v[2] as number];
+  return { mid: tuple(out.mid), end: tuple(out.end), normal: tuple(out.normal) };
+}
 
 const plain = { swivel: 0, restReach: null, restDirection: [1, 0, 0], restBend: [0, 0, 1] } as const;
 
@@ -25,7 +57,7 @@ describe('against worked examples', () => {
   const { cases } = readReference<{ cases: readonly PoleCase[] }>('two_bone_pole.json');
 
   it.each(cases)('root $root, target $target, pole $pole', (one) => {
-    const solution = solveTwoBone({
+    const solution = solve({
       ...plain,
       start: one.root,
       goal: one.target,
@@ -51,7 +83,7 @@ describe('against worked examples', () => {
     const degenerate = cases.filter(({ degenerate_pole }) => degenerate_pole);
     expect(degenerate).toHaveLength(1);
     for (const one of degenerate) {
-      const { mid } = solveTwoBone({
+      const { mid } = solve({
         ...plain,
         start: one.root,
         goal: one.target,
@@ -85,7 +117,7 @@ describe('against worked examples', () => {
         const across = rejectFrom([elbow[0], elbow[1], 0], normalise(goal));
         // A straight or folded arm has no elbow side; any pole will do.
         const side: Vec3 = length(across) > 1e-9 ? normalise(across) : normalise([-y, x, 0]);
-        const input: TwoBoneInput = {
+        const input: Input = {
           ...plain,
           start: [0, 0, 0],
           goal,
@@ -93,7 +125,7 @@ describe('against worked examples', () => {
           upper: one.l1,
           lower: one.l2,
         };
-        const solution = solveTwoBone(input);
+        const solution = solve(input);
         expectNear(solution.mid, [elbow[0], elbow[1], 0], 1e-9);
         expectNear(solution.end, goal, 1e-9);
       }
@@ -104,7 +136,7 @@ describe('against worked examples', () => {
     const beyond = planar.filter(({ reachable }) => !reachable);
     for (const { l1, l2, target } of beyond) {
       const goal: Vec3 = [target[0], target[1], 0];
-      const { end } = solveTwoBone({
+      const { end } = solve({
         ...plain,
         start: [0, 0, 0],
         goal,
@@ -129,7 +161,7 @@ const reachable = fc
     poleAway: direction,
     swivel: fc.double({ min: -3, max: 3, noNaN: true }),
   })
-  .map(({ start, upper, lower, toward, share, poleAway, swivel }): TwoBoneInput => {
+  .map(({ start, upper, lower, toward, share, poleAway, swivel }): Input => {
     const least = Math.abs(upper - lower);
     const d = least + (upper + lower - least) * share;
     const goal = add(start, scale(normalise(toward), d));
@@ -149,7 +181,7 @@ describe('always', () => {
   it('keeps both lengths and meets a goal within reach', () => {
     fc.assert(
       fc.property(reachable, (input) => {
-        const { mid, end } = solveTwoBone(input);
+        const { mid, end } = solve(input);
         const size = input.upper + input.lower;
         expect(Math.abs(distance(input.start, mid) - input.upper)).toBeLessThan(size * 1e-9);
         expect(Math.abs(distance(mid, end) - input.lower)).toBeLessThan(size * 1e-9);
@@ -161,7 +193,7 @@ describe('always', () => {
   it('bends into the half plane of the pole when there is no swivel', () => {
     fc.assert(
       fc.property(ordinary, (input) => {
-        const { mid, normal } = solveTwoBone({ ...input, swivel: 0 });
+        const { mid, normal } = solve({ ...input, swivel: 0 });
         const along = normalise(sub(input.goal, input.start));
         const bend = rejectFrom(sub(mid, input.start), along);
         const toPole = sub(input.pole, input.start);
@@ -178,8 +210,8 @@ describe('always', () => {
     fc.assert(
       fc.property(ordinary, (input) => {
         const { start, goal, pole, swivel, restDirection, restBend } = input;
-        const { mid, end } = solveTwoBone(input);
-        const mirrored = solveTwoBone({
+        const { mid, end } = solve(input);
+        const mirrored = solve({
           ...input,
           start: mirror(start),
           goal: mirror(goal),
@@ -196,7 +228,7 @@ describe('always', () => {
 
   it('moves little when the goal moves little, up to full reach and beyond', () => {
     const at = (x: number): Vec3 =>
-      solveTwoBone({ ...plain, start: [0, 0, 0], goal: [x, 0, 0], pole: [1, 0, 9], upper: 1, lower: 1 }).mid;
+      solve({ ...plain, start: [0, 0, 0], goal: [x, 0, 0], pole: [1, 0, 9], upper: 1, lower: 1 }).mid;
     for (let x = 1.9; x < 2.1; x += 0.001) {
       // The bend goes with the square root of what is left: sqrt(2 · 0.001) at most for this step.
       expect(distance(at(x), at(x + 0.001))).toBeLessThan(0.05);
@@ -221,7 +253,7 @@ describe('always', () => {
           [1, 0.5],
           [0.5, 1],
         ] as const) {
-          const { mid, end, normal } = solveTwoBone({ ...plain, start: [0, 0, 0], goal, pole, upper, lower });
+          const { mid, end, normal } = solve({ ...plain, start: [0, 0, 0], goal, pole, upper, lower });
           expect(length(mid)).toBeCloseTo(upper, 9);
           expect(distance(mid, end)).toBeCloseTo(lower, 9);
           expect(length(normal)).toBeCloseTo(1, 9);
@@ -231,7 +263,7 @@ describe('always', () => {
   });
 
   it('finds a bend even when the rest bend lies on the line as well', () => {
-    const { mid } = solveTwoBone({
+    const { mid } = solve({
       ...plain,
       start: [0, 0, 0],
       goal: [0, 0, 1.5],

@@ -33,7 +33,7 @@ const ROWS: readonly Row[] = [
     'unknown-key',
     'wombat',
     'There is no key "wombat" here.',
-    'Keys here are "format", "recipe", "title", "house", "extends", "params", "scene", "landmarks", "roles", "containers", "parts", "chains" and 5 more.',
+    'Keys here are "format", "recipe", "title", "house", "extends", "params", "scene", "landmarks", "roles", "containers", "parts", "chains" and 9 more.',
     ['wombat'],
   ),
   row(
@@ -239,12 +239,12 @@ const ROWS: readonly Row[] = [
   ),
   row(
     'list with too many entries',
-    'solvers: { s: { joints: [a, b, c, d] } }',
+    'parts: { s: { kind: limb, points: [a, b, c, d] } }',
     'list-size',
     '[a, b, c, d]',
-    '"joints" of "s" has 4 entries, where at most 3 are needed.',
+    '"points" of "s" has 4 entries, where at most 3 are needed.',
     'Write at most 3.',
-    ['solvers/s'],
+    ['parts/s'],
   ),
   row(
     'map with too few entries',

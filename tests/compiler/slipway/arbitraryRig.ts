@@ -4,6 +4,7 @@ import type {
   Axis,
   Channel,
   ChannelRule,
+  JointNode,
   NumberOrAttribute,
   Rig,
   RigAttribute,
@@ -78,13 +79,21 @@ const channels = fc
   .array(fc.tuple(fc.constantFrom(...CHANNEL_NAMES), rule), { maxLength: 4 })
   .map((entries): Readonly<Partial<Record<Channel, ChannelRule>>> => Object.fromEntries(entries));
 
+const limits = fc
+  .array(fc.tuple(fc.constantFrom('rx', 'ry', 'rz'), range), { maxLength: 2 })
+  .map((entries): JointNode['limits'] => Object.fromEntries(entries));
+
 const attributes: fc.Arbitrary<readonly RigAttribute[]> = fc.uniqueArray(
-  fc.tuple(text, range, number).map(([name, { min, max }, value]) => ({
-    name,
-    default: Math.min(Math.max(value, min ?? -Infinity), max ?? Infinity),
-    min,
-    max,
-  })),
+  fc
+    .tuple(text, range, number, fc.option(fc.array(text, { maxLength: 3 })), fc.option(text))
+    .map(([name, { min, max }, value, labels, note]) => ({
+      name,
+      default: Math.min(Math.max(value, min ?? -Infinity), max ?? Infinity),
+      min,
+      max,
+      labels,
+      note,
+    })),
   { maxLength: 3, selector: ({ name }) => name },
 );
 
@@ -108,7 +117,7 @@ const scene: fc.Arbitrary<RigScene> = fc.record({
 });
 
 const seed = fc.record({
-  kind: fc.constantFrom<RigNode['kind']>('group', 'joint', 'control', 'line', 'note'),
+  kind: fc.constantFrom<RigNode['kind']>('group', 'joint', 'control', 'line', 'note', 'geometry'),
   name: text,
   id: text,
   above: fc.nat(),
@@ -123,6 +132,7 @@ const seed = fc.record({
   shape: fc.constantFrom(...SHAPE_NAMES),
   size: number,
   channels,
+  limits,
   attributes,
   entries,
   ends: fc.tuple(fc.nat(), fc.nat()),
@@ -138,7 +148,7 @@ function nodeOf(one: Seed, before: readonly RigNode[]): RigNode {
   const base = { id, name, parent, container, role, side, at, turn, shown, selectable };
   switch (one.kind) {
     case 'joint':
-      return { ...base, kind: 'joint', order: rotationOrder };
+      return { ...base, kind: 'joint', order: rotationOrder, limits: one.limits };
     case 'control': {
       const { shape, size, channels: rules, attributes: own } = one;
       return {
@@ -156,6 +166,8 @@ function nodeOf(one: Seed, before: readonly RigNode[]): RigNode {
     case 'line':
       if (before.length === 0) return { ...base, kind: 'group' };
       return { ...base, kind: 'line', from: pick(one.ends[0]), to: pick(one.ends[1]), style: one.style };
+    case 'geometry':
+      return { ...base, kind: 'geometry', mesh: one.container };
     default:
       return { ...base, kind: 'group' };
   }
@@ -164,7 +176,8 @@ function nodeOf(one: Seed, before: readonly RigNode[]): RigNode {
 const linkSeed = fc.record({
   name: text,
   id: text,
-  kind: fc.constantFrom<RigConstraint['kind']>('parent', 'point', 'orient', 'scale'),
+  kind: fc.constantFrom<RigConstraint['kind']>('parent', 'point', 'orient', 'scale', 'aim'),
+  axes: fc.tuple(axis, axis).filter(([first, second]) => first[1] !== second[1]),
   target: fc.nat(),
   sources: fc.array(
     fc.tuple(
@@ -206,18 +219,80 @@ function constraintsOf(seeds: readonly LinkSeed[], nodes: readonly RigNode[]): r
       weight,
     }));
     const blend = sources.length === 2 && one.blend !== 0 ? blendOf(one, nodes) : null;
-    return [
-      {
-        id: one.id,
-        name: one.name,
-        kind: one.kind,
-        target: node.name,
-        sources,
-        blend,
-        keepOffset: one.keepOffset,
-      },
-    ];
+    const { id, name, kind, keepOffset } = one;
+    const base = { id, name, target: node.name, sources, blend, keepOffset };
+    const [main, upAxis] = one.axes;
+    const up = one.byAttribute ? null : (sources[0]?.node ?? null);
+    return [kind === 'aim' ? { ...base, kind, axis: main, upAxis, up } : { ...base, kind }];
   });
+}
+
+type OtherLinks = Pick<Rig, 'spaces' | 'drivers' | 'skins' | 'shapes'>;
+
+/** Spaces, drivers, skins and shapes on whatever controls and meshes there are. */
+function otherLinksOf(
+  seeds: readonly LinkSeed[],
+  nodes: readonly RigNode[],
+  isFree: (link: { readonly name: string }) => boolean,
+): OtherLinks {
+  const control = nodes.find((node) => node.kind === 'control' && node.attributes.length > 0);
+  const geometry = nodes.find(({ kind }) => kind === 'geometry');
+  const joints = nodes.filter(({ kind }) => kind === 'joint').map(({ name }) => name);
+  const attribute = (control?.kind === 'control' ? control.attributes[0]?.name : undefined) ?? '';
+  const links = seeds.map((one) => ({ id: one.id, name: `${one.name}\u0002`, seed: one })).filter(isFree);
+  const [space, driver, skin, shape] = links;
+  const first = nodes[0]?.name ?? '';
+  return {
+    spaces:
+      space === undefined || control === undefined
+        ? []
+        : [
+            {
+              id: space.id,
+              name: space.name,
+              control: control.name,
+              attribute,
+              sources: [first],
+              follow: space.seed.keepOffset ? 'all' : 'turn',
+            },
+          ],
+    drivers:
+      driver === undefined || control === undefined
+        ? []
+        : [
+            {
+              id: driver.id,
+              name: driver.name,
+              control: control.name,
+              input: driver.seed.keepOffset ? attribute : 'ty',
+              target: first,
+              channel: 'rz',
+              inputs: [-1, 0.1, 2],
+              outputs: driver.seed.sources
+                .map(([, weight]) => weight)
+                .concat([0, 0, 0])
+                .slice(0, 3),
+              curve: driver.seed.byAttribute ? 'smooth' : 'linear',
+              beyond: driver.seed.keepOffset ? 'hold' : 'extend',
+            },
+          ],
+    skins:
+      skin === undefined || geometry === undefined || joints.length === 0
+        ? []
+        : [{ id: skin.id, name: skin.name, geometry: geometry.name, joints, influences: 4 }],
+    shapes:
+      shape === undefined || geometry === undefined
+        ? []
+        : [
+            {
+              id: shape.id,
+              name: shape.name,
+              geometry: geometry.name,
+              morph: shape.id,
+              weight: blendOf(shape.seed, nodes),
+            },
+          ],
+  };
 }
 
 /** A solver on the first three joints that hang in a row, when goal and pole can stand before them. */
@@ -239,6 +314,10 @@ function solversOf(one: LinkSeed, nodes: readonly RigNode[]): readonly RigSolver
         goal: goal.name,
         pole: goal.name,
         blend: blendOf(one, nodes),
+        stretch: blendOf(one, nodes),
+        stretchLimit: 1.5,
+        soft: 0.25,
+        swing: blendOf(one, nodes),
       },
     ];
   }
@@ -260,7 +339,7 @@ function limbOf(nodes: readonly RigNode[]): readonly RigNode[] {
       at: [1, 0, 0.25],
       turn: [0, 0, 0, 1],
     } as const;
-    joints.push({ ...base, shown: true, selectable: true, kind: 'joint', order: 'xyz' });
+    joints.push({ ...base, shown: true, selectable: true, kind: 'joint', order: 'xyz', limits: {} });
   }
   return joints;
 }
@@ -283,7 +362,7 @@ export const arbitraryRig: fc.Arbitrary<Rig> = fc
       !taken.has(name) && Boolean(taken.add(name));
     const constraints = constraintsOf(links, nodes).filter(isFree);
     const solvers = solversOf(solver, nodes).filter(isFree);
-    const rig: Rig = { scene: opened, nodes, constraints, solvers };
+    const rig: Rig = { scene: opened, nodes, constraints, solvers, ...otherLinksOf(links, nodes, isFree) };
     // A middle joint that follows something the solver has moved would wait for itself.
-    return findEvaluationRing(rig) === null ? rig : { ...rig, constraints: [] };
+    return findEvaluationRing(rig) === null ? rig : { ...rig, constraints: [], spaces: [] };
   });

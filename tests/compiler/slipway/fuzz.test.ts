@@ -4,6 +4,7 @@ import { emitScript } from '@/compiler/emit/emitScript';
 import { MAXIMUM_FINDINGS } from '@/compiler/findings/FindingList';
 import { planSteps } from '@/compiler/plan/planSteps';
 import { runScript } from '@/compiler/slipway/runScript';
+import { VERBS } from '@/compiler/slipway/verbs';
 import { arbitraryRig } from './arbitraryRig';
 import { make, SCENE, seal } from './scripts';
 
@@ -14,8 +15,11 @@ function expectOrderly(text: string): void {
   expect(findings.length).toBeLessThanOrEqual(MAXIMUM_FINDINGS + 1);
   if (rig !== null) {
     // Whatever a script without findings makes is in the rig.
-    const made = rig.nodes.length + rig.constraints.length + rig.solvers.length;
-    expect(made).toBe(text.match(/^(group|joint|control|note|line|constrain|solve) /gm)?.length ?? 0);
+    const { scene: _, ...lists } = rig;
+    const made = Object.values(lists).reduce((count, list) => count + list.length, 0);
+    const makers = Object.entries(VERBS).filter(([verb, { name }]) => name === 'new' && verb !== 'scene');
+    const lines = new RegExp(`^(${makers.map(([verb]) => verb).join('|')}) `, 'gm');
+    expect(made).toBe(text.match(lines)?.length ?? 0);
   }
   for (const { span, message, help } of findings) {
     expect(span.start).toBeGreaterThanOrEqual(0);

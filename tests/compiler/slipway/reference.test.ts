@@ -24,7 +24,6 @@ describe('the reference', () => {
       optional ? `${key}?` : key,
       typeof kind === 'string' ? kind : kind.join(', '),
     ]);
-    // A solver has one kind so far, which the table shows as the one word.
     expect(keysInReference(verb)).toEqual(expected);
   });
 

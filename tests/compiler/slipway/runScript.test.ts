@@ -258,8 +258,11 @@ describe('solvers', () => {
     make.joint('e', 'm'),
     make.joint('f', 'e'),
   ];
-  const solve = (name: string, joints: string, rest = 'goal="g" pole="g" blend=1'): string =>
-    `solve "${name}" id="${name}" kind=two_bone ${joints} ${rest}`;
+  const solve = (
+    name: string,
+    joints: string,
+    rest = 'goal="g" pole="g" blend=1 stretch=0 stretch_limit=1 soft=0 swing=0',
+  ): string => `two_bone "${name}" id="${name}" ${joints} ${rest}`;
 
   it('take three joints in a row', () => {
     expect(findingsOf(...nodes, solve('ik', 'start="s" mid="m" end="e"'))).toEqual([]);

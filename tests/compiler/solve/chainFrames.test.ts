@@ -29,6 +29,7 @@ const chain = (over: Partial<ChainSpecification> = {}): ChainSpecification => ({
   mirror: 'behaviour',
   orient: { rule: 'chain', aim: '+x', up: '+y', toward: null },
   order: 'xyz',
+  limits: {},
   ...over,
 });
 
