@@ -83,7 +83,7 @@ export function compile(request: CompileRequest): Compilation {
   const expanded = expandRecipe(recipe, context);
   const resolved = resolveRecipe(recipe, expanded, character, context);
   const solved = solveRecipe(resolved, context);
-  runRules(recipe, resolved, context);
+  runRules(recipe, resolved, solved, context);
 
   const recipeHash = sha256Hex(
     canonicalJson({ recipe: merged.value, params: request.character?.params ?? {} }),

@@ -11,26 +11,36 @@ import type {
 } from '../expand/types';
 import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import type { FindingDeclaration } from '../findings/catalogue';
-import type { RelatedPlace } from '../findings/Finding';
+import type { Fix, RelatedPlace } from '../findings/Finding';
 import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
+import type { SolvedRecipe } from '../solve/types';
 import type { Path } from '../syntax/types';
+import type { Lineage } from './Lineage';
 import type { ExpressionNames } from './namesInExpressions';
 
 /** What a rule may read and how it speaks. Rules cannot change anything. */
 export interface RuleContext {
   readonly recipe: EvaluatedRecipe;
   readonly resolved: ResolvedRecipe;
+  /** Rest places in the scene's axes and unit; what could not be placed is missing. */
+  readonly solved: SolvedRecipe;
   readonly stage: ResolveContext;
   /** False when entries were refused: then nothing can be called missing or unused. */
   readonly isWhole: boolean;
+  /** Who hangs beneath whom, measured when first asked for. */
+  lineage(): Lineage;
   /** Names that expressions read, listed when first asked for. */
   expressionNames(): ExpressionNames;
   /** Reports the rule's own code at a path of the recipe. */
   report(
     path: Path,
     parameters: Readonly<Record<string, string | number>>,
-    more?: { readonly part?: 'key' | 'value'; readonly related?: readonly RelatedPlace[] },
+    more?: {
+      readonly part?: 'key' | 'value';
+      readonly related?: readonly RelatedPlace[];
+      readonly fix?: Fix;
+    },
   ): void;
 }
 
@@ -49,7 +59,7 @@ export interface RuleHandlers {
 }
 
 /** What a rule is about, for the list of rules in the handbook. */
-export type RuleCategory = 'animator' | 'structure' | 'motion' | 'tidiness';
+export type RuleCategory = 'animator' | 'structure' | 'motion' | 'geometry' | 'tidiness';
 
 /** One lint rule. Its file name is its code; its page lies beside it. */
 export interface Rule extends FindingDeclaration {

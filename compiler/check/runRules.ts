@@ -2,23 +2,37 @@ import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import { fillTemplate } from '../findings/FindingList';
 import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
+import type { SolvedRecipe } from '../solve/types';
+import { Lineage } from './Lineage';
 import { type ExpressionNames, namesInExpressions } from './namesInExpressions';
 import { RULES } from './rules/index';
 
 /** Runs every rule over the resolved recipe in one walk. */
-export function runRules(recipe: EvaluatedRecipe, resolved: ResolvedRecipe, stage: ResolveContext): void {
+export function runRules(
+  recipe: EvaluatedRecipe,
+  resolved: ResolvedRecipe,
+  solved: SolvedRecipe,
+  stage: ResolveContext,
+): void {
   let names: ExpressionNames | null = null;
   const expressionNames = (): ExpressionNames => {
     names ??= namesInExpressions(stage.document.value);
     return names;
   };
+  let measured: Lineage | null = null;
+  const lineage = (): Lineage => {
+    measured ??= new Lineage(resolved);
+    return measured;
+  };
   const handlers = RULES.map((rule) =>
     rule.create({
       recipe,
       resolved,
+      solved,
       stage,
       isWhole: stage.poisoned.size === 0,
       expressionNames,
+      lineage,
       report(path, parameters, more = {}) {
         stage.findings.add({
           code: rule.code,
@@ -27,6 +41,7 @@ export function runRules(recipe: EvaluatedRecipe, resolved: ResolvedRecipe, stag
           span: stage.document.spanAt(path, more.part ?? 'value'),
           related: more.related ?? [],
           help: fillTemplate(rule.help, parameters),
+          ...(more.fix ? { fix: more.fix } : {}),
         });
       },
     }),
