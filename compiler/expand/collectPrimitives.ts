@@ -16,6 +16,7 @@ import { mirrorId, sideOfId } from './sides';
 
 type Collected = { readonly [C in Collection]: Map<string, Sided<PrimitiveEntries[C]>> };
 type SideOption = Side | 'both';
+type Parts = Readonly<Record<string, PartEntry>>;
 
 function emptyCollections(): Collected {
   return Object.fromEntries(COLLECTIONS.map((collection) => [collection, new Map()])) as unknown as Collected;
@@ -55,13 +56,41 @@ function mirrorMade(made: MadePrimitives, left: Vec3): MadePrimitives {
   return copy as MadePrimitives;
 }
 
-function addPart(into: Collected, id: string, part: PartEntry, left: Vec3): void {
+/** What a part does to what other parts make, once all of them are written out. */
+interface Adjustment {
+  readonly part: string;
+  readonly adjusts: MadePrimitives;
+  readonly side: Side;
+}
+
+function addPart(
+  into: Collected,
+  adjustments: Adjustment[],
+  id: string,
+  parts: Parts,
+  part: PartEntry,
+  left: Vec3,
+): void {
   const option: SideOption = ('side' in part ? part.side : undefined) ?? sideOfId(id);
   const [first, second] = sidedIds(id, option);
   if (!first) return;
-  const made = expandPart(first, part);
+  const made = expandPart({ ...first, parts }, part);
+  const { adjusts = {} } = made;
   addMade(into, made, first.side, id);
-  if (second) addMade(into, mirrorMade(made, left), second.side, id);
+  adjustments.push({ part: id, adjusts, side: first.side });
+  if (!second) return;
+  addMade(into, mirrorMade(made, left), second.side, id);
+  adjustments.push({ part: id, adjusts: mirrorMade(adjusts, left), side: second.side });
+}
+
+function applyAdjustment(into: Collected, { part, adjusts, side }: Adjustment): void {
+  for (const collection of COLLECTIONS) {
+    const target = into[collection] as Map<string, Sided<PrimitiveEntries[Collection]>>;
+    for (const [id, entry] of Object.entries(adjusts[collection] ?? {})) {
+      // A part that is adjusted but not there has a finding of its own where it is named.
+      if (target.has(id)) addEntry(target, { id, side }, entry, ['parts', part]);
+    }
+  }
 }
 
 /** Merges an author's entry onto what a part made under the same id, or adds it as new. */
@@ -116,9 +145,12 @@ export function collectPrimitives(
 ): Collected {
   const collected = emptyCollections();
   const isPoisoned = (place: string): boolean => poisoned.has(place);
-  for (const [id, part] of Object.entries(recipe.parts ?? {})) {
-    if (!isPoisoned(`parts/${id}`)) addPart(collected, id, part, left);
+  const parts: Parts = recipe.parts ?? {};
+  const adjustments: Adjustment[] = [];
+  for (const [id, part] of Object.entries(parts)) {
+    if (!isPoisoned(`parts/${id}`)) addPart(collected, adjustments, id, parts, part, left);
   }
+  for (const adjustment of adjustments) applyAdjustment(collected, adjustment);
   for (const collection of COLLECTIONS) {
     const into = collected[collection] as Map<string, Sided<PrimitiveEntries[Collection]>>;
     addEntries(into, collection, recipe[collection] ?? {}, left, isPoisoned);

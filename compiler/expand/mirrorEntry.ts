@@ -17,6 +17,7 @@ const POINT_KEYS: ReadonlySet<string> = new Set([
 const REFERENCE_KEYS: ReadonlySet<string> = new Set([
   'parent',
   'align',
+  'like',
   'spaces',
   'target',
   'goal',

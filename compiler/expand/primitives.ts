@@ -48,6 +48,9 @@ export type MadePrimitives = {
   readonly [C in Collection]?: Readonly<Record<string, PrimitiveEntries[C]>>;
 };
 
+/** What one part makes, and how it changes what other parts make: merged onto it, or leaving it out by `omit`. */
+export type MadePart = MadePrimitives & { readonly adjusts?: MadePrimitives };
+
 /** One primitive on one side, with where it came from. */
 export interface Sided<E> {
   readonly id: string;

@@ -29,7 +29,7 @@ function specifyOrient(
     );
     up = aim[1] === 'y' ? '+z' : '+y';
   }
-  return { rule: orient.rule ?? 'chain', aim, up, toward: orient.toward ?? null };
+  return { rule: orient.rule ?? 'chain', aim, up, toward: orient.toward ?? null, like: orient.like ?? null };
 }
 
 const TURNS = ['rx', 'ry', 'rz'] as const;

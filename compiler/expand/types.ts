@@ -13,8 +13,15 @@ import type {
 } from '../rig/Rig';
 import type { Path } from '../syntax/types';
 
-/** A landmark or joint by name, or a point in the scene's axes and unit. */
-export type PlaceReference = string | Vec3;
+/** A point on the line between two landmarks or joints. */
+export interface BetweenPlace {
+  readonly from: string;
+  readonly to: string;
+  readonly share?: number;
+}
+
+/** A landmark or joint by name, a point in the scene's axes and unit, or a point between two. */
+export type PlaceReference = string | Vec3 | BetweenPlace;
 
 /** What every primitive carries after expansion: it stands on one side only and knows where it was written. */
 export interface Specification {
@@ -43,6 +50,8 @@ export interface ChainSpecification extends Specification {
     readonly aim: Axis;
     readonly up: Axis;
     readonly toward: Vec3 | null;
+    /** Joint whose frame all joints take. */
+    readonly like: string | null;
   };
   readonly order: RotationOrder;
   /** By the joint's name in the chain, in degrees from rest. */

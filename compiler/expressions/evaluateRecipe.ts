@@ -34,7 +34,16 @@ const POINT_KEYS: ReadonlySet<string> = new Set([
   'toe',
   'inner',
   'outer',
+  'look',
+  'crown',
+  'along',
+  'from',
+  'to',
 ]);
+/** Keys whose list holds whole points, where a text is one of them. */
+const POINT_LIST_KEYS: ReadonlySet<string> = new Set(['points', 'via', 'tips']);
+/** Keys of maps of such lists. */
+const POINT_MAP_KEYS: ReadonlySet<string> = new Set(['digits']);
 /** Keys with words for people, which are never expressions. */
 const PROSE_KEYS: ReadonlySet<string> = new Set(['note', 'title', 'mesh', 'morph', 'labels']);
 
@@ -110,8 +119,11 @@ class RecipeEvaluator {
 
   #wantedAt(path: Path, key: string): Wanted {
     const isListItem = typeof path[path.length - 1] === 'number';
-    // A text in `points` stands for a whole point; a text in a list of three numbers for one of them.
-    if (isListItem) return key === 'points' && typeof path[path.length - 2] !== 'number' ? 'point' : 'number';
+    if (isListItem) {
+      // A text in `points` stands for a whole point; a text in a list of three numbers for one of them.
+      const holdsPoints = POINT_LIST_KEYS.has(key) || POINT_MAP_KEYS.has(String(path[path.length - 3]));
+      return holdsPoints && typeof path[path.length - 2] !== 'number' ? 'point' : 'number';
+    }
     return POINT_KEYS.has(key) ? 'point' : 'number';
   }
 

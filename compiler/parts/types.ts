@@ -1,10 +1,12 @@
-import type { MadePrimitives, PartEntry } from '../expand/primitives';
+import type { MadePart, PartEntry } from '../expand/primitives';
 import type { Side } from '../rig/Rig';
 
 /** Who the part is: its id with the side it is made for, e.g. `arm.left`. */
 export interface PartContext {
   readonly id: string;
   readonly side: Side;
+  /** All parts of the recipe by the ids they were written under, for parts that build on others. */
+  readonly parts: Readonly<Record<string, PartEntry>>;
 }
 
 /**
@@ -14,4 +16,4 @@ export interface PartContext {
 export type ExpandPart<Kind extends PartEntry['kind']> = (
   context: PartContext,
   part: Extract<PartEntry, { readonly kind: Kind }>,
-) => MadePrimitives;
+) => MadePart;

@@ -201,6 +201,9 @@ export function checkReferences(
   };
 
   recipe.controls.forEach(checkPlace);
+  for (const chain of recipe.chains) {
+    if (chain.orient.like !== null) isJoint(chain, chain.orient.like, ['orient', 'like']);
+  }
   return {
     chains: recipe.chains
       .filter((chain) => things.joints.get(chain.jointIds[0] ?? '')?.chain === chain)

@@ -8,7 +8,7 @@ import {
   type Specification,
 } from '../expand/types';
 import { IDENTITY_QUAT } from '../math/quat';
-import { distance } from '../math/vec3';
+import { distance, mix } from '../math/vec3';
 import { orderByReads } from '../order/orderByReads';
 import { type ResolveContext, reportUnknown } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
@@ -69,16 +69,21 @@ export class PlaceSolver {
 
   /** The chains and controls that must be placed before this one. */
   #ownersRead(owner: Owner): readonly Owner[] {
-    const joint = (reference: PlaceReference): Owner | undefined =>
-      typeof reference !== 'string' || this.recipe.landmarks.has(reference)
-        ? undefined
-        : this.#chainOfJoint.get(reference);
+    const named = (id: string): Owner | undefined =>
+      this.recipe.landmarks.has(id) ? undefined : this.#chainOfJoint.get(id);
+    const joints = (reference: PlaceReference): readonly (Owner | undefined)[] => {
+      if (typeof reference === 'string') return [named(reference)];
+      return 'from' in reference ? [named(reference.from), named(reference.to)] : [];
+    };
     const thing = (id: string): Owner | undefined => this.#chainOfJoint.get(id) ?? this.#controls.get(id);
     const read: (Owner | undefined)[] = [];
-    if ('jointIds' in owner) read.push(...owner.points.map(joint));
+    if ('jointIds' in owner) {
+      read.push(...owner.points.flatMap(joints));
+      if (owner.orient.like !== null) read.push(thing(owner.orient.like));
+    }
     else {
       const { place, align } = owner;
-      if (place.kind === 'place') read.push(joint(place.at));
+      if (place.kind === 'place') read.push(...joints(place.at));
       else read.push(...place.joints.map(thing));
       if (align !== null) read.push(thing(align));
     }
@@ -91,7 +96,12 @@ export class PlaceSolver {
 
   /** The world position of a landmark (on the owner's side), a joint or a literal point. */
   #positionOf(reference: PlaceReference, owner: Specification, keys: Path): Vec3 | null {
-    if (typeof reference !== 'string') return reference;
+    if (typeof reference !== 'string') {
+      if (!('from' in reference)) return reference;
+      const from = this.#positionOf(reference.from, owner, [...keys, 'from']);
+      const to = this.#positionOf(reference.to, owner, [...keys, 'to']);
+      return from && to ? mix(from, to, reference.share ?? 0.5) : null;
+    }
     const landmark = this.recipe.landmarks.get(reference);
     if (landmark) return owner.side === 'right' ? landmark.right : landmark.left;
     if (this.#chainOfJoint.has(reference)) return this.places.get(reference)?.position ?? null;
@@ -106,7 +116,10 @@ export class PlaceSolver {
     if (points.some((point) => point === null)) return;
     const positions = this.#jointPositions(chain, points as Vec3[]);
     if (!positions) return;
-    const frames = chainFrames(chain, positions, this.recipe.scene);
+    const like = chain.orient.like === null ? undefined : this.places.get(chain.orient.like)?.turn;
+    // A frame that could not be found was reported where it is missing.
+    if (chain.orient.like !== null && !like) return;
+    const frames = like ? positions.map(() => like) : chainFrames(chain, positions, this.recipe.scene);
     chain.jointIds.forEach((id, index) => {
       const position = positions[index];
       if (position) this.places.set(id, { position, turn: frames[index] ?? IDENTITY_QUAT });

@@ -436,7 +436,7 @@ export const recipeSchema = {
     },
     "Place": {
       "title": "Place",
-      "description": "A landmark or joint by name, or a point.",
+      "description": "A landmark or joint by name, a point, or a point between two of them.",
       "anyOf": [
         {
           "type": "array",
@@ -458,6 +458,9 @@ export const recipeSchema = {
           "type": "string",
           "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)",
           "maxLength": 2000
+        },
+        {
+          "$ref": "#/$defs/Between"
         }
       ],
       "examples": [
@@ -466,7 +469,12 @@ export const recipeSchema = {
           0,
           51,
           0
-        ]
+        ],
+        {
+          "from": "shoulder",
+          "to": "elbow",
+          "share": 0.5
+        }
       ]
     },
     "SideOption": {
@@ -784,13 +792,43 @@ export const recipeSchema = {
       },
       "oneOf": [
         {
+          "$ref": "#/$defs/AxlePart"
+        },
+        {
+          "$ref": "#/$defs/ClaviclePart"
+        },
+        {
+          "$ref": "#/$defs/EyePart"
+        },
+        {
+          "$ref": "#/$defs/FootPart"
+        },
+        {
+          "$ref": "#/$defs/HandPart"
+        },
+        {
+          "$ref": "#/$defs/JawPart"
+        },
+        {
+          "$ref": "#/$defs/LegThreePart"
+        },
+        {
           "$ref": "#/$defs/LimbPart"
+        },
+        {
+          "$ref": "#/$defs/NeckHeadPart"
         },
         {
           "$ref": "#/$defs/RootPart"
         },
         {
+          "$ref": "#/$defs/SpinePart"
+        },
+        {
           "$ref": "#/$defs/StrandPart"
+        },
+        {
+          "$ref": "#/$defs/WingPart"
         }
       ]
     },
@@ -841,6 +879,13 @@ export const recipeSchema = {
               1,
               0
             ]
+          ]
+        },
+        "like": {
+          "$ref": "#/$defs/id",
+          "description": "Joint whose frame every joint of the chain takes, in place of frames of its own.",
+          "examples": [
+            "arm.left.elbow"
           ]
         }
       },
@@ -1986,9 +2031,876 @@ export const recipeSchema = {
         }
       }
     },
+    "Between": {
+      "title": "Between",
+      "description": "A point on the line between two others.",
+      "type": "object",
+      "required": [
+        "from",
+        "to"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "from": {
+          "type": "string",
+          "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$",
+          "maxLength": 120,
+          "description": "Landmark or joint at its start.",
+          "examples": [
+            "shoulder"
+          ]
+        },
+        "to": {
+          "type": "string",
+          "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$",
+          "maxLength": 120,
+          "description": "Landmark or joint at its end.",
+          "examples": [
+            "elbow"
+          ]
+        },
+        "share": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0.5,
+          "description": "How far along, from 0 to 1.",
+          "examples": [
+            0.25
+          ]
+        }
+      },
+      "examples": [
+        {
+          "from": "shoulder",
+          "to": "elbow",
+          "share": 0.5
+        }
+      ]
+    },
+    "AxlePart": {
+      "title": "AxlePart",
+      "description": "One joint that turns about, swings on or slides along a line: a wheel, a hinge or a slider, with a control that has that one freedom.",
+      "type": "object",
+      "required": [
+        "kind",
+        "at",
+        "along"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "axle",
+          "description": "A moving part of a prop."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that it hangs on.",
+          "examples": [
+            "body"
+          ]
+        },
+        "at": {
+          "$ref": "#/$defs/Place",
+          "description": "Where it sits.",
+          "examples": [
+            "wheel"
+          ]
+        },
+        "along": {
+          "$ref": "#/$defs/Place",
+          "description": "A second place on the line that it turns about or slides along.",
+          "examples": [
+            "wheel_out"
+          ]
+        },
+        "motion": {
+          "enum": [
+            "wheel",
+            "hinge",
+            "slider"
+          ],
+          "default": "hinge",
+          "description": "wheel: turns without end. hinge: turns within limits. slider: moves along the line.",
+          "examples": [
+            "hinge"
+          ]
+        },
+        "min": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0,
+          "description": "hinge, slider: least turn or shift.",
+          "examples": [
+            -90
+          ],
+          "x-unit": "degrees or scene unit"
+        },
+        "max": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 90,
+          "description": "hinge, slider: greatest turn or shift.",
+          "examples": [
+            90
+          ],
+          "x-unit": "degrees or scene unit"
+        },
+        "roll_with": {
+          "type": "string",
+          "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$",
+          "maxLength": 180,
+          "description": "wheel: channel of a control, as control.tz, with whose way the wheel rolls. Needs radius.",
+          "examples": [
+            "root.tz"
+          ]
+        },
+        "radius": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "wheel: radius, for rolling; below zero rolls the other way.",
+          "examples": [
+            12
+          ],
+          "x-unit": "scene unit"
+        },
+        "shape": {
+          "enum": [
+            "ring",
+            "square",
+            "diamond",
+            "cross",
+            "arrow",
+            "ball",
+            "box",
+            "pin",
+            "compass"
+          ],
+          "default": "ring",
+          "description": "Shape of the control.",
+          "examples": [
+            "ring"
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        }
+      }
+    },
+    "ClaviclePart": {
+      "title": "ClaviclePart",
+      "description": "One bone between body and limb, with a control that turns it.",
+      "type": "object",
+      "required": [
+        "kind",
+        "points"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "clavicle",
+          "description": "A collar bone, shoulder blade or hip girdle."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that it hangs on.",
+          "examples": [
+            "spine.chest"
+          ]
+        },
+        "points": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 2,
+          "maxItems": 2,
+          "description": "Root and end.",
+          "examples": [
+            [
+              "clavicle",
+              "shoulder"
+            ]
+          ]
+        },
+        "names": {
+          "type": "array",
+          "items": {
+            "type": "string",
+            "pattern": "^[a-z][a-z0-9_]*$",
+            "maxLength": 60
+          },
+          "minItems": 2,
+          "maxItems": 2,
+          "description": "Names of the two joints. Without it they take their landmarks' names, else root and end.",
+          "examples": [
+            [
+              "root",
+              "end"
+            ]
+          ]
+        },
+        "limits": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/JointLimits"
+          },
+          "default": {},
+          "description": "How far the root turns, by its name; the control is limited alike.",
+          "examples": [
+            {
+              "clavicle": {
+                "rz": {
+                  "min": -20,
+                  "max": 40
+                }
+              }
+            }
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
+    "EyePart": {
+      "title": "EyePart",
+      "description": "An eyeball that points at a control of its own in front of it; a pair hangs on one control that both follow.",
+      "type": "object",
+      "required": [
+        "kind",
+        "at",
+        "look"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "eye",
+          "description": "An eye."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the eye sits in.",
+          "examples": [
+            "head.head"
+          ]
+        },
+        "at": {
+          "$ref": "#/$defs/Place",
+          "description": "Centre of the eyeball.",
+          "examples": [
+            "eye"
+          ]
+        },
+        "look": {
+          "$ref": "#/$defs/Place",
+          "description": "Where the eye's target control stands at rest.",
+          "examples": [
+            "gaze"
+          ]
+        },
+        "pair": {
+          "$ref": "#/$defs/id",
+          "description": "Control that the target follows, so that a pair of eyes looks at one thing.",
+          "examples": [
+            "gaze"
+          ]
+        },
+        "limits": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/JointLimits"
+          },
+          "default": {},
+          "description": "How far the eyeball is meant to turn, under the name ball.",
+          "examples": [
+            {
+              "ball": {
+                "ry": {
+                  "min": -35,
+                  "max": 35
+                },
+                "rx": {
+                  "min": -25,
+                  "max": 25
+                }
+              }
+            }
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        }
+      }
+    },
+    "FootPart": {
+      "title": "FootPart",
+      "description": "A foot at the end of a leg: ball and toe joints, and attributes on the leg's goal control that roll it over heel, ball and toe and bank it over its edges.",
+      "type": "object",
+      "required": [
+        "kind",
+        "leg",
+        "ball",
+        "toe",
+        "heel",
+        "inner",
+        "outer"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "foot",
+          "description": "A foot that rolls."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "leg": {
+          "$ref": "#/$defs/id",
+          "description": "Part of kind limb or leg_three that the foot is the end of.",
+          "examples": [
+            "leg"
+          ]
+        },
+        "ball": {
+          "$ref": "#/$defs/Place",
+          "description": "Ball of the foot.",
+          "examples": [
+            "ball"
+          ]
+        },
+        "toe": {
+          "$ref": "#/$defs/Place",
+          "description": "Tip of the toes.",
+          "examples": [
+            "toe"
+          ]
+        },
+        "heel": {
+          "$ref": "#/$defs/Place",
+          "description": "Back of the sole.",
+          "examples": [
+            "heel"
+          ]
+        },
+        "inner": {
+          "$ref": "#/$defs/Place",
+          "description": "Inner edge of the sole.",
+          "examples": [
+            "foot_inner"
+          ]
+        },
+        "outer": {
+          "$ref": "#/$defs/Place",
+          "description": "Outer edge of the sole.",
+          "examples": [
+            "foot_outer"
+          ]
+        },
+        "break": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 30,
+          "description": "Value at rest of the attribute toe_break: roll at which the toes begin to lift.",
+          "examples": [
+            30
+          ],
+          "x-unit": "degrees"
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
+    "HandPart": {
+      "title": "HandPart",
+      "description": "Digits that are turned joint by joint, and one control that curls, spreads and cups them together.",
+      "type": "object",
+      "required": [
+        "kind",
+        "parent",
+        "digits"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "hand",
+          "description": "A hand or claw with any count of digits."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint that the digits hang on.",
+          "examples": [
+            "arm.left.wrist"
+          ]
+        },
+        "at": {
+          "$ref": "#/$defs/Place",
+          "description": "Where the hand's control stands; without it, at the parent.",
+          "examples": [
+            "palm"
+          ]
+        },
+        "digits": {
+          "type": "object",
+          "propertyNames": {
+            "$ref": "#/$defs/word"
+          },
+          "additionalProperties": {
+            "type": "array",
+            "items": {
+              "$ref": "#/$defs/Place"
+            },
+            "minItems": 2,
+            "maxItems": 12,
+            "description": "Places of the digit's joints, from its root to its tip.",
+            "examples": [
+              [
+                "index_1",
+                "index_2",
+                "index_3",
+                "index_tip"
+              ]
+            ]
+          },
+          "minProperties": 1,
+          "description": "Digits by name, in their order across the hand.",
+          "examples": [
+            {
+              "index": [
+                "index_1",
+                "index_2",
+                "index_3",
+                "index_tip"
+              ]
+            }
+          ]
+        },
+        "curl": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 70,
+          "description": "Turn of each joint at curl 1.",
+          "examples": [
+            70
+          ],
+          "x-unit": "degrees"
+        },
+        "spread": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 20,
+          "description": "Turn of the outermost digits away from the middle at spread 1.",
+          "examples": [
+            20
+          ],
+          "x-unit": "degrees"
+        },
+        "cup": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 15,
+          "description": "Turn of the outermost digits' roots about their length at cup 1.",
+          "examples": [
+            15
+          ],
+          "x-unit": "degrees"
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "orient": {
+          "$ref": "#/$defs/Orient"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
+    "JawPart": {
+      "title": "JawPart",
+      "description": "One bone that opens about a hinge: a control that turns and shifts it, with an attribute that opens it.",
+      "type": "object",
+      "required": [
+        "kind",
+        "points"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "jaw",
+          "description": "A jaw or beak."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the jaw hangs on.",
+          "examples": [
+            "head.head"
+          ]
+        },
+        "points": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 2,
+          "maxItems": 2,
+          "description": "Hinge and tip.",
+          "examples": [
+            [
+              "jaw_hinge",
+              "chin"
+            ]
+          ]
+        },
+        "names": {
+          "type": "array",
+          "items": {
+            "type": "string",
+            "pattern": "^[a-z][a-z0-9_]*$",
+            "maxLength": 60
+          },
+          "minItems": 2,
+          "maxItems": 2,
+          "description": "Names of the two joints. Without it they take their landmarks' names, else hinge and tip.",
+          "examples": [
+            [
+              "hinge",
+              "tip"
+            ]
+          ]
+        },
+        "open": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 25,
+          "description": "Turn about the hinge at open 1; its sign says which way.",
+          "examples": [
+            -25
+          ],
+          "x-unit": "degrees"
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "orient": {
+          "$ref": "#/$defs/Orient"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
+    "LegThreePart": {
+      "title": "LegThreePart",
+      "description": "Four joints in a row with three bones, as of a hind leg: joint-by-joint controls, a goal control with a reach solver that folds all bends together, a pole vector control, a blend between the two ways, and an attribute that moves the fold between knee and hock.",
+      "type": "object",
+      "required": [
+        "kind",
+        "points"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "leg_three",
+          "description": "A leg that bends twice."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the leg hangs on.",
+          "examples": [
+            "hips"
+          ]
+        },
+        "points": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 4,
+          "maxItems": 4,
+          "description": "Hip, knee, hock and end.",
+          "examples": [
+            [
+              "hip",
+              "knee",
+              "hock",
+              "paw"
+            ]
+          ]
+        },
+        "names": {
+          "type": "array",
+          "items": {
+            "type": "string",
+            "pattern": "^[a-z][a-z0-9_]*$",
+            "maxLength": 60
+          },
+          "minItems": 4,
+          "maxItems": 4,
+          "description": "Names of the four joints. Without it they take their landmarks' names, else upper, middle, lower, end.",
+          "examples": [
+            [
+              "hip",
+              "knee",
+              "hock",
+              "paw"
+            ]
+          ]
+        },
+        "goal": {
+          "$ref": "#/$defs/word",
+          "default": "goal",
+          "description": "Name of the goal control.",
+          "examples": [
+            "paw"
+          ]
+        },
+        "goal_parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that goal and pole follow; without it they follow the root only.",
+          "examples": [
+            "hips"
+          ]
+        },
+        "pole": {
+          "type": "object",
+          "additionalProperties": false,
+          "description": "The pole vector control.",
+          "properties": {
+            "distance": {
+              "$ref": "#/$defs/NumberOrExpression",
+              "default": 1,
+              "description": "Distance from the line start–end through the bend, as a factor on the limb's length.",
+              "examples": [
+                1
+              ],
+              "x-unit": "limb lengths"
+            },
+            "guide_line": {
+              "type": "boolean",
+              "default": true,
+              "description": "Draws a guide line from the pole control to the joint it leads.",
+              "examples": [
+                true
+              ]
+            }
+          },
+          "default": {
+            "distance": 1,
+            "guide_line": true
+          },
+          "examples": [
+            {
+              "distance": 0.8
+            }
+          ]
+        },
+        "bend": {
+          "$ref": "#/$defs/Point",
+          "description": "Direction in which the middle joint should lead when the limb is straight at rest.",
+          "examples": [
+            [
+              0,
+              0,
+              -1
+            ]
+          ]
+        },
+        "reach": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.",
+          "examples": [
+            1
+          ]
+        },
+        "stretch": {
+          "type": "object",
+          "additionalProperties": false,
+          "description": "Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.",
+          "properties": {
+            "limit": {
+              "$ref": "#/$defs/NumberOrExpression",
+              "default": 1.5,
+              "description": "Greatest factor on the bones' length.",
+              "examples": [
+                1.5
+              ],
+              "x-unit": "factor"
+            },
+            "value": {
+              "$ref": "#/$defs/NumberOrExpression",
+              "default": 0,
+              "description": "Value at rest of the attribute stretch: 0 keeps lengths, 1 grows.",
+              "examples": [
+                0
+              ]
+            }
+          },
+          "examples": [
+            {
+              "limit": 1.5,
+              "value": 1
+            }
+          ]
+        },
+        "soft": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0,
+          "description": "Share of the limb's length over which its end slows down before full reach. The zone never begins before the reach at rest.",
+          "examples": [
+            0.05
+          ],
+          "x-unit": "limb lengths"
+        },
+        "spaces": {
+          "type": "object",
+          "propertyNames": {
+            "$ref": "#/$defs/word"
+          },
+          "additionalProperties": {
+            "type": "array",
+            "items": {
+              "$ref": "#/$defs/id"
+            },
+            "minItems": 1,
+            "maxItems": 40,
+            "description": "What may carry the control.",
+            "examples": [
+              [
+                "root",
+                "spine.chest"
+              ]
+            ]
+          },
+          "default": {},
+          "description": "What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.",
+          "examples": [
+            {
+              "hand": [
+                "root",
+                "spine.chest",
+                "spine.hips"
+              ]
+            }
+          ]
+        },
+        "limits": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/JointLimits"
+          },
+          "default": {},
+          "description": "How far the joints turn, by name; joint-by-joint controls are limited alike.",
+          "examples": [
+            {
+              "elbow": {
+                "rz": {
+                  "min": 0,
+                  "max": 140
+                }
+              }
+            }
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
     "LimbPart": {
       "title": "LimbPart",
-      "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.",
+      "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, a blend between the two ways, and on request twist joints, stretch, soft reach and spaces.",
       "type": "object",
       "required": [
         "kind",
@@ -2062,29 +2974,29 @@ export const recipeSchema = {
         "pole": {
           "type": "object",
           "additionalProperties": false,
-          "default": {
-            "distance": 1,
-            "guide_line": true
-          },
           "description": "The pole vector control.",
           "properties": {
             "distance": {
               "$ref": "#/$defs/NumberOrExpression",
               "default": 1,
               "description": "Distance from the line start–end through the bend, as a factor on the limb's length.",
-              "x-unit": "limb lengths",
               "examples": [
                 1
-              ]
+              ],
+              "x-unit": "limb lengths"
             },
             "guide_line": {
               "type": "boolean",
               "default": true,
-              "description": "Draws a guide line from the pole control to the middle joint.",
+              "description": "Draws a guide line from the pole control to the joint it leads.",
               "examples": [
                 true
               ]
             }
+          },
+          "default": {
+            "distance": 1,
+            "guide_line": true
           },
           "examples": [
             {
@@ -2111,6 +3023,134 @@ export const recipeSchema = {
             1
           ]
         },
+        "stretch": {
+          "type": "object",
+          "additionalProperties": false,
+          "description": "Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.",
+          "properties": {
+            "limit": {
+              "$ref": "#/$defs/NumberOrExpression",
+              "default": 1.5,
+              "description": "Greatest factor on the bones' length.",
+              "examples": [
+                1.5
+              ],
+              "x-unit": "factor"
+            },
+            "value": {
+              "$ref": "#/$defs/NumberOrExpression",
+              "default": 0,
+              "description": "Value at rest of the attribute stretch: 0 keeps lengths, 1 grows.",
+              "examples": [
+                0
+              ]
+            }
+          },
+          "examples": [
+            {
+              "limit": 1.5,
+              "value": 1
+            }
+          ]
+        },
+        "soft": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0,
+          "description": "Share of the limb's length over which its end slows down before full reach. The zone never begins before the reach at rest.",
+          "examples": [
+            0.05
+          ],
+          "x-unit": "limb lengths"
+        },
+        "spaces": {
+          "type": "object",
+          "propertyNames": {
+            "$ref": "#/$defs/word"
+          },
+          "additionalProperties": {
+            "type": "array",
+            "items": {
+              "$ref": "#/$defs/id"
+            },
+            "minItems": 1,
+            "maxItems": 40,
+            "description": "What may carry the control.",
+            "examples": [
+              [
+                "root",
+                "spine.chest"
+              ]
+            ]
+          },
+          "default": {},
+          "description": "What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.",
+          "examples": [
+            {
+              "hand": [
+                "root",
+                "spine.chest",
+                "spine.hips"
+              ]
+            }
+          ]
+        },
+        "limits": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/JointLimits"
+          },
+          "default": {},
+          "description": "How far the joints turn, by name; joint-by-joint controls are limited alike.",
+          "examples": [
+            {
+              "elbow": {
+                "rz": {
+                  "min": 0,
+                  "max": 140
+                }
+              }
+            }
+          ]
+        },
+        "twist": {
+          "type": "object",
+          "additionalProperties": false,
+          "description": "Counts of joints that share the twist along each bone.",
+          "properties": {
+            "upper": {
+              "type": "integer",
+              "minimum": 0,
+              "maximum": 20,
+              "default": 0,
+              "description": "Joints along the upper bone, which let the twist at its root fade in. Needs parent.",
+              "examples": [
+                2
+              ]
+            },
+            "lower": {
+              "type": "integer",
+              "minimum": 0,
+              "maximum": 20,
+              "default": 0,
+              "description": "Joints along the lower bone, which let the twist of the end fade out.",
+              "examples": [
+                3
+              ]
+            }
+          },
+          "default": {},
+          "examples": [
+            {
+              "upper": 2,
+              "lower": 3
+            }
+          ]
+        },
         "role": {
           "$ref": "#/$defs/word",
           "default": "skin",
@@ -2127,9 +3167,142 @@ export const recipeSchema = {
         }
       }
     },
+    "NeckHeadPart": {
+      "title": "NeckHeadPart",
+      "description": "A neck of joints that are turned one by one, and a head on it that can keep its direction against the body.",
+      "type": "object",
+      "required": [
+        "kind",
+        "from",
+        "to",
+        "crown"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "neck_head",
+          "description": "Neck and head."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the neck hangs on.",
+          "examples": [
+            "spine.chest"
+          ]
+        },
+        "from": {
+          "$ref": "#/$defs/Place",
+          "description": "Root of the neck.",
+          "examples": [
+            "neck"
+          ]
+        },
+        "to": {
+          "$ref": "#/$defs/Place",
+          "description": "Where the head turns on the neck.",
+          "examples": [
+            "skull"
+          ]
+        },
+        "crown": {
+          "$ref": "#/$defs/Place",
+          "description": "Top of the head.",
+          "examples": [
+            "crown"
+          ]
+        },
+        "joints": {
+          "type": "integer",
+          "minimum": 1,
+          "maximum": 60,
+          "default": 2,
+          "description": "Count of joints of the neck, the head's own not counted.",
+          "examples": [
+            2
+          ]
+        },
+        "via": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 1,
+          "maxItems": 50,
+          "description": "Places the neck runs through on the way.",
+          "examples": [
+            [
+              "neck_bend"
+            ]
+          ]
+        },
+        "spaces": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/id"
+          },
+          "minItems": 1,
+          "maxItems": 40,
+          "description": "What may turn the head beside the neck; the attribute space chooses.",
+          "examples": [
+            [
+              "root",
+              "spine.chest"
+            ]
+          ]
+        },
+        "limits": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/JointLimits"
+          },
+          "default": {},
+          "description": "How far the head turns, under the name head; its control is limited alike.",
+          "examples": [
+            {
+              "head": {
+                "ry": {
+                  "min": -70,
+                  "max": 70
+                }
+              }
+            }
+          ]
+        },
+        "guide_line": {
+          "type": "boolean",
+          "default": false,
+          "description": "Draws a guide line from the head control to the crown.",
+          "examples": [
+            true
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "orient": {
+          "$ref": "#/$defs/Orient"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
     "RootPart": {
       "title": "RootPart",
-      "description": "The root control: it carries everything in the carried containers and lies at the origin.",
+      "description": "The control that carries the whole rig; on request with a root joint beneath it.",
       "type": "object",
       "required": [
         "kind"
@@ -2138,23 +3311,25 @@ export const recipeSchema = {
       "properties": {
         "kind": {
           "const": "root",
-          "description": "The root control that carries the whole rig."
+          "description": "The carrier of the rig."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
         },
         "at": {
           "$ref": "#/$defs/Place",
-          "default": [
-            0,
-            0,
-            0
-          ],
-          "description": "Where the root control stands.",
-          "x-unit": "scene unit",
+          "description": "Where it stands.",
           "examples": [
             [
               0,
               0,
               0
             ]
+          ],
+          "default": [
+            0,
+            0,
+            0
           ]
         },
         "shape": {
@@ -2170,7 +3345,7 @@ export const recipeSchema = {
             "compass"
           ],
           "default": "compass",
-          "description": "Drawn shape.",
+          "description": "Shape of the control.",
           "examples": [
             "compass"
           ]
@@ -2178,16 +3353,129 @@ export const recipeSchema = {
         "size": {
           "$ref": "#/$defs/NumberOrExpression",
           "default": 1,
-          "description": "Factor on the size taken from the whole rig.",
+          "description": "Factor on its size.",
           "examples": [
             1.2
           ]
+        },
+        "joint": {
+          "type": "boolean",
+          "default": false,
+          "description": "Makes a joint at the root that follows the control, as some receivers of skeletons want.",
+          "examples": [
+            true
+          ]
+        }
+      }
+    },
+    "SpinePart": {
+      "title": "SpinePart",
+      "description": "A row of joints along a curve between two ends: a control at each end that carries both place and direction of the curve, controls between them that follow both, a spline solver, stretch and volume.",
+      "type": "object",
+      "required": [
+        "kind",
+        "from",
+        "to"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "spine",
+          "description": "A spine, or any bendy body between two ends."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the lower control follows.",
+          "examples": [
+            "root"
+          ]
+        },
+        "from": {
+          "$ref": "#/$defs/Place",
+          "description": "Where it begins.",
+          "examples": [
+            "hips"
+          ]
+        },
+        "to": {
+          "$ref": "#/$defs/Place",
+          "description": "Where it ends.",
+          "examples": [
+            "chest"
+          ]
+        },
+        "via": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 1,
+          "maxItems": 50,
+          "description": "Places it runs through on the way.",
+          "examples": [
+            [
+              "waist"
+            ]
+          ]
+        },
+        "joints": {
+          "type": "integer",
+          "minimum": 3,
+          "maximum": 100,
+          "default": 5,
+          "description": "Count of joints, spread evenly by arc length.",
+          "examples": [
+            5
+          ]
+        },
+        "controls": {
+          "type": "integer",
+          "minimum": 2,
+          "maximum": 12,
+          "default": 3,
+          "description": "Count of controls: both ends and those between.",
+          "examples": [
+            3
+          ]
+        },
+        "stretch": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 1,
+          "description": "Value at rest of the upper control's attribute stretch: 0 keeps lengths, 1 spreads the joints over the whole curve.",
+          "examples": [
+            0
+          ]
+        },
+        "volume": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0,
+          "description": "Value at rest of the upper control's attribute volume: how far joints thicken and thin.",
+          "examples": [
+            0
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "orient": {
+          "$ref": "#/$defs/Orient"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
         }
       }
     },
     "StrandPart": {
       "title": "StrandPart",
-      "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.",
+      "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before, or all laid along a curve through a few controls.",
       "type": "object",
       "required": [
         "kind",
@@ -2198,7 +3486,7 @@ export const recipeSchema = {
       "properties": {
         "kind": {
           "const": "strand",
-          "description": "A row of joints, each with its own control."
+          "description": "A row of joints."
         },
         "side": {
           "$ref": "#/$defs/SideOption"
@@ -2245,6 +3533,35 @@ export const recipeSchema = {
             "smooth"
           ]
         },
+        "steer": {
+          "enum": [
+            "joints",
+            "spline"
+          ],
+          "default": "joints",
+          "description": "joints: one control for each joint. spline: a few controls shape a curve.",
+          "examples": [
+            "joints"
+          ]
+        },
+        "controls": {
+          "type": "integer",
+          "minimum": 2,
+          "maximum": 40,
+          "default": 4,
+          "description": "spline: count of controls along the strand.",
+          "examples": [
+            4
+          ]
+        },
+        "stretch": {
+          "$ref": "#/$defs/NumberOrExpression",
+          "default": 0,
+          "description": "spline: value at rest of the last control's attribute stretch: 0 keeps lengths, 1 spreads the joints over the whole curve.",
+          "examples": [
+            0
+          ]
+        },
         "shape": {
           "enum": [
             "ring",
@@ -2269,6 +3586,226 @@ export const recipeSchema = {
           "description": "Factor on the controls' size.",
           "examples": [
             1.2
+          ]
+        },
+        "limits": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[a-z0-9_]+$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/JointLimits"
+          },
+          "default": {},
+          "description": "joints: how far each joint turns, by its name; controls are limited alike.",
+          "examples": [
+            {
+              "01": {
+                "rz": {
+                  "min": -30,
+                  "max": 30
+                }
+              }
+            }
+          ]
+        },
+        "role": {
+          "$ref": "#/$defs/word",
+          "default": "skin",
+          "description": "Role of the joints.",
+          "examples": [
+            "skin"
+          ]
+        },
+        "mirror": {
+          "$ref": "#/$defs/MirrorRule"
+        },
+        "orient": {
+          "$ref": "#/$defs/Orient"
+        },
+        "rotation_order": {
+          "$ref": "#/$defs/RotationOrderOption"
+        }
+      }
+    },
+    "WingPart": {
+      "title": "WingPart",
+      "description": "A limb that folds in two places with rows of feathers on its bones: a control for each joint, one control that folds the wing and fans its feathers.",
+      "type": "object",
+      "required": [
+        "kind",
+        "points"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "kind": {
+          "const": "wing",
+          "description": "A wing."
+        },
+        "side": {
+          "$ref": "#/$defs/SideOption"
+        },
+        "parent": {
+          "$ref": "#/$defs/id",
+          "description": "Joint or control that the wing hangs on.",
+          "examples": [
+            "spine.chest"
+          ]
+        },
+        "points": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/Place"
+          },
+          "minItems": 4,
+          "maxItems": 4,
+          "description": "Shoulder, elbow, wrist and tip.",
+          "examples": [
+            [
+              "shoulder",
+              "elbow",
+              "wrist",
+              "wing_tip"
+            ]
+          ]
+        },
+        "names": {
+          "type": "array",
+          "items": {
+            "type": "string",
+            "pattern": "^[a-z][a-z0-9_]*$",
+            "maxLength": 60
+          },
+          "minItems": 4,
+          "maxItems": 4,
+          "description": "Names of the four joints. Without it they take their landmarks' names, else upper, lower, hand, tip.",
+          "examples": [
+            [
+              "upper",
+              "lower",
+              "hand",
+              "tip"
+            ]
+          ]
+        },
+        "fold": {
+          "type": "array",
+          "items": {
+            "$ref": "#/$defs/NumberOrExpression"
+          },
+          "minItems": 3,
+          "maxItems": 3,
+          "default": [
+            20,
+            110,
+            -120
+          ],
+          "description": "Turn of shoulder, elbow and wrist about their hinges at fold 1.",
+          "x-unit": "degrees",
+          "examples": [
+            [
+              20,
+              110,
+              -120
+            ]
+          ]
+        },
+        "feathers": {
+          "type": "object",
+          "propertyNames": {
+            "$ref": "#/$defs/word"
+          },
+          "additionalProperties": {
+            "type": "object",
+            "additionalProperties": false,
+            "description": "A row of feathers along one bone.",
+            "properties": {
+              "bone": {
+                "enum": [
+                  "upper",
+                  "lower",
+                  "hand"
+                ],
+                "default": "hand",
+                "description": "Bone that the row sits on.",
+                "examples": [
+                  "hand"
+                ]
+              },
+              "tips": {
+                "type": "array",
+                "items": {
+                  "$ref": "#/$defs/Place"
+                },
+                "minItems": 2,
+                "maxItems": 2,
+                "description": "Where the tips of the first and the last feather lie.",
+                "examples": [
+                  [
+                    "primary_first",
+                    "primary_last"
+                  ]
+                ]
+              },
+              "count": {
+                "type": "integer",
+                "minimum": 1,
+                "maximum": 40,
+                "default": 5,
+                "description": "Count of feathers.",
+                "examples": [
+                  5
+                ]
+              },
+              "joints": {
+                "type": "integer",
+                "minimum": 2,
+                "maximum": 12,
+                "default": 3,
+                "description": "Count of joints of each feather.",
+                "examples": [
+                  3
+                ]
+              },
+              "fan": {
+                "$ref": "#/$defs/NumberOrExpression",
+                "default": 30,
+                "description": "Turn of the last feather at fan 1; the first stays.",
+                "examples": [
+                  30
+                ],
+                "x-unit": "degrees"
+              }
+            },
+            "required": [
+              "tips"
+            ],
+            "examples": [
+              {
+                "bone": "hand",
+                "tips": [
+                  "primary_first",
+                  "primary_last"
+                ],
+                "count": 5
+              }
+            ]
+          },
+          "default": {},
+          "description": "Rows of feathers by name.",
+          "examples": [
+            {
+              "primary": {
+                "bone": "hand",
+                "tips": [
+                  "primary_first",
+                  "primary_last"
+                ],
+                "count": 5
+              }
+            }
           ]
         },
         "role": {

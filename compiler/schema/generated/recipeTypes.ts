@@ -37,7 +37,20 @@ export type NumberOrExpression = number | string;
  * This interface was referenced by `Recipe`'s JSON-Schema
  * via the `definition` "Part".
  */
-export type Part = LimbPart | RootPart | StrandPart;
+export type Part =
+  | AxlePart
+  | ClaviclePart
+  | EyePart
+  | FootPart
+  | HandPart
+  | JawPart
+  | LegThreePart
+  | LimbPart
+  | NeckHeadPart
+  | RootPart
+  | SpinePart
+  | StrandPart
+  | WingPart;
 /**
  * left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.
  *
@@ -51,12 +64,12 @@ export type SideOption = 'left' | 'right' | 'both' | 'centre';
  */
 export type Id = string;
 /**
- * A landmark or joint by name, or a point.
+ * A landmark or joint by name, a point, or a point between two of them.
  *
  * This interface was referenced by `Recipe`'s JSON-Schema
  * via the `definition` "Place".
  */
-export type Place = [NumberOrExpression, NumberOrExpression, NumberOrExpression] | string;
+export type Place = [NumberOrExpression, NumberOrExpression, NumberOrExpression] | string | Between;
 /**
  * How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.
  *
@@ -293,7 +306,293 @@ export interface Container {
   title?: Line;
 }
 /**
- * Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.
+ * One joint that turns about, swings on or slides along a line: a wheel, a hinge or a slider, with a control that has that one freedom.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "AxlePart".
+ */
+export interface AxlePart {
+  /**
+   * A moving part of a prop.
+   */
+  kind: 'axle';
+  side?: SideOption;
+  parent?: Id;
+  at: Place;
+  along: Place;
+  /**
+   * wheel: turns without end. hinge: turns within limits. slider: moves along the line.
+   */
+  motion?: 'wheel' | 'hinge' | 'slider';
+  min?: NumberOrExpression;
+  max?: NumberOrExpression;
+  /**
+   * wheel: channel of a control, as control.tz, with whose way the wheel rolls. Needs radius.
+   */
+  roll_with?: string;
+  radius?: NumberOrExpression;
+  /**
+   * Shape of the control.
+   */
+  shape?: 'ring' | 'square' | 'diamond' | 'cross' | 'arrow' | 'ball' | 'box' | 'pin' | 'compass';
+  role?: Word;
+  mirror?: MirrorRule;
+}
+/**
+ * A point on the line between two others.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Between".
+ */
+export interface Between {
+  /**
+   * Landmark or joint at its start.
+   */
+  from: string;
+  /**
+   * Landmark or joint at its end.
+   */
+  to: string;
+  share?: NumberOrExpression;
+}
+/**
+ * One bone between body and limb, with a control that turns it.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "ClaviclePart".
+ */
+export interface ClaviclePart {
+  /**
+   * A collar bone, shoulder blade or hip girdle.
+   */
+  kind: 'clavicle';
+  side?: SideOption;
+  parent?: Id;
+  /**
+   * Root and end.
+   */
+  points: Place[];
+  /**
+   * Names of the two joints. Without it they take their landmarks' names, else root and end.
+   */
+  names?: string[];
+  /**
+   * How far the root turns, by its name; the control is limited alike.
+   */
+  limits?: {
+    [k: string]: JointLimits;
+  };
+  role?: Word;
+  mirror?: MirrorRule;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * How far a joint is meant to turn from rest, by axis. Controls enforce it; the joint itself does not.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "JointLimits".
+ */
+export interface JointLimits {
+  rx?: Range;
+  ry?: Range;
+  rz?: Range;
+}
+/**
+ * Smallest and largest value, from rest.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Range".
+ */
+export interface Range {
+  min?: NumberOrExpression;
+  max?: NumberOrExpression;
+}
+/**
+ * An eyeball that points at a control of its own in front of it; a pair hangs on one control that both follow.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "EyePart".
+ */
+export interface EyePart {
+  /**
+   * An eye.
+   */
+  kind: 'eye';
+  side?: SideOption;
+  parent?: Id;
+  at: Place;
+  look: Place;
+  pair?: Id;
+  /**
+   * How far the eyeball is meant to turn, under the name ball.
+   */
+  limits?: {
+    [k: string]: JointLimits;
+  };
+  role?: Word;
+  mirror?: MirrorRule;
+}
+/**
+ * A foot at the end of a leg: ball and toe joints, and attributes on the leg's goal control that roll it over heel, ball and toe and bank it over its edges.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "FootPart".
+ */
+export interface FootPart {
+  /**
+   * A foot that rolls.
+   */
+  kind: 'foot';
+  side?: SideOption;
+  leg: Id;
+  ball: Place;
+  toe: Place;
+  heel: Place;
+  inner: Place;
+  outer: Place;
+  break?: NumberOrExpression;
+  role?: Word;
+  mirror?: MirrorRule;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * Digits that are turned joint by joint, and one control that curls, spreads and cups them together.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "HandPart".
+ */
+export interface HandPart {
+  /**
+   * A hand or claw with any count of digits.
+   */
+  kind: 'hand';
+  side?: SideOption;
+  parent: Id;
+  at?: Place;
+  /**
+   * Digits by name, in their order across the hand.
+   */
+  digits: {
+    /**
+     * Places of the digit's joints, from its root to its tip.
+     */
+    [k: string]: Place[];
+  };
+  curl?: NumberOrExpression;
+  spread?: NumberOrExpression;
+  cup?: NumberOrExpression;
+  role?: Word;
+  mirror?: MirrorRule;
+  orient?: Orient;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * How joint frames are turned.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "Orient".
+ */
+export interface Orient {
+  /**
+   * chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.
+   */
+  rule?: 'chain' | 'world';
+  aim?: AxisName;
+  up?: AxisName;
+  toward?: Point;
+  like?: Id;
+}
+/**
+ * One bone that opens about a hinge: a control that turns and shifts it, with an attribute that opens it.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "JawPart".
+ */
+export interface JawPart {
+  /**
+   * A jaw or beak.
+   */
+  kind: 'jaw';
+  side?: SideOption;
+  parent?: Id;
+  /**
+   * Hinge and tip.
+   */
+  points: Place[];
+  /**
+   * Names of the two joints. Without it they take their landmarks' names, else hinge and tip.
+   */
+  names?: string[];
+  open?: NumberOrExpression;
+  role?: Word;
+  mirror?: MirrorRule;
+  orient?: Orient;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * Four joints in a row with three bones, as of a hind leg: joint-by-joint controls, a goal control with a reach solver that folds all bends together, a pole vector control, a blend between the two ways, and an attribute that moves the fold between knee and hock.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "LegThreePart".
+ */
+export interface LegThreePart {
+  /**
+   * A leg that bends twice.
+   */
+  kind: 'leg_three';
+  side?: SideOption;
+  parent?: Id;
+  /**
+   * Hip, knee, hock and end.
+   */
+  points: Place[];
+  /**
+   * Names of the four joints. Without it they take their landmarks' names, else upper, middle, lower, end.
+   */
+  names?: string[];
+  goal?: Word;
+  goal_parent?: Id;
+  /**
+   * The pole vector control.
+   */
+  pole?: {
+    distance?: NumberOrExpression;
+    /**
+     * Draws a guide line from the pole control to the joint it leads.
+     */
+    guide_line?: boolean;
+  };
+  bend?: Point;
+  reach?: NumberOrExpression;
+  /**
+   * Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.
+   */
+  stretch?: {
+    limit?: NumberOrExpression;
+    value?: NumberOrExpression;
+  };
+  soft?: NumberOrExpression;
+  /**
+   * What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.
+   */
+  spaces?: {
+    /**
+     * What may carry the control.
+     */
+    [k: string]: Id[];
+  };
+  /**
+   * How far the joints turn, by name; joint-by-joint controls are limited alike.
+   */
+  limits?: {
+    [k: string]: JointLimits;
+  };
+  role?: Word;
+  mirror?: MirrorRule;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, a blend between the two ways, and on request twist joints, stretch, soft reach and spaces.
  *
  * This interface was referenced by `Recipe`'s JSON-Schema
  * via the `definition` "LimbPart".
@@ -321,43 +620,159 @@ export interface LimbPart {
   pole?: {
     distance?: NumberOrExpression;
     /**
-     * Draws a guide line from the pole control to the middle joint.
+     * Draws a guide line from the pole control to the joint it leads.
      */
     guide_line?: boolean;
   };
   bend?: Point;
   reach?: NumberOrExpression;
+  /**
+   * Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.
+   */
+  stretch?: {
+    limit?: NumberOrExpression;
+    value?: NumberOrExpression;
+  };
+  soft?: NumberOrExpression;
+  /**
+   * What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.
+   */
+  spaces?: {
+    /**
+     * What may carry the control.
+     */
+    [k: string]: Id[];
+  };
+  /**
+   * How far the joints turn, by name; joint-by-joint controls are limited alike.
+   */
+  limits?: {
+    [k: string]: JointLimits;
+  };
+  /**
+   * Counts of joints that share the twist along each bone.
+   */
+  twist?: {
+    /**
+     * Joints along the upper bone, which let the twist at its root fade in. Needs parent.
+     */
+    upper?: number;
+    /**
+     * Joints along the lower bone, which let the twist of the end fade out.
+     */
+    lower?: number;
+  };
   role?: Word;
   mirror?: MirrorRule;
   rotation_order?: RotationOrderOption;
 }
 /**
- * The root control: it carries everything in the carried containers and lies at the origin.
+ * A neck of joints that are turned one by one, and a head on it that can keep its direction against the body.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "NeckHeadPart".
+ */
+export interface NeckHeadPart {
+  /**
+   * Neck and head.
+   */
+  kind: 'neck_head';
+  side?: SideOption;
+  parent?: Id;
+  from: Place;
+  to: Place;
+  crown: Place;
+  /**
+   * Count of joints of the neck, the head's own not counted.
+   */
+  joints?: number;
+  /**
+   * Places the neck runs through on the way.
+   */
+  via?: Place[];
+  /**
+   * What may turn the head beside the neck; the attribute space chooses.
+   */
+  spaces?: Id[];
+  /**
+   * How far the head turns, under the name head; its control is limited alike.
+   */
+  limits?: {
+    [k: string]: JointLimits;
+  };
+  /**
+   * Draws a guide line from the head control to the crown.
+   */
+  guide_line?: boolean;
+  role?: Word;
+  orient?: Orient;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * The control that carries the whole rig; on request with a root joint beneath it.
  *
  * This interface was referenced by `Recipe`'s JSON-Schema
  * via the `definition` "RootPart".
  */
 export interface RootPart {
   /**
-   * The root control that carries the whole rig.
+   * The carrier of the rig.
    */
   kind: 'root';
+  side?: SideOption;
   at?: Place;
   /**
-   * Drawn shape.
+   * Shape of the control.
    */
   shape?: 'ring' | 'square' | 'diamond' | 'cross' | 'arrow' | 'ball' | 'box' | 'pin' | 'compass';
   size?: NumberOrExpression;
+  /**
+   * Makes a joint at the root that follows the control, as some receivers of skeletons want.
+   */
+  joint?: boolean;
 }
 /**
- * A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.
+ * A row of joints along a curve between two ends: a control at each end that carries both place and direction of the curve, controls between them that follow both, a spline solver, stretch and volume.
+ *
+ * This interface was referenced by `Recipe`'s JSON-Schema
+ * via the `definition` "SpinePart".
+ */
+export interface SpinePart {
+  /**
+   * A spine, or any bendy body between two ends.
+   */
+  kind: 'spine';
+  side?: SideOption;
+  parent?: Id;
+  from: Place;
+  to: Place;
+  /**
+   * Places it runs through on the way.
+   */
+  via?: Place[];
+  /**
+   * Count of joints, spread evenly by arc length.
+   */
+  joints?: number;
+  /**
+   * Count of controls: both ends and those between.
+   */
+  controls?: number;
+  stretch?: NumberOrExpression;
+  volume?: NumberOrExpression;
+  role?: Word;
+  orient?: Orient;
+  rotation_order?: RotationOrderOption;
+}
+/**
+ * A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before, or all laid along a curve through a few controls.
  *
  * This interface was referenced by `Recipe`'s JSON-Schema
  * via the `definition` "StrandPart".
  */
 export interface StrandPart {
   /**
-   * A row of joints, each with its own control.
+   * A row of joints.
    */
   kind: 'strand';
   side?: SideOption;
@@ -375,29 +790,86 @@ export interface StrandPart {
    */
   curve?: 'smooth' | 'straight';
   /**
+   * joints: one control for each joint. spline: a few controls shape a curve.
+   */
+  steer?: 'joints' | 'spline';
+  /**
+   * spline: count of controls along the strand.
+   */
+  controls?: number;
+  stretch?: NumberOrExpression;
+  /**
    * Shape of the controls.
    */
   shape?: 'ring' | 'square' | 'diamond' | 'cross' | 'arrow' | 'ball' | 'box' | 'pin' | 'compass';
   size?: NumberOrExpression;
+  /**
+   * joints: how far each joint turns, by its name; controls are limited alike.
+   */
+  limits?: {
+    [k: string]: JointLimits;
+  };
   role?: Word;
   mirror?: MirrorRule;
   orient?: Orient;
   rotation_order?: RotationOrderOption;
 }
 /**
- * How joint frames are turned.
+ * A limb that folds in two places with rows of feathers on its bones: a control for each joint, one control that folds the wing and fans its feathers.
  *
  * This interface was referenced by `Recipe`'s JSON-Schema
- * via the `definition` "Orient".
+ * via the `definition` "WingPart".
  */
-export interface Orient {
+export interface WingPart {
   /**
-   * chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.
+   * A wing.
    */
-  rule?: 'chain' | 'world';
-  aim?: AxisName;
-  up?: AxisName;
-  toward?: Point;
+  kind: 'wing';
+  side?: SideOption;
+  parent?: Id;
+  /**
+   * Shoulder, elbow, wrist and tip.
+   */
+  points: Place[];
+  /**
+   * Names of the four joints. Without it they take their landmarks' names, else upper, lower, hand, tip.
+   */
+  names?: string[];
+  /**
+   * Turn of shoulder, elbow and wrist about their hinges at fold 1.
+   */
+  fold?: NumberOrExpression[];
+  /**
+   * Rows of feathers by name.
+   */
+  feathers?: {
+    /**
+     * A row of feathers along one bone.
+     */
+    [k: string]: {
+      /**
+       * Bone that the row sits on.
+       */
+      bone?: 'upper' | 'lower' | 'hand';
+      /**
+       * Where the tips of the first and the last feather lie.
+       */
+      tips: Place[];
+      /**
+       * Count of feathers.
+       */
+      count?: number;
+      /**
+       * Count of joints of each feather.
+       */
+      joints?: number;
+      fan?: NumberOrExpression;
+    };
+  };
+  role?: Word;
+  mirror?: MirrorRule;
+  orient?: Orient;
+  rotation_order?: RotationOrderOption;
 }
 /**
  * Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.
@@ -438,27 +910,6 @@ export interface Chain {
   limits?: {
     [k: string]: JointLimits;
   };
-}
-/**
- * How far a joint is meant to turn from rest, by axis. Controls enforce it; the joint itself does not.
- *
- * This interface was referenced by `Recipe`'s JSON-Schema
- * via the `definition` "JointLimits".
- */
-export interface JointLimits {
-  rx?: Range;
-  ry?: Range;
-  rz?: Range;
-}
-/**
- * Smallest and largest value, from rest.
- *
- * This interface was referenced by `Recipe`'s JSON-Schema
- * via the `definition` "Range".
- */
-export interface Range {
-  min?: NumberOrExpression;
-  max?: NumberOrExpression;
 }
 /**
  * What the animator takes hold of.

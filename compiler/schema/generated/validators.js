@@ -36,7 +36,7 @@ var require_ucs2length = __commonJS({
 
 // <stdin>
 var validateRecipe = validate52;
-var schema19 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/recipe/1", "title": "Recipe", "description": "A rig recipe, format 1: everything Pintle needs to make one character movable.", "type": "object", "required": ["format", "recipe"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the recipe language.", "examples": [1] }, "recipe": { "$ref": "#/$defs/word", "description": "Name of the recipe: lower-case letters, digits and underscores. Also the character's name unless one is given when compiling.", "examples": ["hare"] }, "title": { "$ref": "#/$defs/line", "description": "What people call the rig.", "examples": ["Upright hare"] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "House rules to follow, as name@version.", "default": "standard@1", "examples": ["tidewrack@1"] }, "extends": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "Recipe version this one changes, as name@version. This document is merged onto it by RFC 7396: maps merge key by key, null removes, anything else replaces.", "examples": ["walker@4"] }, "params": { "description": "Parameters: the numbers that vary from character to character.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Parameter" }, "default": {}, "examples": [{ "stature": { "unit": "cm", "default": 96, "min": 30, "max": 260 } }] }, "scene": { "$ref": "#/$defs/Scene" }, "landmarks": { "description": "Named measured points on the model. Those with side left have a mirrored right twin.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Landmark" }, "default": {}, "examples": [{ "hips": { "at": [0, 51, 0] } }] }, "roles": { "description": "Adds to or adjusts the roles of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Role" }, "default": {}, "examples": [{ "skin": { "token": "sk" } }] }, "containers": { "description": "Adds to or adjusts the containers of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Container" }, "default": {}, "examples": [{ "whiskers": { "parent": "carry" } }] }, "parts": { "description": "Building blocks that expand into chains, controls, solvers, constraints and guide lines. Whatever a part makes can be adjusted by id in those maps.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Part" }, "default": {}, "examples": [{ "root": { "kind": "root" } }] }, "chains": { "description": "Joint chains.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Chain" }, "default": {}, "examples": [{ "spine": { "points": ["hips", "chest"], "joints": 4 } }] }, "controls": { "description": "Controls: what the animator takes hold of. An entry whose id a part has made adjusts that control.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Control" }, "default": {}, "examples": [{ "hips": { "at": "hips", "shape": "square" } }] }, "solvers": { "description": "Solvers: what computes the rotation of several joints at once.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Solver" }, "default": {}, "examples": [{ "boom": { "kind": "two_bone", "joints": ["boom.base", "boom.knee", "boom.tip"], "goal": "hook", "pole": "boom_pole" } }] }, "constraints": { "description": "Constraints: what makes one thing follow others.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Constraint" }, "default": {}, "examples": [{ "neck_turn": { "kind": "orient", "target": "spine.04", "sources": { "head": 1 } } }] }, "drivers": { "description": "Drivers: what follows an attribute or channel of a control through a curve and is added to a channel of another thing.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Driver" }, "default": {}, "examples": [{ "claw_open": { "input": "claw.open", "target": "claw_upper.hinge", "channel": "rz", "keys": [[0, 0], [1, 35]] } }] }, "guide_lines": { "description": "Guide lines: drawn, never selectable, from a control to the thing it steers.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/GuideLine" }, "default": {}, "examples": [{ "knee_line": { "from": "knee_pole", "to": "leg.left.knee" } }] }, "geometry": { "description": "Meshes of the model that the rig carries.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Geometry" }, "default": {}, "examples": [{ "body": { "mesh": "hare_body" } }] }, "skins": { "description": "Which joints deform which mesh.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Skin" }, "default": {}, "examples": [{ "body_skin": { "geometry": "body", "joints": ["spine", "arm.left", "arm.right"], "influences": 4 } }] }, "shapes": { "description": "Morph targets of meshes, each with what weighs it.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Shape" }, "default": {}, "examples": [{ "smile": { "geometry": "body", "morph": "smile", "weight": "head.smile" } }] }, "notes": { "description": "Custom metadata carried on the rig's note node.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": ["string", "number", "boolean"], "maxLength": 2e3 }, "default": {}, "examples": [{ "sequence": "Marsh at dawn" }] } }, "$defs": { "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "id": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "maxLength": 120 }, "line": { "type": "string", "maxLength": 200 }, "NumberOrExpression": { "title": "NumberOrExpression", "description": "A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.", "type": ["number", "string"], "pattern": "^=", "maxLength": 2e3, "examples": [12.5, "=params.stature * 0.53"] }, "Point": { "title": "Point", "description": "Three numbers in the scene's unit and axes, or an expression that gives a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^=", "maxLength": 2e3 }], "examples": [[0, 51, 0], "=mid(landmarks.hip, landmarks.ankle)"] }, "Place": { "title": "Place", "description": "A landmark or joint by name, or a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)", "maxLength": 2e3 }], "examples": ["wrist", [0, 51, 0]] }, "SideOption": { "title": "SideOption", "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.", "enum": ["left", "right", "both", "centre"], "default": "centre", "examples": ["both"] }, "MirrorRule": { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] }, "RotationOrderOption": { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] }, "AxisName": { "title": "AxisName", "enum": ["+x", "-x", "+y", "-y", "+z", "-z"], "description": "One of the six axis directions.", "examples": ["+x"] }, "ChannelName": { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." }, "Parameter": { "title": "Parameter", "description": "A number that varies from character to character.", "type": "object", "required": ["default"], "additionalProperties": false, "properties": { "default": { "type": "number", "description": "Value when a character gives none.", "examples": [96] }, "min": { "type": "number", "description": "Smallest value allowed.", "examples": [30] }, "max": { "type": "number", "description": "Largest value allowed.", "examples": [260] }, "unit": { "$ref": "#/$defs/line", "description": "Unit, for people; nothing is converted.", "examples": ["cm"] }, "whole": { "type": "boolean", "default": false, "description": "Only whole numbers are allowed.", "examples": [true] }, "note": { "$ref": "#/$defs/line", "description": "What the number measures.", "examples": ["floor to crown"] } } }, "Scene": { "title": "Scene", "description": "Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.", "type": "object", "additionalProperties": false, "default": { "up": "+y", "forward": "+z", "unit": "cm" }, "properties": { "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis that points up.", "examples": ["+z"] }, "forward": { "$ref": "#/$defs/AxisName", "default": "+z", "description": "Axis the character faces along. Left is up \xD7 forward.", "examples": ["-y"] }, "unit": { "enum": ["mm", "cm", "m"], "default": "cm", "description": "Unit of length.", "examples": ["m"] } }, "examples": [{ "up": "+z", "forward": "-y", "unit": "m" }] }, "Landmark": { "title": "Landmark", "description": "A named measured point on the model.", "type": "object", "required": ["at"], "additionalProperties": false, "properties": { "at": { "$ref": "#/$defs/Point", "description": "Where it is. For side left: the left point.", "x-unit": "scene unit" }, "side": { "enum": ["left", "centre"], "default": "centre", "description": "left: a mirrored right twin exists.", "examples": ["left"] }, "right": { "$ref": "#/$defs/Point", "description": "The right point, where the model is not symmetrical.", "x-unit": "scene unit" }, "note": { "$ref": "#/$defs/line", "description": "How to find it on the model.", "examples": ["bony tip of the elbow"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Part": { "title": "Part", "description": "A building block; kind decides which.", "type": "object", "required": ["kind"], "discriminator": { "propertyName": "kind" }, "oneOf": [{ "$ref": "#/$defs/LimbPart" }, { "$ref": "#/$defs/RootPart" }, { "$ref": "#/$defs/StrandPart" }] }, "Orient": { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] } }, "examples": [{ "aim": "+y", "up": "+z" }] }, "Chain": { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far joints are meant to turn, by the joint's name in the chain.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] } } }, "PolePlace": { "title": "PolePlace", "description": "Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.", "type": "object", "required": ["joints"], "additionalProperties": false, "properties": { "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "Start, middle and end joint.", "examples": [["leg.left.hip", "leg.left.knee", "leg.left.ankle"]] }, "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end, as a factor on the length of both bones.", "x-unit": "limb lengths", "examples": [1] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the three joints lie on one line.", "examples": [[0, 0, 1]] } }, "examples": [{ "joints": ["leg.left.hip", "leg.left.knee", "leg.left.ankle"], "distance": 0.8 }] }, "ChannelOption": { "title": "ChannelOption", "description": "What an animator may do with a channel.", "type": "object", "additionalProperties": false, "properties": { "locked": { "type": "boolean", "default": false, "description": "The channel cannot be changed.", "examples": [true] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees, scene unit or factor", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees, scene unit or factor", "examples": [40] } } }, "AttributeOption": { "title": "AttributeOption", "description": "A value of its own on a control, beside the nine channels.", "type": "object", "additionalProperties": false, "properties": { "default": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest.", "examples": [1] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "examples": [0] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "examples": [1] }, "note": { "$ref": "#/$defs/line", "description": "What it does, for the animator.", "examples": ["0 turns joint by joint, 1 follows the hand"] }, "labels": { "type": "array", "items": { "type": "string", "minLength": 1, "maxLength": 80 }, "minItems": 2, "maxItems": 100, "description": "Words for the values 0, 1, 2 \u2026, for a choice in place of a number.", "examples": [["arm", "world"]] } } }, "Control": { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.", "examples": [["root", "spine.chest", "hips"]] }, "space_follow": { "enum": ["all", "turn"], "default": "all", "description": "all: the chosen space carries the control. turn: it only turns it; place stays with the parent.", "examples": ["turn"] } } }, "NumberOrAttribute": { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] }, "Solver": { "title": "Solver", "description": "Computes the transform of several joints at once. Which keys it takes depends on its kind.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone", "reach", "spline", "twist", "aim", "foot_roll"], "description": "two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 500, "description": "two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "two_bone, reach: joint or control that the last joint follows. aim: what the joint points at.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "two_bone, reach: control toward which the chain bends. aim: thing that says which way is up; without it the joint turns along the shortest arc.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "two_bone, reach, aim: 0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "stretch": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: 0: bones keep their length, 1: they grow until the end meets the goal. spline: 0: joints keep their distances, 1: they spread over the whole curve.", "examples": ["arm.left.hand.stretch"] }, "stretch_limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "two_bone, reach: greatest factor on the bones' length.", "x-unit": "factor", "examples": [1.5] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "two_bone, reach: share of the chain's length over which the end slows down before full reach. The zone never begins before the reach at rest.", "x-unit": "chain lengths", "examples": [0.05] }, "swing": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: angle by which the bend is swung about the line from start to goal.", "examples": ["arm.left.hand.swing"], "x-unit": "degrees" }, "bias": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "reach: \u22121 to 1: moves the fold from the last bends to the first.", "examples": ["leg.left.foot.lead"] }, "controls": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 2, "maxItems": 100, "description": "spline: the controls whose places shape the curve, from root to tip.", "examples": [["spine.low", "spine.middle", "spine.high"]] }, "volume": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "spline: 0 to 1: how far joints thicken and thin to keep the volume.", "examples": ["spine.high.volume"] }, "shares": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 1, "maxItems": 100, "description": "twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).", "examples": [[0.25, 0.5, 0.75]] }, "bone": { "$ref": "#/$defs/id", "description": "twist: joint at the root of the bone, the parent of the twist joints.", "examples": ["arm.left.elbow"] }, "tip": { "$ref": "#/$defs/id", "description": "twist: joint at the other end of the bone.", "examples": ["arm.left.wrist"] }, "base": { "$ref": "#/$defs/id", "description": "twist: joint or control against which the driver's twist is measured.", "examples": ["arm.left.elbow"] }, "driver": { "$ref": "#/$defs/id", "description": "twist: joint whose twist is spread.", "examples": ["arm.left.wrist"] }, "foot": { "$ref": "#/$defs/id", "description": "foot_roll: control that carries the foot.", "examples": ["leg.left.foot"] }, "ankle": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot moves.", "examples": ["leg.left_roll.ankle"] }, "toes": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot but the ball moves; without it the ankle alone is moved.", "examples": ["leg.left_roll.toes"] }, "heel": { "$ref": "#/$defs/Place", "description": "foot_roll: back of the sole, about which negative roll turns.", "examples": ["heel"] }, "ball": { "$ref": "#/$defs/Place", "description": "foot_roll: ball of the foot, about which roll turns up to the break angle.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "foot_roll: tip of the toes, about which roll turns beyond the break angle.", "examples": ["toe"] }, "inner": { "$ref": "#/$defs/Place", "description": "foot_roll: inner edge of the sole, about which negative bank turns.", "examples": ["inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "foot_roll: outer edge of the sole, about which positive bank turns.", "examples": ["outer"] }, "roll": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive forward.", "examples": ["leg.left.foot.roll"], "x-unit": "degrees" }, "bank": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive outward.", "examples": ["leg.left.foot.bank"], "x-unit": "degrees" }, "break": { "$ref": "#/$defs/NumberOrAttribute", "default": 30, "description": "foot_roll: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "side": { "$ref": "#/$defs/SideOption" } } }, "Constraint": { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale", "aim"], "description": "What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "axis": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "aim: axis of the target that points at the sources, when no offset is kept.", "examples": ["+x"] }, "up_axis": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "aim: axis of the target that keeps its direction against up.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/id", "description": "aim: joint or control whose rotation carries the up axis; without it the target turns along the shortest arc.", "examples": ["head.chin"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "GuideLine": { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Range": { "title": "Range", "description": "Smallest and largest value, from rest.", "type": "object", "additionalProperties": false, "properties": { "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees", "examples": [40] } }, "examples": [{ "min": -10, "max": 140 }] }, "JointLimits": { "title": "JointLimits", "description": "How far a joint is meant to turn from rest, by axis. Controls enforce it; the joint itself does not.", "type": "object", "additionalProperties": false, "properties": { "rx": { "$ref": "#/$defs/Range", "description": "About its own x axis.", "examples": [{ "min": 0, "max": 140 }] }, "ry": { "$ref": "#/$defs/Range", "description": "About its own y axis.", "examples": [{ "min": 0, "max": 140 }] }, "rz": { "$ref": "#/$defs/Range", "description": "About its own z axis.", "examples": [{ "min": 0, "max": 140 }] } }, "examples": [{ "rz": { "min": 0, "max": 140 } }] }, "Driver": { "title": "Driver", "description": "Adds a value that follows a control to a channel of a joint or control.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "input": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "Attribute or channel of a control, as control.attribute.", "examples": ["jaw.open", "leg.left.foot.ty"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control whose channel it moves.", "examples": ["jaw.hinge"] }, "channel": { "enum": ["tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "Channel that it is added to.", "examples": ["rz"] }, "keys": { "type": "array", "items": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 2, "maxItems": 2 }, "minItems": 2, "maxItems": 100, "description": "Curve as pairs of input and output, inputs ascending.", "examples": [[[0, 0], [1, 30]]] }, "curve": { "enum": ["linear", "smooth"], "default": "linear", "description": "How outputs run between keys: straight, or level at each key.", "examples": ["smooth"] }, "beyond": { "enum": ["hold", "extend"], "default": "hold", "description": "Beyond the end keys: hold the last output, or run on straight.", "examples": ["extend"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Geometry": { "title": "Geometry", "description": "A mesh of the model.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "mesh": { "type": "string", "minLength": 1, "maxLength": 200, "description": "Name of the mesh in the model's file; without it, the id.", "examples": ["hare_body"] }, "role": { "$ref": "#/$defs/word", "default": "geometry", "description": "Role; decides the container.", "examples": ["geometry"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Skin": { "title": "Skin", "description": "Which joints deform a mesh.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "geometry": { "$ref": "#/$defs/id", "description": "The mesh.", "examples": ["body"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 2e3, "description": "Joints, or chains for all of their joints.", "examples": [["spine", "arm.left"]] }, "influences": { "type": "integer", "minimum": 1, "maximum": 16, "default": 4, "description": "Joints that a vertex may follow at most.", "examples": [4] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Shape": { "title": "Shape", "description": "A morph target of a mesh with what weighs it.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "geometry": { "$ref": "#/$defs/id", "description": "The mesh.", "examples": ["body"] }, "morph": { "type": "string", "minLength": 1, "maxLength": 200, "description": "Name of the morph target in the model's file; without it, the id.", "examples": ["smile"] }, "weight": { "$ref": "#/$defs/NumberOrAttribute", "description": "Its weight, 0 to 1: a number or an attribute of a control.", "examples": ["head.smile"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "LimbPart": { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "default": { "distance": 1, "guide_line": true }, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "x-unit": "limb lengths", "examples": [1] }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the middle joint.", "examples": [true] } }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "RootPart": { "title": "RootPart", "description": "The root control: it carries everything in the carried containers and lies at the origin.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The root control that carries the whole rig." }, "at": { "$ref": "#/$defs/Place", "default": [0, 0, 0], "description": "Where the root control stands.", "x-unit": "scene unit", "examples": [[0, 0, 0]] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Drawn shape.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size taken from the whole rig.", "examples": [1.2] } } }, "StrandPart": { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints, each with its own control." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } } } };
+var schema19 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/recipe/1", "title": "Recipe", "description": "A rig recipe, format 1: everything Pintle needs to make one character movable.", "type": "object", "required": ["format", "recipe"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the recipe language.", "examples": [1] }, "recipe": { "$ref": "#/$defs/word", "description": "Name of the recipe: lower-case letters, digits and underscores. Also the character's name unless one is given when compiling.", "examples": ["hare"] }, "title": { "$ref": "#/$defs/line", "description": "What people call the rig.", "examples": ["Upright hare"] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "House rules to follow, as name@version.", "default": "standard@1", "examples": ["tidewrack@1"] }, "extends": { "type": "string", "pattern": "^[a-z][a-z0-9_]*@[1-9][0-9]*$", "description": "Recipe version this one changes, as name@version. This document is merged onto it by RFC 7396: maps merge key by key, null removes, anything else replaces.", "examples": ["walker@4"] }, "params": { "description": "Parameters: the numbers that vary from character to character.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Parameter" }, "default": {}, "examples": [{ "stature": { "unit": "cm", "default": 96, "min": 30, "max": 260 } }] }, "scene": { "$ref": "#/$defs/Scene" }, "landmarks": { "description": "Named measured points on the model. Those with side left have a mirrored right twin.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Landmark" }, "default": {}, "examples": [{ "hips": { "at": [0, 51, 0] } }] }, "roles": { "description": "Adds to or adjusts the roles of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Role" }, "default": {}, "examples": [{ "skin": { "token": "sk" } }] }, "containers": { "description": "Adds to or adjusts the containers of the house rules.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/Container" }, "default": {}, "examples": [{ "whiskers": { "parent": "carry" } }] }, "parts": { "description": "Building blocks that expand into chains, controls, solvers, constraints and guide lines. Whatever a part makes can be adjusted by id in those maps.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Part" }, "default": {}, "examples": [{ "root": { "kind": "root" } }] }, "chains": { "description": "Joint chains.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Chain" }, "default": {}, "examples": [{ "spine": { "points": ["hips", "chest"], "joints": 4 } }] }, "controls": { "description": "Controls: what the animator takes hold of. An entry whose id a part has made adjusts that control.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Control" }, "default": {}, "examples": [{ "hips": { "at": "hips", "shape": "square" } }] }, "solvers": { "description": "Solvers: what computes the rotation of several joints at once.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Solver" }, "default": {}, "examples": [{ "boom": { "kind": "two_bone", "joints": ["boom.base", "boom.knee", "boom.tip"], "goal": "hook", "pole": "boom_pole" } }] }, "constraints": { "description": "Constraints: what makes one thing follow others.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Constraint" }, "default": {}, "examples": [{ "neck_turn": { "kind": "orient", "target": "spine.04", "sources": { "head": 1 } } }] }, "drivers": { "description": "Drivers: what follows an attribute or channel of a control through a curve and is added to a channel of another thing.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Driver" }, "default": {}, "examples": [{ "claw_open": { "input": "claw.open", "target": "claw_upper.hinge", "channel": "rz", "keys": [[0, 0], [1, 35]] } }] }, "guide_lines": { "description": "Guide lines: drawn, never selectable, from a control to the thing it steers.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/GuideLine" }, "default": {}, "examples": [{ "knee_line": { "from": "knee_pole", "to": "leg.left.knee" } }] }, "geometry": { "description": "Meshes of the model that the rig carries.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Geometry" }, "default": {}, "examples": [{ "body": { "mesh": "hare_body" } }] }, "skins": { "description": "Which joints deform which mesh.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Skin" }, "default": {}, "examples": [{ "body_skin": { "geometry": "body", "joints": ["spine", "arm.left", "arm.right"], "influences": 4 } }] }, "shapes": { "description": "Morph targets of meshes, each with what weighs it.", "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/Shape" }, "default": {}, "examples": [{ "smile": { "geometry": "body", "morph": "smile", "weight": "head.smile" } }] }, "notes": { "description": "Custom metadata carried on the rig's note node.", "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": ["string", "number", "boolean"], "maxLength": 2e3 }, "default": {}, "examples": [{ "sequence": "Marsh at dawn" }] } }, "$defs": { "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "id": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "maxLength": 120 }, "line": { "type": "string", "maxLength": 200 }, "NumberOrExpression": { "title": "NumberOrExpression", "description": "A number, or an expression: a string that begins with = and holds CEL over params, landmarks, dist, mix and mid.", "type": ["number", "string"], "pattern": "^=", "maxLength": 2e3, "examples": [12.5, "=params.stature * 0.53"] }, "Point": { "title": "Point", "description": "Three numbers in the scene's unit and axes, or an expression that gives a point.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^=", "maxLength": 2e3 }], "examples": [[0, 51, 0], "=mid(landmarks.hip, landmarks.ankle)"] }, "Place": { "title": "Place", "description": "A landmark or joint by name, a point, or a point between two of them.", "anyOf": [{ "type": "array", "prefixItems": [{ "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }, { "$ref": "#/$defs/NumberOrExpression" }], "minItems": 3, "items": false }, { "type": "string", "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)", "maxLength": 2e3 }, { "$ref": "#/$defs/Between" }], "examples": ["wrist", [0, 51, 0], { "from": "shoulder", "to": "elbow", "share": 0.5 }] }, "SideOption": { "title": "SideOption", "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.", "enum": ["left", "right", "both", "centre"], "default": "centre", "examples": ["both"] }, "MirrorRule": { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] }, "RotationOrderOption": { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] }, "AxisName": { "title": "AxisName", "enum": ["+x", "-x", "+y", "-y", "+z", "-z"], "description": "One of the six axis directions.", "examples": ["+x"] }, "ChannelName": { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." }, "Parameter": { "title": "Parameter", "description": "A number that varies from character to character.", "type": "object", "required": ["default"], "additionalProperties": false, "properties": { "default": { "type": "number", "description": "Value when a character gives none.", "examples": [96] }, "min": { "type": "number", "description": "Smallest value allowed.", "examples": [30] }, "max": { "type": "number", "description": "Largest value allowed.", "examples": [260] }, "unit": { "$ref": "#/$defs/line", "description": "Unit, for people; nothing is converted.", "examples": ["cm"] }, "whole": { "type": "boolean", "default": false, "description": "Only whole numbers are allowed.", "examples": [true] }, "note": { "$ref": "#/$defs/line", "description": "What the number measures.", "examples": ["floor to crown"] } } }, "Scene": { "title": "Scene", "description": "Axes and unit of every number in the recipe and in the emitted script. Right-handed always; angles in degrees.", "type": "object", "additionalProperties": false, "default": { "up": "+y", "forward": "+z", "unit": "cm" }, "properties": { "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis that points up.", "examples": ["+z"] }, "forward": { "$ref": "#/$defs/AxisName", "default": "+z", "description": "Axis the character faces along. Left is up \xD7 forward.", "examples": ["-y"] }, "unit": { "enum": ["mm", "cm", "m"], "default": "cm", "description": "Unit of length.", "examples": ["m"] } }, "examples": [{ "up": "+z", "forward": "-y", "unit": "m" }] }, "Landmark": { "title": "Landmark", "description": "A named measured point on the model.", "type": "object", "required": ["at"], "additionalProperties": false, "properties": { "at": { "$ref": "#/$defs/Point", "description": "Where it is. For side left: the left point.", "x-unit": "scene unit" }, "side": { "enum": ["left", "centre"], "default": "centre", "description": "left: a mirrored right twin exists.", "examples": ["left"] }, "right": { "$ref": "#/$defs/Point", "description": "The right point, where the model is not symmetrical.", "x-unit": "scene unit" }, "note": { "$ref": "#/$defs/line", "description": "How to find it on the model.", "examples": ["bony tip of the elbow"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Part": { "title": "Part", "description": "A building block; kind decides which.", "type": "object", "required": ["kind"], "discriminator": { "propertyName": "kind" }, "oneOf": [{ "$ref": "#/$defs/AxlePart" }, { "$ref": "#/$defs/ClaviclePart" }, { "$ref": "#/$defs/EyePart" }, { "$ref": "#/$defs/FootPart" }, { "$ref": "#/$defs/HandPart" }, { "$ref": "#/$defs/JawPart" }, { "$ref": "#/$defs/LegThreePart" }, { "$ref": "#/$defs/LimbPart" }, { "$ref": "#/$defs/NeckHeadPart" }, { "$ref": "#/$defs/RootPart" }, { "$ref": "#/$defs/SpinePart" }, { "$ref": "#/$defs/StrandPart" }, { "$ref": "#/$defs/WingPart" }] }, "Orient": { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] }, "like": { "$ref": "#/$defs/id", "description": "Joint whose frame every joint of the chain takes, in place of frames of its own.", "examples": ["arm.left.elbow"] } }, "examples": [{ "aim": "+y", "up": "+z" }] }, "Chain": { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far joints are meant to turn, by the joint's name in the chain.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] } } }, "PolePlace": { "title": "PolePlace", "description": "Stands where the pole of three joints belongs, in place of at: in their plane, from the foot of the perpendicular through the middle joint.", "type": "object", "required": ["joints"], "additionalProperties": false, "properties": { "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 3, "maxItems": 3, "description": "Start, middle and end joint.", "examples": [["leg.left.hip", "leg.left.knee", "leg.left.ankle"]] }, "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end, as a factor on the length of both bones.", "x-unit": "limb lengths", "examples": [1] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the three joints lie on one line.", "examples": [[0, 0, 1]] } }, "examples": [{ "joints": ["leg.left.hip", "leg.left.knee", "leg.left.ankle"], "distance": 0.8 }] }, "ChannelOption": { "title": "ChannelOption", "description": "What an animator may do with a channel.", "type": "object", "additionalProperties": false, "properties": { "locked": { "type": "boolean", "default": false, "description": "The channel cannot be changed.", "examples": [true] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees, scene unit or factor", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees, scene unit or factor", "examples": [40] } } }, "AttributeOption": { "title": "AttributeOption", "description": "A value of its own on a control, beside the nine channels.", "type": "object", "additionalProperties": false, "properties": { "default": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest.", "examples": [1] }, "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "examples": [0] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "examples": [1] }, "note": { "$ref": "#/$defs/line", "description": "What it does, for the animator.", "examples": ["0 turns joint by joint, 1 follows the hand"] }, "labels": { "type": "array", "items": { "type": "string", "minLength": 1, "maxLength": 80 }, "minItems": 2, "maxItems": 100, "description": "Words for the values 0, 1, 2 \u2026, for a choice in place of a number.", "examples": [["arm", "world"]] } } }, "Control": { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.", "examples": [["root", "spine.chest", "hips"]] }, "space_follow": { "enum": ["all", "turn"], "default": "all", "description": "all: the chosen space carries the control. turn: it only turns it; place stays with the parent.", "examples": ["turn"] } } }, "NumberOrAttribute": { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] }, "Solver": { "title": "Solver", "description": "Computes the transform of several joints at once. Which keys it takes depends on its kind.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone", "reach", "spline", "twist", "aim", "foot_roll"], "description": "two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 500, "description": "two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "two_bone, reach: joint or control that the last joint follows. aim: what the joint points at.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "two_bone, reach: control toward which the chain bends. aim: thing that says which way is up; without it the joint turns along the shortest arc.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "two_bone, reach, aim: 0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "stretch": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: 0: bones keep their length, 1: they grow until the end meets the goal. spline: 0: joints keep their distances, 1: they spread over the whole curve.", "examples": ["arm.left.hand.stretch"] }, "stretch_limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "two_bone, reach: greatest factor on the bones' length.", "x-unit": "factor", "examples": [1.5] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "two_bone, reach: share of the chain's length over which the end slows down before full reach. The zone never begins before the reach at rest.", "x-unit": "chain lengths", "examples": [0.05] }, "swing": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: angle by which the bend is swung about the line from start to goal.", "examples": ["arm.left.hand.swing"], "x-unit": "degrees" }, "bias": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "reach: \u22121 to 1: moves the fold from the last bends to the first.", "examples": ["leg.left.foot.lead"] }, "controls": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 2, "maxItems": 100, "description": "spline: the controls whose places shape the curve, from root to tip.", "examples": [["spine.low", "spine.middle", "spine.high"]] }, "volume": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "spline: 0 to 1: how far joints thicken and thin to keep the volume.", "examples": ["spine.high.volume"] }, "shares": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 1, "maxItems": 100, "description": "twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).", "examples": [[0.25, 0.5, 0.75]] }, "bone": { "$ref": "#/$defs/id", "description": "twist: joint at the root of the bone, the parent of the twist joints.", "examples": ["arm.left.elbow"] }, "tip": { "$ref": "#/$defs/id", "description": "twist: joint at the other end of the bone.", "examples": ["arm.left.wrist"] }, "base": { "$ref": "#/$defs/id", "description": "twist: joint or control against which the driver's twist is measured.", "examples": ["arm.left.elbow"] }, "driver": { "$ref": "#/$defs/id", "description": "twist: joint whose twist is spread.", "examples": ["arm.left.wrist"] }, "foot": { "$ref": "#/$defs/id", "description": "foot_roll: control that carries the foot.", "examples": ["leg.left.foot"] }, "ankle": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot moves.", "examples": ["leg.left_roll.ankle"] }, "toes": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot but the ball moves; without it the ankle alone is moved.", "examples": ["leg.left_roll.toes"] }, "heel": { "$ref": "#/$defs/Place", "description": "foot_roll: back of the sole, about which negative roll turns.", "examples": ["heel"] }, "ball": { "$ref": "#/$defs/Place", "description": "foot_roll: ball of the foot, about which roll turns up to the break angle.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "foot_roll: tip of the toes, about which roll turns beyond the break angle.", "examples": ["toe"] }, "inner": { "$ref": "#/$defs/Place", "description": "foot_roll: inner edge of the sole, about which negative bank turns.", "examples": ["inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "foot_roll: outer edge of the sole, about which positive bank turns.", "examples": ["outer"] }, "roll": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive forward.", "examples": ["leg.left.foot.roll"], "x-unit": "degrees" }, "bank": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive outward.", "examples": ["leg.left.foot.bank"], "x-unit": "degrees" }, "break": { "$ref": "#/$defs/NumberOrAttribute", "default": 30, "description": "foot_roll: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "side": { "$ref": "#/$defs/SideOption" } } }, "Constraint": { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale", "aim"], "description": "What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "axis": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "aim: axis of the target that points at the sources, when no offset is kept.", "examples": ["+x"] }, "up_axis": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "aim: axis of the target that keeps its direction against up.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/id", "description": "aim: joint or control whose rotation carries the up axis; without it the target turns along the shortest arc.", "examples": ["head.chin"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "GuideLine": { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Range": { "title": "Range", "description": "Smallest and largest value, from rest.", "type": "object", "additionalProperties": false, "properties": { "min": { "$ref": "#/$defs/NumberOrExpression", "description": "Smallest value.", "x-unit": "degrees", "examples": [-40] }, "max": { "$ref": "#/$defs/NumberOrExpression", "description": "Largest value.", "x-unit": "degrees", "examples": [40] } }, "examples": [{ "min": -10, "max": 140 }] }, "JointLimits": { "title": "JointLimits", "description": "How far a joint is meant to turn from rest, by axis. Controls enforce it; the joint itself does not.", "type": "object", "additionalProperties": false, "properties": { "rx": { "$ref": "#/$defs/Range", "description": "About its own x axis.", "examples": [{ "min": 0, "max": 140 }] }, "ry": { "$ref": "#/$defs/Range", "description": "About its own y axis.", "examples": [{ "min": 0, "max": 140 }] }, "rz": { "$ref": "#/$defs/Range", "description": "About its own z axis.", "examples": [{ "min": 0, "max": 140 }] } }, "examples": [{ "rz": { "min": 0, "max": 140 } }] }, "Driver": { "title": "Driver", "description": "Adds a value that follows a control to a channel of a joint or control.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "input": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "Attribute or channel of a control, as control.attribute.", "examples": ["jaw.open", "leg.left.foot.ty"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control whose channel it moves.", "examples": ["jaw.hinge"] }, "channel": { "enum": ["tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "Channel that it is added to.", "examples": ["rz"] }, "keys": { "type": "array", "items": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 2, "maxItems": 2 }, "minItems": 2, "maxItems": 100, "description": "Curve as pairs of input and output, inputs ascending.", "examples": [[[0, 0], [1, 30]]] }, "curve": { "enum": ["linear", "smooth"], "default": "linear", "description": "How outputs run between keys: straight, or level at each key.", "examples": ["smooth"] }, "beyond": { "enum": ["hold", "extend"], "default": "hold", "description": "Beyond the end keys: hold the last output, or run on straight.", "examples": ["extend"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Geometry": { "title": "Geometry", "description": "A mesh of the model.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "mesh": { "type": "string", "minLength": 1, "maxLength": 200, "description": "Name of the mesh in the model's file; without it, the id.", "examples": ["hare_body"] }, "role": { "$ref": "#/$defs/word", "default": "geometry", "description": "Role; decides the container.", "examples": ["geometry"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Skin": { "title": "Skin", "description": "Which joints deform a mesh.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "geometry": { "$ref": "#/$defs/id", "description": "The mesh.", "examples": ["body"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 2e3, "description": "Joints, or chains for all of their joints.", "examples": [["spine", "arm.left"]] }, "influences": { "type": "integer", "minimum": 1, "maximum": 16, "default": 4, "description": "Joints that a vertex may follow at most.", "examples": [4] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Shape": { "title": "Shape", "description": "A morph target of a mesh with what weighs it.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "geometry": { "$ref": "#/$defs/id", "description": "The mesh.", "examples": ["body"] }, "morph": { "type": "string", "minLength": 1, "maxLength": 200, "description": "Name of the morph target in the model's file; without it, the id.", "examples": ["smile"] }, "weight": { "$ref": "#/$defs/NumberOrAttribute", "description": "Its weight, 0 to 1: a number or an attribute of a control.", "examples": ["head.smile"] }, "side": { "$ref": "#/$defs/SideOption" } } }, "Between": { "title": "Between", "description": "A point on the line between two others.", "type": "object", "required": ["from", "to"], "additionalProperties": false, "properties": { "from": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "maxLength": 120, "description": "Landmark or joint at its start.", "examples": ["shoulder"] }, "to": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "maxLength": 120, "description": "Landmark or joint at its end.", "examples": ["elbow"] }, "share": { "$ref": "#/$defs/NumberOrExpression", "default": 0.5, "description": "How far along, from 0 to 1.", "examples": [0.25] } }, "examples": [{ "from": "shoulder", "to": "elbow", "share": 0.5 }] }, "AxlePart": { "title": "AxlePart", "description": "One joint that turns about, swings on or slides along a line: a wheel, a hinge or a slider, with a control that has that one freedom.", "type": "object", "required": ["kind", "at", "along"], "additionalProperties": false, "properties": { "kind": { "const": "axle", "description": "A moving part of a prop." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it hangs on.", "examples": ["body"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it sits.", "examples": ["wheel"] }, "along": { "$ref": "#/$defs/Place", "description": "A second place on the line that it turns about or slides along.", "examples": ["wheel_out"] }, "motion": { "enum": ["wheel", "hinge", "slider"], "default": "hinge", "description": "wheel: turns without end. hinge: turns within limits. slider: moves along the line.", "examples": ["hinge"] }, "min": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "hinge, slider: least turn or shift.", "examples": [-90], "x-unit": "degrees or scene unit" }, "max": { "$ref": "#/$defs/NumberOrExpression", "default": 90, "description": "hinge, slider: greatest turn or shift.", "examples": [90], "x-unit": "degrees or scene unit" }, "roll_with": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "wheel: channel of a control, as control.tz, with whose way the wheel rolls. Needs radius.", "examples": ["root.tz"] }, "radius": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "wheel: radius, for rolling; below zero rolls the other way.", "examples": [12], "x-unit": "scene unit" }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the control.", "examples": ["ring"] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" } } }, "ClaviclePart": { "title": "ClaviclePart", "description": "One bone between body and limb, with a control that turns it.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "clavicle", "description": "A collar bone, shoulder blade or hip girdle." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 2, "description": "Root and end.", "examples": [["clavicle", "shoulder"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 2, "maxItems": 2, "description": "Names of the two joints. Without it they take their landmarks' names, else root and end.", "examples": [["root", "end"]] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the root turns, by its name; the control is limited alike.", "examples": [{ "clavicle": { "rz": { "min": -20, "max": 40 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "EyePart": { "title": "EyePart", "description": "An eyeball that points at a control of its own in front of it; a pair hangs on one control that both follow.", "type": "object", "required": ["kind", "at", "look"], "additionalProperties": false, "properties": { "kind": { "const": "eye", "description": "An eye." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the eye sits in.", "examples": ["head.head"] }, "at": { "$ref": "#/$defs/Place", "description": "Centre of the eyeball.", "examples": ["eye"] }, "look": { "$ref": "#/$defs/Place", "description": "Where the eye's target control stands at rest.", "examples": ["gaze"] }, "pair": { "$ref": "#/$defs/id", "description": "Control that the target follows, so that a pair of eyes looks at one thing.", "examples": ["gaze"] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the eyeball is meant to turn, under the name ball.", "examples": [{ "ball": { "ry": { "min": -35, "max": 35 }, "rx": { "min": -25, "max": 25 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" } } }, "FootPart": { "title": "FootPart", "description": "A foot at the end of a leg: ball and toe joints, and attributes on the leg's goal control that roll it over heel, ball and toe and bank it over its edges.", "type": "object", "required": ["kind", "leg", "ball", "toe", "heel", "inner", "outer"], "additionalProperties": false, "properties": { "kind": { "const": "foot", "description": "A foot that rolls." }, "side": { "$ref": "#/$defs/SideOption" }, "leg": { "$ref": "#/$defs/id", "description": "Part of kind limb or leg_three that the foot is the end of.", "examples": ["leg"] }, "ball": { "$ref": "#/$defs/Place", "description": "Ball of the foot.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "Tip of the toes.", "examples": ["toe"] }, "heel": { "$ref": "#/$defs/Place", "description": "Back of the sole.", "examples": ["heel"] }, "inner": { "$ref": "#/$defs/Place", "description": "Inner edge of the sole.", "examples": ["foot_inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "Outer edge of the sole.", "examples": ["foot_outer"] }, "break": { "$ref": "#/$defs/NumberOrExpression", "default": 30, "description": "Value at rest of the attribute toe_break: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "HandPart": { "title": "HandPart", "description": "Digits that are turned joint by joint, and one control that curls, spreads and cups them together.", "type": "object", "required": ["kind", "parent", "digits"], "additionalProperties": false, "properties": { "kind": { "const": "hand", "description": "A hand or claw with any count of digits." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint that the digits hang on.", "examples": ["arm.left.wrist"] }, "at": { "$ref": "#/$defs/Place", "description": "Where the hand's control stands; without it, at the parent.", "examples": ["palm"] }, "digits": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 12, "description": "Places of the digit's joints, from its root to its tip.", "examples": [["index_1", "index_2", "index_3", "index_tip"]] }, "minProperties": 1, "description": "Digits by name, in their order across the hand.", "examples": [{ "index": ["index_1", "index_2", "index_3", "index_tip"] }] }, "curl": { "$ref": "#/$defs/NumberOrExpression", "default": 70, "description": "Turn of each joint at curl 1.", "examples": [70], "x-unit": "degrees" }, "spread": { "$ref": "#/$defs/NumberOrExpression", "default": 20, "description": "Turn of the outermost digits away from the middle at spread 1.", "examples": [20], "x-unit": "degrees" }, "cup": { "$ref": "#/$defs/NumberOrExpression", "default": 15, "description": "Turn of the outermost digits' roots about their length at cup 1.", "examples": [15], "x-unit": "degrees" }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "JawPart": { "title": "JawPart", "description": "One bone that opens about a hinge: a control that turns and shifts it, with an attribute that opens it.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "jaw", "description": "A jaw or beak." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the jaw hangs on.", "examples": ["head.head"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 2, "description": "Hinge and tip.", "examples": [["jaw_hinge", "chin"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 2, "maxItems": 2, "description": "Names of the two joints. Without it they take their landmarks' names, else hinge and tip.", "examples": [["hinge", "tip"]] }, "open": { "$ref": "#/$defs/NumberOrExpression", "default": 25, "description": "Turn about the hinge at open 1; its sign says which way.", "examples": [-25], "x-unit": "degrees" }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "LegThreePart": { "title": "LegThreePart", "description": "Four joints in a row with three bones, as of a hind leg: joint-by-joint controls, a goal control with a reach solver that folds all bends together, a pole vector control, a blend between the two ways, and an attribute that moves the fold between knee and hock.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "leg_three", "description": "A leg that bends twice." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the leg hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 4, "maxItems": 4, "description": "Hip, knee, hock and end.", "examples": [["hip", "knee", "hock", "paw"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 4, "maxItems": 4, "description": "Names of the four joints. Without it they take their landmarks' names, else upper, middle, lower, end.", "examples": [["hip", "knee", "hock", "paw"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["paw"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "examples": [1], "x-unit": "limb lengths" }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the joint it leads.", "examples": [true] } }, "default": { "distance": 1, "guide_line": true }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "stretch": { "type": "object", "additionalProperties": false, "description": "Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.", "properties": { "limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "Greatest factor on the bones' length.", "examples": [1.5], "x-unit": "factor" }, "value": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest of the attribute stretch: 0 keeps lengths, 1 grows.", "examples": [0] } }, "examples": [{ "limit": 1.5, "value": 1 }] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Share of the limb's length over which its end slows down before full reach. The zone never begins before the reach at rest.", "examples": [0.05], "x-unit": "limb lengths" }, "spaces": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "What may carry the control.", "examples": [["root", "spine.chest"]] }, "default": {}, "description": "What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.", "examples": [{ "hand": ["root", "spine.chest", "spine.hips"] }] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the joints turn, by name; joint-by-joint controls are limited alike.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "LimbPart": { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, a blend between the two ways, and on request twist joints, stretch, soft reach and spaces.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "examples": [1], "x-unit": "limb lengths" }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the joint it leads.", "examples": [true] } }, "default": { "distance": 1, "guide_line": true }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "stretch": { "type": "object", "additionalProperties": false, "description": "Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.", "properties": { "limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "Greatest factor on the bones' length.", "examples": [1.5], "x-unit": "factor" }, "value": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest of the attribute stretch: 0 keeps lengths, 1 grows.", "examples": [0] } }, "examples": [{ "limit": 1.5, "value": 1 }] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Share of the limb's length over which its end slows down before full reach. The zone never begins before the reach at rest.", "examples": [0.05], "x-unit": "limb lengths" }, "spaces": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "What may carry the control.", "examples": [["root", "spine.chest"]] }, "default": {}, "description": "What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.", "examples": [{ "hand": ["root", "spine.chest", "spine.hips"] }] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the joints turn, by name; joint-by-joint controls are limited alike.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] }, "twist": { "type": "object", "additionalProperties": false, "description": "Counts of joints that share the twist along each bone.", "properties": { "upper": { "type": "integer", "minimum": 0, "maximum": 20, "default": 0, "description": "Joints along the upper bone, which let the twist at its root fade in. Needs parent.", "examples": [2] }, "lower": { "type": "integer", "minimum": 0, "maximum": 20, "default": 0, "description": "Joints along the lower bone, which let the twist of the end fade out.", "examples": [3] } }, "default": {}, "examples": [{ "upper": 2, "lower": 3 }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "NeckHeadPart": { "title": "NeckHeadPart", "description": "A neck of joints that are turned one by one, and a head on it that can keep its direction against the body.", "type": "object", "required": ["kind", "from", "to", "crown"], "additionalProperties": false, "properties": { "kind": { "const": "neck_head", "description": "Neck and head." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the neck hangs on.", "examples": ["spine.chest"] }, "from": { "$ref": "#/$defs/Place", "description": "Root of the neck.", "examples": ["neck"] }, "to": { "$ref": "#/$defs/Place", "description": "Where the head turns on the neck.", "examples": ["skull"] }, "crown": { "$ref": "#/$defs/Place", "description": "Top of the head.", "examples": ["crown"] }, "joints": { "type": "integer", "minimum": 1, "maximum": 60, "default": 2, "description": "Count of joints of the neck, the head's own not counted.", "examples": [2] }, "via": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 50, "description": "Places the neck runs through on the way.", "examples": [["neck_bend"]] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "What may turn the head beside the neck; the attribute space chooses.", "examples": [["root", "spine.chest"]] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the head turns, under the name head; its control is limited alike.", "examples": [{ "head": { "ry": { "min": -70, "max": 70 } } }] }, "guide_line": { "type": "boolean", "default": false, "description": "Draws a guide line from the head control to the crown.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "RootPart": { "title": "RootPart", "description": "The control that carries the whole rig; on request with a root joint beneath it.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The carrier of the rig." }, "side": { "$ref": "#/$defs/SideOption" }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands.", "examples": [[0, 0, 0]], "default": [0, 0, 0] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Shape of the control.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on its size.", "examples": [1.2] }, "joint": { "type": "boolean", "default": false, "description": "Makes a joint at the root that follows the control, as some receivers of skeletons want.", "examples": [true] } } }, "SpinePart": { "title": "SpinePart", "description": "A row of joints along a curve between two ends: a control at each end that carries both place and direction of the curve, controls between them that follow both, a spline solver, stretch and volume.", "type": "object", "required": ["kind", "from", "to"], "additionalProperties": false, "properties": { "kind": { "const": "spine", "description": "A spine, or any bendy body between two ends." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the lower control follows.", "examples": ["root"] }, "from": { "$ref": "#/$defs/Place", "description": "Where it begins.", "examples": ["hips"] }, "to": { "$ref": "#/$defs/Place", "description": "Where it ends.", "examples": ["chest"] }, "via": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 50, "description": "Places it runs through on the way.", "examples": [["waist"]] }, "joints": { "type": "integer", "minimum": 3, "maximum": 100, "default": 5, "description": "Count of joints, spread evenly by arc length.", "examples": [5] }, "controls": { "type": "integer", "minimum": 2, "maximum": 12, "default": 3, "description": "Count of controls: both ends and those between.", "examples": [3] }, "stretch": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the upper control's attribute stretch: 0 keeps lengths, 1 spreads the joints over the whole curve.", "examples": [0] }, "volume": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest of the upper control's attribute volume: how far joints thicken and thin.", "examples": [0] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "StrandPart": { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before, or all laid along a curve through a few controls.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "steer": { "enum": ["joints", "spline"], "default": "joints", "description": "joints: one control for each joint. spline: a few controls shape a curve.", "examples": ["joints"] }, "controls": { "type": "integer", "minimum": 2, "maximum": 40, "default": 4, "description": "spline: count of controls along the strand.", "examples": [4] }, "stretch": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "spline: value at rest of the last control's attribute stretch: 0 keeps lengths, 1 spreads the joints over the whole curve.", "examples": [0] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "joints: how far each joint turns, by its name; controls are limited alike.", "examples": [{ "01": { "rz": { "min": -30, "max": 30 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } }, "WingPart": { "title": "WingPart", "description": "A limb that folds in two places with rows of feathers on its bones: a control for each joint, one control that folds the wing and fans its feathers.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "wing", "description": "A wing." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the wing hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 4, "maxItems": 4, "description": "Shoulder, elbow, wrist and tip.", "examples": [["shoulder", "elbow", "wrist", "wing_tip"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 4, "maxItems": 4, "description": "Names of the four joints. Without it they take their landmarks' names, else upper, lower, hand, tip.", "examples": [["upper", "lower", "hand", "tip"]] }, "fold": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 3, "maxItems": 3, "default": [20, 110, -120], "description": "Turn of shoulder, elbow and wrist about their hinges at fold 1.", "x-unit": "degrees", "examples": [[20, 110, -120]] }, "feathers": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "object", "additionalProperties": false, "description": "A row of feathers along one bone.", "properties": { "bone": { "enum": ["upper", "lower", "hand"], "default": "hand", "description": "Bone that the row sits on.", "examples": ["hand"] }, "tips": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 2, "description": "Where the tips of the first and the last feather lie.", "examples": [["primary_first", "primary_last"]] }, "count": { "type": "integer", "minimum": 1, "maximum": 40, "default": 5, "description": "Count of feathers.", "examples": [5] }, "joints": { "type": "integer", "minimum": 2, "maximum": 12, "default": 3, "description": "Count of joints of each feather.", "examples": [3] }, "fan": { "$ref": "#/$defs/NumberOrExpression", "default": 30, "description": "Turn of the last feather at fan 1; the first stays.", "examples": [30], "x-unit": "degrees" } }, "required": ["tips"], "examples": [{ "bone": "hand", "tips": ["primary_first", "primary_last"], "count": 5 }] }, "default": {}, "description": "Rows of feathers by name.", "examples": [{ "primary": { "bone": "hand", "tips": ["primary_first", "primary_last"], "count": 5 } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } } } };
 var func1 = Object.prototype.hasOwnProperty;
 var func2 = require_ucs2length().default;
 var pattern3 = new RegExp("^[a-z][a-z0-9_]*$", "u");
@@ -757,7 +757,7 @@ function validate88(data, { instancePath = "", parentData, parentDataProperty, r
   return errors === 0;
 }
 validate88.evaluated = { "dynamicProps": false, "dynamicItems": false };
-var schema32 = { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, and a blend between the two ways.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "default": { "distance": 1, "guide_line": true }, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "x-unit": "limb lengths", "examples": [1] }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the middle joint.", "examples": [true] } }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+var schema32 = { "title": "AxlePart", "description": "One joint that turns about, swings on or slides along a line: a wheel, a hinge or a slider, with a control that has that one freedom.", "type": "object", "required": ["kind", "at", "along"], "additionalProperties": false, "properties": { "kind": { "const": "axle", "description": "A moving part of a prop." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it hangs on.", "examples": ["body"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it sits.", "examples": ["wheel"] }, "along": { "$ref": "#/$defs/Place", "description": "A second place on the line that it turns about or slides along.", "examples": ["wheel_out"] }, "motion": { "enum": ["wheel", "hinge", "slider"], "default": "hinge", "description": "wheel: turns without end. hinge: turns within limits. slider: moves along the line.", "examples": ["hinge"] }, "min": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "hinge, slider: least turn or shift.", "examples": [-90], "x-unit": "degrees or scene unit" }, "max": { "$ref": "#/$defs/NumberOrExpression", "default": 90, "description": "hinge, slider: greatest turn or shift.", "examples": [90], "x-unit": "degrees or scene unit" }, "roll_with": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "wheel: channel of a control, as control.tz, with whose way the wheel rolls. Needs radius.", "examples": ["root.tz"] }, "radius": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "wheel: radius, for rolling; below zero rolls the other way.", "examples": [12], "x-unit": "scene unit" }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the control.", "examples": ["ring"] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" } } };
 var schema33 = { "title": "SideOption", "description": "left or right: that side alone. both: the left side as written and its mirror image, in which every .left in an id reads .right. centre: neither. Without it, an id with a segment left or right says the side.", "enum": ["left", "right", "both", "centre"], "default": "centre", "examples": ["both"] };
 function validate92(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
@@ -782,6 +782,127 @@ function validate92(data, { instancePath = "", parentData, parentDataProperty, r
   return errors === 0;
 }
 validate92.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate99(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate99.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.from === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "from" }, message: "must have required property 'from'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.to === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "to" }, message: "must have required property 'to'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!(key0 === "from" || key0 === "to" || key0 === "share")) {
+        const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.from !== void 0) {
+      let data0 = data.from;
+      if (typeof data0 === "string") {
+        if (func2(data0) > 120) {
+          const err3 = { instancePath: instancePath + "/from", schemaPath: "#/properties/from/maxLength", keyword: "maxLength", params: { limit: 120 }, message: "must NOT have more than 120 characters" };
+          if (vErrors === null) {
+            vErrors = [err3];
+          } else {
+            vErrors.push(err3);
+          }
+          errors++;
+        }
+        if (!pattern9.test(data0)) {
+          const err4 = { instancePath: instancePath + "/from", schemaPath: "#/properties/from/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$"' };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+      } else {
+        const err5 = { instancePath: instancePath + "/from", schemaPath: "#/properties/from/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.to !== void 0) {
+      let data1 = data.to;
+      if (typeof data1 === "string") {
+        if (func2(data1) > 120) {
+          const err6 = { instancePath: instancePath + "/to", schemaPath: "#/properties/to/maxLength", keyword: "maxLength", params: { limit: 120 }, message: "must NOT have more than 120 characters" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        if (!pattern9.test(data1)) {
+          const err7 = { instancePath: instancePath + "/to", schemaPath: "#/properties/to/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$"' };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+      } else {
+        const err8 = { instancePath: instancePath + "/to", schemaPath: "#/properties/to/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+    }
+    if (data.share !== void 0) {
+      if (!validate70(data.share, { instancePath: instancePath + "/share", parentData: data, parentDataProperty: "share", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err9 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err9];
+    } else {
+      vErrors.push(err9);
+    }
+    errors++;
+  }
+  validate99.errors = vErrors;
+  return errors === 0;
+}
+validate99.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
 var pattern10 = new RegExp("^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$)", "u");
 function validate95(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
@@ -880,6 +1001,16 @@ function validate95(data, { instancePath = "", parentData, parentDataProperty, r
   }
   var _valid0 = _errs6 === errors;
   valid0 = valid0 || _valid0;
+  const _errs8 = errors;
+  if (!validate99(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+    vErrors = vErrors === null ? validate99.errors : vErrors.concat(validate99.errors);
+    errors = vErrors.length;
+  }
+  var _valid0 = _errs8 === errors;
+  valid0 = valid0 || _valid0;
+  if (_valid0) {
+    var props0 = true;
+  }
   if (!valid0) {
     const err6 = { instancePath, schemaPath: "#/anyOf", keyword: "anyOf", params: {}, message: "must match a schema in anyOf" };
     if (vErrors === null) {
@@ -899,35 +1030,12 @@ function validate95(data, { instancePath = "", parentData, parentDataProperty, r
     }
   }
   validate95.errors = vErrors;
+  evaluated0.props = props0;
   evaluated0.items = items0;
   return errors === 0;
 }
-validate95.evaluated = { "dynamicProps": false, "dynamicItems": true };
-var schema35 = { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] };
-function validate106(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
-  let vErrors = null;
-  let errors = 0;
-  const evaluated0 = validate106.evaluated;
-  if (evaluated0.dynamicProps) {
-    evaluated0.props = void 0;
-  }
-  if (evaluated0.dynamicItems) {
-    evaluated0.items = void 0;
-  }
-  if (!(data === "behaviour" || data === "orientation" || data === "world")) {
-    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema35.enum }, message: "must be equal to one of the allowed values" };
-    if (vErrors === null) {
-      vErrors = [err0];
-    } else {
-      vErrors.push(err0);
-    }
-    errors++;
-  }
-  validate106.errors = vErrors;
-  return errors === 0;
-}
-validate106.evaluated = { "dynamicProps": false, "dynamicItems": false };
-var schema36 = { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] };
+validate95.evaluated = { "dynamicProps": true, "dynamicItems": true };
+var schema36 = { "title": "MirrorRule", "description": "How the right copy's frames follow from the left's. behaviour: the same rotation values give the mirrored pose. orientation: aim and up axes are mirror images. world: the same world orientation.", "enum": ["behaviour", "orientation", "world"], "default": "behaviour", "examples": ["behaviour"] };
 function validate108(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
@@ -938,7 +1046,7 @@ function validate108(data, { instancePath = "", parentData, parentDataProperty, 
   if (evaluated0.dynamicItems) {
     evaluated0.items = void 0;
   }
-  if (!(data === "xyz" || data === "xzy" || data === "yxz" || data === "yzx" || data === "zxy" || data === "zyx")) {
+  if (!(data === "behaviour" || data === "orientation" || data === "world")) {
     const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema36.enum }, message: "must be equal to one of the allowed values" };
     if (vErrors === null) {
       vErrors = [err0];
@@ -951,10 +1059,319 @@ function validate108(data, { instancePath = "", parentData, parentDataProperty, 
   return errors === 0;
 }
 validate108.evaluated = { "dynamicProps": false, "dynamicItems": false };
+var pattern13 = new RegExp("^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "u");
 function validate91(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
   const evaluated0 = validate91.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.at === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "at" }, message: "must have required property 'at'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.along === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "along" }, message: "must have required property 'along'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema32.properties, key0)) {
+        const err3 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("axle" !== data.kind) {
+        const err4 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "axle" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.at !== void 0) {
+      if (!validate95(data.at, { instancePath: instancePath + "/at", parentData: data, parentDataProperty: "at", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.along !== void 0) {
+      if (!validate95(data.along, { instancePath: instancePath + "/along", parentData: data, parentDataProperty: "along", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.motion !== void 0) {
+      let data5 = data.motion;
+      if (!(data5 === "wheel" || data5 === "hinge" || data5 === "slider")) {
+        const err5 = { instancePath: instancePath + "/motion", schemaPath: "#/properties/motion/enum", keyword: "enum", params: { allowedValues: schema32.properties.motion.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.min !== void 0) {
+      if (!validate70(data.min, { instancePath: instancePath + "/min", parentData: data, parentDataProperty: "min", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.max !== void 0) {
+      if (!validate70(data.max, { instancePath: instancePath + "/max", parentData: data, parentDataProperty: "max", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.roll_with !== void 0) {
+      let data8 = data.roll_with;
+      if (typeof data8 === "string") {
+        if (func2(data8) > 180) {
+          const err6 = { instancePath: instancePath + "/roll_with", schemaPath: "#/properties/roll_with/maxLength", keyword: "maxLength", params: { limit: 180 }, message: "must NOT have more than 180 characters" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        if (!pattern13.test(data8)) {
+          const err7 = { instancePath: instancePath + "/roll_with", schemaPath: "#/properties/roll_with/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$" }, message: 'must match pattern "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$"' };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+      } else {
+        const err8 = { instancePath: instancePath + "/roll_with", schemaPath: "#/properties/roll_with/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+    }
+    if (data.radius !== void 0) {
+      if (!validate70(data.radius, { instancePath: instancePath + "/radius", parentData: data, parentDataProperty: "radius", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.shape !== void 0) {
+      let data10 = data.shape;
+      if (!(data10 === "ring" || data10 === "square" || data10 === "diamond" || data10 === "cross" || data10 === "arrow" || data10 === "ball" || data10 === "box" || data10 === "pin" || data10 === "compass")) {
+        const err9 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema32.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err9];
+        } else {
+          vErrors.push(err9);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err10 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err10];
+    } else {
+      vErrors.push(err10);
+    }
+    errors++;
+  }
+  validate91.errors = vErrors;
+  return errors === 0;
+}
+validate91.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema37 = { "title": "ClaviclePart", "description": "One bone between body and limb, with a control that turns it.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "clavicle", "description": "A collar bone, shoulder blade or hip girdle." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 2, "description": "Root and end.", "examples": [["clavicle", "shoulder"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 2, "maxItems": 2, "description": "Names of the two joints. Without it they take their landmarks' names, else root and end.", "examples": [["root", "end"]] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the root turns, by its name; the control is limited alike.", "examples": [{ "clavicle": { "rz": { "min": -20, "max": 40 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate115(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate115.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "min" || key0 === "max")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.min !== void 0) {
+      if (!validate70(data.min, { instancePath: instancePath + "/min", parentData: data, parentDataProperty: "min", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.max !== void 0) {
+      if (!validate70(data.max, { instancePath: instancePath + "/max", parentData: data, parentDataProperty: "max", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err1];
+    } else {
+      vErrors.push(err1);
+    }
+    errors++;
+  }
+  validate115.errors = vErrors;
+  return errors === 0;
+}
+validate115.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate114(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate114.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "rx" || key0 === "ry" || key0 === "rz")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.rx !== void 0) {
+      if (!validate115(data.rx, { instancePath: instancePath + "/rx", parentData: data, parentDataProperty: "rx", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate115.errors : vErrors.concat(validate115.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.ry !== void 0) {
+      if (!validate115(data.ry, { instancePath: instancePath + "/ry", parentData: data, parentDataProperty: "ry", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate115.errors : vErrors.concat(validate115.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rz !== void 0) {
+      if (!validate115(data.rz, { instancePath: instancePath + "/rz", parentData: data, parentDataProperty: "rz", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate115.errors : vErrors.concat(validate115.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err1];
+    } else {
+      vErrors.push(err1);
+    }
+    errors++;
+  }
+  validate114.errors = vErrors;
+  return errors === 0;
+}
+validate114.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema40 = { "title": "RotationOrderOption", "description": "Which axis turns first, second and third, about fixed axes.", "enum": ["xyz", "xzy", "yxz", "yzx", "zxy", "zyx"], "default": "xyz", "examples": ["zxy"] };
+function validate124(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate124.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (!(data === "xyz" || data === "xzy" || data === "yxz" || data === "yzx" || data === "zxy" || data === "zyx")) {
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema40.enum }, message: "must be equal to one of the allowed values" };
+    if (vErrors === null) {
+      vErrors = [err0];
+    } else {
+      vErrors.push(err0);
+    }
+    errors++;
+  }
+  validate124.errors = vErrors;
+  return errors === 0;
+}
+validate124.evaluated = { "dynamicProps": false, "dynamicItems": false };
+var pattern15 = new RegExp("^[a-z0-9_]+$", "u");
+function validate110(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate110.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -981,7 +1398,1537 @@ function validate91(data, { instancePath = "", parentData, parentDataProperty, r
       errors++;
     }
     for (const key0 in data) {
-      if (!func1.call(schema32.properties, key0)) {
+      if (!func1.call(schema37.properties, key0)) {
+        const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("clavicle" !== data.kind) {
+        const err3 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "clavicle" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.points !== void 0) {
+      let data3 = data.points;
+      if (Array.isArray(data3)) {
+        if (data3.length > 2) {
+          const err4 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/maxItems", keyword: "maxItems", params: { limit: 2 }, message: "must NOT have more than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+        if (data3.length < 2) {
+          const err5 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        const len0 = data3.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data3[i0], { instancePath: instancePath + "/points/" + i0, parentData: data3, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err6 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.names !== void 0) {
+      let data5 = data.names;
+      if (Array.isArray(data5)) {
+        if (data5.length > 2) {
+          const err7 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/maxItems", keyword: "maxItems", params: { limit: 2 }, message: "must NOT have more than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        if (data5.length < 2) {
+          const err8 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err8];
+          } else {
+            vErrors.push(err8);
+          }
+          errors++;
+        }
+        const len1 = data5.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          let data6 = data5[i1];
+          if (typeof data6 === "string") {
+            if (func2(data6) > 60) {
+              const err9 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+              if (vErrors === null) {
+                vErrors = [err9];
+              } else {
+                vErrors.push(err9);
+              }
+              errors++;
+            }
+            if (!pattern3.test(data6)) {
+              const err10 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+              if (vErrors === null) {
+                vErrors = [err10];
+              } else {
+                vErrors.push(err10);
+              }
+              errors++;
+            }
+          } else {
+            const err11 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err11];
+            } else {
+              vErrors.push(err11);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err12 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.limits !== void 0) {
+      let data7 = data.limits;
+      if (data7 && typeof data7 == "object" && !Array.isArray(data7)) {
+        for (const key1 in data7) {
+          const _errs14 = errors;
+          if (typeof key1 === "string") {
+            if (func2(key1) > 60) {
+              const err13 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters", propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err13];
+              } else {
+                vErrors.push(err13);
+              }
+              errors++;
+            }
+            if (!pattern15.test(key1)) {
+              const err14 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err14];
+              } else {
+                vErrors.push(err14);
+              }
+              errors++;
+            }
+          } else {
+            const err15 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key1 };
+            if (vErrors === null) {
+              vErrors = [err15];
+            } else {
+              vErrors.push(err15);
+            }
+            errors++;
+          }
+          var valid5 = _errs14 === errors;
+          if (!valid5) {
+            const err16 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err16];
+            } else {
+              vErrors.push(err16);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data7) {
+          if (!validate114(data7[key2], { instancePath: instancePath + "/limits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data7, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate114.errors : vErrors.concat(validate114.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err17 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err17];
+        } else {
+          vErrors.push(err17);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err18 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err18];
+    } else {
+      vErrors.push(err18);
+    }
+    errors++;
+  }
+  validate110.errors = vErrors;
+  return errors === 0;
+}
+validate110.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema41 = { "title": "EyePart", "description": "An eyeball that points at a control of its own in front of it; a pair hangs on one control that both follow.", "type": "object", "required": ["kind", "at", "look"], "additionalProperties": false, "properties": { "kind": { "const": "eye", "description": "An eye." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the eye sits in.", "examples": ["head.head"] }, "at": { "$ref": "#/$defs/Place", "description": "Centre of the eyeball.", "examples": ["eye"] }, "look": { "$ref": "#/$defs/Place", "description": "Where the eye's target control stands at rest.", "examples": ["gaze"] }, "pair": { "$ref": "#/$defs/id", "description": "Control that the target follows, so that a pair of eyes looks at one thing.", "examples": ["gaze"] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the eyeball is meant to turn, under the name ball.", "examples": [{ "ball": { "ry": { "min": -35, "max": 35 }, "rx": { "min": -25, "max": 25 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" } } };
+function validate126(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate126.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.at === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "at" }, message: "must have required property 'at'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.look === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "look" }, message: "must have required property 'look'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema41.properties, key0)) {
+        const err3 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("eye" !== data.kind) {
+        const err4 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "eye" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.at !== void 0) {
+      if (!validate95(data.at, { instancePath: instancePath + "/at", parentData: data, parentDataProperty: "at", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.look !== void 0) {
+      if (!validate95(data.look, { instancePath: instancePath + "/look", parentData: data, parentDataProperty: "look", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.pair !== void 0) {
+      if (!validate88(data.pair, { instancePath: instancePath + "/pair", parentData: data, parentDataProperty: "pair", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.limits !== void 0) {
+      let data6 = data.limits;
+      if (data6 && typeof data6 == "object" && !Array.isArray(data6)) {
+        for (const key1 in data6) {
+          const _errs10 = errors;
+          if (typeof key1 === "string") {
+            if (func2(key1) > 60) {
+              const err5 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters", propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err5];
+              } else {
+                vErrors.push(err5);
+              }
+              errors++;
+            }
+            if (!pattern15.test(key1)) {
+              const err6 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err6];
+              } else {
+                vErrors.push(err6);
+              }
+              errors++;
+            }
+          } else {
+            const err7 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key1 };
+            if (vErrors === null) {
+              vErrors = [err7];
+            } else {
+              vErrors.push(err7);
+            }
+            errors++;
+          }
+          var valid1 = _errs10 === errors;
+          if (!valid1) {
+            const err8 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err8];
+            } else {
+              vErrors.push(err8);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data6) {
+          if (!validate114(data6[key2], { instancePath: instancePath + "/limits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data6, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate114.errors : vErrors.concat(validate114.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err9 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err9];
+        } else {
+          vErrors.push(err9);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err10 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err10];
+    } else {
+      vErrors.push(err10);
+    }
+    errors++;
+  }
+  validate126.errors = vErrors;
+  return errors === 0;
+}
+validate126.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema42 = { "title": "FootPart", "description": "A foot at the end of a leg: ball and toe joints, and attributes on the leg's goal control that roll it over heel, ball and toe and bank it over its edges.", "type": "object", "required": ["kind", "leg", "ball", "toe", "heel", "inner", "outer"], "additionalProperties": false, "properties": { "kind": { "const": "foot", "description": "A foot that rolls." }, "side": { "$ref": "#/$defs/SideOption" }, "leg": { "$ref": "#/$defs/id", "description": "Part of kind limb or leg_three that the foot is the end of.", "examples": ["leg"] }, "ball": { "$ref": "#/$defs/Place", "description": "Ball of the foot.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "Tip of the toes.", "examples": ["toe"] }, "heel": { "$ref": "#/$defs/Place", "description": "Back of the sole.", "examples": ["heel"] }, "inner": { "$ref": "#/$defs/Place", "description": "Inner edge of the sole.", "examples": ["foot_inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "Outer edge of the sole.", "examples": ["foot_outer"] }, "break": { "$ref": "#/$defs/NumberOrExpression", "default": 30, "description": "Value at rest of the attribute toe_break: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate135(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate135.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.leg === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "leg" }, message: "must have required property 'leg'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.ball === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "ball" }, message: "must have required property 'ball'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+    if (data.toe === void 0) {
+      const err3 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "toe" }, message: "must have required property 'toe'" };
+      if (vErrors === null) {
+        vErrors = [err3];
+      } else {
+        vErrors.push(err3);
+      }
+      errors++;
+    }
+    if (data.heel === void 0) {
+      const err4 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "heel" }, message: "must have required property 'heel'" };
+      if (vErrors === null) {
+        vErrors = [err4];
+      } else {
+        vErrors.push(err4);
+      }
+      errors++;
+    }
+    if (data.inner === void 0) {
+      const err5 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "inner" }, message: "must have required property 'inner'" };
+      if (vErrors === null) {
+        vErrors = [err5];
+      } else {
+        vErrors.push(err5);
+      }
+      errors++;
+    }
+    if (data.outer === void 0) {
+      const err6 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "outer" }, message: "must have required property 'outer'" };
+      if (vErrors === null) {
+        vErrors = [err6];
+      } else {
+        vErrors.push(err6);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema42.properties, key0)) {
+        const err7 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err7];
+        } else {
+          vErrors.push(err7);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("foot" !== data.kind) {
+        const err8 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "foot" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.leg !== void 0) {
+      if (!validate88(data.leg, { instancePath: instancePath + "/leg", parentData: data, parentDataProperty: "leg", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.ball !== void 0) {
+      if (!validate95(data.ball, { instancePath: instancePath + "/ball", parentData: data, parentDataProperty: "ball", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.toe !== void 0) {
+      if (!validate95(data.toe, { instancePath: instancePath + "/toe", parentData: data, parentDataProperty: "toe", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.heel !== void 0) {
+      if (!validate95(data.heel, { instancePath: instancePath + "/heel", parentData: data, parentDataProperty: "heel", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.inner !== void 0) {
+      if (!validate95(data.inner, { instancePath: instancePath + "/inner", parentData: data, parentDataProperty: "inner", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.outer !== void 0) {
+      if (!validate95(data.outer, { instancePath: instancePath + "/outer", parentData: data, parentDataProperty: "outer", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.break !== void 0) {
+      if (!validate70(data.break, { instancePath: instancePath + "/break", parentData: data, parentDataProperty: "break", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err9 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err9];
+    } else {
+      vErrors.push(err9);
+    }
+    errors++;
+  }
+  validate135.errors = vErrors;
+  return errors === 0;
+}
+validate135.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema43 = { "title": "HandPart", "description": "Digits that are turned joint by joint, and one control that curls, spreads and cups them together.", "type": "object", "required": ["kind", "parent", "digits"], "additionalProperties": false, "properties": { "kind": { "const": "hand", "description": "A hand or claw with any count of digits." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint that the digits hang on.", "examples": ["arm.left.wrist"] }, "at": { "$ref": "#/$defs/Place", "description": "Where the hand's control stands; without it, at the parent.", "examples": ["palm"] }, "digits": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 12, "description": "Places of the digit's joints, from its root to its tip.", "examples": [["index_1", "index_2", "index_3", "index_tip"]] }, "minProperties": 1, "description": "Digits by name, in their order across the hand.", "examples": [{ "index": ["index_1", "index_2", "index_3", "index_tip"] }] }, "curl": { "$ref": "#/$defs/NumberOrExpression", "default": 70, "description": "Turn of each joint at curl 1.", "examples": [70], "x-unit": "degrees" }, "spread": { "$ref": "#/$defs/NumberOrExpression", "default": 20, "description": "Turn of the outermost digits away from the middle at spread 1.", "examples": [20], "x-unit": "degrees" }, "cup": { "$ref": "#/$defs/NumberOrExpression", "default": 15, "description": "Turn of the outermost digits' roots about their length at cup 1.", "examples": [15], "x-unit": "degrees" }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+var schema44 = { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] }, "like": { "$ref": "#/$defs/id", "description": "Joint whose frame every joint of the chain takes, in place of frames of its own.", "examples": ["arm.left.elbow"] } }, "examples": [{ "aim": "+y", "up": "+z" }] };
+function validate158(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate158.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    for (const key0 in data) {
+      if (!(key0 === "rule" || key0 === "aim" || key0 === "up" || key0 === "toward" || key0 === "like")) {
+        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err0];
+        } else {
+          vErrors.push(err0);
+        }
+        errors++;
+      }
+    }
+    if (data.rule !== void 0) {
+      let data0 = data.rule;
+      if (!(data0 === "chain" || data0 === "world")) {
+        const err1 = { instancePath: instancePath + "/rule", schemaPath: "#/properties/rule/enum", keyword: "enum", params: { allowedValues: schema44.properties.rule.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err1];
+        } else {
+          vErrors.push(err1);
+        }
+        errors++;
+      }
+    }
+    if (data.aim !== void 0) {
+      if (!validate63(data.aim, { instancePath: instancePath + "/aim", parentData: data, parentDataProperty: "aim", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.up !== void 0) {
+      if (!validate63(data.up, { instancePath: instancePath + "/up", parentData: data, parentDataProperty: "up", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.toward !== void 0) {
+      if (!validate69(data.toward, { instancePath: instancePath + "/toward", parentData: data, parentDataProperty: "toward", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.like !== void 0) {
+      if (!validate88(data.like, { instancePath: instancePath + "/like", parentData: data, parentDataProperty: "like", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err2];
+    } else {
+      vErrors.push(err2);
+    }
+    errors++;
+  }
+  validate158.errors = vErrors;
+  return errors === 0;
+}
+validate158.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate147(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate147.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.parent === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "parent" }, message: "must have required property 'parent'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.digits === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "digits" }, message: "must have required property 'digits'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema43.properties, key0)) {
+        const err3 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("hand" !== data.kind) {
+        const err4 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "hand" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.at !== void 0) {
+      if (!validate95(data.at, { instancePath: instancePath + "/at", parentData: data, parentDataProperty: "at", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.digits !== void 0) {
+      let data4 = data.digits;
+      if (data4 && typeof data4 == "object" && !Array.isArray(data4)) {
+        if (Object.keys(data4).length < 1) {
+          const err5 = { instancePath: instancePath + "/digits", schemaPath: "#/properties/digits/minProperties", keyword: "minProperties", params: { limit: 1 }, message: "must NOT have fewer than 1 properties" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        for (const key1 in data4) {
+          const _errs8 = errors;
+          if (!validate53(key1, { instancePath: instancePath + "/digits", parentData: data4, parentDataProperty: "digits", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid1 = _errs8 === errors;
+          if (!valid1) {
+            const err6 = { instancePath: instancePath + "/digits", schemaPath: "#/properties/digits/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err6];
+            } else {
+              vErrors.push(err6);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data4) {
+          let data5 = data4[key2];
+          if (Array.isArray(data5)) {
+            if (data5.length > 12) {
+              const err7 = { instancePath: instancePath + "/digits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/digits/additionalProperties/maxItems", keyword: "maxItems", params: { limit: 12 }, message: "must NOT have more than 12 items" };
+              if (vErrors === null) {
+                vErrors = [err7];
+              } else {
+                vErrors.push(err7);
+              }
+              errors++;
+            }
+            if (data5.length < 2) {
+              const err8 = { instancePath: instancePath + "/digits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/digits/additionalProperties/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+              if (vErrors === null) {
+                vErrors = [err8];
+              } else {
+                vErrors.push(err8);
+              }
+              errors++;
+            }
+            const len0 = data5.length;
+            for (let i0 = 0; i0 < len0; i0++) {
+              if (!validate95(data5[i0], { instancePath: instancePath + "/digits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/" + i0, parentData: data5, parentDataProperty: i0, rootData, dynamicAnchors })) {
+                vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+                errors = vErrors.length;
+              }
+            }
+          } else {
+            const err9 = { instancePath: instancePath + "/digits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/digits/additionalProperties/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+            if (vErrors === null) {
+              vErrors = [err9];
+            } else {
+              vErrors.push(err9);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err10 = { instancePath: instancePath + "/digits", schemaPath: "#/properties/digits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err10];
+        } else {
+          vErrors.push(err10);
+        }
+        errors++;
+      }
+    }
+    if (data.curl !== void 0) {
+      if (!validate70(data.curl, { instancePath: instancePath + "/curl", parentData: data, parentDataProperty: "curl", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.spread !== void 0) {
+      if (!validate70(data.spread, { instancePath: instancePath + "/spread", parentData: data, parentDataProperty: "spread", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.cup !== void 0) {
+      if (!validate70(data.cup, { instancePath: instancePath + "/cup", parentData: data, parentDataProperty: "cup", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.orient !== void 0) {
+      if (!validate158(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate158.errors : vErrors.concat(validate158.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err11 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err11];
+    } else {
+      vErrors.push(err11);
+    }
+    errors++;
+  }
+  validate147.errors = vErrors;
+  return errors === 0;
+}
+validate147.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema45 = { "title": "JawPart", "description": "One bone that opens about a hinge: a control that turns and shifts it, with an attribute that opens it.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "jaw", "description": "A jaw or beak." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the jaw hangs on.", "examples": ["head.head"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 2, "description": "Hinge and tip.", "examples": [["jaw_hinge", "chin"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 2, "maxItems": 2, "description": "Names of the two joints. Without it they take their landmarks' names, else hinge and tip.", "examples": [["hinge", "tip"]] }, "open": { "$ref": "#/$defs/NumberOrExpression", "default": 25, "description": "Turn about the hinge at open 1; its sign says which way.", "examples": [-25], "x-unit": "degrees" }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate165(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate165.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.points === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "points" }, message: "must have required property 'points'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema45.properties, key0)) {
+        const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("jaw" !== data.kind) {
+        const err3 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "jaw" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.points !== void 0) {
+      let data3 = data.points;
+      if (Array.isArray(data3)) {
+        if (data3.length > 2) {
+          const err4 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/maxItems", keyword: "maxItems", params: { limit: 2 }, message: "must NOT have more than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+        if (data3.length < 2) {
+          const err5 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        const len0 = data3.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data3[i0], { instancePath: instancePath + "/points/" + i0, parentData: data3, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err6 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.names !== void 0) {
+      let data5 = data.names;
+      if (Array.isArray(data5)) {
+        if (data5.length > 2) {
+          const err7 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/maxItems", keyword: "maxItems", params: { limit: 2 }, message: "must NOT have more than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        if (data5.length < 2) {
+          const err8 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+          if (vErrors === null) {
+            vErrors = [err8];
+          } else {
+            vErrors.push(err8);
+          }
+          errors++;
+        }
+        const len1 = data5.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          let data6 = data5[i1];
+          if (typeof data6 === "string") {
+            if (func2(data6) > 60) {
+              const err9 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+              if (vErrors === null) {
+                vErrors = [err9];
+              } else {
+                vErrors.push(err9);
+              }
+              errors++;
+            }
+            if (!pattern3.test(data6)) {
+              const err10 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+              if (vErrors === null) {
+                vErrors = [err10];
+              } else {
+                vErrors.push(err10);
+              }
+              errors++;
+            }
+          } else {
+            const err11 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err11];
+            } else {
+              vErrors.push(err11);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err12 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.open !== void 0) {
+      if (!validate70(data.open, { instancePath: instancePath + "/open", parentData: data, parentDataProperty: "open", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.orient !== void 0) {
+      if (!validate158(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate158.errors : vErrors.concat(validate158.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err13 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err13];
+    } else {
+      vErrors.push(err13);
+    }
+    errors++;
+  }
+  validate165.errors = vErrors;
+  return errors === 0;
+}
+validate165.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema46 = { "title": "LegThreePart", "description": "Four joints in a row with three bones, as of a hind leg: joint-by-joint controls, a goal control with a reach solver that folds all bends together, a pole vector control, a blend between the two ways, and an attribute that moves the fold between knee and hock.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "leg_three", "description": "A leg that bends twice." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the leg hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 4, "maxItems": 4, "description": "Hip, knee, hock and end.", "examples": [["hip", "knee", "hock", "paw"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 4, "maxItems": 4, "description": "Names of the four joints. Without it they take their landmarks' names, else upper, middle, lower, end.", "examples": [["hip", "knee", "hock", "paw"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["paw"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "examples": [1], "x-unit": "limb lengths" }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the joint it leads.", "examples": [true] } }, "default": { "distance": 1, "guide_line": true }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "stretch": { "type": "object", "additionalProperties": false, "description": "Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.", "properties": { "limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "Greatest factor on the bones' length.", "examples": [1.5], "x-unit": "factor" }, "value": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest of the attribute stretch: 0 keeps lengths, 1 grows.", "examples": [0] } }, "examples": [{ "limit": 1.5, "value": 1 }] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Share of the limb's length over which its end slows down before full reach. The zone never begins before the reach at rest.", "examples": [0.05], "x-unit": "limb lengths" }, "spaces": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "What may carry the control.", "examples": [["root", "spine.chest"]] }, "default": {}, "description": "What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.", "examples": [{ "hand": ["root", "spine.chest", "spine.hips"] }] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the joints turn, by name; joint-by-joint controls are limited alike.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate174(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate174.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.points === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "points" }, message: "must have required property 'points'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema46.properties, key0)) {
+        const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("leg_three" !== data.kind) {
+        const err3 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "leg_three" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.points !== void 0) {
+      let data3 = data.points;
+      if (Array.isArray(data3)) {
+        if (data3.length > 4) {
+          const err4 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/maxItems", keyword: "maxItems", params: { limit: 4 }, message: "must NOT have more than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+        if (data3.length < 4) {
+          const err5 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/minItems", keyword: "minItems", params: { limit: 4 }, message: "must NOT have fewer than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        const len0 = data3.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data3[i0], { instancePath: instancePath + "/points/" + i0, parentData: data3, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err6 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.names !== void 0) {
+      let data5 = data.names;
+      if (Array.isArray(data5)) {
+        if (data5.length > 4) {
+          const err7 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/maxItems", keyword: "maxItems", params: { limit: 4 }, message: "must NOT have more than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        if (data5.length < 4) {
+          const err8 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/minItems", keyword: "minItems", params: { limit: 4 }, message: "must NOT have fewer than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err8];
+          } else {
+            vErrors.push(err8);
+          }
+          errors++;
+        }
+        const len1 = data5.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          let data6 = data5[i1];
+          if (typeof data6 === "string") {
+            if (func2(data6) > 60) {
+              const err9 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+              if (vErrors === null) {
+                vErrors = [err9];
+              } else {
+                vErrors.push(err9);
+              }
+              errors++;
+            }
+            if (!pattern3.test(data6)) {
+              const err10 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+              if (vErrors === null) {
+                vErrors = [err10];
+              } else {
+                vErrors.push(err10);
+              }
+              errors++;
+            }
+          } else {
+            const err11 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err11];
+            } else {
+              vErrors.push(err11);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err12 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.goal !== void 0) {
+      if (!validate53(data.goal, { instancePath: instancePath + "/goal", parentData: data, parentDataProperty: "goal", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.goal_parent !== void 0) {
+      if (!validate88(data.goal_parent, { instancePath: instancePath + "/goal_parent", parentData: data, parentDataProperty: "goal_parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.pole !== void 0) {
+      let data9 = data.pole;
+      if (data9 && typeof data9 == "object" && !Array.isArray(data9)) {
+        for (const key1 in data9) {
+          if (!(key1 === "distance" || key1 === "guide_line")) {
+            const err13 = { instancePath: instancePath + "/pole", schemaPath: "#/properties/pole/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key1 }, message: "must NOT have additional properties" };
+            if (vErrors === null) {
+              vErrors = [err13];
+            } else {
+              vErrors.push(err13);
+            }
+            errors++;
+          }
+        }
+        if (data9.distance !== void 0) {
+          if (!validate70(data9.distance, { instancePath: instancePath + "/pole/distance", parentData: data9, parentDataProperty: "distance", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+        if (data9.guide_line !== void 0) {
+          if (typeof data9.guide_line !== "boolean") {
+            const err14 = { instancePath: instancePath + "/pole/guide_line", schemaPath: "#/properties/pole/properties/guide_line/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+            if (vErrors === null) {
+              vErrors = [err14];
+            } else {
+              vErrors.push(err14);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err15 = { instancePath: instancePath + "/pole", schemaPath: "#/properties/pole/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err15];
+        } else {
+          vErrors.push(err15);
+        }
+        errors++;
+      }
+    }
+    if (data.bend !== void 0) {
+      if (!validate69(data.bend, { instancePath: instancePath + "/bend", parentData: data, parentDataProperty: "bend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.reach !== void 0) {
+      if (!validate70(data.reach, { instancePath: instancePath + "/reach", parentData: data, parentDataProperty: "reach", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.stretch !== void 0) {
+      let data14 = data.stretch;
+      if (data14 && typeof data14 == "object" && !Array.isArray(data14)) {
+        for (const key2 in data14) {
+          if (!(key2 === "limit" || key2 === "value")) {
+            const err16 = { instancePath: instancePath + "/stretch", schemaPath: "#/properties/stretch/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key2 }, message: "must NOT have additional properties" };
+            if (vErrors === null) {
+              vErrors = [err16];
+            } else {
+              vErrors.push(err16);
+            }
+            errors++;
+          }
+        }
+        if (data14.limit !== void 0) {
+          if (!validate70(data14.limit, { instancePath: instancePath + "/stretch/limit", parentData: data14, parentDataProperty: "limit", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+        if (data14.value !== void 0) {
+          if (!validate70(data14.value, { instancePath: instancePath + "/stretch/value", parentData: data14, parentDataProperty: "value", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err17 = { instancePath: instancePath + "/stretch", schemaPath: "#/properties/stretch/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err17];
+        } else {
+          vErrors.push(err17);
+        }
+        errors++;
+      }
+    }
+    if (data.soft !== void 0) {
+      if (!validate70(data.soft, { instancePath: instancePath + "/soft", parentData: data, parentDataProperty: "soft", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.spaces !== void 0) {
+      let data18 = data.spaces;
+      if (data18 && typeof data18 == "object" && !Array.isArray(data18)) {
+        for (const key3 in data18) {
+          const _errs30 = errors;
+          if (!validate53(key3, { instancePath: instancePath + "/spaces", parentData: data18, parentDataProperty: "spaces", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid7 = _errs30 === errors;
+          if (!valid7) {
+            const err18 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/propertyNames", keyword: "propertyNames", params: { propertyName: key3 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err18];
+            } else {
+              vErrors.push(err18);
+            }
+            errors++;
+          }
+        }
+        for (const key4 in data18) {
+          let data19 = data18[key4];
+          if (Array.isArray(data19)) {
+            if (data19.length > 40) {
+              const err19 = { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/spaces/additionalProperties/maxItems", keyword: "maxItems", params: { limit: 40 }, message: "must NOT have more than 40 items" };
+              if (vErrors === null) {
+                vErrors = [err19];
+              } else {
+                vErrors.push(err19);
+              }
+              errors++;
+            }
+            if (data19.length < 1) {
+              const err20 = { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/spaces/additionalProperties/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+              if (vErrors === null) {
+                vErrors = [err20];
+              } else {
+                vErrors.push(err20);
+              }
+              errors++;
+            }
+            const len2 = data19.length;
+            for (let i2 = 0; i2 < len2; i2++) {
+              if (!validate88(data19[i2], { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1") + "/" + i2, parentData: data19, parentDataProperty: i2, rootData, dynamicAnchors })) {
+                vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+                errors = vErrors.length;
+              }
+            }
+          } else {
+            const err21 = { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/spaces/additionalProperties/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+            if (vErrors === null) {
+              vErrors = [err21];
+            } else {
+              vErrors.push(err21);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err22 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err22];
+        } else {
+          vErrors.push(err22);
+        }
+        errors++;
+      }
+    }
+    if (data.limits !== void 0) {
+      let data21 = data.limits;
+      if (data21 && typeof data21 == "object" && !Array.isArray(data21)) {
+        for (const key5 in data21) {
+          const _errs37 = errors;
+          if (typeof key5 === "string") {
+            if (func2(key5) > 60) {
+              const err23 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters", propertyName: key5 };
+              if (vErrors === null) {
+                vErrors = [err23];
+              } else {
+                vErrors.push(err23);
+              }
+              errors++;
+            }
+            if (!pattern15.test(key5)) {
+              const err24 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key5 };
+              if (vErrors === null) {
+                vErrors = [err24];
+              } else {
+                vErrors.push(err24);
+              }
+              errors++;
+            }
+          } else {
+            const err25 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key5 };
+            if (vErrors === null) {
+              vErrors = [err25];
+            } else {
+              vErrors.push(err25);
+            }
+            errors++;
+          }
+          var valid11 = _errs37 === errors;
+          if (!valid11) {
+            const err26 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames", keyword: "propertyNames", params: { propertyName: key5 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err26];
+            } else {
+              vErrors.push(err26);
+            }
+            errors++;
+          }
+        }
+        for (const key6 in data21) {
+          if (!validate114(data21[key6], { instancePath: instancePath + "/limits/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data21, parentDataProperty: key6, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate114.errors : vErrors.concat(validate114.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err27 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err27];
+        } else {
+          vErrors.push(err27);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err28 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err28];
+    } else {
+      vErrors.push(err28);
+    }
+    errors++;
+  }
+  validate174.errors = vErrors;
+  return errors === 0;
+}
+validate174.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema47 = { "title": "LimbPart", "description": "Three joints in a row that bend in the middle: joint-by-joint controls, a goal control with two-bone inverse kinematics, a pole vector control with its guide line, a blend between the two ways, and on request twist joints, stretch, soft reach and spaces.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "limb", "description": "An arm, a leg, or anything else that bends once." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the limb hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 3, "maxItems": 3, "description": "Start, bend and end.", "examples": [["shoulder", "elbow", "wrist"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 3, "maxItems": 3, "description": "Names of the three joints. Without it they take their landmarks' names, else upper, lower, end.", "examples": [["upper", "lower", "end"]] }, "goal": { "$ref": "#/$defs/word", "default": "goal", "description": "Name of the goal control.", "examples": ["hand"] }, "goal_parent": { "$ref": "#/$defs/id", "description": "Joint or control that goal and pole follow; without it they follow the root only.", "examples": ["hips"] }, "pole": { "type": "object", "additionalProperties": false, "description": "The pole vector control.", "properties": { "distance": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Distance from the line start\u2013end through the bend, as a factor on the limb's length.", "examples": [1], "x-unit": "limb lengths" }, "guide_line": { "type": "boolean", "default": true, "description": "Draws a guide line from the pole control to the joint it leads.", "examples": [true] } }, "default": { "distance": 1, "guide_line": true }, "examples": [{ "distance": 0.8 }] }, "bend": { "$ref": "#/$defs/Point", "description": "Direction in which the middle joint should lead when the limb is straight at rest.", "examples": [[0, 0, -1]] }, "reach": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the goal control's attribute reach: 0 turns joint by joint, 1 follows the goal.", "examples": [1] }, "stretch": { "type": "object", "additionalProperties": false, "description": "Lets bones grow toward a goal out of reach; the goal control's attribute stretch turns it on.", "properties": { "limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "Greatest factor on the bones' length.", "examples": [1.5], "x-unit": "factor" }, "value": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest of the attribute stretch: 0 keeps lengths, 1 grows.", "examples": [0] } }, "examples": [{ "limit": 1.5, "value": 1 }] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Share of the limb's length over which its end slows down before full reach. The zone never begins before the reach at rest.", "examples": [0.05], "x-unit": "limb lengths" }, "spaces": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "What may carry the control.", "examples": [["root", "spine.chest"]] }, "default": {}, "description": "What may carry the goal control (by its name) and the pole control (pole); each gets an attribute space.", "examples": [{ "hand": ["root", "spine.chest", "spine.hips"] }] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the joints turn, by name; joint-by-joint controls are limited alike.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] }, "twist": { "type": "object", "additionalProperties": false, "description": "Counts of joints that share the twist along each bone.", "properties": { "upper": { "type": "integer", "minimum": 0, "maximum": 20, "default": 0, "description": "Joints along the upper bone, which let the twist at its root fade in. Needs parent.", "examples": [2] }, "lower": { "type": "integer", "minimum": 0, "maximum": 20, "default": 0, "description": "Joints along the lower bone, which let the twist of the end fade out.", "examples": [3] } }, "default": {}, "examples": [{ "upper": 2, "lower": 3 }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate192(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate192.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.points === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "points" }, message: "must have required property 'points'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema47.properties, key0)) {
         const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err2];
@@ -1180,6 +3127,264 @@ function validate91(data, { instancePath = "", parentData, parentDataProperty, r
         errors = vErrors.length;
       }
     }
+    if (data.stretch !== void 0) {
+      let data14 = data.stretch;
+      if (data14 && typeof data14 == "object" && !Array.isArray(data14)) {
+        for (const key2 in data14) {
+          if (!(key2 === "limit" || key2 === "value")) {
+            const err16 = { instancePath: instancePath + "/stretch", schemaPath: "#/properties/stretch/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key2 }, message: "must NOT have additional properties" };
+            if (vErrors === null) {
+              vErrors = [err16];
+            } else {
+              vErrors.push(err16);
+            }
+            errors++;
+          }
+        }
+        if (data14.limit !== void 0) {
+          if (!validate70(data14.limit, { instancePath: instancePath + "/stretch/limit", parentData: data14, parentDataProperty: "limit", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+        if (data14.value !== void 0) {
+          if (!validate70(data14.value, { instancePath: instancePath + "/stretch/value", parentData: data14, parentDataProperty: "value", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err17 = { instancePath: instancePath + "/stretch", schemaPath: "#/properties/stretch/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err17];
+        } else {
+          vErrors.push(err17);
+        }
+        errors++;
+      }
+    }
+    if (data.soft !== void 0) {
+      if (!validate70(data.soft, { instancePath: instancePath + "/soft", parentData: data, parentDataProperty: "soft", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.spaces !== void 0) {
+      let data18 = data.spaces;
+      if (data18 && typeof data18 == "object" && !Array.isArray(data18)) {
+        for (const key3 in data18) {
+          const _errs30 = errors;
+          if (!validate53(key3, { instancePath: instancePath + "/spaces", parentData: data18, parentDataProperty: "spaces", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid7 = _errs30 === errors;
+          if (!valid7) {
+            const err18 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/propertyNames", keyword: "propertyNames", params: { propertyName: key3 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err18];
+            } else {
+              vErrors.push(err18);
+            }
+            errors++;
+          }
+        }
+        for (const key4 in data18) {
+          let data19 = data18[key4];
+          if (Array.isArray(data19)) {
+            if (data19.length > 40) {
+              const err19 = { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/spaces/additionalProperties/maxItems", keyword: "maxItems", params: { limit: 40 }, message: "must NOT have more than 40 items" };
+              if (vErrors === null) {
+                vErrors = [err19];
+              } else {
+                vErrors.push(err19);
+              }
+              errors++;
+            }
+            if (data19.length < 1) {
+              const err20 = { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/spaces/additionalProperties/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+              if (vErrors === null) {
+                vErrors = [err20];
+              } else {
+                vErrors.push(err20);
+              }
+              errors++;
+            }
+            const len2 = data19.length;
+            for (let i2 = 0; i2 < len2; i2++) {
+              if (!validate88(data19[i2], { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1") + "/" + i2, parentData: data19, parentDataProperty: i2, rootData, dynamicAnchors })) {
+                vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+                errors = vErrors.length;
+              }
+            }
+          } else {
+            const err21 = { instancePath: instancePath + "/spaces/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/spaces/additionalProperties/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+            if (vErrors === null) {
+              vErrors = [err21];
+            } else {
+              vErrors.push(err21);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err22 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err22];
+        } else {
+          vErrors.push(err22);
+        }
+        errors++;
+      }
+    }
+    if (data.limits !== void 0) {
+      let data21 = data.limits;
+      if (data21 && typeof data21 == "object" && !Array.isArray(data21)) {
+        for (const key5 in data21) {
+          const _errs37 = errors;
+          if (typeof key5 === "string") {
+            if (func2(key5) > 60) {
+              const err23 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters", propertyName: key5 };
+              if (vErrors === null) {
+                vErrors = [err23];
+              } else {
+                vErrors.push(err23);
+              }
+              errors++;
+            }
+            if (!pattern15.test(key5)) {
+              const err24 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key5 };
+              if (vErrors === null) {
+                vErrors = [err24];
+              } else {
+                vErrors.push(err24);
+              }
+              errors++;
+            }
+          } else {
+            const err25 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key5 };
+            if (vErrors === null) {
+              vErrors = [err25];
+            } else {
+              vErrors.push(err25);
+            }
+            errors++;
+          }
+          var valid11 = _errs37 === errors;
+          if (!valid11) {
+            const err26 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames", keyword: "propertyNames", params: { propertyName: key5 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err26];
+            } else {
+              vErrors.push(err26);
+            }
+            errors++;
+          }
+        }
+        for (const key6 in data21) {
+          if (!validate114(data21[key6], { instancePath: instancePath + "/limits/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data21, parentDataProperty: key6, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate114.errors : vErrors.concat(validate114.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err27 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err27];
+        } else {
+          vErrors.push(err27);
+        }
+        errors++;
+      }
+    }
+    if (data.twist !== void 0) {
+      let data23 = data.twist;
+      if (data23 && typeof data23 == "object" && !Array.isArray(data23)) {
+        for (const key7 in data23) {
+          if (!(key7 === "upper" || key7 === "lower")) {
+            const err28 = { instancePath: instancePath + "/twist", schemaPath: "#/properties/twist/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key7 }, message: "must NOT have additional properties" };
+            if (vErrors === null) {
+              vErrors = [err28];
+            } else {
+              vErrors.push(err28);
+            }
+            errors++;
+          }
+        }
+        if (data23.upper !== void 0) {
+          let data24 = data23.upper;
+          if (!(typeof data24 == "number" && (!(data24 % 1) && !isNaN(data24)) && isFinite(data24))) {
+            const err29 = { instancePath: instancePath + "/twist/upper", schemaPath: "#/properties/twist/properties/upper/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+            if (vErrors === null) {
+              vErrors = [err29];
+            } else {
+              vErrors.push(err29);
+            }
+            errors++;
+          }
+          if (typeof data24 == "number" && isFinite(data24)) {
+            if (data24 > 20 || isNaN(data24)) {
+              const err30 = { instancePath: instancePath + "/twist/upper", schemaPath: "#/properties/twist/properties/upper/maximum", keyword: "maximum", params: { comparison: "<=", limit: 20 }, message: "must be <= 20" };
+              if (vErrors === null) {
+                vErrors = [err30];
+              } else {
+                vErrors.push(err30);
+              }
+              errors++;
+            }
+            if (data24 < 0 || isNaN(data24)) {
+              const err31 = { instancePath: instancePath + "/twist/upper", schemaPath: "#/properties/twist/properties/upper/minimum", keyword: "minimum", params: { comparison: ">=", limit: 0 }, message: "must be >= 0" };
+              if (vErrors === null) {
+                vErrors = [err31];
+              } else {
+                vErrors.push(err31);
+              }
+              errors++;
+            }
+          }
+        }
+        if (data23.lower !== void 0) {
+          let data25 = data23.lower;
+          if (!(typeof data25 == "number" && (!(data25 % 1) && !isNaN(data25)) && isFinite(data25))) {
+            const err32 = { instancePath: instancePath + "/twist/lower", schemaPath: "#/properties/twist/properties/lower/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+            if (vErrors === null) {
+              vErrors = [err32];
+            } else {
+              vErrors.push(err32);
+            }
+            errors++;
+          }
+          if (typeof data25 == "number" && isFinite(data25)) {
+            if (data25 > 20 || isNaN(data25)) {
+              const err33 = { instancePath: instancePath + "/twist/lower", schemaPath: "#/properties/twist/properties/lower/maximum", keyword: "maximum", params: { comparison: "<=", limit: 20 }, message: "must be <= 20" };
+              if (vErrors === null) {
+                vErrors = [err33];
+              } else {
+                vErrors.push(err33);
+              }
+              errors++;
+            }
+            if (data25 < 0 || isNaN(data25)) {
+              const err34 = { instancePath: instancePath + "/twist/lower", schemaPath: "#/properties/twist/properties/lower/minimum", keyword: "minimum", params: { comparison: ">=", limit: 0 }, message: "must be >= 0" };
+              if (vErrors === null) {
+                vErrors = [err34];
+              } else {
+                vErrors.push(err34);
+              }
+              errors++;
+            }
+          }
+        }
+      } else {
+        const err35 = { instancePath: instancePath + "/twist", schemaPath: "#/properties/twist/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err35];
+        } else {
+          vErrors.push(err35);
+        }
+        errors++;
+      }
+    }
     if (data.role !== void 0) {
       if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
         vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
@@ -1187,35 +3392,345 @@ function validate91(data, { instancePath = "", parentData, parentDataProperty, r
       }
     }
     if (data.mirror !== void 0) {
-      if (!validate106(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate106.errors : vErrors.concat(validate106.errors);
-        errors = vErrors.length;
-      }
-    }
-    if (data.rotation_order !== void 0) {
-      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
         vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
         errors = vErrors.length;
       }
     }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
   } else {
-    const err16 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err36 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err16];
+      vErrors = [err36];
     } else {
-      vErrors.push(err16);
+      vErrors.push(err36);
     }
     errors++;
   }
-  validate91.errors = vErrors;
+  validate192.errors = vErrors;
   return errors === 0;
 }
-validate91.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema37 = { "title": "RootPart", "description": "The root control: it carries everything in the carried containers and lies at the origin.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The root control that carries the whole rig." }, "at": { "$ref": "#/$defs/Place", "default": [0, 0, 0], "description": "Where the root control stands.", "x-unit": "scene unit", "examples": [[0, 0, 0]] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Drawn shape.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size taken from the whole rig.", "examples": [1.2] } } };
-function validate110(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate192.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema48 = { "title": "NeckHeadPart", "description": "A neck of joints that are turned one by one, and a head on it that can keep its direction against the body.", "type": "object", "required": ["kind", "from", "to", "crown"], "additionalProperties": false, "properties": { "kind": { "const": "neck_head", "description": "Neck and head." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the neck hangs on.", "examples": ["spine.chest"] }, "from": { "$ref": "#/$defs/Place", "description": "Root of the neck.", "examples": ["neck"] }, "to": { "$ref": "#/$defs/Place", "description": "Where the head turns on the neck.", "examples": ["skull"] }, "crown": { "$ref": "#/$defs/Place", "description": "Top of the head.", "examples": ["crown"] }, "joints": { "type": "integer", "minimum": 1, "maximum": 60, "default": 2, "description": "Count of joints of the neck, the head's own not counted.", "examples": [2] }, "via": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 50, "description": "Places the neck runs through on the way.", "examples": [["neck_bend"]] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "What may turn the head beside the neck; the attribute space chooses.", "examples": [["root", "spine.chest"]] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far the head turns, under the name head; its control is limited alike.", "examples": [{ "head": { "ry": { "min": -70, "max": 70 } } }] }, "guide_line": { "type": "boolean", "default": false, "description": "Draws a guide line from the head control to the crown.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate210(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate110.evaluated;
+  const evaluated0 = validate210.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.from === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "from" }, message: "must have required property 'from'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.to === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "to" }, message: "must have required property 'to'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
+    if (data.crown === void 0) {
+      const err3 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "crown" }, message: "must have required property 'crown'" };
+      if (vErrors === null) {
+        vErrors = [err3];
+      } else {
+        vErrors.push(err3);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema48.properties, key0)) {
+        const err4 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("neck_head" !== data.kind) {
+        const err5 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "neck_head" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err5];
+        } else {
+          vErrors.push(err5);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.from !== void 0) {
+      if (!validate95(data.from, { instancePath: instancePath + "/from", parentData: data, parentDataProperty: "from", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.to !== void 0) {
+      if (!validate95(data.to, { instancePath: instancePath + "/to", parentData: data, parentDataProperty: "to", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.crown !== void 0) {
+      if (!validate95(data.crown, { instancePath: instancePath + "/crown", parentData: data, parentDataProperty: "crown", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.joints !== void 0) {
+      let data6 = data.joints;
+      if (!(typeof data6 == "number" && (!(data6 % 1) && !isNaN(data6)) && isFinite(data6))) {
+        const err6 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+      if (typeof data6 == "number" && isFinite(data6)) {
+        if (data6 > 60 || isNaN(data6)) {
+          const err7 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maximum", keyword: "maximum", params: { comparison: "<=", limit: 60 }, message: "must be <= 60" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        if (data6 < 1 || isNaN(data6)) {
+          const err8 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minimum", keyword: "minimum", params: { comparison: ">=", limit: 1 }, message: "must be >= 1" };
+          if (vErrors === null) {
+            vErrors = [err8];
+          } else {
+            vErrors.push(err8);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.via !== void 0) {
+      let data7 = data.via;
+      if (Array.isArray(data7)) {
+        if (data7.length > 50) {
+          const err9 = { instancePath: instancePath + "/via", schemaPath: "#/properties/via/maxItems", keyword: "maxItems", params: { limit: 50 }, message: "must NOT have more than 50 items" };
+          if (vErrors === null) {
+            vErrors = [err9];
+          } else {
+            vErrors.push(err9);
+          }
+          errors++;
+        }
+        if (data7.length < 1) {
+          const err10 = { instancePath: instancePath + "/via", schemaPath: "#/properties/via/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+          if (vErrors === null) {
+            vErrors = [err10];
+          } else {
+            vErrors.push(err10);
+          }
+          errors++;
+        }
+        const len0 = data7.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data7[i0], { instancePath: instancePath + "/via/" + i0, parentData: data7, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err11 = { instancePath: instancePath + "/via", schemaPath: "#/properties/via/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err11];
+        } else {
+          vErrors.push(err11);
+        }
+        errors++;
+      }
+    }
+    if (data.spaces !== void 0) {
+      let data9 = data.spaces;
+      if (Array.isArray(data9)) {
+        if (data9.length > 40) {
+          const err12 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/maxItems", keyword: "maxItems", params: { limit: 40 }, message: "must NOT have more than 40 items" };
+          if (vErrors === null) {
+            vErrors = [err12];
+          } else {
+            vErrors.push(err12);
+          }
+          errors++;
+        }
+        if (data9.length < 1) {
+          const err13 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+          if (vErrors === null) {
+            vErrors = [err13];
+          } else {
+            vErrors.push(err13);
+          }
+          errors++;
+        }
+        const len1 = data9.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          if (!validate88(data9[i1], { instancePath: instancePath + "/spaces/" + i1, parentData: data9, parentDataProperty: i1, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err14 = { instancePath: instancePath + "/spaces", schemaPath: "#/properties/spaces/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err14];
+        } else {
+          vErrors.push(err14);
+        }
+        errors++;
+      }
+    }
+    if (data.limits !== void 0) {
+      let data11 = data.limits;
+      if (data11 && typeof data11 == "object" && !Array.isArray(data11)) {
+        for (const key1 in data11) {
+          const _errs18 = errors;
+          if (typeof key1 === "string") {
+            if (func2(key1) > 60) {
+              const err15 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters", propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err15];
+              } else {
+                vErrors.push(err15);
+              }
+              errors++;
+            }
+            if (!pattern15.test(key1)) {
+              const err16 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err16];
+              } else {
+                vErrors.push(err16);
+              }
+              errors++;
+            }
+          } else {
+            const err17 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key1 };
+            if (vErrors === null) {
+              vErrors = [err17];
+            } else {
+              vErrors.push(err17);
+            }
+            errors++;
+          }
+          var valid5 = _errs18 === errors;
+          if (!valid5) {
+            const err18 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err18];
+            } else {
+              vErrors.push(err18);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data11) {
+          if (!validate114(data11[key2], { instancePath: instancePath + "/limits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data11, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate114.errors : vErrors.concat(validate114.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err19 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err19];
+        } else {
+          vErrors.push(err19);
+        }
+        errors++;
+      }
+    }
+    if (data.guide_line !== void 0) {
+      if (typeof data.guide_line !== "boolean") {
+        const err20 = { instancePath: instancePath + "/guide_line", schemaPath: "#/properties/guide_line/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err20];
+        } else {
+          vErrors.push(err20);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.orient !== void 0) {
+      if (!validate158(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate158.errors : vErrors.concat(validate158.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err21 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err21];
+    } else {
+      vErrors.push(err21);
+    }
+    errors++;
+  }
+  validate210.errors = vErrors;
+  return errors === 0;
+}
+validate210.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema49 = { "title": "RootPart", "description": "The control that carries the whole rig; on request with a root joint beneath it.", "type": "object", "required": ["kind"], "additionalProperties": false, "properties": { "kind": { "const": "root", "description": "The carrier of the rig." }, "side": { "$ref": "#/$defs/SideOption" }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands.", "examples": [[0, 0, 0]], "default": [0, 0, 0] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "compass", "description": "Shape of the control.", "examples": ["compass"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on its size.", "examples": [1.2] }, "joint": { "type": "boolean", "default": false, "description": "Makes a joint at the root that follows the control, as some receivers of skeletons want.", "examples": [true] } } };
+function validate222(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate222.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -1233,7 +3748,7 @@ function validate110(data, { instancePath = "", parentData, parentDataProperty, 
       errors++;
     }
     for (const key0 in data) {
-      if (!(key0 === "kind" || key0 === "at" || key0 === "shape" || key0 === "size")) {
+      if (!(key0 === "kind" || key0 === "side" || key0 === "at" || key0 === "shape" || key0 === "size" || key0 === "joint")) {
         const err1 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err1];
@@ -1254,6 +3769,12 @@ function validate110(data, { instancePath = "", parentData, parentDataProperty, 
         errors++;
       }
     }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
     if (data.at !== void 0) {
       if (!validate95(data.at, { instancePath: instancePath + "/at", parentData: data, parentDataProperty: "at", rootData, dynamicAnchors })) {
         vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
@@ -1261,9 +3782,9 @@ function validate110(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.shape !== void 0) {
-      let data2 = data.shape;
-      if (!(data2 === "ring" || data2 === "square" || data2 === "diamond" || data2 === "cross" || data2 === "arrow" || data2 === "ball" || data2 === "box" || data2 === "pin" || data2 === "compass")) {
-        const err3 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema37.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+      let data3 = data.shape;
+      if (!(data3 === "ring" || data3 === "square" || data3 === "diamond" || data3 === "cross" || data3 === "arrow" || data3 === "ball" || data3 === "box" || data3 === "pin" || data3 === "compass")) {
+        const err3 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema49.properties.shape.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err3];
         } else {
@@ -1278,25 +3799,35 @@ function validate110(data, { instancePath = "", parentData, parentDataProperty, 
         errors = vErrors.length;
       }
     }
+    if (data.joint !== void 0) {
+      if (typeof data.joint !== "boolean") {
+        const err4 = { instancePath: instancePath + "/joint", schemaPath: "#/properties/joint/type", keyword: "type", params: { type: "boolean" }, message: "must be boolean" };
+        if (vErrors === null) {
+          vErrors = [err4];
+        } else {
+          vErrors.push(err4);
+        }
+        errors++;
+      }
+    }
   } else {
-    const err4 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err5 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err4];
+      vErrors = [err5];
     } else {
-      vErrors.push(err4);
+      vErrors.push(err5);
     }
     errors++;
   }
-  validate110.errors = vErrors;
+  validate222.errors = vErrors;
   return errors === 0;
 }
-validate110.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema38 = { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints, each with its own control." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
-var schema39 = { "title": "Orient", "description": "How joint frames are turned.", "type": "object", "additionalProperties": false, "default": { "rule": "chain", "aim": "+x", "up": "+y" }, "properties": { "rule": { "enum": ["chain", "world"], "default": "chain", "description": "chain: the aim axis points at the next joint and the third axis is the hinge. world: frames keep the scene's axes.", "examples": ["world"] }, "aim": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "Axis of the joint that points at the next joint.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "Axis of the joint that lies in the chain's plane, on the side that the chain folds toward. The third axis is the hinge: positive turns about it fold the chain.", "examples": ["+z"] }, "toward": { "$ref": "#/$defs/Point", "description": "Direction the up axis should lean to, in place of the chain's own plane.", "examples": [[0, 1, 0]] } }, "examples": [{ "aim": "+y", "up": "+z" }] };
-function validate120(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate222.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema50 = { "title": "SpinePart", "description": "A row of joints along a curve between two ends: a control at each end that carries both place and direction of the curve, controls between them that follow both, a spline solver, stretch and volume.", "type": "object", "required": ["kind", "from", "to"], "additionalProperties": false, "properties": { "kind": { "const": "spine", "description": "A spine, or any bendy body between two ends." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the lower control follows.", "examples": ["root"] }, "from": { "$ref": "#/$defs/Place", "description": "Where it begins.", "examples": ["hips"] }, "to": { "$ref": "#/$defs/Place", "description": "Where it ends.", "examples": ["chest"] }, "via": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 50, "description": "Places it runs through on the way.", "examples": [["waist"]] }, "joints": { "type": "integer", "minimum": 3, "maximum": 100, "default": 5, "description": "Count of joints, spread evenly by arc length.", "examples": [5] }, "controls": { "type": "integer", "minimum": 2, "maximum": 12, "default": 3, "description": "Count of controls: both ends and those between.", "examples": [3] }, "stretch": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Value at rest of the upper control's attribute stretch: 0 keeps lengths, 1 spreads the joints over the whole curve.", "examples": [0] }, "volume": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "Value at rest of the upper control's attribute volume: how far joints thicken and thin.", "examples": [0] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate226(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate120.evaluated;
+  const evaluated0 = validate226.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -1304,64 +3835,229 @@ function validate120(data, { instancePath = "", parentData, parentDataProperty, 
     evaluated0.items = void 0;
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.from === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "from" }, message: "must have required property 'from'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    if (data.to === void 0) {
+      const err2 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "to" }, message: "must have required property 'to'" };
+      if (vErrors === null) {
+        vErrors = [err2];
+      } else {
+        vErrors.push(err2);
+      }
+      errors++;
+    }
     for (const key0 in data) {
-      if (!(key0 === "rule" || key0 === "aim" || key0 === "up" || key0 === "toward")) {
-        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+      if (!func1.call(schema50.properties, key0)) {
+        const err3 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
-          vErrors = [err0];
+          vErrors = [err3];
         } else {
-          vErrors.push(err0);
+          vErrors.push(err3);
         }
         errors++;
       }
     }
-    if (data.rule !== void 0) {
-      let data0 = data.rule;
-      if (!(data0 === "chain" || data0 === "world")) {
-        const err1 = { instancePath: instancePath + "/rule", schemaPath: "#/properties/rule/enum", keyword: "enum", params: { allowedValues: schema39.properties.rule.enum }, message: "must be equal to one of the allowed values" };
+    if (data.kind !== void 0) {
+      if ("spine" !== data.kind) {
+        const err4 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "spine" }, message: "must be equal to constant" };
         if (vErrors === null) {
-          vErrors = [err1];
+          vErrors = [err4];
         } else {
-          vErrors.push(err1);
+          vErrors.push(err4);
         }
         errors++;
       }
     }
-    if (data.aim !== void 0) {
-      if (!validate63(data.aim, { instancePath: instancePath + "/aim", parentData: data, parentDataProperty: "aim", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
         errors = vErrors.length;
       }
     }
-    if (data.up !== void 0) {
-      if (!validate63(data.up, { instancePath: instancePath + "/up", parentData: data, parentDataProperty: "up", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate63.errors : vErrors.concat(validate63.errors);
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
         errors = vErrors.length;
       }
     }
-    if (data.toward !== void 0) {
-      if (!validate69(data.toward, { instancePath: instancePath + "/toward", parentData: data, parentDataProperty: "toward", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate69.errors : vErrors.concat(validate69.errors);
+    if (data.from !== void 0) {
+      if (!validate95(data.from, { instancePath: instancePath + "/from", parentData: data, parentDataProperty: "from", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.to !== void 0) {
+      if (!validate95(data.to, { instancePath: instancePath + "/to", parentData: data, parentDataProperty: "to", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.via !== void 0) {
+      let data5 = data.via;
+      if (Array.isArray(data5)) {
+        if (data5.length > 50) {
+          const err5 = { instancePath: instancePath + "/via", schemaPath: "#/properties/via/maxItems", keyword: "maxItems", params: { limit: 50 }, message: "must NOT have more than 50 items" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        if (data5.length < 1) {
+          const err6 = { instancePath: instancePath + "/via", schemaPath: "#/properties/via/minItems", keyword: "minItems", params: { limit: 1 }, message: "must NOT have fewer than 1 items" };
+          if (vErrors === null) {
+            vErrors = [err6];
+          } else {
+            vErrors.push(err6);
+          }
+          errors++;
+        }
+        const len0 = data5.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data5[i0], { instancePath: instancePath + "/via/" + i0, parentData: data5, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err7 = { instancePath: instancePath + "/via", schemaPath: "#/properties/via/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err7];
+        } else {
+          vErrors.push(err7);
+        }
+        errors++;
+      }
+    }
+    if (data.joints !== void 0) {
+      let data7 = data.joints;
+      if (!(typeof data7 == "number" && (!(data7 % 1) && !isNaN(data7)) && isFinite(data7))) {
+        const err8 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err8];
+        } else {
+          vErrors.push(err8);
+        }
+        errors++;
+      }
+      if (typeof data7 == "number" && isFinite(data7)) {
+        if (data7 > 100 || isNaN(data7)) {
+          const err9 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/maximum", keyword: "maximum", params: { comparison: "<=", limit: 100 }, message: "must be <= 100" };
+          if (vErrors === null) {
+            vErrors = [err9];
+          } else {
+            vErrors.push(err9);
+          }
+          errors++;
+        }
+        if (data7 < 3 || isNaN(data7)) {
+          const err10 = { instancePath: instancePath + "/joints", schemaPath: "#/properties/joints/minimum", keyword: "minimum", params: { comparison: ">=", limit: 3 }, message: "must be >= 3" };
+          if (vErrors === null) {
+            vErrors = [err10];
+          } else {
+            vErrors.push(err10);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.controls !== void 0) {
+      let data8 = data.controls;
+      if (!(typeof data8 == "number" && (!(data8 % 1) && !isNaN(data8)) && isFinite(data8))) {
+        const err11 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err11];
+        } else {
+          vErrors.push(err11);
+        }
+        errors++;
+      }
+      if (typeof data8 == "number" && isFinite(data8)) {
+        if (data8 > 12 || isNaN(data8)) {
+          const err12 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/maximum", keyword: "maximum", params: { comparison: "<=", limit: 12 }, message: "must be <= 12" };
+          if (vErrors === null) {
+            vErrors = [err12];
+          } else {
+            vErrors.push(err12);
+          }
+          errors++;
+        }
+        if (data8 < 2 || isNaN(data8)) {
+          const err13 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/minimum", keyword: "minimum", params: { comparison: ">=", limit: 2 }, message: "must be >= 2" };
+          if (vErrors === null) {
+            vErrors = [err13];
+          } else {
+            vErrors.push(err13);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.stretch !== void 0) {
+      if (!validate70(data.stretch, { instancePath: instancePath + "/stretch", parentData: data, parentDataProperty: "stretch", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.volume !== void 0) {
+      if (!validate70(data.volume, { instancePath: instancePath + "/volume", parentData: data, parentDataProperty: "volume", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.orient !== void 0) {
+      if (!validate158(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate158.errors : vErrors.concat(validate158.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
         errors = vErrors.length;
       }
     }
   } else {
-    const err2 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err14 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err2];
+      vErrors = [err14];
     } else {
-      vErrors.push(err2);
+      vErrors.push(err14);
     }
     errors++;
   }
-  validate120.errors = vErrors;
+  validate226.errors = vErrors;
   return errors === 0;
 }
-validate120.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate113(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate226.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema51 = { "title": "StrandPart", "description": "A tail, ear, tentacle or rope: joints spread evenly along a curve, each turned by a control that hangs on the one before, or all laid along a curve through a few controls.", "type": "object", "required": ["kind", "points", "joints"], "additionalProperties": false, "properties": { "kind": { "const": "strand", "description": "A row of joints." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the strand hangs on.", "examples": ["hips"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 500, "description": "Where the strand runs, from base to tip.", "examples": [["tail_base", "tail_tip"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length.", "examples": [8] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "Whether joints follow a smooth curve through the points or straight lines.", "examples": ["smooth"] }, "steer": { "enum": ["joints", "spline"], "default": "joints", "description": "joints: one control for each joint. spline: a few controls shape a curve.", "examples": ["joints"] }, "controls": { "type": "integer", "minimum": 2, "maximum": 40, "default": 4, "description": "spline: count of controls along the strand.", "examples": [4] }, "stretch": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "spline: value at rest of the last control's attribute stretch: 0 keeps lengths, 1 spreads the joints over the whole curve.", "examples": [0] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Shape of the controls.", "examples": ["ring"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the controls' size.", "examples": [1.2] }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "joints: how far each joint turns, by its name; controls are limited alike.", "examples": [{ "01": { "rz": { "min": -30, "max": 30 } } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate237(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate113.evaluated;
+  const evaluated0 = validate237.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -1397,7 +4093,7 @@ function validate113(data, { instancePath = "", parentData, parentDataProperty, 
       errors++;
     }
     for (const key0 in data) {
-      if (!func1.call(schema38.properties, key0)) {
+      if (!func1.call(schema51.properties, key0)) {
         const err3 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err3];
@@ -1503,7 +4199,7 @@ function validate113(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.curve !== void 0) {
       let data6 = data.curve;
       if (!(data6 === "smooth" || data6 === "straight")) {
-        const err11 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema38.properties.curve.enum }, message: "must be equal to one of the allowed values" };
+        const err11 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema51.properties.curve.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err11];
         } else {
@@ -1512,14 +4208,64 @@ function validate113(data, { instancePath = "", parentData, parentDataProperty, 
         errors++;
       }
     }
-    if (data.shape !== void 0) {
-      let data7 = data.shape;
-      if (!(data7 === "ring" || data7 === "square" || data7 === "diamond" || data7 === "cross" || data7 === "arrow" || data7 === "ball" || data7 === "box" || data7 === "pin" || data7 === "compass")) {
-        const err12 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema38.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+    if (data.steer !== void 0) {
+      let data7 = data.steer;
+      if (!(data7 === "joints" || data7 === "spline")) {
+        const err12 = { instancePath: instancePath + "/steer", schemaPath: "#/properties/steer/enum", keyword: "enum", params: { allowedValues: schema51.properties.steer.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err12];
         } else {
           vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.controls !== void 0) {
+      let data8 = data.controls;
+      if (!(typeof data8 == "number" && (!(data8 % 1) && !isNaN(data8)) && isFinite(data8))) {
+        const err13 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+        if (vErrors === null) {
+          vErrors = [err13];
+        } else {
+          vErrors.push(err13);
+        }
+        errors++;
+      }
+      if (typeof data8 == "number" && isFinite(data8)) {
+        if (data8 > 40 || isNaN(data8)) {
+          const err14 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/maximum", keyword: "maximum", params: { comparison: "<=", limit: 40 }, message: "must be <= 40" };
+          if (vErrors === null) {
+            vErrors = [err14];
+          } else {
+            vErrors.push(err14);
+          }
+          errors++;
+        }
+        if (data8 < 2 || isNaN(data8)) {
+          const err15 = { instancePath: instancePath + "/controls", schemaPath: "#/properties/controls/minimum", keyword: "minimum", params: { comparison: ">=", limit: 2 }, message: "must be >= 2" };
+          if (vErrors === null) {
+            vErrors = [err15];
+          } else {
+            vErrors.push(err15);
+          }
+          errors++;
+        }
+      }
+    }
+    if (data.stretch !== void 0) {
+      if (!validate70(data.stretch, { instancePath: instancePath + "/stretch", parentData: data, parentDataProperty: "stretch", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.shape !== void 0) {
+      let data10 = data.shape;
+      if (!(data10 === "ring" || data10 === "square" || data10 === "diamond" || data10 === "cross" || data10 === "arrow" || data10 === "ball" || data10 === "box" || data10 === "pin" || data10 === "compass")) {
+        const err16 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema51.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+        if (vErrors === null) {
+          vErrors = [err16];
+        } else {
+          vErrors.push(err16);
         }
         errors++;
       }
@@ -1530,6 +4276,66 @@ function validate113(data, { instancePath = "", parentData, parentDataProperty, 
         errors = vErrors.length;
       }
     }
+    if (data.limits !== void 0) {
+      let data12 = data.limits;
+      if (data12 && typeof data12 == "object" && !Array.isArray(data12)) {
+        for (const key1 in data12) {
+          const _errs19 = errors;
+          if (typeof key1 === "string") {
+            if (func2(key1) > 60) {
+              const err17 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters", propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err17];
+              } else {
+                vErrors.push(err17);
+              }
+              errors++;
+            }
+            if (!pattern15.test(key1)) {
+              const err18 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key1 };
+              if (vErrors === null) {
+                vErrors = [err18];
+              } else {
+                vErrors.push(err18);
+              }
+              errors++;
+            }
+          } else {
+            const err19 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/type", keyword: "type", params: { type: "string" }, message: "must be string", propertyName: key1 };
+            if (vErrors === null) {
+              vErrors = [err19];
+            } else {
+              vErrors.push(err19);
+            }
+            errors++;
+          }
+          var valid3 = _errs19 === errors;
+          if (!valid3) {
+            const err20 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err20];
+            } else {
+              vErrors.push(err20);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data12) {
+          if (!validate114(data12[key2], { instancePath: instancePath + "/limits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data12, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate114.errors : vErrors.concat(validate114.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err21 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err21];
+        } else {
+          vErrors.push(err21);
+        }
+        errors++;
+      }
+    }
     if (data.role !== void 0) {
       if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
         vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
@@ -1537,36 +4343,459 @@ function validate113(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.mirror !== void 0) {
-      if (!validate106(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate106.errors : vErrors.concat(validate106.errors);
-        errors = vErrors.length;
-      }
-    }
-    if (data.orient !== void 0) {
-      if (!validate120(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate120.errors : vErrors.concat(validate120.errors);
-        errors = vErrors.length;
-      }
-    }
-    if (data.rotation_order !== void 0) {
-      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
         vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
         errors = vErrors.length;
       }
     }
+    if (data.orient !== void 0) {
+      if (!validate158(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate158.errors : vErrors.concat(validate158.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
   } else {
-    const err13 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    const err22 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
     if (vErrors === null) {
-      vErrors = [err13];
+      vErrors = [err22];
     } else {
-      vErrors.push(err13);
+      vErrors.push(err22);
     }
     errors++;
   }
-  validate113.errors = vErrors;
+  validate237.errors = vErrors;
   return errors === 0;
 }
-validate113.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+validate237.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema52 = { "title": "WingPart", "description": "A limb that folds in two places with rows of feathers on its bones: a control for each joint, one control that folds the wing and fans its feathers.", "type": "object", "required": ["kind", "points"], "additionalProperties": false, "properties": { "kind": { "const": "wing", "description": "A wing." }, "side": { "$ref": "#/$defs/SideOption" }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the wing hangs on.", "examples": ["spine.chest"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 4, "maxItems": 4, "description": "Shoulder, elbow, wrist and tip.", "examples": [["shoulder", "elbow", "wrist", "wing_tip"]] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 }, "minItems": 4, "maxItems": 4, "description": "Names of the four joints. Without it they take their landmarks' names, else upper, lower, hand, tip.", "examples": [["upper", "lower", "hand", "tip"]] }, "fold": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 3, "maxItems": 3, "default": [20, 110, -120], "description": "Turn of shoulder, elbow and wrist about their hinges at fold 1.", "x-unit": "degrees", "examples": [[20, 110, -120]] }, "feathers": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "type": "object", "additionalProperties": false, "description": "A row of feathers along one bone.", "properties": { "bone": { "enum": ["upper", "lower", "hand"], "default": "hand", "description": "Bone that the row sits on.", "examples": ["hand"] }, "tips": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 2, "maxItems": 2, "description": "Where the tips of the first and the last feather lie.", "examples": [["primary_first", "primary_last"]] }, "count": { "type": "integer", "minimum": 1, "maximum": 40, "default": 5, "description": "Count of feathers.", "examples": [5] }, "joints": { "type": "integer", "minimum": 2, "maximum": 12, "default": 3, "description": "Count of joints of each feather.", "examples": [3] }, "fan": { "$ref": "#/$defs/NumberOrExpression", "default": 30, "description": "Turn of the last feather at fan 1; the first stays.", "examples": [30], "x-unit": "degrees" } }, "required": ["tips"], "examples": [{ "bone": "hand", "tips": ["primary_first", "primary_last"], "count": 5 }] }, "default": {}, "description": "Rows of feathers by name.", "examples": [{ "primary": { "bone": "hand", "tips": ["primary_first", "primary_last"], "count": 5 } }] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of the joints.", "examples": ["skin"] }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" } } };
+function validate248(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+  let vErrors = null;
+  let errors = 0;
+  const evaluated0 = validate248.evaluated;
+  if (evaluated0.dynamicProps) {
+    evaluated0.props = void 0;
+  }
+  if (evaluated0.dynamicItems) {
+    evaluated0.items = void 0;
+  }
+  if (data && typeof data == "object" && !Array.isArray(data)) {
+    if (data.kind === void 0) {
+      const err0 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "kind" }, message: "must have required property 'kind'" };
+      if (vErrors === null) {
+        vErrors = [err0];
+      } else {
+        vErrors.push(err0);
+      }
+      errors++;
+    }
+    if (data.points === void 0) {
+      const err1 = { instancePath, schemaPath: "#/required", keyword: "required", params: { missingProperty: "points" }, message: "must have required property 'points'" };
+      if (vErrors === null) {
+        vErrors = [err1];
+      } else {
+        vErrors.push(err1);
+      }
+      errors++;
+    }
+    for (const key0 in data) {
+      if (!func1.call(schema52.properties, key0)) {
+        const err2 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
+        if (vErrors === null) {
+          vErrors = [err2];
+        } else {
+          vErrors.push(err2);
+        }
+        errors++;
+      }
+    }
+    if (data.kind !== void 0) {
+      if ("wing" !== data.kind) {
+        const err3 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/const", keyword: "const", params: { allowedValue: "wing" }, message: "must be equal to constant" };
+        if (vErrors === null) {
+          vErrors = [err3];
+        } else {
+          vErrors.push(err3);
+        }
+        errors++;
+      }
+    }
+    if (data.side !== void 0) {
+      if (!validate92(data.side, { instancePath: instancePath + "/side", parentData: data, parentDataProperty: "side", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate92.errors : vErrors.concat(validate92.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.parent !== void 0) {
+      if (!validate88(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate88.errors : vErrors.concat(validate88.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.points !== void 0) {
+      let data3 = data.points;
+      if (Array.isArray(data3)) {
+        if (data3.length > 4) {
+          const err4 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/maxItems", keyword: "maxItems", params: { limit: 4 }, message: "must NOT have more than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err4];
+          } else {
+            vErrors.push(err4);
+          }
+          errors++;
+        }
+        if (data3.length < 4) {
+          const err5 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/minItems", keyword: "minItems", params: { limit: 4 }, message: "must NOT have fewer than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err5];
+          } else {
+            vErrors.push(err5);
+          }
+          errors++;
+        }
+        const len0 = data3.length;
+        for (let i0 = 0; i0 < len0; i0++) {
+          if (!validate95(data3[i0], { instancePath: instancePath + "/points/" + i0, parentData: data3, parentDataProperty: i0, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err6 = { instancePath: instancePath + "/points", schemaPath: "#/properties/points/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err6];
+        } else {
+          vErrors.push(err6);
+        }
+        errors++;
+      }
+    }
+    if (data.names !== void 0) {
+      let data5 = data.names;
+      if (Array.isArray(data5)) {
+        if (data5.length > 4) {
+          const err7 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/maxItems", keyword: "maxItems", params: { limit: 4 }, message: "must NOT have more than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err7];
+          } else {
+            vErrors.push(err7);
+          }
+          errors++;
+        }
+        if (data5.length < 4) {
+          const err8 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/minItems", keyword: "minItems", params: { limit: 4 }, message: "must NOT have fewer than 4 items" };
+          if (vErrors === null) {
+            vErrors = [err8];
+          } else {
+            vErrors.push(err8);
+          }
+          errors++;
+        }
+        const len1 = data5.length;
+        for (let i1 = 0; i1 < len1; i1++) {
+          let data6 = data5[i1];
+          if (typeof data6 === "string") {
+            if (func2(data6) > 60) {
+              const err9 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/maxLength", keyword: "maxLength", params: { limit: 60 }, message: "must NOT have more than 60 characters" };
+              if (vErrors === null) {
+                vErrors = [err9];
+              } else {
+                vErrors.push(err9);
+              }
+              errors++;
+            }
+            if (!pattern3.test(data6)) {
+              const err10 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*$" }, message: 'must match pattern "^[a-z][a-z0-9_]*$"' };
+              if (vErrors === null) {
+                vErrors = [err10];
+              } else {
+                vErrors.push(err10);
+              }
+              errors++;
+            }
+          } else {
+            const err11 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            if (vErrors === null) {
+              vErrors = [err11];
+            } else {
+              vErrors.push(err11);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err12 = { instancePath: instancePath + "/names", schemaPath: "#/properties/names/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err12];
+        } else {
+          vErrors.push(err12);
+        }
+        errors++;
+      }
+    }
+    if (data.fold !== void 0) {
+      let data7 = data.fold;
+      if (Array.isArray(data7)) {
+        if (data7.length > 3) {
+          const err13 = { instancePath: instancePath + "/fold", schemaPath: "#/properties/fold/maxItems", keyword: "maxItems", params: { limit: 3 }, message: "must NOT have more than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err13];
+          } else {
+            vErrors.push(err13);
+          }
+          errors++;
+        }
+        if (data7.length < 3) {
+          const err14 = { instancePath: instancePath + "/fold", schemaPath: "#/properties/fold/minItems", keyword: "minItems", params: { limit: 3 }, message: "must NOT have fewer than 3 items" };
+          if (vErrors === null) {
+            vErrors = [err14];
+          } else {
+            vErrors.push(err14);
+          }
+          errors++;
+        }
+        const len2 = data7.length;
+        for (let i2 = 0; i2 < len2; i2++) {
+          if (!validate70(data7[i2], { instancePath: instancePath + "/fold/" + i2, parentData: data7, parentDataProperty: i2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+            errors = vErrors.length;
+          }
+        }
+      } else {
+        const err15 = { instancePath: instancePath + "/fold", schemaPath: "#/properties/fold/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+        if (vErrors === null) {
+          vErrors = [err15];
+        } else {
+          vErrors.push(err15);
+        }
+        errors++;
+      }
+    }
+    if (data.feathers !== void 0) {
+      let data9 = data.feathers;
+      if (data9 && typeof data9 == "object" && !Array.isArray(data9)) {
+        for (const key1 in data9) {
+          const _errs17 = errors;
+          if (!validate53(key1, { instancePath: instancePath + "/feathers", parentData: data9, parentDataProperty: "feathers", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+            errors = vErrors.length;
+          }
+          var valid7 = _errs17 === errors;
+          if (!valid7) {
+            const err16 = { instancePath: instancePath + "/feathers", schemaPath: "#/properties/feathers/propertyNames", keyword: "propertyNames", params: { propertyName: key1 }, message: "property name must be valid" };
+            if (vErrors === null) {
+              vErrors = [err16];
+            } else {
+              vErrors.push(err16);
+            }
+            errors++;
+          }
+        }
+        for (const key2 in data9) {
+          let data10 = data9[key2];
+          if (data10 && typeof data10 == "object" && !Array.isArray(data10)) {
+            if (data10.tips === void 0) {
+              const err17 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/feathers/additionalProperties/required", keyword: "required", params: { missingProperty: "tips" }, message: "must have required property 'tips'" };
+              if (vErrors === null) {
+                vErrors = [err17];
+              } else {
+                vErrors.push(err17);
+              }
+              errors++;
+            }
+            for (const key3 in data10) {
+              if (!(key3 === "bone" || key3 === "tips" || key3 === "count" || key3 === "joints" || key3 === "fan")) {
+                const err18 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/feathers/additionalProperties/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key3 }, message: "must NOT have additional properties" };
+                if (vErrors === null) {
+                  vErrors = [err18];
+                } else {
+                  vErrors.push(err18);
+                }
+                errors++;
+              }
+            }
+            if (data10.bone !== void 0) {
+              let data11 = data10.bone;
+              if (!(data11 === "upper" || data11 === "lower" || data11 === "hand")) {
+                const err19 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/bone", schemaPath: "#/properties/feathers/additionalProperties/properties/bone/enum", keyword: "enum", params: { allowedValues: schema52.properties.feathers.additionalProperties.properties.bone.enum }, message: "must be equal to one of the allowed values" };
+                if (vErrors === null) {
+                  vErrors = [err19];
+                } else {
+                  vErrors.push(err19);
+                }
+                errors++;
+              }
+            }
+            if (data10.tips !== void 0) {
+              let data12 = data10.tips;
+              if (Array.isArray(data12)) {
+                if (data12.length > 2) {
+                  const err20 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/tips", schemaPath: "#/properties/feathers/additionalProperties/properties/tips/maxItems", keyword: "maxItems", params: { limit: 2 }, message: "must NOT have more than 2 items" };
+                  if (vErrors === null) {
+                    vErrors = [err20];
+                  } else {
+                    vErrors.push(err20);
+                  }
+                  errors++;
+                }
+                if (data12.length < 2) {
+                  const err21 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/tips", schemaPath: "#/properties/feathers/additionalProperties/properties/tips/minItems", keyword: "minItems", params: { limit: 2 }, message: "must NOT have fewer than 2 items" };
+                  if (vErrors === null) {
+                    vErrors = [err21];
+                  } else {
+                    vErrors.push(err21);
+                  }
+                  errors++;
+                }
+                const len3 = data12.length;
+                for (let i3 = 0; i3 < len3; i3++) {
+                  if (!validate95(data12[i3], { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/tips/" + i3, parentData: data12, parentDataProperty: i3, rootData, dynamicAnchors })) {
+                    vErrors = vErrors === null ? validate95.errors : vErrors.concat(validate95.errors);
+                    errors = vErrors.length;
+                  }
+                }
+              } else {
+                const err22 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/tips", schemaPath: "#/properties/feathers/additionalProperties/properties/tips/type", keyword: "type", params: { type: "array" }, message: "must be array" };
+                if (vErrors === null) {
+                  vErrors = [err22];
+                } else {
+                  vErrors.push(err22);
+                }
+                errors++;
+              }
+            }
+            if (data10.count !== void 0) {
+              let data14 = data10.count;
+              if (!(typeof data14 == "number" && (!(data14 % 1) && !isNaN(data14)) && isFinite(data14))) {
+                const err23 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/count", schemaPath: "#/properties/feathers/additionalProperties/properties/count/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+                if (vErrors === null) {
+                  vErrors = [err23];
+                } else {
+                  vErrors.push(err23);
+                }
+                errors++;
+              }
+              if (typeof data14 == "number" && isFinite(data14)) {
+                if (data14 > 40 || isNaN(data14)) {
+                  const err24 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/count", schemaPath: "#/properties/feathers/additionalProperties/properties/count/maximum", keyword: "maximum", params: { comparison: "<=", limit: 40 }, message: "must be <= 40" };
+                  if (vErrors === null) {
+                    vErrors = [err24];
+                  } else {
+                    vErrors.push(err24);
+                  }
+                  errors++;
+                }
+                if (data14 < 1 || isNaN(data14)) {
+                  const err25 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/count", schemaPath: "#/properties/feathers/additionalProperties/properties/count/minimum", keyword: "minimum", params: { comparison: ">=", limit: 1 }, message: "must be >= 1" };
+                  if (vErrors === null) {
+                    vErrors = [err25];
+                  } else {
+                    vErrors.push(err25);
+                  }
+                  errors++;
+                }
+              }
+            }
+            if (data10.joints !== void 0) {
+              let data15 = data10.joints;
+              if (!(typeof data15 == "number" && (!(data15 % 1) && !isNaN(data15)) && isFinite(data15))) {
+                const err26 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/joints", schemaPath: "#/properties/feathers/additionalProperties/properties/joints/type", keyword: "type", params: { type: "integer" }, message: "must be integer" };
+                if (vErrors === null) {
+                  vErrors = [err26];
+                } else {
+                  vErrors.push(err26);
+                }
+                errors++;
+              }
+              if (typeof data15 == "number" && isFinite(data15)) {
+                if (data15 > 12 || isNaN(data15)) {
+                  const err27 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/joints", schemaPath: "#/properties/feathers/additionalProperties/properties/joints/maximum", keyword: "maximum", params: { comparison: "<=", limit: 12 }, message: "must be <= 12" };
+                  if (vErrors === null) {
+                    vErrors = [err27];
+                  } else {
+                    vErrors.push(err27);
+                  }
+                  errors++;
+                }
+                if (data15 < 2 || isNaN(data15)) {
+                  const err28 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/joints", schemaPath: "#/properties/feathers/additionalProperties/properties/joints/minimum", keyword: "minimum", params: { comparison: ">=", limit: 2 }, message: "must be >= 2" };
+                  if (vErrors === null) {
+                    vErrors = [err28];
+                  } else {
+                    vErrors.push(err28);
+                  }
+                  errors++;
+                }
+              }
+            }
+            if (data10.fan !== void 0) {
+              if (!validate70(data10.fan, { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1") + "/fan", parentData: data10, parentDataProperty: "fan", rootData, dynamicAnchors })) {
+                vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
+                errors = vErrors.length;
+              }
+            }
+          } else {
+            const err29 = { instancePath: instancePath + "/feathers/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/feathers/additionalProperties/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+            if (vErrors === null) {
+              vErrors = [err29];
+            } else {
+              vErrors.push(err29);
+            }
+            errors++;
+          }
+        }
+      } else {
+        const err30 = { instancePath: instancePath + "/feathers", schemaPath: "#/properties/feathers/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        if (vErrors === null) {
+          vErrors = [err30];
+        } else {
+          vErrors.push(err30);
+        }
+        errors++;
+      }
+    }
+    if (data.role !== void 0) {
+      if (!validate53(data.role, { instancePath: instancePath + "/role", parentData: data, parentDataProperty: "role", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate53.errors : vErrors.concat(validate53.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.mirror !== void 0) {
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.orient !== void 0) {
+      if (!validate158(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate158.errors : vErrors.concat(validate158.errors);
+        errors = vErrors.length;
+      }
+    }
+    if (data.rotation_order !== void 0) {
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
+        errors = vErrors.length;
+      }
+    }
+  } else {
+    const err31 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    if (vErrors === null) {
+      vErrors = [err31];
+    } else {
+      vErrors.push(err31);
+    }
+    errors++;
+  }
+  validate248.errors = vErrors;
+  return errors === 0;
+}
+validate248.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
 function validate90(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
@@ -1589,13 +4818,13 @@ function validate90(data, { instancePath = "", parentData, parentDataProperty, r
     }
     const tag0 = data.kind;
     if (typeof tag0 == "string") {
-      if (tag0 === "limb") {
+      if (tag0 === "axle") {
         if (!validate91(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
           vErrors = vErrors === null ? validate91.errors : vErrors.concat(validate91.errors);
           errors = vErrors.length;
         }
         var props0 = true;
-      } else if (tag0 === "root") {
+      } else if (tag0 === "clavicle") {
         if (!validate110(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
           vErrors = vErrors === null ? validate110.errors : vErrors.concat(validate110.errors);
           errors = vErrors.length;
@@ -1603,9 +4832,89 @@ function validate90(data, { instancePath = "", parentData, parentDataProperty, r
         if (props0 !== true) {
           props0 = true;
         }
+      } else if (tag0 === "eye") {
+        if (!validate126(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate126.errors : vErrors.concat(validate126.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "foot") {
+        if (!validate135(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate135.errors : vErrors.concat(validate135.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "hand") {
+        if (!validate147(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate147.errors : vErrors.concat(validate147.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "jaw") {
+        if (!validate165(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate165.errors : vErrors.concat(validate165.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "leg_three") {
+        if (!validate174(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate174.errors : vErrors.concat(validate174.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "limb") {
+        if (!validate192(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate192.errors : vErrors.concat(validate192.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "neck_head") {
+        if (!validate210(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate210.errors : vErrors.concat(validate210.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "root") {
+        if (!validate222(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate222.errors : vErrors.concat(validate222.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "spine") {
+        if (!validate226(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate226.errors : vErrors.concat(validate226.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
       } else if (tag0 === "strand") {
-        if (!validate113(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
-          vErrors = vErrors === null ? validate113.errors : vErrors.concat(validate113.errors);
+        if (!validate237(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate237.errors : vErrors.concat(validate237.errors);
+          errors = vErrors.length;
+        }
+        if (props0 !== true) {
+          props0 = true;
+        }
+      } else if (tag0 === "wing") {
+        if (!validate248(data, { instancePath, parentData, parentDataProperty, rootData, dynamicAnchors })) {
+          vErrors = vErrors === null ? validate248.errors : vErrors.concat(validate248.errors);
           errors = vErrors.length;
         }
         if (props0 !== true) {
@@ -1643,11 +4952,11 @@ function validate90(data, { instancePath = "", parentData, parentDataProperty, r
   return errors === 0;
 }
 validate90.evaluated = { "dynamicProps": true, "dynamicItems": false };
-var schema40 = { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far joints are meant to turn, by the joint's name in the chain.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] } } };
-function validate140(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+var schema53 = { "title": "Chain", "description": "Joints in a row. Joint ids are the chain's id, a dot, and the joint's name.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "skin", "description": "Role of every joint of the chain.", "examples": ["helper"] }, "points": { "type": "array", "items": { "$ref": "#/$defs/Place" }, "minItems": 1, "maxItems": 500, "description": "Where the chain runs, from first to last.", "examples": [["shoulder", "elbow", "wrist"]] }, "joints": { "type": "integer", "minimum": 2, "maximum": 500, "description": "Count of joints, spread evenly by arc length over a curve through the points. Without it there is one joint at each point.", "examples": [5] }, "curve": { "enum": ["smooth", "straight"], "default": "smooth", "description": "How joints are spread between the points: along a smooth curve or along straight lines.", "examples": ["straight"] }, "names": { "type": "array", "items": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "description": "Names of the joints in order. Without it a joint takes its landmark's name, else a padded number.", "examples": [["upper", "lower", "end"]] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that the first joint follows.", "examples": ["spine.chest"] }, "side": { "$ref": "#/$defs/SideOption" }, "mirror": { "$ref": "#/$defs/MirrorRule" }, "orient": { "$ref": "#/$defs/Orient" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "limits": { "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z0-9_]+$", "maxLength": 60 }, "additionalProperties": { "$ref": "#/$defs/JointLimits" }, "default": {}, "description": "How far joints are meant to turn, by the joint's name in the chain.", "examples": [{ "elbow": { "rz": { "min": 0, "max": 140 } } }] } } };
+function validate275(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate140.evaluated;
+  const evaluated0 = validate275.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -1656,108 +4965,7 @@ function validate140(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!(key0 === "min" || key0 === "max")) {
-        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
-        if (vErrors === null) {
-          vErrors = [err0];
-        } else {
-          vErrors.push(err0);
-        }
-        errors++;
-      }
-    }
-    if (data.min !== void 0) {
-      if (!validate70(data.min, { instancePath: instancePath + "/min", parentData: data, parentDataProperty: "min", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
-        errors = vErrors.length;
-      }
-    }
-    if (data.max !== void 0) {
-      if (!validate70(data.max, { instancePath: instancePath + "/max", parentData: data, parentDataProperty: "max", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate70.errors : vErrors.concat(validate70.errors);
-        errors = vErrors.length;
-      }
-    }
-  } else {
-    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
-    if (vErrors === null) {
-      vErrors = [err1];
-    } else {
-      vErrors.push(err1);
-    }
-    errors++;
-  }
-  validate140.errors = vErrors;
-  return errors === 0;
-}
-validate140.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate139(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
-  let vErrors = null;
-  let errors = 0;
-  const evaluated0 = validate139.evaluated;
-  if (evaluated0.dynamicProps) {
-    evaluated0.props = void 0;
-  }
-  if (evaluated0.dynamicItems) {
-    evaluated0.items = void 0;
-  }
-  if (data && typeof data == "object" && !Array.isArray(data)) {
-    for (const key0 in data) {
-      if (!(key0 === "rx" || key0 === "ry" || key0 === "rz")) {
-        const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
-        if (vErrors === null) {
-          vErrors = [err0];
-        } else {
-          vErrors.push(err0);
-        }
-        errors++;
-      }
-    }
-    if (data.rx !== void 0) {
-      if (!validate140(data.rx, { instancePath: instancePath + "/rx", parentData: data, parentDataProperty: "rx", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate140.errors : vErrors.concat(validate140.errors);
-        errors = vErrors.length;
-      }
-    }
-    if (data.ry !== void 0) {
-      if (!validate140(data.ry, { instancePath: instancePath + "/ry", parentData: data, parentDataProperty: "ry", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate140.errors : vErrors.concat(validate140.errors);
-        errors = vErrors.length;
-      }
-    }
-    if (data.rz !== void 0) {
-      if (!validate140(data.rz, { instancePath: instancePath + "/rz", parentData: data, parentDataProperty: "rz", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate140.errors : vErrors.concat(validate140.errors);
-        errors = vErrors.length;
-      }
-    }
-  } else {
-    const err1 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
-    if (vErrors === null) {
-      vErrors = [err1];
-    } else {
-      vErrors.push(err1);
-    }
-    errors++;
-  }
-  validate139.errors = vErrors;
-  return errors === 0;
-}
-validate139.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var pattern12 = new RegExp("^[a-z0-9_]+$", "u");
-function validate131(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
-  let vErrors = null;
-  let errors = 0;
-  const evaluated0 = validate131.evaluated;
-  if (evaluated0.dynamicProps) {
-    evaluated0.props = void 0;
-  }
-  if (evaluated0.dynamicItems) {
-    evaluated0.items = void 0;
-  }
-  if (data && typeof data == "object" && !Array.isArray(data)) {
-    for (const key0 in data) {
-      if (!func1.call(schema40.properties, key0)) {
+      if (!func1.call(schema53.properties, key0)) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -1857,7 +5065,7 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.curve !== void 0) {
       let data5 = data.curve;
       if (!(data5 === "smooth" || data5 === "straight")) {
-        const err8 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema40.properties.curve.enum }, message: "must be equal to one of the allowed values" };
+        const err8 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema53.properties.curve.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err8];
         } else {
@@ -1882,7 +5090,7 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
               }
               errors++;
             }
-            if (!pattern12.test(data7)) {
+            if (!pattern15.test(data7)) {
               const err10 = { instancePath: instancePath + "/names/" + i1, schemaPath: "#/properties/names/items/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"' };
               if (vErrors === null) {
                 vErrors = [err10];
@@ -1924,20 +5132,20 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.mirror !== void 0) {
-      if (!validate106(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate106.errors : vErrors.concat(validate106.errors);
+      if (!validate108(data.mirror, { instancePath: instancePath + "/mirror", parentData: data, parentDataProperty: "mirror", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
         errors = vErrors.length;
       }
     }
     if (data.orient !== void 0) {
-      if (!validate120(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate120.errors : vErrors.concat(validate120.errors);
+      if (!validate158(data.orient, { instancePath: instancePath + "/orient", parentData: data, parentDataProperty: "orient", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate158.errors : vErrors.concat(validate158.errors);
         errors = vErrors.length;
       }
     }
     if (data.rotation_order !== void 0) {
-      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
         errors = vErrors.length;
       }
     }
@@ -1956,7 +5164,7 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
               }
               errors++;
             }
-            if (!pattern12.test(key1)) {
+            if (!pattern15.test(key1)) {
               const err14 = { instancePath: instancePath + "/limits", schemaPath: "#/properties/limits/propertyNames/pattern", keyword: "pattern", params: { pattern: "^[a-z0-9_]+$" }, message: 'must match pattern "^[a-z0-9_]+$"', propertyName: key1 };
               if (vErrors === null) {
                 vErrors = [err14];
@@ -1986,8 +5194,8 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key2 in data13) {
-          if (!validate139(data13[key2], { instancePath: instancePath + "/limits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data13, parentDataProperty: key2, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate139.errors : vErrors.concat(validate139.errors);
+          if (!validate114(data13[key2], { instancePath: instancePath + "/limits/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data13, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate114.errors : vErrors.concat(validate114.errors);
             errors = vErrors.length;
           }
         }
@@ -2010,15 +5218,15 @@ function validate131(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate131.errors = vErrors;
+  validate275.errors = vErrors;
   return errors === 0;
 }
-validate131.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema43 = { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.", "examples": [["root", "spine.chest", "hips"]] }, "space_follow": { "enum": ["all", "turn"], "default": "all", "description": "all: the chosen space carries the control. turn: it only turns it; place stays with the parent.", "examples": ["turn"] } } };
-function validate152(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate275.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema54 = { "title": "Control", "description": "What the animator takes hold of.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "role": { "$ref": "#/$defs/word", "default": "control", "description": "Role; decides the container.", "examples": ["control"] }, "at": { "$ref": "#/$defs/Place", "description": "Where it stands at rest: a landmark, a joint or a point.", "examples": ["wrist"] }, "pole_of": { "$ref": "#/$defs/PolePlace" }, "align": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$", "default": "world", "description": "Joint or control whose rest orientation it takes, or world.", "examples": ["arm.left.wrist"] }, "parent": { "$ref": "#/$defs/id", "description": "Joint or control that it follows.", "examples": ["hips"] }, "shape": { "enum": ["ring", "square", "diamond", "cross", "arrow", "ball", "box", "pin", "compass"], "default": "ring", "description": "Drawn shape.", "examples": ["diamond"] }, "size": { "$ref": "#/$defs/NumberOrExpression", "default": 1, "description": "Factor on the size that the compiler takes from what the control steers.", "examples": [1.2] }, "side": { "$ref": "#/$defs/SideOption" }, "rotation_order": { "$ref": "#/$defs/RotationOrderOption" }, "channels": { "type": "object", "propertyNames": { "$ref": "#/$defs/ChannelName" }, "additionalProperties": { "$ref": "#/$defs/ChannelOption" }, "default": {}, "description": "Locks and limits by channel; move, turn and scale stand for three channels each.", "examples": [{ "scale": { "locked": true }, "rx": { "min": -40, "max": 40 } }] }, "attributes": { "type": "object", "propertyNames": { "$ref": "#/$defs/word" }, "additionalProperties": { "$ref": "#/$defs/AttributeOption" }, "default": {}, "description": "Values of its own, by name.", "examples": [{ "reach": { "default": 1, "min": 0, "max": 1 } }] }, "spaces": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 40, "description": "Joints and controls that may carry it; the attribute space chooses. Its parent comes first unless it is listed, else the first. Switching keeps nothing in place by itself: a tool matches the pose, or reads the values from Pintle.", "examples": [["root", "spine.chest", "hips"]] }, "space_follow": { "enum": ["all", "turn"], "default": "all", "description": "all: the chosen space carries the control. turn: it only turns it; place stays with the parent.", "examples": ["turn"] } } };
+function validate289(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate152.evaluated;
+  const evaluated0 = validate289.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2105,15 +5313,15 @@ function validate152(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate152.errors = vErrors;
+  validate289.errors = vErrors;
   return errors === 0;
 }
-validate152.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema45 = { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." };
-function validate161(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate289.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema56 = { "enum": ["move", "turn", "scale", "tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "A channel, or move, turn or scale for all three of a kind." };
+function validate298(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate161.evaluated;
+  const evaluated0 = validate298.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2121,7 +5329,7 @@ function validate161(data, { instancePath = "", parentData, parentDataProperty, 
     evaluated0.items = void 0;
   }
   if (!(data === "move" || data === "turn" || data === "scale" || data === "tx" || data === "ty" || data === "tz" || data === "rx" || data === "ry" || data === "rz" || data === "sx" || data === "sy" || data === "sz")) {
-    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema45.enum }, message: "must be equal to one of the allowed values" };
+    const err0 = { instancePath, schemaPath: "#/enum", keyword: "enum", params: { allowedValues: schema56.enum }, message: "must be equal to one of the allowed values" };
     if (vErrors === null) {
       vErrors = [err0];
     } else {
@@ -2129,14 +5337,14 @@ function validate161(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate161.errors = vErrors;
+  validate298.errors = vErrors;
   return errors === 0;
 }
-validate161.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate163(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate298.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate300(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate163.evaluated;
+  const evaluated0 = validate300.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2187,14 +5395,14 @@ function validate163(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate163.errors = vErrors;
+  validate300.errors = vErrors;
   return errors === 0;
 }
-validate163.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate168(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate300.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate305(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate168.evaluated;
+  const evaluated0 = validate305.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2309,14 +5517,14 @@ function validate168(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate168.errors = vErrors;
+  validate305.errors = vErrors;
   return errors === 0;
 }
-validate168.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate149(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate305.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate286(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate149.evaluated;
+  const evaluated0 = validate286.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2325,7 +5533,7 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!func1.call(schema43.properties, key0)) {
+      if (!func1.call(schema54.properties, key0)) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -2359,8 +5567,8 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.pole_of !== void 0) {
-      if (!validate152(data.pole_of, { instancePath: instancePath + "/pole_of", parentData: data, parentDataProperty: "pole_of", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate152.errors : vErrors.concat(validate152.errors);
+      if (!validate289(data.pole_of, { instancePath: instancePath + "/pole_of", parentData: data, parentDataProperty: "pole_of", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate289.errors : vErrors.concat(validate289.errors);
         errors = vErrors.length;
       }
     }
@@ -2395,7 +5603,7 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.shape !== void 0) {
       let data6 = data.shape;
       if (!(data6 === "ring" || data6 === "square" || data6 === "diamond" || data6 === "cross" || data6 === "arrow" || data6 === "ball" || data6 === "box" || data6 === "pin" || data6 === "compass")) {
-        const err4 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema43.properties.shape.enum }, message: "must be equal to one of the allowed values" };
+        const err4 = { instancePath: instancePath + "/shape", schemaPath: "#/properties/shape/enum", keyword: "enum", params: { allowedValues: schema54.properties.shape.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err4];
         } else {
@@ -2417,8 +5625,8 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.rotation_order !== void 0) {
-      if (!validate108(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate108.errors : vErrors.concat(validate108.errors);
+      if (!validate124(data.rotation_order, { instancePath: instancePath + "/rotation_order", parentData: data, parentDataProperty: "rotation_order", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate124.errors : vErrors.concat(validate124.errors);
         errors = vErrors.length;
       }
     }
@@ -2427,8 +5635,8 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
       if (data10 && typeof data10 == "object" && !Array.isArray(data10)) {
         for (const key1 in data10) {
           const _errs16 = errors;
-          if (!validate161(key1, { instancePath: instancePath + "/channels", parentData: data10, parentDataProperty: "channels", rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate161.errors : vErrors.concat(validate161.errors);
+          if (!validate298(key1, { instancePath: instancePath + "/channels", parentData: data10, parentDataProperty: "channels", rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate298.errors : vErrors.concat(validate298.errors);
             errors = vErrors.length;
           }
           var valid1 = _errs16 === errors;
@@ -2443,8 +5651,8 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key2 in data10) {
-          if (!validate163(data10[key2], { instancePath: instancePath + "/channels/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data10, parentDataProperty: key2, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate163.errors : vErrors.concat(validate163.errors);
+          if (!validate300(data10[key2], { instancePath: instancePath + "/channels/" + key2.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data10, parentDataProperty: key2, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate300.errors : vErrors.concat(validate300.errors);
             errors = vErrors.length;
           }
         }
@@ -2479,8 +5687,8 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key4 in data12) {
-          if (!validate168(data12[key4], { instancePath: instancePath + "/attributes/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data12, parentDataProperty: key4, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate168.errors : vErrors.concat(validate168.errors);
+          if (!validate305(data12[key4], { instancePath: instancePath + "/attributes/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data12, parentDataProperty: key4, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate305.errors : vErrors.concat(validate305.errors);
             errors = vErrors.length;
           }
         }
@@ -2535,7 +5743,7 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.space_follow !== void 0) {
       let data16 = data.space_follow;
       if (!(data16 === "all" || data16 === "turn")) {
-        const err12 = { instancePath: instancePath + "/space_follow", schemaPath: "#/properties/space_follow/enum", keyword: "enum", params: { allowedValues: schema43.properties.space_follow.enum }, message: "must be equal to one of the allowed values" };
+        const err12 = { instancePath: instancePath + "/space_follow", schemaPath: "#/properties/space_follow/enum", keyword: "enum", params: { allowedValues: schema54.properties.space_follow.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err12];
         } else {
@@ -2553,17 +5761,17 @@ function validate149(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate149.errors = vErrors;
+  validate286.errors = vErrors;
   return errors === 0;
 }
-validate149.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema48 = { "title": "Solver", "description": "Computes the transform of several joints at once. Which keys it takes depends on its kind.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone", "reach", "spline", "twist", "aim", "foot_roll"], "description": "two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 500, "description": "two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "two_bone, reach: joint or control that the last joint follows. aim: what the joint points at.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "two_bone, reach: control toward which the chain bends. aim: thing that says which way is up; without it the joint turns along the shortest arc.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "two_bone, reach, aim: 0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "stretch": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: 0: bones keep their length, 1: they grow until the end meets the goal. spline: 0: joints keep their distances, 1: they spread over the whole curve.", "examples": ["arm.left.hand.stretch"] }, "stretch_limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "two_bone, reach: greatest factor on the bones' length.", "x-unit": "factor", "examples": [1.5] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "two_bone, reach: share of the chain's length over which the end slows down before full reach. The zone never begins before the reach at rest.", "x-unit": "chain lengths", "examples": [0.05] }, "swing": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: angle by which the bend is swung about the line from start to goal.", "examples": ["arm.left.hand.swing"], "x-unit": "degrees" }, "bias": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "reach: \u22121 to 1: moves the fold from the last bends to the first.", "examples": ["leg.left.foot.lead"] }, "controls": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 2, "maxItems": 100, "description": "spline: the controls whose places shape the curve, from root to tip.", "examples": [["spine.low", "spine.middle", "spine.high"]] }, "volume": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "spline: 0 to 1: how far joints thicken and thin to keep the volume.", "examples": ["spine.high.volume"] }, "shares": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 1, "maxItems": 100, "description": "twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).", "examples": [[0.25, 0.5, 0.75]] }, "bone": { "$ref": "#/$defs/id", "description": "twist: joint at the root of the bone, the parent of the twist joints.", "examples": ["arm.left.elbow"] }, "tip": { "$ref": "#/$defs/id", "description": "twist: joint at the other end of the bone.", "examples": ["arm.left.wrist"] }, "base": { "$ref": "#/$defs/id", "description": "twist: joint or control against which the driver's twist is measured.", "examples": ["arm.left.elbow"] }, "driver": { "$ref": "#/$defs/id", "description": "twist: joint whose twist is spread.", "examples": ["arm.left.wrist"] }, "foot": { "$ref": "#/$defs/id", "description": "foot_roll: control that carries the foot.", "examples": ["leg.left.foot"] }, "ankle": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot moves.", "examples": ["leg.left_roll.ankle"] }, "toes": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot but the ball moves; without it the ankle alone is moved.", "examples": ["leg.left_roll.toes"] }, "heel": { "$ref": "#/$defs/Place", "description": "foot_roll: back of the sole, about which negative roll turns.", "examples": ["heel"] }, "ball": { "$ref": "#/$defs/Place", "description": "foot_roll: ball of the foot, about which roll turns up to the break angle.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "foot_roll: tip of the toes, about which roll turns beyond the break angle.", "examples": ["toe"] }, "inner": { "$ref": "#/$defs/Place", "description": "foot_roll: inner edge of the sole, about which negative bank turns.", "examples": ["inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "foot_roll: outer edge of the sole, about which positive bank turns.", "examples": ["outer"] }, "roll": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive forward.", "examples": ["leg.left.foot.roll"], "x-unit": "degrees" }, "bank": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive outward.", "examples": ["leg.left.foot.bank"], "x-unit": "degrees" }, "break": { "$ref": "#/$defs/NumberOrAttribute", "default": 30, "description": "foot_roll: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "side": { "$ref": "#/$defs/SideOption" } } };
-var schema49 = { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] };
-var pattern15 = new RegExp("^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "u");
-function validate181(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate286.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema59 = { "title": "Solver", "description": "Computes the transform of several joints at once. Which keys it takes depends on its kind.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["two_bone", "reach", "spline", "twist", "aim", "foot_roll"], "description": "two_bone: three joints in a row bend so that the last meets the goal. reach: four or more joints fold evenly so that the last meets the goal. spline: joints lie along a curve through controls. twist: joints along a bone share the twist of another joint. aim: one joint points at a goal. foot_roll: a foot rolls and banks over points of its sole.", "examples": ["two_bone"] }, "joints": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 1, "maxItems": 500, "description": "two_bone: the three joints from root to tip. reach: four or more. spline: two or more. Each is the parent of the next. twist: joints along the bone, children of its joint. aim: the one joint.", "examples": [["arm.left.shoulder", "arm.left.elbow", "arm.left.wrist"]] }, "goal": { "$ref": "#/$defs/id", "description": "two_bone, reach: joint or control that the last joint follows. aim: what the joint points at.", "examples": ["arm.left.hand"] }, "pole": { "$ref": "#/$defs/id", "description": "two_bone, reach: control toward which the chain bends. aim: thing that says which way is up; without it the joint turns along the shortest arc.", "examples": ["arm.left.pole"] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "default": 1, "description": "two_bone, reach, aim: 0: joints keep their own rotation. 1: solved.", "examples": ["arm.left.hand.reach"] }, "stretch": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: 0: bones keep their length, 1: they grow until the end meets the goal. spline: 0: joints keep their distances, 1: they spread over the whole curve.", "examples": ["arm.left.hand.stretch"] }, "stretch_limit": { "$ref": "#/$defs/NumberOrExpression", "default": 1.5, "description": "two_bone, reach: greatest factor on the bones' length.", "x-unit": "factor", "examples": [1.5] }, "soft": { "$ref": "#/$defs/NumberOrExpression", "default": 0, "description": "two_bone, reach: share of the chain's length over which the end slows down before full reach. The zone never begins before the reach at rest.", "x-unit": "chain lengths", "examples": [0.05] }, "swing": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "two_bone, reach: angle by which the bend is swung about the line from start to goal.", "examples": ["arm.left.hand.swing"], "x-unit": "degrees" }, "bias": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "reach: \u22121 to 1: moves the fold from the last bends to the first.", "examples": ["leg.left.foot.lead"] }, "controls": { "type": "array", "items": { "$ref": "#/$defs/id" }, "minItems": 2, "maxItems": 100, "description": "spline: the controls whose places shape the curve, from root to tip.", "examples": [["spine.low", "spine.middle", "spine.high"]] }, "volume": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "spline: 0 to 1: how far joints thicken and thin to keep the volume.", "examples": ["spine.high.volume"] }, "shares": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 1, "maxItems": 100, "description": "twist: share of the twist that each joint takes. Without it, joint i of n takes i / (n + 1).", "examples": [[0.25, 0.5, 0.75]] }, "bone": { "$ref": "#/$defs/id", "description": "twist: joint at the root of the bone, the parent of the twist joints.", "examples": ["arm.left.elbow"] }, "tip": { "$ref": "#/$defs/id", "description": "twist: joint at the other end of the bone.", "examples": ["arm.left.wrist"] }, "base": { "$ref": "#/$defs/id", "description": "twist: joint or control against which the driver's twist is measured.", "examples": ["arm.left.elbow"] }, "driver": { "$ref": "#/$defs/id", "description": "twist: joint whose twist is spread.", "examples": ["arm.left.wrist"] }, "foot": { "$ref": "#/$defs/id", "description": "foot_roll: control that carries the foot.", "examples": ["leg.left.foot"] }, "ankle": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot moves.", "examples": ["leg.left_roll.ankle"] }, "toes": { "$ref": "#/$defs/id", "description": "foot_roll: joint that every pivot but the ball moves; without it the ankle alone is moved.", "examples": ["leg.left_roll.toes"] }, "heel": { "$ref": "#/$defs/Place", "description": "foot_roll: back of the sole, about which negative roll turns.", "examples": ["heel"] }, "ball": { "$ref": "#/$defs/Place", "description": "foot_roll: ball of the foot, about which roll turns up to the break angle.", "examples": ["ball"] }, "toe": { "$ref": "#/$defs/Place", "description": "foot_roll: tip of the toes, about which roll turns beyond the break angle.", "examples": ["toe"] }, "inner": { "$ref": "#/$defs/Place", "description": "foot_roll: inner edge of the sole, about which negative bank turns.", "examples": ["inner"] }, "outer": { "$ref": "#/$defs/Place", "description": "foot_roll: outer edge of the sole, about which positive bank turns.", "examples": ["outer"] }, "roll": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive forward.", "examples": ["leg.left.foot.roll"], "x-unit": "degrees" }, "bank": { "$ref": "#/$defs/NumberOrAttribute", "default": 0, "description": "foot_roll: angle, positive outward.", "examples": ["leg.left.foot.bank"], "x-unit": "degrees" }, "break": { "$ref": "#/$defs/NumberOrAttribute", "default": 30, "description": "foot_roll: roll at which the toes begin to lift.", "examples": [30], "x-unit": "degrees" }, "side": { "$ref": "#/$defs/SideOption" } } };
+var schema60 = { "title": "NumberOrAttribute", "description": "A number, an expression, or an attribute of a control as control.attribute.", "type": ["number", "string"], "pattern": "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "maxLength": 2e3, "examples": [1, "arm.left.hand.reach"] };
+var pattern28 = new RegExp("^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)", "u");
+function validate318(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate181.evaluated;
+  const evaluated0 = validate318.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2571,7 +5779,7 @@ function validate181(data, { instancePath = "", parentData, parentDataProperty, 
     evaluated0.items = void 0;
   }
   if (!(typeof data == "number" && isFinite(data)) && typeof data !== "string") {
-    const err0 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: schema49.type }, message: "must be number,string" };
+    const err0 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: schema60.type }, message: "must be number,string" };
     if (vErrors === null) {
       vErrors = [err0];
     } else {
@@ -2589,7 +5797,7 @@ function validate181(data, { instancePath = "", parentData, parentDataProperty, 
       }
       errors++;
     }
-    if (!pattern15.test(data)) {
+    if (!pattern28.test(data)) {
       const err2 = { instancePath, schemaPath: "#/pattern", keyword: "pattern", params: { pattern: "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)" }, message: 'must match pattern "^(=|[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$)"' };
       if (vErrors === null) {
         vErrors = [err2];
@@ -2599,14 +5807,14 @@ function validate181(data, { instancePath = "", parentData, parentDataProperty, 
       errors++;
     }
   }
-  validate181.errors = vErrors;
+  validate318.errors = vErrors;
   return errors === 0;
 }
-validate181.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate177(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate318.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate314(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate177.evaluated;
+  const evaluated0 = validate314.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2615,7 +5823,7 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!func1.call(schema48.properties, key0)) {
+      if (!func1.call(schema59.properties, key0)) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -2639,7 +5847,7 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.kind !== void 0) {
       let data1 = data.kind;
       if (!(data1 === "two_bone" || data1 === "reach" || data1 === "spline" || data1 === "twist" || data1 === "aim" || data1 === "foot_roll")) {
-        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema48.properties.kind.enum }, message: "must be equal to one of the allowed values" };
+        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema59.properties.kind.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err2];
         } else {
@@ -2699,14 +5907,14 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.blend !== void 0) {
-      if (!validate181(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
     if (data.stretch !== void 0) {
-      if (!validate181(data.stretch, { instancePath: instancePath + "/stretch", parentData: data, parentDataProperty: "stretch", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.stretch, { instancePath: instancePath + "/stretch", parentData: data, parentDataProperty: "stretch", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
@@ -2723,14 +5931,14 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.swing !== void 0) {
-      if (!validate181(data.swing, { instancePath: instancePath + "/swing", parentData: data, parentDataProperty: "swing", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.swing, { instancePath: instancePath + "/swing", parentData: data, parentDataProperty: "swing", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
     if (data.bias !== void 0) {
-      if (!validate181(data.bias, { instancePath: instancePath + "/bias", parentData: data, parentDataProperty: "bias", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.bias, { instancePath: instancePath + "/bias", parentData: data, parentDataProperty: "bias", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
@@ -2773,8 +5981,8 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.volume !== void 0) {
-      if (!validate181(data.volume, { instancePath: instancePath + "/volume", parentData: data, parentDataProperty: "volume", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.volume, { instancePath: instancePath + "/volume", parentData: data, parentDataProperty: "volume", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
@@ -2889,20 +6097,20 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.roll !== void 0) {
-      if (!validate181(data.roll, { instancePath: instancePath + "/roll", parentData: data, parentDataProperty: "roll", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.roll, { instancePath: instancePath + "/roll", parentData: data, parentDataProperty: "roll", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
     if (data.bank !== void 0) {
-      if (!validate181(data.bank, { instancePath: instancePath + "/bank", parentData: data, parentDataProperty: "bank", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.bank, { instancePath: instancePath + "/bank", parentData: data, parentDataProperty: "bank", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
     if (data.break !== void 0) {
-      if (!validate181(data.break, { instancePath: instancePath + "/break", parentData: data, parentDataProperty: "break", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.break, { instancePath: instancePath + "/break", parentData: data, parentDataProperty: "break", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
@@ -2921,15 +6129,15 @@ function validate177(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate177.errors = vErrors;
+  validate314.errors = vErrors;
   return errors === 0;
 }
-validate177.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema50 = { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale", "aim"], "description": "What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "axis": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "aim: axis of the target that points at the sources, when no offset is kept.", "examples": ["+x"] }, "up_axis": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "aim: axis of the target that keeps its direction against up.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/id", "description": "aim: joint or control whose rotation carries the up axis; without it the target turns along the shortest arc.", "examples": ["head.chin"] }, "side": { "$ref": "#/$defs/SideOption" } } };
-function validate209(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate314.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema61 = { "title": "Constraint", "description": "Makes one thing follow others.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "kind": { "enum": ["parent", "point", "orient", "scale", "aim"], "description": "What is followed: everything, position, rotation or scale; or, aim, the target turns to point at the sources.", "examples": ["orient"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control that follows.", "examples": ["arm.left.wrist"] }, "sources": { "type": "object", "propertyNames": { "$ref": "#/$defs/id" }, "additionalProperties": { "$ref": "#/$defs/NumberOrExpression" }, "minProperties": 1, "description": "What is followed, each with its weight; weights are taken as shares of their sum.", "examples": [{ "arm.left.hand": 1 }] }, "blend": { "$ref": "#/$defs/NumberOrAttribute", "description": "Two sources only: share of the first; the second takes the rest.", "examples": ["arm.left.hand.reach"] }, "keep_offset": { "type": "boolean", "default": true, "description": "Keeps the distance and turn that target and sources have at rest, so that nothing moves at rest.", "examples": [true] }, "axis": { "$ref": "#/$defs/AxisName", "default": "+x", "description": "aim: axis of the target that points at the sources, when no offset is kept.", "examples": ["+x"] }, "up_axis": { "$ref": "#/$defs/AxisName", "default": "+y", "description": "aim: axis of the target that keeps its direction against up.", "examples": ["+y"] }, "up": { "$ref": "#/$defs/id", "description": "aim: joint or control whose rotation carries the up axis; without it the target turns along the shortest arc.", "examples": ["head.chin"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+function validate346(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate209.evaluated;
+  const evaluated0 = validate346.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -2938,7 +6146,7 @@ function validate209(data, { instancePath = "", parentData, parentDataProperty, 
   }
   if (data && typeof data == "object" && !Array.isArray(data)) {
     for (const key0 in data) {
-      if (!func1.call(schema50.properties, key0)) {
+      if (!func1.call(schema61.properties, key0)) {
         const err0 = { instancePath, schemaPath: "#/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key0 }, message: "must NOT have additional properties" };
         if (vErrors === null) {
           vErrors = [err0];
@@ -2962,7 +6170,7 @@ function validate209(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.kind !== void 0) {
       let data1 = data.kind;
       if (!(data1 === "parent" || data1 === "point" || data1 === "orient" || data1 === "scale" || data1 === "aim")) {
-        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema50.properties.kind.enum }, message: "must be equal to one of the allowed values" };
+        const err2 = { instancePath: instancePath + "/kind", schemaPath: "#/properties/kind/enum", keyword: "enum", params: { allowedValues: schema61.properties.kind.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err2];
         } else {
@@ -3023,8 +6231,8 @@ function validate209(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.blend !== void 0) {
-      if (!validate181(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.blend, { instancePath: instancePath + "/blend", parentData: data, parentDataProperty: "blend", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
@@ -3072,16 +6280,15 @@ function validate209(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate209.errors = vErrors;
+  validate346.errors = vErrors;
   return errors === 0;
 }
-validate209.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema51 = { "title": "Driver", "description": "Adds a value that follows a control to a channel of a joint or control.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "input": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "Attribute or channel of a control, as control.attribute.", "examples": ["jaw.open", "leg.left.foot.ty"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control whose channel it moves.", "examples": ["jaw.hinge"] }, "channel": { "enum": ["tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "Channel that it is added to.", "examples": ["rz"] }, "keys": { "type": "array", "items": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 2, "maxItems": 2 }, "minItems": 2, "maxItems": 100, "description": "Curve as pairs of input and output, inputs ascending.", "examples": [[[0, 0], [1, 30]]] }, "curve": { "enum": ["linear", "smooth"], "default": "linear", "description": "How outputs run between keys: straight, or level at each key.", "examples": ["smooth"] }, "beyond": { "enum": ["hold", "extend"], "default": "hold", "description": "Beyond the end keys: hold the last output, or run on straight.", "examples": ["extend"] }, "side": { "$ref": "#/$defs/SideOption" } } };
-var pattern16 = new RegExp("^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "u");
-function validate220(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate346.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema62 = { "title": "Driver", "description": "Adds a value that follows a control to a channel of a joint or control.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "input": { "type": "string", "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$", "maxLength": 180, "description": "Attribute or channel of a control, as control.attribute.", "examples": ["jaw.open", "leg.left.foot.ty"] }, "target": { "$ref": "#/$defs/id", "description": "Joint or control whose channel it moves.", "examples": ["jaw.hinge"] }, "channel": { "enum": ["tx", "ty", "tz", "rx", "ry", "rz", "sx", "sy", "sz"], "description": "Channel that it is added to.", "examples": ["rz"] }, "keys": { "type": "array", "items": { "type": "array", "items": { "$ref": "#/$defs/NumberOrExpression" }, "minItems": 2, "maxItems": 2 }, "minItems": 2, "maxItems": 100, "description": "Curve as pairs of input and output, inputs ascending.", "examples": [[[0, 0], [1, 30]]] }, "curve": { "enum": ["linear", "smooth"], "default": "linear", "description": "How outputs run between keys: straight, or level at each key.", "examples": ["smooth"] }, "beyond": { "enum": ["hold", "extend"], "default": "hold", "description": "Beyond the end keys: hold the last output, or run on straight.", "examples": ["extend"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+function validate357(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate220.evaluated;
+  const evaluated0 = validate357.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3123,7 +6330,7 @@ function validate220(data, { instancePath = "", parentData, parentDataProperty, 
           }
           errors++;
         }
-        if (!pattern16.test(data1)) {
+        if (!pattern13.test(data1)) {
           const err3 = { instancePath: instancePath + "/input", schemaPath: "#/properties/input/pattern", keyword: "pattern", params: { pattern: "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$" }, message: 'must match pattern "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)+$"' };
           if (vErrors === null) {
             vErrors = [err3];
@@ -3151,7 +6358,7 @@ function validate220(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.channel !== void 0) {
       let data3 = data.channel;
       if (!(data3 === "tx" || data3 === "ty" || data3 === "tz" || data3 === "rx" || data3 === "ry" || data3 === "rz" || data3 === "sx" || data3 === "sy" || data3 === "sz")) {
-        const err5 = { instancePath: instancePath + "/channel", schemaPath: "#/properties/channel/enum", keyword: "enum", params: { allowedValues: schema51.properties.channel.enum }, message: "must be equal to one of the allowed values" };
+        const err5 = { instancePath: instancePath + "/channel", schemaPath: "#/properties/channel/enum", keyword: "enum", params: { allowedValues: schema62.properties.channel.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err5];
         } else {
@@ -3233,7 +6440,7 @@ function validate220(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.curve !== void 0) {
       let data7 = data.curve;
       if (!(data7 === "linear" || data7 === "smooth")) {
-        const err12 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema51.properties.curve.enum }, message: "must be equal to one of the allowed values" };
+        const err12 = { instancePath: instancePath + "/curve", schemaPath: "#/properties/curve/enum", keyword: "enum", params: { allowedValues: schema62.properties.curve.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err12];
         } else {
@@ -3245,7 +6452,7 @@ function validate220(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.beyond !== void 0) {
       let data8 = data.beyond;
       if (!(data8 === "hold" || data8 === "extend")) {
-        const err13 = { instancePath: instancePath + "/beyond", schemaPath: "#/properties/beyond/enum", keyword: "enum", params: { allowedValues: schema51.properties.beyond.enum }, message: "must be equal to one of the allowed values" };
+        const err13 = { instancePath: instancePath + "/beyond", schemaPath: "#/properties/beyond/enum", keyword: "enum", params: { allowedValues: schema62.properties.beyond.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err13];
         } else {
@@ -3269,15 +6476,15 @@ function validate220(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate220.errors = vErrors;
+  validate357.errors = vErrors;
   return errors === 0;
 }
-validate220.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var schema52 = { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } };
-function validate226(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate357.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+var schema63 = { "title": "GuideLine", "description": "A drawn, unselectable line from a control to the thing it steers.", "type": "object", "additionalProperties": false, "properties": { "omit": { "type": "boolean", "default": false, "description": "Leaves out what a part made under this id.", "examples": [true] }, "from": { "$ref": "#/$defs/id", "description": "Control at its start.", "examples": ["arm.left.pole"] }, "to": { "$ref": "#/$defs/id", "description": "Joint or control at its end.", "examples": ["arm.left.elbow"] }, "style": { "enum": ["dotted", "dashed", "solid"], "default": "dotted", "description": "How it is drawn.", "examples": ["dotted"] }, "side": { "$ref": "#/$defs/SideOption" } } };
+function validate363(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate226.evaluated;
+  const evaluated0 = validate363.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3322,7 +6529,7 @@ function validate226(data, { instancePath = "", parentData, parentDataProperty, 
     if (data.style !== void 0) {
       let data3 = data.style;
       if (!(data3 === "dotted" || data3 === "dashed" || data3 === "solid")) {
-        const err2 = { instancePath: instancePath + "/style", schemaPath: "#/properties/style/enum", keyword: "enum", params: { allowedValues: schema52.properties.style.enum }, message: "must be equal to one of the allowed values" };
+        const err2 = { instancePath: instancePath + "/style", schemaPath: "#/properties/style/enum", keyword: "enum", params: { allowedValues: schema63.properties.style.enum }, message: "must be equal to one of the allowed values" };
         if (vErrors === null) {
           vErrors = [err2];
         } else {
@@ -3346,14 +6553,14 @@ function validate226(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate226.errors = vErrors;
+  validate363.errors = vErrors;
   return errors === 0;
 }
-validate226.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate232(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate363.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate369(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate232.evaluated;
+  const evaluated0 = validate369.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3435,14 +6642,14 @@ function validate232(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate232.errors = vErrors;
+  validate369.errors = vErrors;
   return errors === 0;
 }
-validate232.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate237(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate369.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate374(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate237.evaluated;
+  const evaluated0 = validate374.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3563,14 +6770,14 @@ function validate237(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate237.errors = vErrors;
+  validate374.errors = vErrors;
   return errors === 0;
 }
-validate237.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate243(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate374.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate380(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate243.evaluated;
+  const evaluated0 = validate380.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -3638,8 +6845,8 @@ function validate243(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.weight !== void 0) {
-      if (!validate181(data.weight, { instancePath: instancePath + "/weight", parentData: data, parentDataProperty: "weight", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate181.errors : vErrors.concat(validate181.errors);
+      if (!validate318(data.weight, { instancePath: instancePath + "/weight", parentData: data, parentDataProperty: "weight", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate318.errors : vErrors.concat(validate318.errors);
         errors = vErrors.length;
       }
     }
@@ -3658,10 +6865,10 @@ function validate243(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate243.errors = vErrors;
+  validate380.errors = vErrors;
   return errors === 0;
 }
-validate243.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+validate380.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
 var pattern4 = new RegExp("^[a-z][a-z0-9_]*@[1-9][0-9]*$", "u");
 function validate52(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   ;
@@ -3978,8 +7185,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key12 in data16) {
-          if (!validate131(data16[key12], { instancePath: instancePath + "/chains/" + key12.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key12, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate131.errors : vErrors.concat(validate131.errors);
+          if (!validate275(data16[key12], { instancePath: instancePath + "/chains/" + key12.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key12, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate275.errors : vErrors.concat(validate275.errors);
             errors = vErrors.length;
           }
         }
@@ -4014,8 +7221,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key14 in data18) {
-          if (!validate149(data18[key14], { instancePath: instancePath + "/controls/" + key14.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data18, parentDataProperty: key14, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate149.errors : vErrors.concat(validate149.errors);
+          if (!validate286(data18[key14], { instancePath: instancePath + "/controls/" + key14.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data18, parentDataProperty: key14, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate286.errors : vErrors.concat(validate286.errors);
             errors = vErrors.length;
           }
         }
@@ -4050,8 +7257,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key16 in data20) {
-          if (!validate177(data20[key16], { instancePath: instancePath + "/solvers/" + key16.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data20, parentDataProperty: key16, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate177.errors : vErrors.concat(validate177.errors);
+          if (!validate314(data20[key16], { instancePath: instancePath + "/solvers/" + key16.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data20, parentDataProperty: key16, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate314.errors : vErrors.concat(validate314.errors);
             errors = vErrors.length;
           }
         }
@@ -4086,8 +7293,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key18 in data22) {
-          if (!validate209(data22[key18], { instancePath: instancePath + "/constraints/" + key18.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data22, parentDataProperty: key18, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate209.errors : vErrors.concat(validate209.errors);
+          if (!validate346(data22[key18], { instancePath: instancePath + "/constraints/" + key18.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data22, parentDataProperty: key18, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate346.errors : vErrors.concat(validate346.errors);
             errors = vErrors.length;
           }
         }
@@ -4122,8 +7329,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key20 in data24) {
-          if (!validate220(data24[key20], { instancePath: instancePath + "/drivers/" + key20.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data24, parentDataProperty: key20, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate220.errors : vErrors.concat(validate220.errors);
+          if (!validate357(data24[key20], { instancePath: instancePath + "/drivers/" + key20.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data24, parentDataProperty: key20, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate357.errors : vErrors.concat(validate357.errors);
             errors = vErrors.length;
           }
         }
@@ -4158,8 +7365,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key22 in data26) {
-          if (!validate226(data26[key22], { instancePath: instancePath + "/guide_lines/" + key22.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data26, parentDataProperty: key22, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate226.errors : vErrors.concat(validate226.errors);
+          if (!validate363(data26[key22], { instancePath: instancePath + "/guide_lines/" + key22.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data26, parentDataProperty: key22, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate363.errors : vErrors.concat(validate363.errors);
             errors = vErrors.length;
           }
         }
@@ -4194,8 +7401,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key24 in data28) {
-          if (!validate232(data28[key24], { instancePath: instancePath + "/geometry/" + key24.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data28, parentDataProperty: key24, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate232.errors : vErrors.concat(validate232.errors);
+          if (!validate369(data28[key24], { instancePath: instancePath + "/geometry/" + key24.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data28, parentDataProperty: key24, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate369.errors : vErrors.concat(validate369.errors);
             errors = vErrors.length;
           }
         }
@@ -4230,8 +7437,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key26 in data30) {
-          if (!validate237(data30[key26], { instancePath: instancePath + "/skins/" + key26.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data30, parentDataProperty: key26, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate237.errors : vErrors.concat(validate237.errors);
+          if (!validate374(data30[key26], { instancePath: instancePath + "/skins/" + key26.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data30, parentDataProperty: key26, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate374.errors : vErrors.concat(validate374.errors);
             errors = vErrors.length;
           }
         }
@@ -4266,8 +7473,8 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
           }
         }
         for (const key28 in data32) {
-          if (!validate243(data32[key28], { instancePath: instancePath + "/shapes/" + key28.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data32, parentDataProperty: key28, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate243.errors : vErrors.concat(validate243.errors);
+          if (!validate380(data32[key28], { instancePath: instancePath + "/shapes/" + key28.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data32, parentDataProperty: key28, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate380.errors : vErrors.concat(validate380.errors);
             errors = vErrors.length;
           }
         }
@@ -4347,13 +7554,13 @@ function validate52(data, { instancePath = "", parentData, parentDataProperty, r
   return errors === 0;
 }
 validate52.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-var validateHouse = validate249;
-var schema56 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/house/1", "title": "HouseRules", "description": "House rules, format 1: a studio's own standard for containers, roles, names and severities.", "type": "object", "required": ["format", "house", "naming", "roles", "containers"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the house-rules language.", "examples": [1] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60, "description": "Name of the house rules.", "examples": ["tidewrack"] }, "version": { "type": "integer", "minimum": 1, "default": 1, "description": "Version of the house rules.", "examples": [1] }, "title": { "type": "string", "maxLength": 200, "description": "What people call them.", "examples": ["Tidewrack house rules"] }, "naming": { "title": "NamingRules", "description": "How names in the scene are made from ids.", "type": "object", "required": ["pattern"], "additionalProperties": false, "properties": { "pattern": { "type": "array", "minItems": 1, "items": { "enum": ["character", "role", "side", "path", "leaf", "index"] }, "description": "Parts of a name in order; empty ones are left out. path: the id without its side and index. leaf: the last segment of the id. index: the padded number of a counted joint.", "examples": [["character", "side", "path", "index", "role"]] }, "separator": { "type": "string", "pattern": "^[A-Za-z0-9_]{0,3}$", "default": "_", "description": "Text between the parts.", "examples": ["_"] }, "index_digits": { "type": "integer", "minimum": 2, "maximum": 6, "default": 2, "description": "Least count of digits in an index.", "examples": [2] }, "sides": { "type": "object", "additionalProperties": false, "description": "Text for each side.", "properties": { "left": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "l", "description": "Text for the left side.", "examples": ["l"] }, "right": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "r", "description": "Text for the right side.", "examples": ["r"] }, "centre": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "", "description": "Text for the centre.", "examples": ["c"] } }, "examples": [{ "left": "l", "right": "r", "centre": "c" }] }, "longest": { "type": "integer", "minimum": 8, "maximum": 255, "default": 64, "description": "Longest name allowed, in characters.", "examples": [64] } } }, "roles": { "description": "What things are for. The compiler itself uses carrier, control, skin, guide_line and note.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Role" } }, "containers": { "description": "The container tree.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Container" } }, "severities": { "description": "Changes the severity of findings, by code. An error of the language itself stays an error.", "type": "object", "additionalProperties": { "enum": ["error", "warning", "info", "off"] }, "default": {}, "examples": [{ "landmark-unused": "off" }] } }, "$defs": { "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "line": { "type": "string", "maxLength": 200 }, "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 } } };
-var pattern18 = new RegExp("^[A-Za-z0-9_]{0,3}$", "u");
-function validate251(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+var validateHouse = validate386;
+var schema67 = { "$schema": "https://json-schema.org/draft/2020-12/schema", "$id": "https://pintle.invalid/schema/house/1", "title": "HouseRules", "description": "House rules, format 1: a studio's own standard for containers, roles, names and severities.", "type": "object", "required": ["format", "house", "naming", "roles", "containers"], "additionalProperties": false, "properties": { "format": { "const": 1, "description": "Version of the house-rules language.", "examples": [1] }, "house": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60, "description": "Name of the house rules.", "examples": ["tidewrack"] }, "version": { "type": "integer", "minimum": 1, "default": 1, "description": "Version of the house rules.", "examples": [1] }, "title": { "type": "string", "maxLength": 200, "description": "What people call them.", "examples": ["Tidewrack house rules"] }, "naming": { "title": "NamingRules", "description": "How names in the scene are made from ids.", "type": "object", "required": ["pattern"], "additionalProperties": false, "properties": { "pattern": { "type": "array", "minItems": 1, "items": { "enum": ["character", "role", "side", "path", "leaf", "index"] }, "description": "Parts of a name in order; empty ones are left out. path: the id without its side and index. leaf: the last segment of the id. index: the padded number of a counted joint.", "examples": [["character", "side", "path", "index", "role"]] }, "separator": { "type": "string", "pattern": "^[A-Za-z0-9_]{0,3}$", "default": "_", "description": "Text between the parts.", "examples": ["_"] }, "index_digits": { "type": "integer", "minimum": 2, "maximum": 6, "default": 2, "description": "Least count of digits in an index.", "examples": [2] }, "sides": { "type": "object", "additionalProperties": false, "description": "Text for each side.", "properties": { "left": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "l", "description": "Text for the left side.", "examples": ["l"] }, "right": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "r", "description": "Text for the right side.", "examples": ["r"] }, "centre": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "default": "", "description": "Text for the centre.", "examples": ["c"] } }, "examples": [{ "left": "l", "right": "r", "centre": "c" }] }, "longest": { "type": "integer", "minimum": 8, "maximum": 255, "default": 64, "description": "Longest name allowed, in characters.", "examples": [64] } } }, "roles": { "description": "What things are for. The compiler itself uses carrier, control, skin, guide_line and note.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Role" } }, "containers": { "description": "The container tree.", "type": "object", "propertyNames": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$" }, "additionalProperties": { "$ref": "#/$defs/Container" } }, "severities": { "description": "Changes the severity of findings, by code. An error of the language itself stays an error.", "type": "object", "additionalProperties": { "enum": ["error", "warning", "info", "off"] }, "default": {}, "examples": [{ "landmark-unused": "off" }] } }, "$defs": { "Container": { "title": "Container", "description": "A group that holds one class of things.", "type": "object", "additionalProperties": false, "properties": { "parent": { "$ref": "#/$defs/word", "description": "Container it lies in; without one it lies directly in the rig.", "examples": ["carry"] }, "moves": { "enum": ["carried", "parked"], "description": "carried: moves with the root control. parked: stays in the world. Inherited from the parent container; parked at the top.", "examples": ["parked"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees what is inside.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joints"] } } }, "Role": { "title": "Role", "description": "What a thing is for; decides its container, name token and visibility.", "type": "object", "additionalProperties": false, "properties": { "token": { "type": "string", "pattern": "^[A-Za-z0-9_]*$", "maxLength": 20, "description": "Text that the naming pattern puts for this role; may be empty.", "examples": ["sk"] }, "container": { "$ref": "#/$defs/word", "description": "Container that holds things of this role.", "examples": ["skin"] }, "shown": { "type": "boolean", "default": true, "description": "Whether an animator sees things of this role.", "examples": [false] }, "selectable": { "type": "boolean", "default": true, "description": "Whether an animator can select things of this role.", "examples": [false] }, "title": { "$ref": "#/$defs/line", "description": "What people call it.", "examples": ["Skin joint"] } } }, "line": { "type": "string", "maxLength": 200 }, "word": { "type": "string", "pattern": "^[a-z][a-z0-9_]*$", "maxLength": 60 } } };
+var pattern31 = new RegExp("^[A-Za-z0-9_]{0,3}$", "u");
+function validate388(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate251.evaluated;
+  const evaluated0 = validate388.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -4388,14 +7595,14 @@ function validate251(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate251.errors = vErrors;
+  validate388.errors = vErrors;
   return errors === 0;
 }
-validate251.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate253(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate388.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate390(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate253.evaluated;
+  const evaluated0 = validate390.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -4421,14 +7628,14 @@ function validate253(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate253.errors = vErrors;
+  validate390.errors = vErrors;
   return errors === 0;
 }
-validate253.evaluated = { "dynamicProps": false, "dynamicItems": false };
-function validate250(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate390.evaluated = { "dynamicProps": false, "dynamicItems": false };
+function validate387(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate250.evaluated;
+  const evaluated0 = validate387.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -4479,8 +7686,8 @@ function validate250(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.container !== void 0) {
-      if (!validate251(data.container, { instancePath: instancePath + "/container", parentData: data, parentDataProperty: "container", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate251.errors : vErrors.concat(validate251.errors);
+      if (!validate388(data.container, { instancePath: instancePath + "/container", parentData: data, parentDataProperty: "container", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate388.errors : vErrors.concat(validate388.errors);
         errors = vErrors.length;
       }
     }
@@ -4507,8 +7714,8 @@ function validate250(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.title !== void 0) {
-      if (!validate253(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate253.errors : vErrors.concat(validate253.errors);
+      if (!validate390(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate390.errors : vErrors.concat(validate390.errors);
         errors = vErrors.length;
       }
     }
@@ -4521,14 +7728,14 @@ function validate250(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate250.errors = vErrors;
+  validate387.errors = vErrors;
   return errors === 0;
 }
-validate250.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate256(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate387.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate393(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate256.evaluated;
+  const evaluated0 = validate393.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -4548,8 +7755,8 @@ function validate256(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.parent !== void 0) {
-      if (!validate251(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate251.errors : vErrors.concat(validate251.errors);
+      if (!validate388(data.parent, { instancePath: instancePath + "/parent", parentData: data, parentDataProperty: "parent", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate388.errors : vErrors.concat(validate388.errors);
         errors = vErrors.length;
       }
     }
@@ -4577,8 +7784,8 @@ function validate256(data, { instancePath = "", parentData, parentDataProperty, 
       }
     }
     if (data.title !== void 0) {
-      if (!validate253(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
-        vErrors = vErrors === null ? validate253.errors : vErrors.concat(validate253.errors);
+      if (!validate390(data.title, { instancePath: instancePath + "/title", parentData: data, parentDataProperty: "title", rootData, dynamicAnchors })) {
+        vErrors = vErrors === null ? validate390.errors : vErrors.concat(validate390.errors);
         errors = vErrors.length;
       }
     }
@@ -4591,15 +7798,15 @@ function validate256(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate256.errors = vErrors;
+  validate393.errors = vErrors;
   return errors === 0;
 }
-validate256.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
-function validate249(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
+validate393.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+function validate386(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
   ;
   let vErrors = null;
   let errors = 0;
-  const evaluated0 = validate249.evaluated;
+  const evaluated0 = validate386.evaluated;
   if (evaluated0.dynamicProps) {
     evaluated0.props = void 0;
   }
@@ -4789,7 +7996,7 @@ function validate249(data, { instancePath = "", parentData, parentDataProperty, 
             for (let i0 = 0; i0 < len0; i0++) {
               let data6 = data5[i0];
               if (!(data6 === "character" || data6 === "role" || data6 === "side" || data6 === "path" || data6 === "leaf" || data6 === "index")) {
-                const err17 = { instancePath: instancePath + "/naming/pattern/" + i0, schemaPath: "#/properties/naming/properties/pattern/items/enum", keyword: "enum", params: { allowedValues: schema56.properties.naming.properties.pattern.items.enum }, message: "must be equal to one of the allowed values" };
+                const err17 = { instancePath: instancePath + "/naming/pattern/" + i0, schemaPath: "#/properties/naming/properties/pattern/items/enum", keyword: "enum", params: { allowedValues: schema67.properties.naming.properties.pattern.items.enum }, message: "must be equal to one of the allowed values" };
                 if (vErrors === null) {
                   vErrors = [err17];
                 } else {
@@ -4811,7 +8018,7 @@ function validate249(data, { instancePath = "", parentData, parentDataProperty, 
         if (data4.separator !== void 0) {
           let data7 = data4.separator;
           if (typeof data7 === "string") {
-            if (!pattern18.test(data7)) {
+            if (!pattern31.test(data7)) {
               const err19 = { instancePath: instancePath + "/naming/separator", schemaPath: "#/properties/naming/properties/separator/pattern", keyword: "pattern", params: { pattern: "^[A-Za-z0-9_]{0,3}$" }, message: 'must match pattern "^[A-Za-z0-9_]{0,3}$"' };
               if (vErrors === null) {
                 vErrors = [err19];
@@ -5057,8 +8264,8 @@ function validate249(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key4 in data14) {
-          if (!validate250(data14[key4], { instancePath: instancePath + "/roles/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data14, parentDataProperty: key4, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate250.errors : vErrors.concat(validate250.errors);
+          if (!validate387(data14[key4], { instancePath: instancePath + "/roles/" + key4.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data14, parentDataProperty: key4, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate387.errors : vErrors.concat(validate387.errors);
             errors = vErrors.length;
           }
         }
@@ -5108,8 +8315,8 @@ function validate249(data, { instancePath = "", parentData, parentDataProperty, 
           }
         }
         for (const key6 in data16) {
-          if (!validate256(data16[key6], { instancePath: instancePath + "/containers/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key6, rootData, dynamicAnchors })) {
-            vErrors = vErrors === null ? validate256.errors : vErrors.concat(validate256.errors);
+          if (!validate393(data16[key6], { instancePath: instancePath + "/containers/" + key6.replace(/~/g, "~0").replace(/\//g, "~1"), parentData: data16, parentDataProperty: key6, rootData, dynamicAnchors })) {
+            vErrors = vErrors === null ? validate393.errors : vErrors.concat(validate393.errors);
             errors = vErrors.length;
           }
         }
@@ -5129,7 +8336,7 @@ function validate249(data, { instancePath = "", parentData, parentDataProperty, 
         for (const key7 in data18) {
           let data19 = data18[key7];
           if (!(data19 === "error" || data19 === "warning" || data19 === "info" || data19 === "off")) {
-            const err47 = { instancePath: instancePath + "/severities/" + key7.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/severities/additionalProperties/enum", keyword: "enum", params: { allowedValues: schema56.properties.severities.additionalProperties.enum }, message: "must be equal to one of the allowed values" };
+            const err47 = { instancePath: instancePath + "/severities/" + key7.replace(/~/g, "~0").replace(/\//g, "~1"), schemaPath: "#/properties/severities/additionalProperties/enum", keyword: "enum", params: { allowedValues: schema67.properties.severities.additionalProperties.enum }, message: "must be equal to one of the allowed values" };
             if (vErrors === null) {
               vErrors = [err47];
             } else {
@@ -5157,10 +8364,10 @@ function validate249(data, { instancePath = "", parentData, parentDataProperty, 
     }
     errors++;
   }
-  validate249.errors = vErrors;
+  validate386.errors = vErrors;
   return errors === 0;
 }
-validate249.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
+validate386.evaluated = { "props": true, "dynamicProps": false, "dynamicItems": false };
 export {
   validateHouse,
   validateRecipe

@@ -27,7 +27,7 @@ const chain = (over: Partial<ChainSpecification> = {}): ChainSpecification => ({
   jointIds: [],
   parent: null,
   mirror: 'behaviour',
-  orient: { rule: 'chain', aim: '+x', up: '+y', toward: null },
+  orient: { rule: 'chain', aim: '+x', up: '+y', toward: null, like: null },
   order: 'xyz',
   limits: {},
   ...over,
@@ -64,7 +64,7 @@ describe('joint frames of a chain', () => {
 
   it('takes other axes for aim and up when told to', () => {
     const frames = chainFrames(
-      chain({ orient: { rule: 'chain', aim: '-y', up: '+z', toward: null } }),
+      chain({ orient: { rule: 'chain', aim: '-y', up: '+z', toward: null, like: null } }),
       elbow,
       scene,
     );
@@ -75,7 +75,7 @@ describe('joint frames of a chain', () => {
 
   it('leans the up axis to a given direction', () => {
     const frames = chainFrames(
-      chain({ orient: { rule: 'chain', aim: '+x', up: '+y', toward: [0, 0, -2] } }),
+      chain({ orient: { rule: 'chain', aim: '+x', up: '+y', toward: [0, 0, -2], like: null } }),
       elbow,
       scene,
     );
@@ -107,7 +107,7 @@ describe('joint frames of a chain', () => {
 
   it('keeps the scene’s axes by the rule world', () => {
     const frames = chainFrames(
-      chain({ orient: { rule: 'world', aim: '+x', up: '+y', toward: null } }),
+      chain({ orient: { rule: 'world', aim: '+x', up: '+y', toward: null, like: null } }),
       elbow,
       scene,
     );
