@@ -16,7 +16,6 @@ import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
 import type { SolvedRecipe } from '../solve/types';
 import type { Path } from '../syntax/types';
-import type { Lineage } from './Lineage';
 import type { ExpressionNames } from './namesInExpressions';
 
 /** What a rule may read and how it speaks. Rules cannot change anything. */
@@ -28,8 +27,6 @@ export interface RuleContext {
   readonly stage: ResolveContext;
   /** False when entries were refused: then nothing can be called missing or unused. */
   readonly isWhole: boolean;
-  /** Who hangs beneath whom, measured when first asked for. */
-  lineage(): Lineage;
   /** Names that expressions read, listed when first asked for. */
   expressionNames(): ExpressionNames;
   /** Reports the rule's own code at a path of the recipe. */

@@ -3,7 +3,6 @@ import { fillTemplate } from '../findings/FindingList';
 import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
 import type { SolvedRecipe } from '../solve/types';
-import { Lineage } from './Lineage';
 import { type ExpressionNames, namesInExpressions } from './namesInExpressions';
 import { RULES } from './rules/index';
 
@@ -19,11 +18,6 @@ export function runRules(
     names ??= namesInExpressions(stage.document.value);
     return names;
   };
-  let measured: Lineage | null = null;
-  const lineage = (): Lineage => {
-    measured ??= new Lineage(resolved);
-    return measured;
-  };
   const handlers = RULES.map((rule) =>
     rule.create({
       recipe,
@@ -32,7 +26,6 @@ export function runRules(
       stage,
       isWhole: stage.poisoned.size === 0,
       expressionNames,
-      lineage,
       report(path, parameters, more = {}) {
         stage.findings.add({
           code: rule.code,
