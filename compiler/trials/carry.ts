@@ -18,7 +18,11 @@ const MOTIONS: readonly Readonly<Partial<Record<Channel, number>>>[] = [
 ];
 
 /** The values of a motion that the root can take: locked channels stay, the others within their limits. */
-function valuesFor(root: ControlNode, motion: (typeof MOTIONS)[number], size: number): Record<Channel, number> {
+function valuesFor(
+  root: ControlNode,
+  motion: (typeof MOTIONS)[number],
+  size: number,
+): Record<Channel, number> {
   const values = CHANNELS.map((channel): [Channel, number] => {
     const rest = channel.startsWith('s') ? 1 : 0;
     const rule = root.channels[channel];

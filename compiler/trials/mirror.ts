@@ -1,9 +1,18 @@
 import { eulerToQuat, quatToEuler } from '../math/euler';
-import { columnsOf, composeMat4, type Mat4, matFromColumns, multiplyMat4, positionOf, rotationOf } from '../math/mat4';
+import {
+  columnsOf,
+  composeMat4,
+  type Mat4,
+  matFromColumns,
+  multiplyMat4,
+  positionOf,
+  rotationOf,
+} from '../math/mat4';
 import { add, dot, scale, sub } from '../math/vec3';
 import { readMatrix } from '../pose/worldMatrices';
-import type { ControlNode, PoseValues, Vec3 } from '../rig/Rig';
+import type { ControlNode, PoseValues, RigNode, Vec3 } from '../rig/Rig';
 import { displacement } from './displacement';
+import { findInfluences } from './influences';
 import { nudge, type PoseDraft, put, putAmount } from './poses';
 import { Tally } from './Tally';
 import type { TrialBench } from './TrialBench';
@@ -139,6 +148,27 @@ function mirroredPose(pairs: readonly Pair[], bench: TrialBench, seed: number, s
 }
 
 /**
+ * Pairs without those that something moves which stands on one side only: the recipe is lopsided there. Most recipes
+ * have no such thing, so what moves what is looked up only when there is one.
+ */
+function leaveOutLopsided(
+  pairs: readonly Pair[],
+  paired: ReadonlySet<string>,
+  bench: TrialBench,
+): readonly Pair[] {
+  const isLoner = ({ id, side, kind }: RigNode): boolean =>
+    side !== 'centre' && (kind === 'joint' || kind === 'control') && !paired.has(id);
+  const loners = bench.rig.nodes.filter(isLoner).map(({ name }) => name);
+  if (loners.length === 0) return pairs;
+  const influencesOf = findInfluences(bench);
+  const isEven = (index: number): boolean => {
+    const influences = influencesOf(bench.rig.nodes[index]?.name ?? '');
+    return !loners.some((name) => influences.has(name));
+  };
+  return pairs.filter(({ leftIndex, rightIndex }) => isEven(leftIndex) && isEven(rightIndex));
+}
+
+/**
  * A mirrored pose gives a mirrored rig: twins that one entry makes on both sides stand as each other's mirror image,
  * at rest and in poses that both sides take alike, with equal attributes; twins mirrored by behaviour take equal turns.
  */
@@ -146,25 +176,27 @@ export function tryMirror(bench: TrialBench): TrialResult {
   const { rig, intent, poser, rest, indexOfId, size, tolerance } = bench;
   const { left } = intent;
   const tally = new Tally('mirror', rig.scene.unit, tolerance);
+  const paired = new Set(intent.twins.flatMap((twins) => [twins.left, twins.right]));
   const pairs = intent.twins.flatMap((twins): Pair[] => {
     const leftIndex = indexOfId.get(twins.left);
     const rightIndex = indexOfId.get(twins.right);
     if (leftIndex === undefined || rightIndex === undefined) return [];
     return [{ ...twins, leftIndex, rightIndex, flip: flipOf(twins, readMatrix(rest, leftIndex), left) }];
   });
-  if (pairs.length === 0) return tally.result();
+  const compared = leaveOutLopsided(pairs, paired, bench);
+  if (compared.length === 0) return tally.result();
   const compare = (pose: PoseValues): void => {
     poser.evaluate(pose);
-    for (const { leftIndex, rightIndex, flip, right } of pairs) {
+    for (const { leftIndex, rightIndex, flip, right } of compared) {
       const expected = mirroredWorld(readMatrix(poser.world, leftIndex), flip, left);
       tally.add(displacement(poser.world, rightIndex, expected, 0, size), right, pose);
     }
   };
   compare({});
-  compare(mirroredPose(pairs, bench, 1, 0));
-  const bySteps: PoseDraft = { ...mirroredPose(pairs, bench, 5, 0.4) };
+  compare(mirroredPose(compared, bench, 1, 0));
+  const bySteps: PoseDraft = { ...mirroredPose(compared, bench, 5, 0.4) };
   for (const solver of rig.solvers) if ('blend' in solver) putAmount(bySteps, solver.blend, 0, bench);
   compare(bySteps);
-  compare(mirroredPose(pairs, bench, 11, 0.7));
+  compare(mirroredPose(compared, bench, 11, 0.7));
   return tally.result();
 }

@@ -24,7 +24,11 @@ const LINK_ROLES: Readonly<Record<LinkCollection, string>> = {
 };
 
 /** Whether the root's motion is meant to reach a node: carriers around the root stay, the root carries itself. */
-function isCarried({ id, role, container }: ResolvedNode, recipe: ResolvedRecipe, carrier: string | null): boolean {
+function isCarried(
+  { id, role, container }: ResolvedNode,
+  recipe: ResolvedRecipe,
+  carrier: string | null,
+): boolean {
   if (role === CARRIER_ROLE) return id === carrier;
   const isGroupOfContainer = role === CONTAINER_ROLE;
   const inside = isGroupOfContainer ? id.slice(CONTAINER_ID_PREFIX.length) : container;
@@ -35,9 +39,7 @@ function isCarried({ id, role, container }: ResolvedNode, recipe: ResolvedRecipe
 
 function intendNode(node: ResolvedNode, recipe: ResolvedRecipe, carrier: string | null): NodeIntent {
   const isStructure = node.role === CONTAINER_ROLE || node.role === SEAT_ROLE;
-  const container = isStructure
-    ? node.container
-    : (recipe.roles.get(node.role)?.container ?? RIG_CONTAINER);
+  const container = isStructure ? node.container : (recipe.roles.get(node.role)?.container ?? RIG_CONTAINER);
   return {
     kind: node.kind,
     role: node.role,
@@ -99,7 +101,10 @@ function namesFor(
   for (const key of recipe.linkNames.keys()) {
     const slash = key.indexOf('/');
     const role = LINK_ROLES[key.slice(0, slash) as LinkCollection];
-    names.set(key, namer.name({ id: key.slice(slash + 1), role, side: sides.get(key) ?? 'centre', path: [] }));
+    names.set(
+      key,
+      namer.name({ id: key.slice(slash + 1), role, side: sides.get(key) ?? 'centre', path: [] }),
+    );
   }
   return names;
 }

@@ -15,7 +15,11 @@ export function tryZero(bench: TrialBench): TrialResult {
   const zeros: PoseDraft = {};
   for (const { name, attributes } of controls.values()) {
     put(zeros, name, Object.fromEntries(attributes.map((attribute) => [attribute.name, attribute.default])));
-    put(zeros, name, Object.fromEntries(CHANNELS.map((channel) => [channel, channel.startsWith('s') ? 1 : 0])));
+    put(
+      zeros,
+      name,
+      Object.fromEntries(CHANNELS.map((channel) => [channel, channel.startsWith('s') ? 1 : 0])),
+    );
   }
   poser.evaluate(zeros);
   rig.nodes.forEach(({ id }, index) => {

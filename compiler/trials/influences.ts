@@ -1,0 +1,60 @@
+import type { NumberOrAttribute, Rig, RigSolver } from '../rig/Rig';
+import { nodesRead, nodesWritten } from '../rig/solverNodes';
+import type { TrialBench } from './TrialBench';
+
+/** Names of controls whose attributes a solver's numbers are. */
+function controlsOfAmounts(solver: RigSolver): readonly string[] {
+  return Object.values(solver).flatMap((value: unknown) =>
+    typeof value === 'object' && value !== null && 'attribute' in value && 'control' in value
+      ? [String((value as Exclude<NumberOrAttribute, number>).control)]
+      : [],
+  );
+}
+
+/** By name, the nodes whose motion or values can move a node directly. */
+function directInfluences(rig: Rig): ReadonlyMap<string, ReadonlySet<string>> {
+  const direct = new Map(
+    rig.nodes.map(({ name, parent }) => [name, new Set(parent === null ? [] : [parent])]),
+  );
+  const add = (target: string, sources: readonly string[]): void => {
+    for (const source of sources) direct.get(target)?.add(source);
+  };
+  for (const constraint of rig.constraints) {
+    add(
+      constraint.target,
+      constraint.sources.map(({ node }) => node),
+    );
+    if (constraint.kind === 'aim' && constraint.up !== null) add(constraint.target, [constraint.up]);
+    if (constraint.blend !== null && typeof constraint.blend !== 'number') {
+      add(constraint.target, [constraint.blend.control]);
+    }
+  }
+  for (const { control, sources } of rig.spaces) add(control, sources);
+  for (const { target, control } of rig.drivers) add(target, [control]);
+  for (const solver of rig.solvers) {
+    const sources = [...nodesRead(solver), ...nodesWritten(solver), ...controlsOfAmounts(solver)];
+    for (const target of nodesWritten(solver))
+      add(
+        target,
+        sources.filter((name) => name !== target),
+      );
+  }
+  return direct;
+}
+
+/** Gives, for a node by name, the names of all nodes that can move it, near or far; itself among them. */
+export function findInfluences({ rig }: TrialBench): (name: string) => ReadonlySet<string> {
+  const direct = directInfluences(rig);
+  return (name) => {
+    const found = new Set([name]);
+    const pending = [name];
+    for (let next = pending.pop(); next !== undefined; next = pending.pop()) {
+      for (const source of direct.get(next) ?? []) {
+        if (found.has(source)) continue;
+        found.add(source);
+        pending.push(source);
+      }
+    }
+    return found;
+  };
+}

@@ -1,0 +1,106 @@
+import { eulerToQuat } from '../math/euler';
+import { invertMat4, transformDirection, transformPoint } from '../math/mat4';
+import { rotate } from '../math/quat';
+import { addScaled, distance, normalise, sub } from '../math/vec3';
+import { readMatrix, readPosition } from '../pose/worldMatrices';
+import type { ControlNode, PoseValues, ReachSolver, TwoBoneSolver, Vec3 } from '../rig/Rig';
+import { isFree, type PoseDraft, put, putAmount } from './poses';
+import type { TrialBench } from './TrialBench';
+
+/** A chain whose end a solver brings to a goal, with what trials need of its rest. */
+export interface ReachChain {
+  readonly solver: TwoBoneSolver | ReachSolver;
+  /** Indices of its joints in the list of nodes, from start to end. */
+  readonly joints: readonly number[];
+  readonly goal: number;
+  readonly pole: number;
+  /** Where the end is in the goal's frame at rest. */
+  readonly goalToEnd: Vec3;
+  /** Lengths of the bones at rest together, and the distance from start to end. */
+  readonly restLength: number;
+  readonly restDistance: number;
+}
+
+/** Every chain of the rig that a solver makes meet a goal; a new kind of such solver belongs here. */
+export function findReachChains({ rig, rest, indexOfName }: TrialBench): readonly ReachChain[] {
+  const chains: ReachChain[] = [];
+  for (const solver of rig.solvers) {
+    if (solver.kind !== 'two_bone' && solver.kind !== 'reach') continue;
+    const names = solver.kind === 'two_bone' ? [solver.start, solver.mid, solver.end] : solver.joints;
+    const joints = names.map((name) => indexOfName.get(name) ?? -1);
+    const goal = indexOfName.get(solver.goal) ?? -1;
+    const points = joints.map((joint) => readPosition(rest, joint));
+    const [start, end] = [points[0] as Vec3, points[points.length - 1] as Vec3];
+    const restLength = points
+      .slice(1)
+      .reduce((sum, point, index) => sum + distance(points[index] as Vec3, point), 0);
+    const inverse = invertMat4(readMatrix(rest, goal));
+    if (inverse === undefined) continue;
+    chains.push({
+      solver,
+      joints,
+      goal,
+      pole: indexOfName.get(solver.pole) ?? -1,
+      goalToEnd: transformPoint(inverse, end),
+      restLength,
+      restDistance: distance(start, end),
+    });
+  }
+  return chains;
+}
+
+/** Index of a chain's first joint. */
+export function startOf(chain: ReachChain): number {
+  return chain.joints[0] as number;
+}
+
+/** The control that moves a node as a whole: itself, what it hangs on or what it follows; null when there is none. */
+function moverOf(index: number, bench: TrialBench): ControlNode | null {
+  const { rig, intent, indexOfName } = bench;
+  let node = rig.nodes[index];
+  for (let hops = 0; node !== undefined && hops < rig.nodes.length; hops += 1) {
+    if (node.id === intent.carrier) return null;
+    if (node.kind === 'control' && isFree(node, 'tx') && isFree(node, 'ty') && isFree(node, 'tz'))
+      return node;
+    const { name }: { readonly name: string } = node;
+    const follows = rig.constraints.find(({ kind, target }) => target === name && kind === 'parent');
+    const next: string | null = follows?.sources[0]?.node ?? node.parent;
+    node = rig.nodes[next === null ? -1 : (indexOfName.get(next) ?? -1)];
+  }
+  return null;
+}
+
+/** Degrees by which the goals are swung out of the line they lie on at rest. */
+const SWING: Vec3 = [18, -24, 12];
+
+/**
+ * A pose that puts the goal of every chain at `share` of its length from its start, to the side of where it is at
+ * rest, with all solvers at work, `stretch` as given and no swing. What else moves depends on the rig; trials measure
+ * where goals really are.
+ */
+export function reachPose(
+  chains: readonly ReachChain[],
+  bench: TrialBench,
+  share: number,
+  stretch: number,
+): PoseValues {
+  const draft: PoseDraft = {};
+  for (const chain of chains) {
+    const { solver } = chain;
+    putAmount(draft, solver.blend, 1, bench);
+    putAmount(draft, solver.stretch, stretch, bench);
+    putAmount(draft, solver.swing, 0, bench);
+    const mover = moverOf(chain.goal, bench);
+    if (mover === null) continue;
+    const start = readPosition(bench.rest, startOf(chain));
+    const end = readPosition(bench.rest, chain.joints[chain.joints.length - 1] as number);
+    const along = normalise(sub(end, start));
+    const swung = rotate(eulerToQuat(SWING, 'xyz'), chain.restDistance > 0 ? along : [0, 1, 0]);
+    const wanted = addScaled(start, swung, share * chain.restLength);
+    const frame = invertMat4(readMatrix(bench.rest, bench.indexOfName.get(mover.name) ?? -1));
+    if (frame === undefined) continue;
+    const [tx, ty, tz] = transformDirection(frame, sub(wanted, end));
+    put(draft, mover.name, { tx, ty, tz });
+  }
+  return draft;
+}
