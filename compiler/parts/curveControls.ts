@@ -1,10 +1,4 @@
-import type {
-  ChainEntry,
-  ConstraintEntry,
-  ControlEntry,
-  MadePart,
-  SolverEntry,
-} from '../expand/primitives';
+import type { ChainEntry, ConstraintEntry, ControlEntry, MadePart, SolverEntry } from '../expand/primitives';
 import type { PlaceReference } from '../expand/types';
 import type { RotationOrder, ShapeName, Side } from '../rig/Rig';
 
@@ -49,7 +43,12 @@ export function curveControls(input: CurveControlsInput): MadePart {
   const constraints: Record<string, ConstraintEntry> = {};
   const hull: string[] = [];
 
-  const control = (name: string, at: PlaceReference, above: string | undefined, more: Partial<ControlEntry>) => {
+  const control = (
+    name: string,
+    at: PlaceReference,
+    above: string | undefined,
+    more: Partial<ControlEntry>,
+  ) => {
     made[name] = {
       side,
       at,
@@ -76,8 +75,18 @@ export function curveControls(input: CurveControlsInput): MadePart {
   control(first, input.from, parent, {});
   control(end, input.to, parent, {
     attributes: {
-      stretch: { default: input.stretch, min: 0, max: 1, note: 'lets the joints spread over the whole curve' },
-      volume: { default: input.volume, min: 0, max: 1, note: 'thickens and thins the joints to keep the volume' },
+      stretch: {
+        default: input.stretch,
+        min: 0,
+        max: 1,
+        note: 'lets the joints spread over the whole curve',
+      },
+      volume: {
+        default: input.volume,
+        min: 0,
+        max: 1,
+        note: 'thickens and thins the joints to keep the volume',
+      },
     },
   });
   const placeOf = (index: number): PlaceReference =>

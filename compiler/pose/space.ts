@@ -4,7 +4,7 @@ import { invertMat4, multiplyMat4, rotationOf } from '../math/mat4';
 import { conjugateQuat, multiplyQuat } from '../math/quat';
 import type { RigSpace } from '../rig/Rig';
 import { type RigMemory, restOf } from './RigMemory';
-import { multiplyInto, rotationInto, turnAxes } from './worldMatrices';
+import { multiplyInto, rotationInto, transformPointInto, turnAxes } from './worldMatrices';
 
 /** Writes, to `base`, what stands for the world matrix of the control's parent in the space that is chosen. */
 export type ReadBase = (base: Float64Array) => void;
@@ -38,6 +38,10 @@ export function prepareSpace(
   });
   const turn = makeQuat();
   const own = makeQuat();
+  const c = indexOf(space.control) * 16 + 12;
+  const at = makeVec(memory.restLocal.subarray(c, c + 3));
+  const place = makeVec();
+  const turned = makeVec();
   const p = parent * 16;
   return (base) => {
     const index = spaceIndex(values[attributeSlot] as number, sources.length);
@@ -52,6 +56,12 @@ export function prepareSpace(
     rotationInto(own, base, 0);
     conjugateInto(own, own);
     multiplyQuatInto(turn, turn, own);
+    // The control's own place stays where its parent has it.
+    transformPointInto(place, base, 0, at);
     turnAxes(base, 0, turn);
+    transformPointInto(turned, base, 0, at);
+    for (let i = 0; i < 3; i += 1) {
+      base[12 + i] = (base[12 + i] as number) + (place[i] as number) - (turned[i] as number);
+    }
   };
 }

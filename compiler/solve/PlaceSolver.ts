@@ -80,8 +80,7 @@ export class PlaceSolver {
     if ('jointIds' in owner) {
       read.push(...owner.points.flatMap(joints));
       if (owner.orient.like !== null) read.push(thing(owner.orient.like));
-    }
-    else {
+    } else {
       const { place, align } = owner;
       if (place.kind === 'place') read.push(...joints(place.at));
       else read.push(...place.joints.map(thing));

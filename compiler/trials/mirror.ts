@@ -116,7 +116,18 @@ function mirroredValues(
   return mirrored;
 }
 
-/** Attribute values for both twins: partway from the default to a bound, where there is one. */
+/** Attributes that solvers read as angles about the line from a start to its goal, as control and attribute. */
+function swingsOf({ rig }: TrialBench): ReadonlySet<string> {
+  const keys = new Set<string>();
+  for (const solver of rig.solvers) {
+    if ('swing' in solver && typeof solver.swing !== 'number') {
+      keys.add(`${solver.swing.control} ${solver.swing.attribute}`);
+    }
+  }
+  return keys;
+}
+
+/** Attribute values for twins: partway from the default to a bound, where there is one, by number on the left. */
 function attributeValues(control: ControlNode, share: number): Readonly<Record<string, number>> {
   const values: Record<string, number> = {};
   for (const { name, default: initial, min, max, labels } of control.attributes) {
@@ -127,10 +138,23 @@ function attributeValues(control: ControlNode, share: number): Readonly<Record<s
   return values;
 }
 
+/** The same on the right: equal but for angles about a line, which the mirror turns round. */
+function mirroredAttributes(
+  values: Readonly<Record<string, number>>,
+  right: ControlNode,
+  swings: ReadonlySet<string>,
+): Readonly<Record<string, number>> {
+  const mirrored = Object.entries(values).map(([name, value]): [string, number] => {
+    return [name, swings.has(`${right.name} ${name}`) ? -value : value];
+  });
+  return Object.fromEntries(mirrored);
+}
+
 /** Both twins posed as the mirror shows them: `seed` varies the channels, `share` how far attributes go. */
 function mirroredPose(pairs: readonly Pair[], bench: TrialBench, seed: number, share: number): PoseValues {
   const { rig, size } = bench;
   const draft: PoseDraft = {};
+  const swings = swingsOf(bench);
   pairs.forEach(({ leftIndex, rightIndex, flip }, index) => {
     const [left, right] = [rig.nodes[leftIndex], rig.nodes[rightIndex]];
     if (left?.kind !== 'control' || right?.kind !== 'control') return;
@@ -142,7 +166,7 @@ function mirroredPose(pairs: readonly Pair[], bench: TrialBench, seed: number, s
     }
     const attributes = attributeValues(left, share);
     put(draft, left.name, attributes);
-    put(draft, right.name, attributes);
+    put(draft, right.name, mirroredAttributes(attributes, right, swings));
   });
   return draft;
 }
@@ -170,7 +194,8 @@ function leaveOutLopsided(
 
 /**
  * A mirrored pose gives a mirrored rig: twins that one entry makes on both sides stand as each other's mirror image,
- * at rest and in poses that both sides take alike, with equal attributes; twins mirrored by behaviour take equal turns.
+ * at rest and in poses that both sides take alike, with equal
+ * attributes (but opposite swings); twins mirrored by behaviour take equal turns.
  */
 export function tryMirror(bench: TrialBench): TrialResult {
   const { rig, intent, poser, rest, indexOfId, size, tolerance } = bench;

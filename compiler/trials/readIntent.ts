@@ -2,7 +2,7 @@ import { idsRead, idsWritten } from '../expand/solverIds';
 import { FindingList } from '../findings/FindingList';
 import { CARRIER_ROLE, findCarrier } from '../resolve/findCarrier';
 import { CONTAINER_ID_PREFIX, type LinkCollection, linkKey, seatFollowId, spaceId } from '../resolve/ids';
-import { NodeNamer } from '../resolve/NodeNamer';
+import { type Nameable, NodeNamer } from '../resolve/NodeNamer';
 import type { ResolveContext } from '../resolve/Reporter';
 import { RIG_CONTAINER } from '../resolve/resolveContainers';
 import type { ResolvedNode, ResolvedRecipe } from '../resolve/types';
@@ -23,29 +23,23 @@ const LINK_ROLES: Readonly<Record<LinkCollection, string>> = {
   shapes: 'shape',
 };
 
-/** Whether the root's motion is meant to reach a node: carriers around the root stay, the root carries itself. */
-function isCarried(
-  { id, role, container }: ResolvedNode,
-  recipe: ResolvedRecipe,
-  carrier: string | null,
-): boolean {
-  if (role === CARRIER_ROLE) return id === carrier;
-  const isGroupOfContainer = role === CONTAINER_ROLE;
-  const inside = isGroupOfContainer ? id.slice(CONTAINER_ID_PREFIX.length) : container;
-  // The root stands in this group and cannot carry it.
-  if (isGroupOfContainer && inside === recipe.roles.get(CARRIER_ROLE)?.container) return false;
-  return recipe.containers.get(inside)?.carried ?? false;
-}
-
 function intendNode(node: ResolvedNode, recipe: ResolvedRecipe, carrier: string | null): NodeIntent {
-  const isStructure = node.role === CONTAINER_ROLE || node.role === SEAT_ROLE;
-  const container = isStructure ? node.container : (recipe.roles.get(node.role)?.container ?? RIG_CONTAINER);
+  const { id, kind, role } = node;
+  const { containers, roles } = recipe;
+  const isContainer = role === CONTAINER_ROLE;
+  const isStructure = isContainer || role === SEAT_ROLE;
+  const container = isStructure ? node.container : (roles.get(role)?.container ?? RIG_CONTAINER);
+  // A container's own group shares the fate of what it holds, but for the one in which the root stands.
+  const inside = isContainer ? id.slice(CONTAINER_ID_PREFIX.length) : container;
+  const isAroundRoot = isContainer && inside === roles.get(CARRIER_ROLE)?.container;
+  const isCarried = containers.get(inside)?.carried === true && !isAroundRoot;
   return {
-    kind: node.kind,
-    role: node.role,
+    kind,
+    role,
     container,
-    carried: isCarried({ ...node, container }, recipe, carrier),
-    shown: (recipe.roles.get(node.role)?.shown ?? true) && (recipe.containers.get(container)?.shown ?? true),
+    // Carriers around the root stay; the root carries itself.
+    carried: role === CARRIER_ROLE ? id === carrier : isCarried,
+    shown: (roles.get(role)?.shown ?? true) && (containers.get(inside)?.shown ?? true),
     isStructure,
   };
 }
@@ -85,32 +79,35 @@ function linkSides(recipe: ResolvedRecipe): ReadonlyMap<string, Side> {
   return sides;
 }
 
-/** Composes every name anew for a character; names that clash are for the trial to find, not to report. */
-function namesFor(
-  character: string,
-  recipe: ResolvedRecipe,
-  context: ResolveContext,
-): ReadonlyMap<string, string> {
-  const namer = new NodeNamer({ ...context, findings: new FindingList() }, character, recipe.roles);
-  const names = new Map<string, string>();
+/** Stands for the character in a name; no name that a person writes can hold it. */
+const ANY_CHARACTER = '_\u0000';
+
+/**
+ * Composes every name once, with a place left for the character, so that a whole cast can be named quickly; names that
+ * clash are for the trial to find, not to report here.
+ */
+function nameParts(recipe: ResolvedRecipe, context: ResolveContext): ReadonlyMap<string, readonly string[]> {
+  const namer = new NodeNamer({ ...context, findings: new FindingList() }, ANY_CHARACTER, recipe.roles);
+  const parts = new Map<string, readonly string[]>();
+  const add = (key: string, thing: Nameable): void => {
+    parts.set(key, namer.name(thing).split(ANY_CHARACTER));
+  };
   for (const { id, role, side, path, kind } of recipe.nodes) {
     const isSideless = role === CONTAINER_ROLE || kind === 'note';
-    names.set(id, namer.name({ id, role, side: isSideless ? null : side, path }));
+    add(id, { id, role, side: isSideless ? null : side, path });
   }
   const sides = linkSides(recipe);
   for (const key of recipe.linkNames.keys()) {
     const slash = key.indexOf('/');
     const role = LINK_ROLES[key.slice(0, slash) as LinkCollection];
-    names.set(
-      key,
-      namer.name({ id: key.slice(slash + 1), role, side: sides.get(key) ?? 'centre', path: [] }),
-    );
+    add(key, { id: key.slice(slash + 1), role, side: sides.get(key) ?? 'centre', path: [] });
   }
-  return names;
+  return parts;
 }
 
 /** Reads from the resolved recipe what its rig has to keep. */
 export function readIntent(recipe: ResolvedRecipe, context: ResolveContext): TrialIntent {
+  let parts: ReadonlyMap<string, readonly string[]> | null = null;
   const silent = { ...context, findings: new FindingList() };
   const carrier = findCarrier(recipe.controls, silent)?.id ?? null;
   const poleOf = new Map(recipe.controls.map(({ id, place }) => [id, place]));
@@ -128,6 +125,9 @@ export function readIntent(recipe: ResolvedRecipe, context: ResolveContext): Tri
     computedPoles: new Set(computedPoles),
     channels: new Map(recipe.controls.map(({ id, channels }) => [id, channels])),
     lines: new Map(recipe.guideLines.map(({ id, from, to }) => [id, { from, to }])),
-    namesFor: (character) => namesFor(character, recipe, context),
+    namesFor: (character) => {
+      parts ??= nameParts(recipe, context);
+      return new Map([...parts].map(([key, around]) => [key, around.join(character)]));
+    },
   };
 }

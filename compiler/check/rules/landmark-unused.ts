@@ -13,11 +13,15 @@ export const landmarkUnused: Rule = {
     const used = new Set<string>();
     const use = (place: PlaceReference): void => {
       if (typeof place === 'string') used.add(place);
+      else if ('from' in place) used.add(place.from).add(place.to);
     };
     return {
       chain: ({ points }) => points.forEach(use),
       control: ({ place }) => {
         if (place.kind === 'place') use(place.at);
+      },
+      solver(solver) {
+        if (solver.kind === 'foot_roll') Object.values(solver.sole).forEach(use);
       },
       finish() {
         if (!context.isWhole) return;

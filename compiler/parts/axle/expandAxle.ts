@@ -2,7 +2,11 @@ import type { Channel } from '../../rig/Rig';
 import { chainEntry } from '../chainEntry';
 import type { ExpandPart } from '../types';
 
-const FREE: Readonly<Record<'wheel' | 'hinge' | 'slider', Channel>> = { wheel: 'rx', hinge: 'rx', slider: 'tx' };
+const FREE: Readonly<Record<'wheel' | 'hinge' | 'slider', Channel>> = {
+  wheel: 'rx',
+  hinge: 'rx',
+  slider: 'tx',
+};
 const ALL: readonly Channel[] = ['tx', 'ty', 'tz', 'rx', 'ry', 'rz', 'sx', 'sy', 'sz'];
 
 /**
@@ -15,7 +19,9 @@ export const expandAxle: ExpandPart<'axle'> = ({ id, side }, part) => {
   const hub = `${id}.hub`;
   const control = `${id}.turn`;
   const range = motion === 'wheel' ? {} : { [free]: { min: part.min ?? 0, max: part.max ?? 90 } };
-  const locked = ALL.filter((channel) => channel !== free).map((channel) => [channel, { locked: true }] as const);
+  const locked = ALL.filter((channel) => channel !== free).map(
+    (channel) => [channel, { locked: true }] as const,
+  );
   const radius = part.radius ?? 1;
   return {
     chains: {

@@ -18,11 +18,13 @@ export const expandEye: ExpandPart<'eye'> = ({ id, side }, part) => {
       [look]: {
         side,
         at: part.look,
-        ...(part.pair ?? part.parent ? { parent: part.pair ?? part.parent } : {}),
+        ...((part.pair ?? part.parent) ? { parent: part.pair ?? part.parent } : {}),
         shape: 'cross',
         size: 0.6,
         channels: { turn: { locked: true }, scale: { locked: true } },
-        attributes: { follow: { default: 1, min: 0, max: 1, note: '0 looks straight ahead, 1 at this control' } },
+        attributes: {
+          follow: { default: 1, min: 0, max: 1, note: '0 looks straight ahead, 1 at this control' },
+        },
       },
     },
     solvers: { [`${id}.aim`]: { side, kind: 'aim', joints: [ball], goal: look, blend: follow } },

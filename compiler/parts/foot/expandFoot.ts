@@ -1,5 +1,5 @@
-import { mirrorId, sideOfId } from '../../expand/sides';
 import type { PartEntry } from '../../expand/primitives';
+import { mirrorId, sideOfId } from '../../expand/sides';
 import { chainEntry } from '../chainEntry';
 import { limbIds } from '../limb/limbIds';
 import { turnControl } from '../turnControl';
@@ -8,7 +8,10 @@ import type { ExpandPart, PartContext } from '../types';
 type Leg = Extract<PartEntry, { readonly kind: 'limb' | 'leg_three' }>;
 
 /** The leg that a foot names: its entry, and its id on the foot's side. Null when there is no such leg. */
-function findLeg({ parts, side }: PartContext, name: string): { readonly id: string; readonly leg: Leg } | null {
+function findLeg(
+  { parts, side }: PartContext,
+  name: string,
+): { readonly id: string; readonly leg: Leg } | null {
   const leg = parts[name];
   if (leg?.kind !== 'limb' && leg?.kind !== 'leg_three') return null;
   const option = leg.side ?? sideOfId(name);
@@ -33,9 +36,9 @@ export const expandFoot: ExpandPart<'foot'> = (context, part) => {
   const reach = ids?.reach ?? `${goal}.reach`;
   const turner = ids?.turners[joints.length - 1] ?? `${ankle}_fk`;
   const ball = `${id}.ball`;
-  const rollAnkle = `${id}_roll_ankle`;
-  const rollToes = `${id}_roll_toes`;
-  const toeBase = `${id}_toe_base`;
+  const rollAnkle = `${id}.roll_ankle`;
+  const rollToes = `${id}.roll_toes`;
+  const toeBase = `${id}.toe_base`;
   const helper = (point: string, parent: string) => ({
     side,
     role: 'helper',
@@ -102,7 +105,12 @@ export const expandFoot: ExpandPart<'foot'> = (context, part) => {
               [goal]: {
                 attributes: {
                   roll: { default: 0, min: -90, max: 120, note: 'rolls over heel, ball and toe, in degrees' },
-                  bank: { default: 0, min: -60, max: 60, note: 'leans the foot inward or outward, in degrees' },
+                  bank: {
+                    default: 0,
+                    min: -60,
+                    max: 60,
+                    note: 'leans the foot inward or outward, in degrees',
+                  },
                   toe_break: {
                     default: part.break ?? 30,
                     min: 0,

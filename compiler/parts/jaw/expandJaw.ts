@@ -12,7 +12,13 @@ export const expandJaw: ExpandPart<'jaw'> = ({ id, side }, part) => {
     chains: { [id]: chainEntry(side, { points: part.points, names: [...names] }, part) },
     controls: {
       [control]: {
-        ...turnControl(hinge, { side, parent: part.parent, order: part.rotation_order, shape: 'pin', moves: true }),
+        ...turnControl(hinge, {
+          side,
+          parent: part.parent,
+          order: part.rotation_order,
+          shape: 'pin',
+          moves: true,
+        }),
         attributes: { open: { default: 0, min: 0, max: 1, note: 'opens about the hinge' } },
       },
     },

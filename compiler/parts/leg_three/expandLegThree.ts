@@ -6,12 +6,5 @@ import type { ExpandPart } from '../types';
 export const expandLegThree: ExpandPart<'leg_three'> = ({ id, side }, part) => {
   const ids = limbIds(id, part);
   const lead = { default: 0, min: -1, max: 1, note: 'moves the fold to the knee (1) or the hock (-1)' };
-  return expandReachingChain(
-    side,
-    id,
-    part,
-    ids,
-    { kind: 'reach', bias: `${ids.goal}.lead` },
-    { lead },
-  );
+  return expandReachingChain(side, id, part, ids, { kind: 'reach', bias: `${ids.goal}.lead` }, { lead });
 };

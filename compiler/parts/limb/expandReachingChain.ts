@@ -9,7 +9,14 @@ type Leg = Extract<PartEntry, { readonly kind: 'limb' | 'leg_three' }>;
 /** The attributes of a goal control that steer how the chain follows it. */
 function goalAttributes(part: Leg): NonNullable<ControlEntry['attributes']> {
   const stretch = part.stretch
-    ? { stretch: { default: part.stretch.value ?? 0, min: 0, max: 1, note: 'lets the bones grow to the goal' } }
+    ? {
+        stretch: {
+          default: part.stretch.value ?? 0,
+          min: 0,
+          max: 1,
+          note: 'lets the bones grow to the goal',
+        },
+      }
     : {};
   return {
     reach: {

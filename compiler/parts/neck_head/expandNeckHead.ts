@@ -26,7 +26,7 @@ export const expandNeckHead: ExpandPart<'neck_head'> = ({ id, side }, part) => {
     parent = control;
   }
   controls[head] = {
-    ...turnControl(`${id}_head.skull`, {
+    ...turnControl(`${head}.skull`, {
       side,
       parent,
       order: part.rotation_order,
@@ -38,7 +38,7 @@ export const expandNeckHead: ExpandPart<'neck_head'> = ({ id, side }, part) => {
   constraints[`${head}_turn`] = {
     side,
     kind: 'orient',
-    target: `${id}_head.skull`,
+    target: `${head}.skull`,
     sources: { [head]: 1 },
   };
   const { limits, ...options } = part;
@@ -50,7 +50,7 @@ export const expandNeckHead: ExpandPart<'neck_head'> = ({ id, side }, part) => {
         { points: [part.from, ...(part.via ?? []), part.to], joints: count + 1, names: [...names] },
         options,
       ),
-      [`${id}_head`]: chainEntry(
+      [head]: chainEntry(
         side,
         { points: [part.to, part.crown], names: ['skull', 'crown'], parent: necks[count] ?? '' },
         { ...options, ...headOptions },
@@ -58,6 +58,8 @@ export const expandNeckHead: ExpandPart<'neck_head'> = ({ id, side }, part) => {
     },
     controls,
     constraints,
-    ...(part.guide_line ? { guide_lines: { [`${head}_line`]: { side, from: head, to: `${id}_head.crown` } } } : {}),
+    ...(part.guide_line
+      ? { guide_lines: { [`${head}_line`]: { side, from: head, to: `${head}.crown` } } }
+      : {}),
   };
 };

@@ -81,7 +81,12 @@ export const expandWing: ExpandPart<'wing'> = ({ id, side }, part) => {
       for (let link = 0; link < links - 1; link += 1) {
         const joint = `${feather}.${jointNumber(link, links)}`;
         const control = `${joint}_fk`;
-        controls[control] = turnControl(joint, { side, parent: above, order: part.rotation_order, size: 0.5 });
+        controls[control] = turnControl(joint, {
+          side,
+          parent: above,
+          order: part.rotation_order,
+          size: 0.5,
+        });
         constraints[`${joint}_turn`] = { side, kind: 'orient', target: joint, sources: { [control]: 1 } };
         if (link === 0 && share > 0) drive('fan', control, 'ry', share * (feathers.fan ?? 30));
         above = control;
