@@ -303,13 +303,18 @@ const frameZ = makeVec();
 
 /**
  * Rotation with its x axis along `along` and its y axis along the part of `side` at right angles to it; should that
- * part be shorter than `noise`, a direction at right angles to x.
+ * part of the direction of `side` be shorter than `noise`, a direction at right angles to x.
  */
 export function frameInto(out: Mutable, along: Mutable, side: Mutable, noise: number): void {
   normaliseInto(frameX, along);
-  rejectInto(frameY, side, frameX);
-  if (lengthOf(frameY) > noise) normaliseInto(frameY, frameY);
-  else perpendicularInto(frameY, frameX);
+  normaliseInto(frameY, side);
+  rejectInto(frameY, frameY, frameX);
+  if (lengthOf(frameY) > noise) {
+    normaliseInto(frameY, frameY);
+    // Made orthogonal twice: the first time may cancel many digits when the two nearly lie on one line.
+    rejectInto(frameY, frameY, frameX);
+    normaliseInto(frameY, frameY);
+  } else perpendicularInto(frameY, frameX);
   crossInto(frameZ, frameX, frameY);
   quatFromAxesInto(out, frameX, frameY, frameZ);
 }

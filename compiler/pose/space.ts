@@ -1,5 +1,5 @@
 import { invariant } from '../findings/invariant';
-import { conjugateInto, type Mutable, makeQuat, multiplyQuatInto } from '../math/inPlace';
+import { conjugateInto, type Mutable, makeQuat, makeVec, multiplyQuatInto } from '../math/inPlace';
 import { invertMat4, multiplyMat4, rotationOf } from '../math/mat4';
 import { conjugateQuat, multiplyQuat } from '../math/quat';
 import type { RigSpace } from '../rig/Rig';
