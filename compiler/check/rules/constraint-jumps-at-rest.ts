@@ -23,7 +23,7 @@ function jumpOf(kind: ConstraintSpecification['kind'], from: RestPlace, to: Rest
 /** Without its offset a target leaves its rest place at once, and the model with it. */
 export const constraintJumpsAtRest: Rule = {
   code: 'constraint-jumps-at-rest',
-  severity: 'warning',
+  severity: 'error',
   category: 'motion',
   summary: 'A constraint that moves its target away from rest.',
   message: '"{id}" keeps no offset, so "{target}" {jump} away from its rest place, onto "{source}".',

@@ -17,7 +17,7 @@ function outputAt(driver: DriverSpecification, value: number): number {
 /** Everything a rig's users measure is measured at rest; a driver that is not zero there shifts it all. */
 export const driverMovesRest: Rule = {
   code: 'driver-moves-rest',
-  severity: 'warning',
+  severity: 'error',
   category: 'motion',
   summary: 'A driver that moves its target while every control is at rest.',
   message: 'At rest "{input}" reads {rest}, where "{id}" adds {output} to {channel} of "{target}".',

@@ -1,14 +1,47 @@
 import type { Rule } from '../Rule';
+import { aimGoalOnJoint } from './aim-goal-on-joint';
+import { boneDwarfed } from './bone-dwarfed';
+import { chainCrossesMiddle } from './chain-crosses-middle';
+import { chainFoldsBack } from './chain-folds-back';
+import { chainNeverBends } from './chain-never-bends';
+import { constraintCrossesSides } from './constraint-crosses-sides';
+import { constraintFollowsParent } from './constraint-follows-parent';
+import { constraintJumpsAtRest } from './constraint-jumps-at-rest';
+import { constraintOverridesControl } from './constraint-overrides-control';
+import { constraintOverwritten } from './constraint-overwritten';
 import { constraintsCompete } from './constraints-compete';
 import { controlAllLocked } from './control-all-locked';
 import { controlSteersNothing } from './control-steers-nothing';
+import { driverFlat } from './driver-flat';
+import { driverMovesRest } from './driver-moves-rest';
 import { guideLineWithoutLength } from './guide-line-without-length';
+import { hingeAcrossBend } from './hinge-across-bend';
+import { hingeOpensBackward } from './hinge-opens-backward';
+import { jointsFewerThanPoints } from './joints-fewer-than-points';
+import { jointsInParkedContainer } from './joints-in-parked-container';
 import { landmarkUnused } from './landmark-unused';
+import { landmarksNearlyMirrored } from './landmarks-nearly-mirrored';
+import { limbBonesUnequal } from './limb-bones-unequal';
+import { limbNearlyStraight } from './limb-nearly-straight';
 import { limitInverted } from './limit-inverted';
 import { nothingCarries } from './nothing-carries';
 import { parameterUnused } from './parameter-unused';
+import { parentCrossesSides } from './parent-crosses-sides';
+import { poleOffPlane } from './pole-off-plane';
+import { poleTooNear } from './pole-too-near';
 import { restOutsideLimits } from './rest-outside-limits';
+import { rigBelowFloor } from './rig-below-floor';
+import { scaleImplausible } from './scale-implausible';
+import { skeletonInPieces } from './skeleton-in-pieces';
+import { skinJointRepeated } from './skin-joint-repeated';
+import { soleNotLevel } from './sole-not-level';
+import { solverCrossesSides } from './solver-crosses-sides';
 import { solversShareJoint } from './solvers-share-joint';
+import { sourceWithoutWeight } from './source-without-weight';
+import { splineRunsBackward } from './spline-runs-backward';
+import { towardAlongChain } from './toward-along-chain';
+import { twistJointOffBone } from './twist-joint-off-bone';
+import { worldOrientedLimb } from './world-oriented-limb';
 
 /** Every rule, those first whose finding most often explains the others. */
 export const RULES: readonly Rule[] = [
@@ -19,6 +52,39 @@ export const RULES: readonly Rule[] = [
   nothingCarries,
   controlSteersNothing,
   controlAllLocked,
+  parentCrossesSides,
+  constraintCrossesSides,
+  solverCrossesSides,
+  jointsFewerThanPoints,
+  skeletonInPieces,
+  jointsInParkedContainer,
+  chainNeverBends,
+  skinJointRepeated,
+  constraintOverwritten,
+  sourceWithoutWeight,
+  constraintJumpsAtRest,
+  constraintOverridesControl,
+  constraintFollowsParent,
+  worldOrientedLimb,
+  driverFlat,
+  driverMovesRest,
+  chainFoldsBack,
+  boneDwarfed,
+  chainCrossesMiddle,
+  landmarksNearlyMirrored,
+  scaleImplausible,
+  rigBelowFloor,
+  towardAlongChain,
+  twistJointOffBone,
+  splineRunsBackward,
+  aimGoalOnJoint,
+  soleNotLevel,
+  limbNearlyStraight,
+  limbBonesUnequal,
+  hingeAcrossBend,
+  hingeOpensBackward,
+  poleOffPlane,
+  poleTooNear,
   guideLineWithoutLength,
   parameterUnused,
   landmarkUnused,

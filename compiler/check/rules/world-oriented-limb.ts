@@ -1,4 +1,4 @@
-import type { SolverSpecification } from '../../expand/types';
+import type { ReachChainSpecification, TwoBoneSpecification } from '../../expand/types';
 import { chainsByJoint } from '../chainsByJoint';
 import type { Rule } from '../Rule';
 import { rewrite } from '../rewrite';
@@ -12,7 +12,7 @@ export const worldOrientedLimb: Rule = {
   message: 'The solver "{solver}" folds "{chain}", whose joints are turned like the world.',
   help: 'Let the joints be turned along the chain (orient rule chain), so that one axis is the hinge.',
   create({ resolved, stage, report }) {
-    const limbs: SolverSpecification[] = [];
+    const limbs: (TwoBoneSpecification | ReachChainSpecification)[] = [];
     return {
       solver(solver) {
         if (solver.kind === 'two_bone' || solver.kind === 'reach') limbs.push(solver);

@@ -1,0 +1,39 @@
+import { SOLE_POINTS } from '../../expand/types';
+import { rotate } from '../../math/quat';
+import { add, distance, dot } from '../../math/vec3';
+import type { Rule } from '../Rule';
+
+/** Share of the foot's length by which points of a sole may differ in height: thick heels, worn shoes. */
+const UNEVEN = 0.25;
+
+/** A foot rolls over points of its sole; one in the air lifts or sinks the foot as it rolls. */
+export const soleNotLevel: Rule = {
+  code: 'sole-not-level',
+  severity: 'warning',
+  category: 'geometry',
+  summary: 'Points of a sole that lie at different heights.',
+  message: 'The point {highest} of "{id}" lies {height} {unit} above {lowest}.',
+  help: 'Place all points of the sole where it touches the floor.',
+  create({ resolved, solved, report }) {
+    return {
+      solver(solver) {
+        if (solver.kind !== 'foot_roll') return;
+        const points = solved.feet.get(solver.id);
+        const foot = solved.places.get(solver.foot);
+        if (!points || !foot) return;
+        const { up, unit } = resolved.scene;
+        const byHeight = SOLE_POINTS.map((name) => ({
+          name,
+          height: dot(add(foot.position, rotate(foot.turn, points[name])), up),
+        })).sort((a, b) => a.height - b.height);
+        const [lowest] = byHeight;
+        const highest = byHeight.at(-1);
+        if (!lowest || !highest) return;
+        const height = highest.height - lowest.height;
+        if (height <= UNEVEN * distance(points.heel, points.toe)) return;
+        const parameters = { id: solver.id, unit, highest: highest.name, lowest: lowest.name };
+        report([...solver.path, highest.name], { ...parameters, height: Number(height.toPrecision(3)) });
+      },
+    };
+  },
+};
