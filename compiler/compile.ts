@@ -18,6 +18,10 @@ import type { Rig } from './rig/Rig';
 import { checkRecipeShape } from './schema/checkShape';
 import { solveRecipe } from './solve/solveRecipe';
 import type { SourceText, Span } from './source/SourceText';
+import { readIntent } from './trials/readIntent';
+import { reportTrials } from './trials/reportTrials';
+import { runTrials } from './trials/runTrials';
+import type { TrialResult } from './trials/TrialResult';
 import { COMPILER_VERSION } from './version';
 
 /** Everything one compile depends on; the same request always gives the same compilation. */
@@ -35,6 +39,8 @@ export interface CompileRequest {
   };
   /** Number of the saved version; left out for a draft. */
   readonly version?: number;
+  /** Whether the rig is put to its trials; they run unless this is false. */
+  readonly trials?: boolean;
 }
 
 /** What one compile gives. Rig and script are null when a finding is an error. */
@@ -45,6 +51,10 @@ export interface Compilation {
   readonly recipeHash: string | null;
   readonly rig: Rig | null;
   readonly script: string | null;
+  /** What the trials measured; empty without a rig to try, and when none were asked for. */
+  readonly trials: readonly TrialResult[];
+  /** The rig and script that failed a trial, to be looked at and never built; null in every other case. */
+  readonly failing: { readonly rig: Rig; readonly script: string } | null;
   /** Where a node of the rig was written, by its id; null for what no document wrote. */
   placeOf(nodeId: string): NodePlace | null;
 }
@@ -58,8 +68,8 @@ export interface NodePlace {
 /**
  * Turns a recipe into a rig and its build script: parse and merge the documents, check their shape, evaluate
  * expressions, write parts out in primitives, resolve ids, containers and names, solve the geometry, check the
- * rules, assemble the rig, plan its steps and emit them. Never throws for what a person wrote: each stage adds
- * its findings and goes on as far as it can, so that one compile shows them all.
+ * rules, assemble the rig, plan its steps, emit them, and put the rig to its trials. Never throws for what a person
+ * wrote: each stage adds its findings and goes on as far as it can, so that one compile shows them all.
  */
 export function compile(request: CompileRequest): Compilation {
   const findings = new FindingList();
@@ -67,7 +77,16 @@ export function compile(request: CompileRequest): Compilation {
   const character = characterNameOf(request.character?.name, merged, findings);
   const stop = (): Compilation => {
     const finished = finishFindings(findings.all);
-    return { findings: finished, character, recipeHash: null, rig: null, script: null, placeOf: () => null };
+    return {
+      findings: finished,
+      character,
+      recipeHash: null,
+      rig: null,
+      script: null,
+      trials: [],
+      failing: null,
+      placeOf: () => null,
+    };
   };
   // Beyond broken YAML every finding would be about a structure nobody wrote.
   if (merged.value === undefined || merged.isBroken) return stop();
@@ -111,5 +130,19 @@ export function compile(request: CompileRequest): Compilation {
       ? { key: merged.spanAt(path, 'key'), value: merged.spanAt(path) }
       : null;
   };
-  return { findings: finishFindings(findings.all), character, recipeHash, rig, script, placeOf };
+  const trials = request.trials === false ? [] : runTrials(rig, readIntent(resolved, context));
+  const spanOf = (nodeId: string | undefined): Span =>
+    (nodeId === undefined ? null : placeOf(nodeId)?.key) ?? merged.spanAt(['recipe']);
+  reportTrials(trials, spanOf, findings);
+  const failing = findings.hasErrors ? { rig, script } : null;
+  return {
+    findings: finishFindings(findings.all),
+    character,
+    recipeHash,
+    rig: failing ? null : rig,
+    script: failing ? null : script,
+    trials,
+    failing,
+    placeOf,
+  };
 }

@@ -21,4 +21,5 @@ export { recipeSchema } from './schema/generated/recipeSchema';
 export { runScript } from './slipway/runScript';
 export { type Polyline, shapeLines } from './slipway/shapes';
 export type { SourceText, Span } from './source/SourceText';
+export { TRIAL_NAMES, type TrialName, type TrialResult } from './trials/TrialResult';
 export { COMPILER_VERSION } from './version';

@@ -9,6 +9,7 @@ import { schemaFindings } from '../schema/findings';
 import { slipwayFindings } from '../slipway/findings';
 import { solveFindings } from '../solve/findings';
 import { syntaxFindings } from '../syntax/findings';
+import { trialFindings } from '../trials/findings';
 import type { FindingDeclaration } from './catalogue';
 
 /** Every code the compiler can give, stage by stage; the only list there is. */
@@ -22,6 +23,7 @@ const DECLARATIONS: Readonly<Record<string, FindingDeclaration>> = {
   ...solveFindings,
   ...evaluationFindings,
   ...Object.fromEntries(RULES.map((rule) => [rule.code, rule])),
+  ...trialFindings,
   ...slipwayFindings,
   ...poseFindings,
 };

@@ -46,6 +46,12 @@ function mixedNodes({ rig, intent, indexOfName }: TrialBench): ReadonlySet<strin
   }
   const parentOf = (parent: string | null): string | undefined =>
     parent === null ? undefined : rig.nodes[indexOfName.get(parent) ?? -1]?.id;
+  // What a driver makes of the root's own channels is meant to go another way than the root.
+  const carrier = rig.nodes.find(({ id }) => id === intent.carrier)?.name;
+  for (const { control, target } of rig.drivers) {
+    const driven = rig.nodes[indexOfName.get(target) ?? -1];
+    if (control === carrier && driven !== undefined) mixed.add(driven.id);
+  }
   for (let before = -1; before < mixed.size; ) {
     before = mixed.size;
     for (const { id, parent } of rig.nodes) {

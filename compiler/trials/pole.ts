@@ -1,7 +1,8 @@
+import { transformPoint } from '../math/mat4';
 import { quatFromAxisAngle, rotate } from '../math/quat';
 import { BEND_TOLERANCE } from '../math/tolerances';
 import { cross, distance, dot, length, normalise, rejectFrom, scale, signedAngle, sub } from '../math/vec3';
-import { readPosition } from '../pose/worldMatrices';
+import { readMatrix, readPosition } from '../pose/worldMatrices';
 import type { PoseValues, Vec3 } from '../rig/Rig';
 import { amountIn, joinPoses, nudgedPose } from './poses';
 import { findReachChains, type ReachChain, reachPose } from './reachChains';
@@ -19,15 +20,20 @@ const SHARES = [0.6, 0.8, 0.95];
 
 interface Plane {
   readonly start: Vec3;
-  /** Unit direction from start to end, and at right angles to it toward the pole. */
+  /** Unit direction from start to goal, and at right angles to it toward the pole. */
   readonly along: Vec3;
   readonly toward: Vec3;
 }
 
-/** The plane of start, end and pole; null when they lie too near to one line. */
-function planeOf({ joints, pole }: ReachChain, matrices: Float64Array, least: number): Plane | null {
+/** The plane of start, goal and pole; null when they lie too near to one line. */
+function planeOf(
+  { joints, pole, goal, goalToEnd }: ReachChain,
+  matrices: Float64Array,
+  least: number,
+): Plane | null {
   const start = readPosition(matrices, joints[0] as number);
-  const line = sub(readPosition(matrices, joints[joints.length - 1] as number), start);
+  // Not to the end: whether that meets the goal is another trial's question.
+  const line = sub(transformPoint(readMatrix(matrices, goal), goalToEnd), start);
   const toPole = sub(readPosition(matrices, pole), start);
   if (length(line) <= least) return null;
   const along = normalise(line);

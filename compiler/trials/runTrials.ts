@@ -15,7 +15,7 @@ import type { TrialIntent } from './TrialIntent';
 import { TRIAL_NAMES, type TrialName, type TrialResult } from './TrialResult';
 import { tryZero } from './zero';
 
-export const TRIALS: Readonly<Record<TrialName, (bench: TrialBench) => TrialResult>> = {
+const TRIALS: Readonly<Record<TrialName, (bench: TrialBench) => TrialResult>> = {
   rest: tryRest,
   zero: tryZero,
   carry: tryCarry,
