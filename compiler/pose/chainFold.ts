@@ -89,7 +89,7 @@ function greatestFold(chain: ChainFold, bias: number): number {
 
 /**
  * Finds the fold at which start and end are `asked` apart, nearest to the fold of rest: stretched out toward 0 when
- * more is asked than at rest, folded up when less. `SCAN_STEPS` even steps find the first interval that holds it and
+ * more is asked than at rest (0 itself at full reach), folded up when less. `SCAN_STEPS` even steps find the first interval that holds it and
  * `BISECTIONS` halvings settle it; when none does, the step that comes nearest. Writes turns and span.
  */
 export function foldToDistance(chain: ChainFold, asked: number, most: number, bias: number): void {
@@ -98,6 +98,11 @@ export function foldToDistance(chain: ChainFold, asked: number, most: number, bi
   const atRest = lengthOf(span);
   if (Math.abs(asked - atRest) <= most * REACH_TOLERANCE) return;
   const isFarther = asked > atRest;
+  if (asked >= most * (1 - REACH_TOLERANCE)) {
+    // At full reach the fold is 0; halving would find it only to the root of what rounding leaves.
+    foldInto(chain, 0, bias);
+    return;
+  }
   const last = isFarther ? 0 : greatestFold(chain, bias);
   let from = restFold as number;
   let to = from;
