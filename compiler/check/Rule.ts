@@ -9,11 +9,12 @@ import type {
   SkinSpecification,
   SolverSpecification,
 } from '../expand/types';
-import type { EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
+import type { EvaluatedLandmark, EvaluatedRecipe } from '../expressions/EvaluatedRecipe';
 import type { FindingDeclaration } from '../findings/catalogue';
 import type { Fix, RelatedPlace } from '../findings/Finding';
 import type { ResolveContext } from '../resolve/Reporter';
 import type { ResolvedRecipe } from '../resolve/types';
+import type { Parameter } from '../schema/generated/recipeTypes';
 import type { SolvedRecipe } from '../solve/types';
 import type { Path } from '../syntax/types';
 import type { ExpressionNames } from './namesInExpressions';
@@ -41,8 +42,22 @@ export interface RuleContext {
   ): void;
 }
 
-/** Called once for each thing of its kind, in the order of the recipe; `finish` once at the end. */
+/** One value of a collection of the recipe, as it was written, with its expressions worked out. */
+export type EntryOf<Key extends 'roles' | 'containers' | 'parts' | 'controls'> = NonNullable<
+  EvaluatedRecipe[Key]
+>[string];
+
+/**
+ * Called once for each thing of its kind, in the order of the recipe; `finish` once at the end. Handlers that take a
+ * name or an id get what was written, refused entries left out; the others get primitives, whoever made them.
+ */
 export interface RuleHandlers {
+  parameter?(name: string, entry: Parameter): void;
+  landmark?(name: string, entry: EvaluatedLandmark): void;
+  role?(id: string, entry: EntryOf<'roles'>): void;
+  container?(id: string, entry: EntryOf<'containers'>): void;
+  part?(id: string, entry: EntryOf<'parts'>): void;
+  controlEntry?(id: string, entry: EntryOf<'controls'>): void;
   chain?(chain: ChainSpecification): void;
   control?(control: ControlSpecification): void;
   solver?(solver: SolverSpecification): void;

@@ -39,6 +39,32 @@ export function runRules(
       },
     }),
   );
+  const written = <Entry>(
+    collection: string,
+    entries: Readonly<Record<string, Entry>> | undefined,
+    visit: (name: string, entry: Entry) => void,
+  ): void => {
+    for (const [name, entry] of Object.entries(entries ?? {}))
+      if (!stage.poisoned.has(`${collection}/${name}`)) visit(name, entry);
+  };
+  written('params', recipe.params, (name, entry) => {
+    for (const handler of handlers) handler.parameter?.(name, entry);
+  });
+  written('landmarks', recipe.landmarks, (name, entry) => {
+    for (const handler of handlers) handler.landmark?.(name, entry);
+  });
+  written('roles', recipe.roles, (id, entry) => {
+    for (const handler of handlers) handler.role?.(id, entry);
+  });
+  written('containers', recipe.containers, (id, entry) => {
+    for (const handler of handlers) handler.container?.(id, entry);
+  });
+  written('parts', recipe.parts, (id, entry) => {
+    for (const handler of handlers) handler.part?.(id, entry);
+  });
+  written('controls', recipe.controls, (id, entry) => {
+    for (const handler of handlers) handler.controlEntry?.(id, entry);
+  });
   for (const chain of resolved.chains) for (const handler of handlers) handler.chain?.(chain);
   for (const control of resolved.controls) for (const handler of handlers) handler.control?.(control);
   for (const solver of resolved.solvers) for (const handler of handlers) handler.solver?.(solver);

@@ -5,6 +5,7 @@ import { removeEntry } from '@/compiler/check/edits/removeEntry';
 import type { Fix } from '@/compiler/findings/Finding';
 import { FindingList } from '@/compiler/findings/FindingList';
 import { mergeDocuments } from '@/compiler/merge/mergeDocuments';
+import { LineIndex } from '@/compiler/source/LineIndex';
 import { parseDocument } from '@/compiler/syntax/parseDocument';
 import type { JsonValue, Path } from '@/compiler/syntax/types';
 
@@ -88,7 +89,12 @@ describe('edits of recipe text', () => {
         const path = paths[choice % paths.length] ?? [];
         const edit = removeEntry(document, path);
         // Comments between a key and its only entry are the one thing that keeps an edit from being made.
-        if (edit === null) return expect(style.comments).toBe(true);
+        if (edit === null) {
+          expect(style.comments).toBe(true);
+          return;
+        }
+        const { span } = edit;
+        expect(new LineIndex({ name: 'edit.yaml', text }).span(span.start, span.end)).toEqual(span);
         const after = apply(text, edit);
         const wanted = changed(document.value as JsonValue, path, undefined);
         expect(read(after).value).toEqual(wanted);
@@ -117,7 +123,12 @@ describe('edits of recipe text', () => {
         });
         const path = maps[choice % maps.length] ?? [];
         const edit = addKey(document, path, 'new_one', '{ to: 3 }');
-        if (edit === null) return expect(style.comments).toBe(true);
+        if (edit === null) {
+          expect(style.comments).toBe(true);
+          return;
+        }
+        const { span } = edit;
+        expect(new LineIndex({ name: 'edit.yaml', text }).span(span.start, span.end)).toEqual(span);
         const wanted = changed(document.value as JsonValue, [...path, 'new_one'], { to: 3 });
         expect(read(apply(text, edit)).value).toEqual(wanted);
       }),
