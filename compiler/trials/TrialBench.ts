@@ -4,6 +4,8 @@ import { indexNodes } from '../pose/evaluationOrder';
 import type { Poser } from '../pose/Poser';
 import { restWorldMatrices, writeMatrix } from '../pose/worldMatrices';
 import type { ControlNode, Rig } from '../rig/Rig';
+import type { ChainPose, ReachChain } from './ReachChain';
+import { findReachChains, poseChains } from './reachChains';
 import type { TrialIntent } from './TrialIntent';
 
 /** A rig with what its recipe asks of it, made ready once for all trials. */
@@ -19,6 +21,9 @@ export interface TrialBench {
   readonly indexOfName: ReadonlyMap<string, number>;
   readonly indexOfId: ReadonlyMap<string, number>;
   readonly controls: ReadonlyMap<string, ControlNode>;
+  /** Chains that solvers bring to a goal, and the poses in which trials look at them. */
+  readonly chains: readonly ReachChain[];
+  readonly chainPoses: readonly ChainPose[];
   /** Greatest distance of a node from the origin at rest, in scene units: what rounding errors are relative to. */
   readonly size: number;
   /** What evaluation may be off by, in scene units. */
@@ -36,7 +41,9 @@ export function makeTrialBench(rig: Rig, intent: TrialIntent): TrialBench {
   });
   poser.evaluate();
   const controls = rig.nodes.filter((node) => node.kind === 'control');
-  return {
+  // A rig that is one point at the origin has the size of its shapes, or else of one unit.
+  if (size === 0) size = Math.max(0, ...controls.map((control) => control.size)) || 1;
+  const bench = {
     rig,
     intent,
     poser,
@@ -45,8 +52,9 @@ export function makeTrialBench(rig: Rig, intent: TrialIntent): TrialBench {
     indexOfName: indexNodes(rig),
     indexOfId: new Map(rig.nodes.map(({ id }, index) => [id, index])),
     controls: new Map(controls.map((control) => [control.name, control])),
-    // A rig that is one point at the origin has the size of its shapes, or else of one unit.
-    size: size > 0 ? size : Math.max(1, ...controls.map((control) => control.size)),
-    tolerance: REST_TOLERANCE * (size > 0 ? size : 1),
+    size,
+    tolerance: REST_TOLERANCE * size,
   };
+  const chains = findReachChains(bench);
+  return { ...bench, chains, chainPoses: poseChains(chains, bench) };
 }

@@ -51,6 +51,9 @@ export interface TrialIntent {
   readonly computedPoles: ReadonlySet<string>;
   readonly channels: ReadonlyMap<string, Readonly<Partial<Record<Channel, ChannelRule>>>>;
   readonly lines: ReadonlyMap<string, { readonly from: string; readonly to: string }>;
-  /** Names of everything, as a character of the given name would have them: nodes by id, links by collection and id. */
-  namesFor(character: string): ReadonlyMap<string, string>;
+  /**
+   * The name of everything as the pieces between which a character's own name stands: nodes by id, links by
+   * collection and id.
+   */
+  nameParts(): ReadonlyMap<string, readonly string[]>;
 }

@@ -7,13 +7,14 @@ import type { TrialResult } from './TrialResult';
 
 /** Even pieces that a blend's way is first cut in, and halvings of the piece over which the rig moves most. */
 const PIECES = 8;
-const HALVINGS = 15;
-/** Part of the way over which the rig is watched at the last: an eighth halved fifteen times. */
-const STEP = 1 / (PIECES * 2 ** HALVINGS);
+const HALVINGS = 7;
+/** Part of the way next to its ends over which the rig is watched. */
+const END_STEP = 1e-5;
 /**
- * Relative to the rig's size: what may move over the smallest step. A blend that turns things half round at the end
- * of the rig moves them by some 6 sizes on its whole way, so by 2.4e-5 in one step; a pop is seen from about
- * 1e-3 on, a millimetre on a metre.
+ * Relative to the rig's size: the jump that is allowed. It is read off the second difference of positions over the
+ * last, smallest piece, h = 1/2048 of the way, which a smooth blend makes h² times its curvature: half a turn at the
+ * end of the rig has a curvature of some 20 sizes, so 5e-6 of a size. Over `END_STEP` such a blend moves 6e-5. A pop is
+ * seen from about 1e-3 on, a millimetre on a metre.
  */
 const POP_TOLERANCE = 1e-4;
 
@@ -82,8 +83,8 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
     }
   }
   // Off its ends a blend is most likely to pop, and there the widest piece need not be.
-  compare(stops[0] as Float64Array, worldAt(STEP), STEP);
-  compare(stops[PIECES] as Float64Array, worldAt(1 - STEP), 1 - STEP);
+  compare(stops[0] as Float64Array, worldAt(END_STEP), END_STEP);
+  compare(stops[PIECES] as Float64Array, worldAt(1 - END_STEP), 1 - END_STEP);
   let from = stops[piece] as Float64Array;
   let to = stops[piece + 1] as Float64Array;
   let way = piece / PIECES;
@@ -98,7 +99,10 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
       way += width;
     }
   }
-  compare(from, to, way);
+  const middle = worldAt(way + width / 2);
+  // What a smooth motion puts halfway between both ends, but for its curvature; a jump does not.
+  const halfway = from.map((value, index) => value + ((to[index] as number) - value) / 2);
+  compare(halfway, middle, way + width / 2);
 }
 
 /** Every choice of space gives the same at rest, so that choosing moves nothing but what was moved before. */
@@ -128,7 +132,8 @@ export function tryBlend(bench: TrialBench): TrialResult {
   const mixes = findMixes(bench);
   if (mixes.length > 0) {
     tryFading(mixes, nudgedPose(bench, 4), bench, tally);
-    for (const way of [0, 0.5, 1]) {
+    // All the way on one side is the rest trial's.
+    for (const way of [0, 0.5]) {
       const pose: PoseDraft = {};
       for (const { control, attribute, from, to } of mixes) {
         put(pose, control, { [attribute]: from + (to - from) * way });

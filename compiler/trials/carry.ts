@@ -9,11 +9,9 @@ import { Tally } from './Tally';
 import type { TrialBench } from './TrialBench';
 import type { TrialResult } from './TrialResult';
 
-/** How the root is moved: each kind by itself, then all at once; moves in rig sizes, turns in degrees. */
+/** How the root is moved: as a rigid body, then scaled as well; moves in rig sizes, turns in degrees. */
 const MOTIONS: readonly Readonly<Partial<Record<Channel, number>>>[] = [
-  { tx: 0.3, ty: -0.04, tz: 0.12 },
-  { rx: 20, ry: 75, rz: -10 },
-  { sx: 1.25, sy: 1.25, sz: 1.25 },
+  { tx: 0.3, ty: -0.04, tz: 0.12, rx: 20, ry: 75, rz: -10 },
   { tx: -0.2, ty: 0.1, tz: 0.3, rx: -35, ry: 140, rz: 15, sx: 0.8, sy: 0.8, sz: 0.8 },
 ];
 

@@ -1,6 +1,6 @@
 import { distance } from '../math/vec3';
 import { readPosition } from '../pose/worldMatrices';
-import type { PoseValues, RigNode } from '../rig/Rig';
+import type { RigNode } from '../rig/Rig';
 import { displacement } from './displacement';
 import { findInfluences } from './influences';
 import { nudgedPose } from './poses';
@@ -48,11 +48,7 @@ export function tryGuide(bench: TrialBench): TrialResult {
   const tally = new Tally('guide', rig.scene.unit, tolerance);
   const lines = findGuideLines(bench);
   if (lines.length === 0) return tally.result();
-  const root = bench.controls.get(
-    rig.nodes[bench.indexOfId.get(bench.intent.carrier ?? '') ?? -1]?.name ?? '',
-  );
-  const carried: PoseValues = root ? { [root.name]: { tx: 0.2 * size, ry: 50 } } : {};
-  for (const pose of [{}, nudgedPose(bench, 6), nudgedPose(bench, 9), carried]) {
+  for (const pose of [{}, nudgedPose(bench, 6)]) {
     poser.evaluate(pose);
     for (const { id, own, ends } of lines) {
       for (const { meant, drawn } of ends) {

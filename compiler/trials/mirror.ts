@@ -218,7 +218,6 @@ export function tryMirror(bench: TrialBench): TrialResult {
     }
   };
   compare({});
-  compare(mirroredPose(compared, bench, 1, 0));
   const bySteps: PoseDraft = { ...mirroredPose(compared, bench, 5, 0.4) };
   for (const solver of rig.solvers) if ('blend' in solver) putAmount(bySteps, solver.blend, 0, bench);
   compare(bySteps);

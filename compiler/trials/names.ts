@@ -7,7 +7,7 @@ import type { TrialResult } from './TrialResult';
 /** How many characters of one cast share a scene in the trial, this one among them. */
 const CAST = 10;
 
-/** Everything in a rig that has a name of its own, by the key that `namesFor` gives it. */
+/** Everything in a rig that has a name of its own, by the key that `nameParts` gives it. */
 function namedThings(
   rig: Rig,
 ): readonly { readonly key: string; readonly id: string; readonly name: string }[] {
@@ -27,14 +27,16 @@ function namedThings(
  */
 export function tryNames({ rig, intent }: TrialBench): TrialResult {
   const count = new Count('names');
-  const own = intent.namesFor(rig.scene.character);
+  const parts = intent.nameParts();
   const taken = new Set<string>();
   for (const { key, id, name } of namedThings(rig)) {
-    count.add(own.get(key) === name && !taken.has(name), id);
+    count.add(parts.get(key)?.join(rig.scene.character) === name && !taken.has(name), id);
     taken.add(name);
   }
   for (let member = 2; member <= CAST; member += 1) {
-    for (const [key, name] of intent.namesFor(`${rig.scene.character}_${member}`)) {
+    const character = `${rig.scene.character}_${member}`;
+    for (const [key, around] of parts) {
+      const name = around.join(character);
       count.add(!taken.has(name), key.slice(key.indexOf('/') + 1));
       taken.add(name);
     }

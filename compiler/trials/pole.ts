@@ -3,9 +3,9 @@ import { quatFromAxisAngle, rotate } from '../math/quat';
 import { BEND_TOLERANCE } from '../math/tolerances';
 import { cross, distance, dot, length, normalise, rejectFrom, scale, signedAngle, sub } from '../math/vec3';
 import { readMatrix, readPosition } from '../pose/worldMatrices';
-import type { PoseValues, Vec3 } from '../rig/Rig';
-import { amountIn, joinPoses, nudgedPose } from './poses';
-import { findReachChains, type ReachChain, reachPose } from './reachChains';
+import type { Vec3 } from '../rig/Rig';
+import { amountIn } from './poses';
+import type { ChainPose, ReachChain } from './ReachChain';
 import { Tally } from './Tally';
 import type { TrialBench } from './TrialBench';
 import type { TrialResult } from './TrialResult';
@@ -15,8 +15,6 @@ import type { TrialResult } from './TrialResult';
  * than its numbers are exact.
  */
 const PLAIN_POLE = 0.02;
-
-const SHARES = [0.6, 0.8, 0.95];
 
 interface Plane {
   readonly start: Vec3;
@@ -68,23 +66,29 @@ function restAngle(chain: ReachChain, { rest, tolerance }: TrialBench): number |
   return signedAngle(plane.toward, off, plane.along);
 }
 
-function tryChain(chain: ReachChain, angle: number, pose: PoseValues, bench: TrialBench, tally: Tally): void {
-  const { rig, poser } = bench;
+function tryChain(
+  chain: ReachChain,
+  angle: number,
+  { pose, world }: ChainPose,
+  bench: TrialBench,
+  tally: Tally,
+): void {
+  const { rig } = bench;
   if (amountIn(chain.solver.blend, pose, bench) < 1) return;
-  const plane = planeOf(chain, poser.world, chain.restLength * PLAIN_POLE);
+  const plane = planeOf(chain, world, chain.restLength * PLAIN_POLE);
   if (plane === null) return;
   const swing = (amountIn(chain.solver.swing, pose, bench) * Math.PI) / 180;
   const bend = rotate(quatFromAxisAngle(plane.along, angle + swing), plane.toward);
   if (chain.solver.kind === 'two_bone') {
     const mid = chain.joints[1] as number;
-    const off = rejectFrom(sub(readPosition(poser.world, mid), plane.start), plane.along);
+    const off = rejectFrom(sub(readPosition(world, mid), plane.start), plane.along);
     tally.add(distance(off, scale(bend, length(off))), rig.nodes[mid]?.id ?? '', pose);
     return;
   }
   // Folded together, joints of a longer row may pass to the other side of the line, but never out of the plane.
   const normal = cross(plane.along, bend);
   for (const joint of chain.joints.slice(1, -1)) {
-    const off = dot(sub(readPosition(poser.world, joint), plane.start), normal);
+    const off = dot(sub(readPosition(world, joint), plane.start), normal);
     tally.add(off, rig.nodes[joint]?.id ?? '', pose);
   }
 }
@@ -94,9 +98,9 @@ function tryChain(chain: ReachChain, angle: number, pose: PoseValues, bench: Tri
  * on the pole's side. Where the recipe puts the pole beside that plane, the angle of rest is kept.
  */
 export function tryPole(bench: TrialBench): TrialResult {
-  const { rig, intent, poser, rest, tolerance } = bench;
+  const { rig, intent, rest, tolerance } = bench;
   const tally = new Tally('pole', rig.scene.unit, tolerance);
-  const chains = findReachChains(bench).flatMap((chain) => {
+  const chains = bench.chains.flatMap((chain) => {
     const angle = restAngle(chain, bench);
     return angle === null ? [] : [{ chain, angle }];
   });
@@ -108,17 +112,8 @@ export function tryPole(bench: TrialBench): TrialResult {
     const { joint, off } = widestJoint(chain, plane, rest);
     tally.add(distance(off, scale(plane.toward, length(off))), rig.nodes[joint]?.id ?? '');
   }
-  const all = chains.map(({ chain }) => chain);
-  const reaching = SHARES.map((share) => reachPose(all, bench, share, 0));
-  const poses = [
-    ...reaching,
-    // Poles and all else moved as well, goals kept where chains bend plainly.
-    joinPoses(nudgedPose(bench, 2), reaching[1] ?? {}),
-    joinPoses(nudgedPose(bench, 7), reaching[0] ?? {}),
-  ];
-  for (const pose of poses) {
-    poser.evaluate(pose);
-    for (const { chain, angle } of chains) tryChain(chain, angle, pose, bench, tally);
+  for (const chainPose of bench.chainPoses) {
+    for (const { chain, angle } of chains) tryChain(chain, angle, chainPose, bench, tally);
   }
   return tally.result();
 }

@@ -13,7 +13,9 @@ const GOLDEN = 0.618033988749895;
 
 /** Adds values to a control of a draft. */
 export function put(draft: PoseDraft, control: string, values: Readonly<Record<string, number>>): void {
-  draft[control] = { ...(Object.hasOwn(draft, control) ? draft[control] : {}), ...values };
+  const own = Object.hasOwn(draft, control) ? draft[control] : undefined;
+  if (own) Object.assign(own, values);
+  else draft[control] = { ...values };
 }
 
 /** Both poses together; where both give a value, the second's. */
@@ -53,7 +55,7 @@ export function nudge(control: ControlNode, seed: number, size: number): Readonl
 }
 
 /** A pose that nudges every control, each differently; the same for the same seed. Attributes keep their defaults. */
-export function nudgedPose(bench: TrialBench, seed: number): PoseValues {
+export function nudgedPose(bench: Pick<TrialBench, 'controls' | 'size'>, seed: number): PoseValues {
   const draft: PoseDraft = {};
   let next = seed;
   for (const control of bench.controls.values()) {
@@ -66,7 +68,7 @@ export function nudgedPose(bench: TrialBench, seed: number): PoseValues {
 /** The attribute that an amount reads; undefined for a plain number or an attribute there is not. */
 export function attributeOf(
   amount: NumberOrAttribute | null,
-  { controls }: TrialBench,
+  { controls }: Pick<TrialBench, 'controls'>,
 ): { readonly control: string; readonly attribute: RigAttribute } | undefined {
   if (amount === null || typeof amount === 'number') return undefined;
   const attribute = controls.get(amount.control)?.attributes.find(({ name }) => name === amount.attribute);
@@ -74,7 +76,11 @@ export function attributeOf(
 }
 
 /** An amount's value in a pose, limits applied. */
-export function amountIn(amount: NumberOrAttribute, pose: PoseValues, bench: TrialBench): number {
+export function amountIn(
+  amount: NumberOrAttribute,
+  pose: PoseValues,
+  bench: Pick<TrialBench, 'controls'>,
+): number {
   if (typeof amount === 'number') return amount;
   const found = attributeOf(amount, bench);
   if (!found) return 0;
@@ -88,7 +94,7 @@ export function putAmount(
   draft: PoseDraft,
   amount: NumberOrAttribute,
   value: number,
-  bench: TrialBench,
+  bench: Pick<TrialBench, 'controls'>,
 ): void {
   const found = attributeOf(amount, bench);
   if (!found) return;

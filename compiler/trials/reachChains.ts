@@ -3,26 +3,20 @@ import { invertMat4, transformDirection, transformPoint } from '../math/mat4';
 import { rotate } from '../math/quat';
 import { addScaled, distance, normalise, sub } from '../math/vec3';
 import { readMatrix, readPosition } from '../pose/worldMatrices';
-import type { ControlNode, PoseValues, ReachSolver, TwoBoneSolver, Vec3 } from '../rig/Rig';
-import { isFree, type PoseDraft, put, putAmount } from './poses';
+import type { ControlNode, PoseValues, Vec3 } from '../rig/Rig';
+import { attributeOf, isFree, joinPoses, nudgedPose, type PoseDraft, put, putAmount } from './poses';
+import type { ChainPose, ReachChain } from './ReachChain';
 import type { TrialBench } from './TrialBench';
 
-/** A chain whose end a solver brings to a goal, with what trials need of its rest. */
-export interface ReachChain {
-  readonly solver: TwoBoneSolver | ReachSolver;
-  /** Indices of its joints in the list of nodes, from start to end. */
-  readonly joints: readonly number[];
-  readonly goal: number;
-  readonly pole: number;
-  /** Where the end is in the goal's frame at rest. */
-  readonly goalToEnd: Vec3;
-  /** Lengths of the bones at rest together, and the distance from start to end. */
-  readonly restLength: number;
-  readonly restDistance: number;
-}
+/** A bench before chains have been posed on it. */
+export type UnposedBench = Omit<TrialBench, 'chains' | 'chainPoses'>;
 
 /** Every chain of the rig that a solver makes meet a goal; a new kind of such solver belongs here. */
-export function findReachChains({ rig, rest, indexOfName }: TrialBench): readonly ReachChain[] {
+export function findReachChains({
+  rig,
+  rest,
+  indexOfName,
+}: Pick<TrialBench, 'rig' | 'rest' | 'indexOfName'>): readonly ReachChain[] {
   const chains: ReachChain[] = [];
   for (const solver of rig.solvers) {
     if (solver.kind !== 'two_bone' && solver.kind !== 'reach') continue;
@@ -55,7 +49,7 @@ export function startOf(chain: ReachChain): number {
 }
 
 /** The control that moves a node as a whole: itself, what it hangs on or what it follows; null when there is none. */
-function moverOf(index: number, bench: TrialBench): ControlNode | null {
+function moverOf(index: number, bench: UnposedBench): ControlNode | null {
   const { rig, intent, indexOfName } = bench;
   let node = rig.nodes[index];
   for (let hops = 0; node !== undefined && hops < rig.nodes.length; hops += 1) {
@@ -78,9 +72,9 @@ const SWING: Vec3 = [18, -24, 12];
  * rest, with all solvers at work, `stretch` as given and no swing. What else moves depends on the rig; trials measure
  * where goals really are.
  */
-export function reachPose(
+function reachPose(
   chains: readonly ReachChain[],
-  bench: TrialBench,
+  bench: UnposedBench,
   share: number,
   stretch: number,
 ): PoseValues {
@@ -103,4 +97,30 @@ export function reachPose(
     put(draft, mover.name, { tx, ty, tz });
   }
   return draft;
+}
+
+/** Where goals are put, in lengths of the chain: folded, easy, near full reach, at it and beyond. */
+const SHARES = [0.55, 0.85, 0.98, 1, 1.02, 1.3];
+const STRETCHED_SHARES = [0.9, 1.3];
+/** With everything else in the rig moved as well, poles among it. */
+const NUDGED = [
+  { seed: 3, share: 0.8 },
+  { seed: 7, share: 0.6 },
+];
+
+/** Evaluates the poses in which chains are tried, for all trials of them together. */
+export function poseChains(chains: readonly ReachChain[], bench: UnposedBench): readonly ChainPose[] {
+  if (chains.length === 0) return [];
+  const canStretch = chains.some(({ solver }) => attributeOf(solver.stretch, bench));
+  const poses = [
+    ...SHARES.map((share) => reachPose(chains, bench, share, 0)),
+    ...(canStretch ? STRETCHED_SHARES : []).map((share) => reachPose(chains, bench, share, 1)),
+    ...NUDGED.map(({ seed, share }) =>
+      joinPoses(nudgedPose(bench, seed), reachPose(chains, bench, share, 0)),
+    ),
+  ];
+  return poses.map((pose) => {
+    bench.poser.evaluate(pose);
+    return { pose, world: bench.poser.world.slice() };
+  });
 }

@@ -107,7 +107,6 @@ function nameParts(recipe: ResolvedRecipe, context: ResolveContext): ReadonlyMap
 
 /** Reads from the resolved recipe what its rig has to keep. */
 export function readIntent(recipe: ResolvedRecipe, context: ResolveContext): TrialIntent {
-  let parts: ReadonlyMap<string, readonly string[]> | null = null;
   const silent = { ...context, findings: new FindingList() };
   const carrier = findCarrier(recipe.controls, silent)?.id ?? null;
   const poleOf = new Map(recipe.controls.map(({ id, place }) => [id, place]));
@@ -125,9 +124,6 @@ export function readIntent(recipe: ResolvedRecipe, context: ResolveContext): Tri
     computedPoles: new Set(computedPoles),
     channels: new Map(recipe.controls.map(({ id, channels }) => [id, channels])),
     lines: new Map(recipe.guideLines.map(({ id, from, to }) => [id, { from, to }])),
-    namesFor: (character) => {
-      parts ??= nameParts(recipe, context);
-      return new Map([...parts].map(([key, around]) => [key, around.join(character)]));
-    },
+    nameParts: () => nameParts(recipe, context),
   };
 }
