@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { addKey } from '@/compiler/check/edits/addKey';
+import { addKeys } from '@/compiler/check/edits/addKeys';
 import { removeEntry } from '@/compiler/check/edits/removeEntry';
 import type { Fix } from '@/compiler/findings/Finding';
 import { FindingList } from '@/compiler/findings/FindingList';
@@ -122,14 +122,18 @@ describe('edits of recipe text', () => {
           return typeof found === 'object' && !Array.isArray(found);
         });
         const path = maps[choice % maps.length] ?? [];
-        const edit = addKey(document, path, 'new_one', '{ to: 3 }');
+        const edit = addKeys(document, path, [
+          ['new_one', '{ to: 3 }'],
+          ['also', '1'],
+        ]);
         if (edit === null) {
           expect(style.comments).toBe(true);
           return;
         }
         const { span } = edit;
         expect(new LineIndex({ name: 'edit.yaml', text }).span(span.start, span.end)).toEqual(span);
-        const wanted = changed(document.value as JsonValue, [...path, 'new_one'], { to: 3 });
+        const one = changed(document.value as JsonValue, [...path, 'new_one'], { to: 3 });
+        const wanted = changed(one, [...path, 'also'], 1);
         expect(read(apply(text, edit)).value).toEqual(wanted);
       }),
       { numRuns: 400 },
