@@ -30,6 +30,18 @@ async function generatedFiles(): Promise<ReadonlyMap<string, string>> {
       'compiler/samples/generated/sampleTexts.ts',
       textModule('SAMPLE_TEXTS', 'compiler/samples', '.recipe.yaml'),
     ],
+    [
+      'compiler/conformance/generated/featureTexts.ts',
+      textModule('FEATURE_TEXTS', 'compiler/conformance', '.feature.yaml'),
+    ],
+    [
+      'compiler/conformance/generated/adapterText.ts',
+      textModule('ADAPTER_TEXT', 'compiler/conformance', '.mjs'),
+    ],
+    [
+      'compiler/conformance/generated/kitGuide.ts',
+      textModule('KIT_GUIDE', 'compiler/conformance', '.guide.md'),
+    ],
     ['compiler/findings/generated/pages.ts', textModule('PAGES', 'compiler', '.page.md')],
   ]);
 }
