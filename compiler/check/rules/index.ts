@@ -1,9 +1,11 @@
 import type { Rule } from '../Rule';
 import { aimGoalOnJoint } from './aim-goal-on-joint';
+import { attributeUnread } from './attribute-unread';
 import { boneDwarfed } from './bone-dwarfed';
 import { chainCrossesMiddle } from './chain-crosses-middle';
 import { chainFoldsBack } from './chain-folds-back';
 import { chainNeverBends } from './chain-never-bends';
+import { channelSteersNothing } from './channel-steers-nothing';
 import { constraintCrossesSides } from './constraint-crosses-sides';
 import { constraintFollowsParent } from './constraint-follows-parent';
 import { constraintJumpsAtRest } from './constraint-jumps-at-rest';
@@ -23,7 +25,10 @@ import { landmarkUnused } from './landmark-unused';
 import { landmarksNearlyMirrored } from './landmarks-nearly-mirrored';
 import { limbBonesUnequal } from './limb-bones-unequal';
 import { limbNearlyStraight } from './limb-nearly-straight';
+import { limitBeyondFullTurn } from './limit-beyond-full-turn';
 import { limitInverted } from './limit-inverted';
+import { limitOnLocked } from './limit-on-locked';
+import { limitZeroWidth } from './limit-zero-width';
 import { nothingCarries } from './nothing-carries';
 import { parameterUnused } from './parameter-unused';
 import { parentCrossesSides } from './parent-crosses-sides';
@@ -31,7 +36,9 @@ import { poleOffPlane } from './pole-off-plane';
 import { poleTooNear } from './pole-too-near';
 import { restOutsideLimits } from './rest-outside-limits';
 import { rigBelowFloor } from './rig-below-floor';
+import { rotationOrderLocksUp } from './rotation-order-locks-up';
 import { scaleImplausible } from './scale-implausible';
+import { shareWithoutRange } from './share-without-range';
 import { skeletonInPieces } from './skeleton-in-pieces';
 import { skinJointRepeated } from './skin-joint-repeated';
 import { soleNotLevel } from './sole-not-level';
@@ -86,6 +93,13 @@ export const RULES: readonly Rule[] = [
   poleOffPlane,
   poleTooNear,
   guideLineWithoutLength,
+  limitZeroWidth,
+  limitOnLocked,
+  limitBeyondFullTurn,
+  rotationOrderLocksUp,
+  attributeUnread,
+  shareWithoutRange,
+  channelSteersNothing,
   parameterUnused,
   landmarkUnused,
 ];
