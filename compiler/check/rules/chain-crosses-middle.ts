@@ -1,8 +1,10 @@
+import { mirrorPoint } from '../../expand/sides';
 import { distance, dot } from '../../math/vec3';
 import type { Vec3 } from '../../rig/Rig';
 import { pointPath } from '../pointPath';
 import { positionsOf } from '../positionsOf';
 import type { Rule } from '../Rule';
+import { rewrite } from '../rewrite';
 
 /** Share of the chain's length by which a joint may cross unsaid: hands that meet, feet side by side. */
 const MARGIN = 0.02;
@@ -15,7 +17,7 @@ export const chainCrossesMiddle: Rule = {
   summary: 'A chain of one side that reaches across the middle of the body.',
   message: '"{joint}" stands across the middle, on the side where it does not belong.',
   help: 'Move the point to its own side, or let the chain be of the centre.',
-  create({ recipe, resolved, solved, report }) {
+  create({ recipe, resolved, solved, stage, report }) {
     const { left } = resolved.scene;
     return {
       chain(chain) {
@@ -34,7 +36,15 @@ export const chainCrossesMiddle: Rule = {
           chain.count === null && typeof point === 'string' ? recipe.landmarks?.[point] : undefined;
         // A sided landmark on the wrong side is told at the landmark itself.
         if (landmark?.side === 'left' && (side === 'left' || landmark.right === undefined)) return;
-        report(pointPath(chain, index), { joint: jointIds[index] ?? '' });
+        const path = pointPath(chain, index);
+        const isLiteral = chain.count === null && typeof point === 'object' && !('from' in point);
+        const fix =
+          isLiteral && side === 'left'
+            ? rewrite(stage.document, 'Mirror the point', [
+                { path, newText: `[${mirrorPoint(point, left).join(', ')}]` },
+              ])
+            : {};
+        report(path, { joint: jointIds[index] ?? '' }, fix);
       },
     };
   },

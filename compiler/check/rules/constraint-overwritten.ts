@@ -1,5 +1,7 @@
 import { idsWritten } from '../../expand/solverIds';
 import type { ConstraintSpecification, SolverSpecification } from '../../expand/types';
+import { fixWith } from '../edits/fixWith';
+import { removeEntry } from '../edits/removeEntry';
 import type { Rule } from '../Rule';
 
 /** Solvers that turn joints wholly at all times; where the blend is an attribute, both may be seen in turn. */
@@ -38,14 +40,20 @@ export const constraintOverwritten: Rule = {
         if (constraint.kind === 'orient' || constraint.kind === 'aim') turning.push(constraint);
       },
       finish() {
-        for (const { id, target, path } of turning) {
+        for (const { id, target, path, part } of turning) {
           const solver = solverOf.get(target);
           if (!solver) continue;
           const span = stage.document.spanAt(solver.path, 'key');
           report(
             path,
             { id, target, solver: solver.id },
-            { part: 'key', related: [{ span, label: `"${solver.id}"` }] },
+            {
+              part: 'key',
+              related: [{ span, label: `"${solver.id}"` }],
+              ...(part === null
+                ? fixWith('Remove the constraint', 'asks', [removeEntry(stage.document, path)])
+                : {}),
+            },
           );
         }
       },

@@ -1,19 +1,22 @@
+import { fixWith } from '../edits/fixWith';
+import { removeEntry } from '../edits/removeEntry';
 import type { Rule } from '../Rule';
 
-/** A driver that gives the same for every input follows nothing. */
+/** A driver that gives nothing for every input follows nothing; a constant that is not 0 moves the rest and is told there. */
 export const driverFlat: Rule = {
   code: 'driver-flat',
   severity: 'warning',
   category: 'motion',
-  summary: 'A driver whose keys all give the same output.',
-  message: 'The driver "{id}" gives {output} whatever "{input}" reads.',
+  summary: 'A driver whose keys all give 0.',
+  message: 'The driver "{id}" gives 0 whatever "{input}" reads.',
   help: 'Give its keys different outputs, or remove it.',
-  create({ report }) {
+  create({ stage, report }) {
     return {
-      driver({ id, control, input, outputs, path }) {
-        const [first] = outputs;
-        if (first === undefined || outputs.some((output) => output !== first)) return;
-        report([...path, 'keys'], { id, output: first, input: `${control}.${input}` });
+      driver({ id, control, input, outputs, path, part }) {
+        if (outputs.some((output) => output !== 0)) return;
+        const fix =
+          part === null ? fixWith('Remove the driver', 'asks', [removeEntry(stage.document, path)]) : {};
+        report([...path, 'keys'], { id, input: `${control}.${input}` }, fix);
       },
     };
   },

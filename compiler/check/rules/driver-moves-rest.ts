@@ -37,8 +37,7 @@ export const driverMovesRest: Rule = {
         for (const drivers of byChannel.values()) {
           const [driver] = drivers;
           // Several drivers of one channel may be meant to cancel out.
-          if (!driver || drivers.length > 1 || driver.outputs.every((output) => output === driver.outputs[0]))
-            continue;
+          if (!driver || drivers.length > 1) continue;
           const { id, control, input, target, channel, outputs, path } = driver;
           const attribute = controls.get(control)?.attributes.find(({ name }) => name === input);
           const rest = attribute?.default ?? (/^s[xyz]$/.test(input) ? 1 : 0);

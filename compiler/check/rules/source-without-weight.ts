@@ -1,3 +1,5 @@
+import { fixWith } from '../edits/fixWith';
+import { removeEntry } from '../edits/removeEntry';
 import type { Rule } from '../Rule';
 import { textAt } from '../textAt';
 
@@ -11,13 +13,15 @@ export const sourceWithoutWeight: Rule = {
   help: 'Give it a weight above 0, or leave it out. To fade between two sources, use blend.',
   create({ stage, report }) {
     return {
-      constraint({ id, target, sources, blend, path }) {
+      constraint({ id, target, sources, blend, path, part }) {
         if (blend !== null) return;
         for (const { node, weight } of sources) {
           const place = [...path, 'sources', node];
           // An expression may give another weight for another character.
           if (weight !== 0 || textAt(stage.document, place)?.includes('=')) continue;
-          report(place, { id, target, source: node });
+          const fix =
+            part === null ? fixWith(`Leave "${node}" out`, 'safe', [removeEntry(stage.document, place)]) : {};
+          report(place, { id, target, source: node }, fix);
         }
       },
     };

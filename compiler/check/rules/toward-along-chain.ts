@@ -1,4 +1,6 @@
 import { angleBetween, sub } from '../../math/vec3';
+import { fixWith } from '../edits/fixWith';
+import { removeEntry } from '../edits/removeEntry';
 import { positionsOf } from '../positionsOf';
 import type { Rule } from '../Rule';
 
@@ -13,7 +15,7 @@ export const towardAlongChain: Rule = {
   summary: 'An up direction that lies along the chain.',
   message: 'toward of "{id}" lies within {degrees} degrees of its first bone and cannot turn its up axis.',
   help: 'Give a direction that points sideways from the chain.',
-  create({ solved, report }) {
+  create({ solved, stage, report }) {
     return {
       chain({ id, orient, jointIds, path }) {
         if (!orient.toward || orient.rule !== 'chain' || orient.like !== null) return;
@@ -22,7 +24,9 @@ export const towardAlongChain: Rule = {
         const angle = (angleBetween(sub(second, first), orient.toward) * 180) / Math.PI;
         const degrees = Math.min(angle, 180 - angle);
         if (degrees >= ALONG) return;
-        report([...path, 'orient', 'toward'], { id, degrees: Math.ceil(degrees) });
+        const place = [...path, 'orient', 'toward'];
+        const fix = fixWith('Leave toward out', 'asks', [removeEntry(stage.document, place)]);
+        report(place, { id, degrees: Math.ceil(degrees) }, fix);
       },
     };
   },

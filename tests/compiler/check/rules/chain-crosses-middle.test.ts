@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'chain-crosses-middle';
 const arm = (side: string, end: string, more = ''): string =>
@@ -10,6 +10,10 @@ describe(CODE, () => {
     expect(told(CODE, arm('left', '[-8, 50, 4]'))).toEqual([
       ['[-8, 50, 4]', '"arm.left.02" stands across the middle, on the side where it does not belong.'],
     ]);
+  });
+
+  it('mirrors the point to its own side', () => {
+    expect(fixed(CODE, arm('both', '[-8, 50, 4]'))).toBe(arm('both', '[8, 50, 4]'));
   });
 
   it('tells both mirrored copies in one finding', () => {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'constraint-follows-parent';
 const withConstraint = (constraint: string, more = ''): string => `chains:
@@ -15,6 +15,11 @@ describe(CODE, () => {
     expect(told(CODE, withConstraint('kind: orient, target: neck.b, sources: { neck.a: 1 }'))).toEqual([
       ['turn', '"neck.b" hangs on "neck.a" already, so "turn" does nothing.'],
     ]);
+  });
+
+  it('removes the constraint and leaves an empty map', () => {
+    const body = withConstraint('kind: orient, target: neck.b, sources: { neck.a: 1 }');
+    expect(fixed(CODE, body)).toBe(body.replace(/constraints:\n.*/, 'constraints: {}'));
   });
 
   it('is silent for any other source, for two of them, and for an aim', () => {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'constraint-overrides-control';
 const withHat = (channels: string, kind: string): string => `chains:
@@ -16,6 +16,13 @@ describe(CODE, () => {
     expect(told(CODE, withHat(channels, 'point'))).toEqual([
       ['hat', '"hold" overrides tx, tz of the control "hat", which an animator can still set.'],
     ]);
+  });
+
+  it('locks the channels where none are written', () => {
+    expect(fixed(CODE, withHat('', 'orient'))).toBe(
+      withHat('', 'orient').replace('{ at: neck.b', '{ channels: { turn: { locked: true } }, at: neck.b'),
+    );
+    expect(fixed(CODE, withHat(', channels: { ty: { locked: true } }', 'point'))).toBeNull();
   });
 
   it('tells a limited channel, which is open all the same', () => {

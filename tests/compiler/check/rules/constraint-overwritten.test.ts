@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'constraint-overwritten';
 const limb = (solver: string, constraint: string): string => `chains:
@@ -20,6 +20,12 @@ describe(CODE, () => {
     expect(told(CODE, limb('', ORIENT))).toEqual([
       ['turn', '"turn" turns "arm.b", but the solver "bend" turns it anew at all times.'],
     ]);
+  });
+
+  it('removes the constraint alone', () => {
+    const other = '  aim: { kind: orient, target: arm.c, sources: { hand: 1 } }\n';
+    const body = limb('', ORIENT) + other;
+    expect(fixed(CODE, body)).toBe(body.replace(/ {2}turn: .*\n/, ''));
   });
 
   it('is silent where the blend may let the constraint show', () => {

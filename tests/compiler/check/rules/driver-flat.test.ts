@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'driver-flat';
 const withKeys = (keys: string): string => `chains:
@@ -15,6 +15,11 @@ describe(CODE, () => {
     expect(told(CODE, withKeys('[[0, 0], [0.5, 0], [1, 0]]'))).toEqual([
       ['[[0, 0], [0.5, 0], [1, 0]]', 'The driver "drop" gives 0 whatever "mouth.open" reads.'],
     ]);
+  });
+
+  it('removes the driver', () => {
+    const body = withKeys('[[0, 0], [1, 0]]');
+    expect(fixed(CODE, body)).toBe(body.replace(/drivers:\n.*/, 'drivers: {}'));
   });
 
   it('is silent as soon as one output differs', () => {

@@ -34,6 +34,10 @@ describe(CODE, () => {
     expect(told(CODE, turned)).toEqual([]);
   });
 
+  it('tells a constant, which is never 0', () => {
+    expect(told(CODE, withDriver('[[0, 3], [1, 3]]')).map(([text]) => text)).toEqual(['[[0, 3], [1, 3]]']);
+  });
+
   it('is silent where two drivers of one channel cancel out', () => {
     const other = '  lift: { input: mouth.open, target: jaw.hinge, channel: rz, keys: [[0, -5], [1, 0]] }\n';
     expect(told(CODE, withDriver('[[0, 5], [1, -25]]', '', 'min: 0, max: 1', other))).toEqual([]);

@@ -19,6 +19,11 @@ describe(CODE, () => {
     expect(told(CODE, part).map(([text]) => text)).toEqual(['2']);
   });
 
+  it('does not edit a number that other chains repeat by its anchor', () => {
+    expect(told(CODE, withJoints(', joints: &few 3'))).toHaveLength(1);
+    expect(fixed(CODE, withJoints(', joints: &few 3'))).toBeNull();
+  });
+
   it('is silent with one joint a point or more, and where each point is a joint', () => {
     expect(told(CODE, withJoints(', joints: 4'))).toEqual([]);
     expect(told(CODE, withJoints(', joints: 9'))).toEqual([]);

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'skin-joint-repeated';
 const withJoints = (joints: string): string => `chains:
@@ -22,6 +22,11 @@ describe(CODE, () => {
     expect(told(CODE, withJoints('ear.tip, ear'))).toEqual([
       ['ear', 'The skin "body" lists the joint "ear.tip" again, after "ear.tip".'],
     ]);
+  });
+
+  it('takes exactly that item out of the list', () => {
+    expect(fixed(CODE, withJoints('tail, ear, tail.base'))).toBe(withJoints('tail, ear'));
+    expect(fixed(CODE, withJoints('ear.tip, ear.tip, tail'))).toBe(withJoints('ear.tip, tail'));
   });
 
   it('is silent for joints of one name in two chains', () => {

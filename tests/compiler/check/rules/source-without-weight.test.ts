@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'source-without-weight';
 const withWeights = (one: string, two: string, rest = ''): string => `params:
@@ -18,6 +18,11 @@ describe(CODE, () => {
     expect(told(CODE, withWeights('1', '0.0'))).toEqual([
       ['0.0', 'The weight of "two" in "turn" is 0, so "neck.a" never follows it.'],
     ]);
+  });
+
+  it('leaves the source out', () => {
+    expect(fixed(CODE, withWeights('1', '0.0'))).toBe(withWeights('1', '0.0').replace(', two: 0.0', ''));
+    expect(fixed(CODE, withWeights('0', '1'))).toBe(withWeights('0', '1').replace('one: 0, ', ''));
   });
 
   it('is silent for any other weight', () => {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'toward-along-chain';
 const flag = (orient: string): string =>
@@ -14,6 +14,10 @@ describe(CODE, () => {
       ],
     ]);
     expect(told(CODE, flag('toward: [-1, 0, 0.05]'))).toHaveLength(1);
+  });
+
+  it('leaves the direction out', () => {
+    expect(fixed(CODE, flag('up: +z, toward: [1, 0, 0]'))).toBe(flag('up: +z'));
   });
 
   it('is silent from 5 degrees on', () => {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { told } from '../ruleFindings';
+import { fixed, told } from '../ruleFindings';
 
 const CODE = 'twist-joint-off-bone';
 const twistAt = (point: string): string => `chains:
@@ -18,6 +18,12 @@ describe(CODE, () => {
     expect(told(CODE, twistAt('[10, 52, 0]'))).toEqual([
       ['twist.half', '"twist.half" stands 10 % of the bone beside the line from "arm.upper" to "arm.lower".'],
     ]);
+  });
+
+  it('places the joint between both, where it stands along the bone', () => {
+    const repaired = twistAt('{ from: arm.upper, to: arm.lower, share: 0.25 }');
+    expect(fixed(CODE, twistAt('[5, 52, 0]'))).toBe(repaired);
+    expect(told(CODE, repaired)).toEqual([]);
   });
 
   it('measures past the ends too', () => {
