@@ -47,6 +47,8 @@ export interface TrialIntent {
   readonly twins: readonly Twins[];
   /** Constraints, seats, spaces at their default, solvers: what may bring a node along. */
   readonly links: readonly DeclaredLink[];
+  /** Ids of nodes that a driver moves by the root's channels or attributes. */
+  readonly drivenByRoot: ReadonlySet<string>;
   /** Ids of solvers whose pole the compiler put on the plane of the bend. */
   readonly computedPoles: ReadonlySet<string>;
   readonly channels: ReadonlyMap<string, Readonly<Partial<Record<Channel, ChannelRule>>>>;

@@ -5,16 +5,17 @@ import { Tally } from './Tally';
 import type { TrialBench } from './TrialBench';
 import type { TrialResult } from './TrialResult';
 
-/** Even pieces that a blend's way is first cut in, and halvings of the piece over which the rig moves most. */
+/** Even pieces that a blend's way is first cut in. */
 const PIECES = 8;
-const HALVINGS = 7;
+/** Halvings of the piece that looks most like a jump; the further ones only while it goes on looking like one. */
+const HALVINGS = { least: 7, most: 24 };
 /** Part of the way next to its ends over which the rig is watched. */
-const END_STEP = 1e-5;
+const END_STEP = 1e-7;
 /**
  * Relative to the rig's size: the jump that is allowed. It is read off the second difference of positions over the
- * last, smallest piece, h = 1/2048 of the way, which a smooth blend makes h² times its curvature: half a turn at the
- * end of the rig has a curvature of some 20 sizes, so 5e-6 of a size. Over `END_STEP` such a blend moves 6e-5. A pop is
- * seen from about 1e-3 on, a millimetre on a metre.
+ * last, smallest piece, h = 1/2048 of the way or less, which a smooth blend makes h² times its curvature: half a turn
+ * at the end of the rig has a curvature of some 20 sizes, so 5e-6 of a size. A kink shrinks with h and has vanished
+ * after the further halvings; a jump stays. One is seen from about 1e-3 on, a millimetre on a metre.
  */
 const POP_TOLERANCE = 1e-4;
 
@@ -47,7 +48,40 @@ function findMixes(bench: TrialBench): readonly Mix[] {
   return [...mixes.values()];
 }
 
-/** Walks all blends together through a pose and finds where the rig moves most over the smallest step. */
+/** A stretch of the way, with the world at both ends. */
+interface Piece {
+  readonly start: number;
+  readonly width: number;
+  readonly from: Float64Array;
+  readonly to: Float64Array;
+}
+
+/** Halfway between two worlds, entry by entry: where a smooth motion is halfway, but for its curvature. */
+function halfway({ from, to }: Piece): Float64Array {
+  return from.map((entry, index) => entry + ((to[index] as number) - entry) / 2);
+}
+
+/**
+ * The node and the two pieces that look most like a jump: where a node's motion in one piece differs from that in the
+ * next by as much as it moves at all. A smooth motion, however wide, differs little from piece to piece.
+ */
+function findSuspect(pieces: readonly Piece[], count: number, size: number) {
+  let suspect = { node: 0, around: pieces.slice(0, 2), score: 0 };
+  for (let i = 0; i + 1 < pieces.length; i += 1) {
+    const [before, after] = [pieces[i] as Piece, pieces[i + 1] as Piece];
+    const even = halfway({ ...before, to: after.to });
+    for (let node = 0; node < count; node += 1) {
+      const first = displacement(before.from, node, before.to, node, size);
+      const second = displacement(after.from, node, after.to, node, size);
+      const bend = 2 * displacement(even, node, before.to, node, size);
+      const score = first + second > 0 ? (bend * bend) / (first + second) : 0;
+      if (score > suspect.score) suspect = { node, around: [before, after], score };
+    }
+  }
+  return suspect;
+}
+
+/** Walks all blends together through a pose, and closes in on what looks most like a jump. */
 function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, tally: Tally): void {
   const { rig, poser, size } = bench;
   const poseAt = (way: number): PoseValues => {
@@ -61,48 +95,42 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
     poser.evaluate(poseAt(way));
     return poser.world.slice();
   };
-  const movedMost = (a: Float64Array, b: Float64Array): number => {
-    let most = 0;
-    for (let i = 0; i < rig.nodes.length; i += 1) most = Math.max(most, displacement(a, i, b, i, size));
-    return most;
-  };
   const compare = (a: Float64Array, b: Float64Array, way: number): void => {
     const pose = poseAt(way);
     rig.nodes.forEach(({ id }, index) => {
       tally.add(displacement(a, index, b, index, size), id, pose);
     });
   };
-  const stops = Array.from({ length: PIECES + 1 }, (_, index) => worldAt(index / PIECES));
-  let piece = 0;
-  let most = 0;
-  for (let index = 0; index < PIECES; index += 1) {
-    const moved = movedMost(stops[index] as Float64Array, stops[index + 1] as Float64Array);
-    if (moved > most) {
-      most = moved;
-      piece = index;
-    }
-  }
-  // Off its ends a blend is most likely to pop, and there the widest piece need not be.
+  const width = 1 / PIECES;
+  const stops = Array.from({ length: PIECES + 1 }, (_, index) => worldAt(index * width));
+  const pieces = Array.from({ length: PIECES }, (_, index): Piece => {
+    const [from, to] = [stops[index] as Float64Array, stops[index + 1] as Float64Array];
+    return { start: index * width, width, from, to };
+  });
   compare(stops[0] as Float64Array, worldAt(END_STEP), END_STEP);
   compare(stops[PIECES] as Float64Array, worldAt(1 - END_STEP), 1 - END_STEP);
-  let from = stops[piece] as Float64Array;
-  let to = stops[piece + 1] as Float64Array;
-  let way = piece / PIECES;
-  let width = 1 / PIECES;
-  for (let halving = 0; halving < HALVINGS; halving += 1) {
-    width /= 2;
-    const middle = worldAt(way + width);
-    // A pop stays in one of the halves whole, while all that moves smoothly halves with them.
-    if (movedMost(from, middle) >= movedMost(middle, to)) to = middle;
-    else {
-      from = middle;
-      way += width;
+
+  const { node, around } = findSuspect(pieces, rig.nodes.length, size);
+  const bendOf = (piece: Piece): number =>
+    displacement(halfway(piece), node, worldAt(piece.start + piece.width / 2), node, size);
+  const [before, after] = around as readonly [Piece, Piece];
+  let last = bendOf(before) > bendOf(after) ? before : after;
+  for (let halving = 0; ; halving += 1) {
+    const half = last.width / 2;
+    const middle = worldAt(last.start + half);
+    const even = halfway(last);
+    const isSuspect = displacement(even, node, middle, node, size) > POP_TOLERANCE * size;
+    if (halving >= (isSuspect ? HALVINGS.most : HALVINGS.least)) {
+      compare(even, middle, last.start + half);
+      return;
     }
+    // A jump stays in one of the halves whole, while all that moves smoothly halves with them.
+    const isInFirst =
+      displacement(last.from, node, middle, node, size) >= displacement(middle, node, last.to, node, size);
+    last = isInFirst
+      ? { ...last, width: half, to: middle }
+      : { ...last, start: last.start + half, width: half, from: middle };
   }
-  const middle = worldAt(way + width / 2);
-  // What a smooth motion puts halfway between both ends, but for its curvature; a jump does not.
-  const halfway = from.map((value, index) => value + ((to[index] as number) - value) / 2);
-  compare(halfway, middle, way + width / 2);
 }
 
 /** Every choice of space gives the same at rest, so that choosing moves nothing but what was moved before. */

@@ -36,7 +36,8 @@ function valuesFor(
  * mixed motion there, of which no single answer can be told. What hangs on or follows such a node is mixed as well.
  */
 function mixedNodes({ rig, intent, indexOfName }: TrialBench): ReadonlySet<string> {
-  const mixed = new Set<string>();
+  // What a driver makes of the root's own channels is meant to go another way than the root.
+  const mixed = new Set(intent.drivenByRoot);
   const isCarried = (id: string): boolean => intent.nodes.get(id)?.carried ?? false;
   const linksOf = new Map<string, string[]>();
   for (const { targets, sources } of intent.links) {
@@ -44,12 +45,6 @@ function mixedNodes({ rig, intent, indexOfName }: TrialBench): ReadonlySet<strin
   }
   const parentOf = (parent: string | null): string | undefined =>
     parent === null ? undefined : rig.nodes[indexOfName.get(parent) ?? -1]?.id;
-  // What a driver makes of the root's own channels is meant to go another way than the root.
-  const carrier = rig.nodes.find(({ id }) => id === intent.carrier)?.name;
-  for (const { control, target } of rig.drivers) {
-    const driven = rig.nodes[indexOfName.get(target) ?? -1];
-    if (control === carrier && driven !== undefined) mixed.add(driven.id);
-  }
   for (let before = -1; before < mixed.size; ) {
     before = mixed.size;
     for (const { id, parent } of rig.nodes) {

@@ -30,7 +30,8 @@ export function tryNames({ rig, intent }: TrialBench): TrialResult {
   const parts = intent.nameParts();
   const taken = new Set<string>();
   for (const { key, id, name } of namedThings(rig)) {
-    count.add(parts.get(key)?.join(rig.scene.character) === name && !taken.has(name), id);
+    const meant = parts.get(key)?.join(rig.scene.character) ?? name;
+    count.add(name === meant && !taken.has(name), id);
     taken.add(name);
   }
   for (let member = 2; member <= CAST; member += 1) {

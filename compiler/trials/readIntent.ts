@@ -44,7 +44,7 @@ function intendNode(node: ResolvedNode, recipe: ResolvedRecipe, carrier: string 
   };
 }
 
-function declaredLinks(recipe: ResolvedRecipe, carrier: string | null): readonly DeclaredLink[] {
+function declaredLinks(recipe: ResolvedRecipe): readonly DeclaredLink[] {
   return [
     ...recipe.constraints.map(({ target, sources }) => ({
       targets: [target],
@@ -58,10 +58,6 @@ function declaredLinks(recipe: ResolvedRecipe, carrier: string | null): readonly
         sources: parent !== null && spaces.includes(parent) ? [parent] : spaces.slice(0, 1),
       })),
     ...recipe.solvers.map((solver) => ({ targets: idsWritten(solver), sources: idsRead(solver) })),
-    // A driver adds to what the root's motion does only when it reads the root.
-    ...recipe.drivers
-      .filter(({ control }) => control === carrier)
-      .map(({ target, control }) => ({ targets: [target], sources: [control] })),
   ];
 }
 
@@ -120,7 +116,10 @@ export function readIntent(recipe: ResolvedRecipe, context: ResolveContext): Tri
     carrier,
     left: recipe.scene.left,
     twins: findTwins(recipe),
-    links: declaredLinks(recipe, carrier),
+    links: declaredLinks(recipe),
+    drivenByRoot: new Set(
+      recipe.drivers.filter(({ control }) => control === carrier).map(({ target }) => target),
+    ),
     computedPoles: new Set(computedPoles),
     channels: new Map(recipe.controls.map(({ id, channels }) => [id, channels])),
     lines: new Map(recipe.guideLines.map(({ id, from, to }) => [id, { from, to }])),

@@ -189,7 +189,7 @@ const SABOTAGE: readonly (readonly [TrialName, string, () => Rig])[] = [
         input: 'reach',
         target: nameOf('trunk.crown'),
         channel: 'ty',
-        inputs: [0, 0.3, 0.30001, 0.45, 1],
+        inputs: [0, 0.3, 0.3 + 1e-10, 0.45, 1],
         outputs: [0, 0, 2, 0, 0],
       }),
   ],
