@@ -13,9 +13,16 @@ import { constraintOverridesControl } from './constraint-overrides-control';
 import { constraintOverwritten } from './constraint-overwritten';
 import { constraintsCompete } from './constraints-compete';
 import { controlAllLocked } from './control-all-locked';
+import { controlFarAway } from './control-far-away';
+import { controlHidden } from './control-hidden';
+import { controlNotSelectable } from './control-not-selectable';
+import { controlSizeExtreme } from './control-size-extreme';
 import { controlSteersNothing } from './control-steers-nothing';
+import { controlsCoincide } from './controls-coincide';
 import { driverFlat } from './driver-flat';
 import { driverMovesRest } from './driver-moves-rest';
+import { guideLineInPlace } from './guide-line-in-place';
+import { guideLineRepeated } from './guide-line-repeated';
 import { guideLineWithoutLength } from './guide-line-without-length';
 import { hingeAcrossBend } from './hinge-across-bend';
 import { hingeOpensBackward } from './hinge-opens-backward';
@@ -29,11 +36,13 @@ import { limitBeyondFullTurn } from './limit-beyond-full-turn';
 import { limitInverted } from './limit-inverted';
 import { limitOnLocked } from './limit-on-locked';
 import { limitZeroWidth } from './limit-zero-width';
+import { mirroredControlsDiffer } from './mirrored-controls-differ';
 import { nothingCarries } from './nothing-carries';
 import { parameterUnused } from './parameter-unused';
 import { parentCrossesSides } from './parent-crosses-sides';
 import { poleOffPlane } from './pole-off-plane';
 import { poleTooNear } from './pole-too-near';
+import { poleWithoutGuideLine } from './pole-without-guide-line';
 import { restOutsideLimits } from './rest-outside-limits';
 import { rigBelowFloor } from './rig-below-floor';
 import { rotationOrderLocksUp } from './rotation-order-locks-up';
@@ -100,6 +109,15 @@ export const RULES: readonly Rule[] = [
   attributeUnread,
   shareWithoutRange,
   channelSteersNothing,
+  controlHidden,
+  controlNotSelectable,
+  controlSizeExtreme,
+  controlFarAway,
+  controlsCoincide,
+  mirroredControlsDiffer,
+  guideLineRepeated,
+  guideLineInPlace,
+  poleWithoutGuideLine,
   parameterUnused,
   landmarkUnused,
 ];
