@@ -6,6 +6,7 @@ import { readHouse } from './readHouse';
 import { readParameters } from './readParameters';
 import { readRequest } from './readRequest';
 import { sayUnusedHouse } from './sayUnusedHouse';
+import { trialWords } from './trialWords';
 import { WrongUse } from './WrongUse';
 
 /** `check FILE…`: compiles recipes and prints what is wrong; writes nothing. */
@@ -21,23 +22,29 @@ export function check(parameters: readonly string[]): number {
   const progress = startProgress(positionals.length, { isWanted: !values.json });
   const results = requests.map(({ file, recipe, bases }, index) => {
     progress.show(index, file);
-    const { findings, rig } = compile({ recipe, bases, houses });
-    return { file, findings, rig, sources: [recipe, ...Object.values(bases), ...Object.values(houses)] };
+    const { findings, rig, trials } = compile({ recipe, bases, houses });
+    return {
+      file,
+      findings,
+      rig,
+      trials,
+      sources: [recipe, ...Object.values(bases), ...Object.values(houses)],
+    };
   });
   progress.clear();
   sayUnusedHouse(values.house, houses, results);
   if (values.json) {
     console.log(
       JSON.stringify(
-        results.map(({ file, findings }) => ({ file, findings })),
+        results.map(({ file, findings, trials }) => ({ file, findings, trials })),
         null,
         2,
       ),
     );
   } else {
-    for (const { file, findings, sources } of results) {
+    for (const { file, findings, trials, sources } of results) {
       printFindings(findings, sources);
-      console.log(`${file}: ${countWords(findings)}`);
+      console.log(`${file}: ${countWords(findings)}${trialWords(trials)}`);
     }
   }
   return results.some(({ findings }) => hasErrors(findings)) ? 1 : 0;

@@ -6,6 +6,7 @@ import { readHouse } from './readHouse';
 import { readParameters } from './readParameters';
 import { readRequest } from './readRequest';
 import { sayUnusedHouse } from './sayUnusedHouse';
+import { trialWords } from './trialWords';
 import { WrongUse } from './WrongUse';
 import { writeFiles } from './writeFiles';
 
@@ -66,8 +67,8 @@ export function compileFiles(parameters: readonly string[]): number {
       character: { ...(character === undefined ? {} : { name: character }), params },
     });
     const sources = [recipe, ...Object.values(bases), ...Object.values(houses)];
-    const { findings, rig } = compilation;
-    return { file, findings, rig, files: buildFiles(compilation), sources };
+    const { findings, rig, trials } = compilation;
+    return { file, findings, rig, trials, files: buildFiles(compilation), sources };
   });
   progress.clear();
   sayUnusedHouse(values.house, houses, results);
@@ -80,9 +81,10 @@ export function compileFiles(parameters: readonly string[]): number {
   if (values.json) {
     console.log(
       JSON.stringify(
-        results.map(({ file, findings, files }) => ({
+        results.map(({ file, findings, trials, files }) => ({
           file,
           findings,
+          trials,
           files: files.map(({ name }) => name),
         })),
         null,
@@ -90,9 +92,11 @@ export function compileFiles(parameters: readonly string[]): number {
       ),
     );
   } else {
-    for (const { file, findings, files, sources } of results) {
+    for (const { file, findings, trials, files, sources } of results) {
       printFindings(findings, sources);
-      console.log(`${file}: ${countWords(findings)}; wrote ${files.map(({ name }) => name).join(', ')}`);
+      console.log(
+        `${file}: ${countWords(findings)}${trialWords(trials)}; wrote ${files.map(({ name }) => name).join(', ')}`,
+      );
     }
   }
   return results.some(({ findings }) => hasErrors(findings)) ? 1 : 0;

@@ -59,6 +59,15 @@ export function buildFiles(compilation: Compilation): readonly BuildFile[] {
       warnings: compilation.findings.filter(({ severity }) => severity === 'warning').length,
       infos: compilation.findings.filter(({ severity }) => severity === 'info').length,
     },
+    trials: compilation.trials.map(({ trial, passed, measured, tolerance, unit, checked }) => ({
+      trial,
+      passed,
+      // More digits of what rounding leaves would say nothing.
+      measured: Number(measured.toPrecision(3)),
+      tolerance: Number(tolerance.toPrecision(3)),
+      unit,
+      checked,
+    })),
     files: files.map(({ name, mediaType, text, sha256 }) => ({
       name,
       mediaType,

@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { recipeSchema, samples } from '@/compiler';
+import { explainFinding, recipeSchema, samples } from '@/compiler';
 import { runPintle } from '../support/pintle';
 
 const root = fileURLToPath(new URL('../..', import.meta.url));
@@ -25,7 +25,7 @@ const hare = () => write('hare.recipe.yaml', samples.find(({ id }) => id === 'ha
 describe('pintle check', () => {
   it('ends with 0 when nothing is wrong', () => {
     const { status, stdout } = pintle('check', hare());
-    expect(stdout).toBe('hare.recipe.yaml: nothing is wrong\n');
+    expect(stdout).toBe('hare.recipe.yaml: nothing is wrong, 12 trials passed\n');
     expect(status).toBe(0);
   });
 
@@ -36,6 +36,16 @@ describe('pintle check', () => {
     expect(stdout).toContain('broken.recipe.yaml:4:17 error not-one-of "roof" is not allowed');
     expect(stdout).toContain('    4 |   root: { kind: roof }\n      |                 ^^^^\n');
     expect(stdout).toContain('Did you mean "root"?');
+  });
+
+  it('ends with 1 when a trial fails, and says which', () => {
+    // The wrong recipe of the finding's own page: a guide line to a joint that its control does not move.
+    const page = explainFinding('trial-guide')?.page ?? '';
+    const file = write('astray.recipe.yaml', /```yaml\n([\s\S]*?)```/.exec(page)?.[1] ?? '');
+    const { status, stdout } = pintle('check', file);
+    expect(status).toBe(1);
+    expect(stdout).toContain(' error trial-guide ');
+    expect(stdout).toContain('11 of 12 trials passed (not guide)');
   });
 
   it('gives findings as data with --json', () => {
@@ -89,7 +99,7 @@ describe('pintle compile and run', () => {
         selectable: boolean;
       }[];
     };
-    const crown = nodes.find(({ id }) => id === 'head.crown');
+    const crown = nodes.find(({ id }) => id === 'head.head.crown');
     expect(crown?.world).toHaveLength(16);
     expect(crown).toMatchObject({ container: 'bones', role: 'skin', shown: false, selectable: true });
     expect(crown?.world[13]).toBeCloseTo(120 * (0.039 + 0.491 * 0.96 + 0.288 + 0.052 + 0.13), 6);
@@ -102,7 +112,7 @@ describe('pintle compile and run', () => {
       const { nodes } = JSON.parse(pintle('run', 'build/hare.slip', '--json', ...more).stdout) as {
         nodes: { id: string; world: number[] }[];
       };
-      return nodes.find(({ id }) => id === 'head.crown')?.world[12] ?? Number.NaN;
+      return nodes.find(({ id }) => id === 'head.head.crown')?.world[12] ?? Number.NaN;
     };
     expect(at('--pose', pose) - at()).toBeCloseTo(10, 9);
   });
