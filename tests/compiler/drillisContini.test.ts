@@ -41,8 +41,8 @@ const segments = [
   ['shank', 'leg.left.knee', 'leg.left.ankle'],
   ['upper_arm', 'arm.left.shoulder', 'arm.left.elbow'],
   ['forearm', 'arm.left.elbow', 'arm.left.wrist'],
-  ['hand', 'arm.right.wrist', 'hand.right.fingertip'],
-  ['head_chin_to_vertex', 'head.chin', 'head.crown'],
+  ['hand', 'arm.right.wrist', 'hand.right.second.03'],
+  ['head_chin_to_vertex', 'head.head.skull', 'head.head.crown'],
 ] as const;
 
 describe.each([30, 96, 175.04, 260])('the upright hare at a stature of %d cm', (stature) => {

@@ -82,7 +82,7 @@ describe('framing', () => {
       return inPicture(camera, [built.world[at] ?? 0, built.world[at + 1] ?? 0, built.world[at + 2] ?? 0]);
     };
     expect(placeOf('arm.left.wrist').x).toBeGreaterThan(placeOf('arm.right.wrist').x);
-    expect(placeOf('head.crown').y).toBeGreaterThan(placeOf('leg.left.ankle').y);
+    expect(placeOf('head.head.crown').y).toBeGreaterThan(placeOf('leg.left.ankle').y);
   });
 
   it('comes near to a chosen thing, with room around it', () => {

@@ -21,12 +21,12 @@ describe('journey 1: a new rigger, ten minutes', () => {
     await makeRecipe(page, 'Upright hare', 'Postmaster "Quill"', 'quill');
 
     // A number changes, and the rig moves while typing.
-    const before = await positionOf(page, 'head.crown');
+    const before = await positionOf(page, 'head.head.crown');
     const viewport = page.getByTestId('viewport');
     const pictureBefore = await viewport.screenshot();
     await replaceInText(page, 'default: 96', 'default: 120');
     await expect
-      .poll(async () => (await positionOf(page, 'head.crown'))[1])
+      .poll(async () => (await positionOf(page, 'head.head.crown'))[1])
       .toBeCloseTo(((before[1] ?? 0) * 120) / 96, 2);
     const pictureAfter = await viewport.screenshot();
     expect(pictureAfter.equals(pictureBefore)).toBe(false);
@@ -68,7 +68,7 @@ describe('journey 1: a new rigger, ten minutes', () => {
     if (!rig) throw new Error('the downloaded script did not run');
     const poser = createPoser(rig);
     poser.evaluate();
-    const crown = rig.nodes.findIndex(({ id }) => id === 'head.crown');
+    const crown = rig.nodes.findIndex(({ id }) => id === 'head.head.crown');
     expect(poser.world[crown * 16 + 13]).toBeCloseTo(((before[1] ?? 0) * 120) / 96, 2);
 
     // Both versions can be compared.
