@@ -22,9 +22,14 @@ export function keyText(key: unknown): string | null {
   return findLookAlike(value)?.twin ?? value;
 }
 
-/** The first pair with a key; later twins are findings and are not read. */
-function findPair(map: YAMLMap, key: string): Pair | undefined {
-  return map.items.find((pair) => keyText(pair.key) === key);
+/** The pairs of a map by key, the first of each; later twins are findings and are not read. */
+function indexPairs(map: YAMLMap): ReadonlyMap<string, Pair> {
+  const pairs = new Map<string, Pair>();
+  for (const pair of map.items) {
+    const key = keyText(pair.key);
+    if (key !== null && !pairs.has(key)) pairs.set(key, pair);
+  }
+  return pairs;
 }
 
 /** A parsed YAML text. Positions are looked up in its tree on demand, since most values never need one. */
@@ -34,6 +39,8 @@ export class YamlSource implements SourceDocument {
   readonly refusedEntries: ReadonlySet<string>;
   readonly #document: Document | null;
   readonly #anchors: ReadonlyMap<string, Node>;
+  /** Made when a map is first looked into: thousands of findings may each look up one of thousands of entries. */
+  readonly #pairs = new Map<YAMLMap, ReadonlyMap<string, Pair>>();
 
   /** `read` is null for a text that was refused as a whole. */
   constructor(
@@ -58,6 +65,15 @@ export class YamlSource implements SourceDocument {
     return isNode(node) ? node : null;
   }
 
+  #pairIn(map: YAMLMap, key: string): Pair | undefined {
+    let pairs = this.#pairs.get(map);
+    if (!pairs) {
+      pairs = indexPairs(map);
+      this.#pairs.set(map, pairs);
+    }
+    return pairs.get(key);
+  }
+
   /** The pair or node at a path, as far as it was written, and whether the whole path was. */
   #find(path: Path): { readonly node: Node | null; readonly pair: Pair | null; readonly whole: boolean } {
     let node: Node | null = this.#document?.contents ?? null;
@@ -65,7 +81,7 @@ export class YamlSource implements SourceDocument {
     for (const step of path) {
       const here: Node | null = this.#follow(node);
       if (isMap(here)) {
-        const next = findPair(here, String(step));
+        const next = this.#pairIn(here, String(step));
         if (!next) return { node, pair, whole: false };
         pair = next;
         node = isNode(next.value) ? next.value : null;
