@@ -66,7 +66,8 @@ function halfway({ from, to }: Piece): Float64Array {
  * next by as much as it moves at all. A smooth motion, however wide, differs little from piece to piece.
  */
 function findSuspect(pieces: readonly Piece[], count: number, size: number) {
-  let suspect = { node: 0, around: pieces.slice(0, 2), score: 0 };
+  let around: readonly [Piece, Piece] = [pieces[0] as Piece, pieces[1] as Piece];
+  let suspect = { node: 0, score: 0 };
   for (let i = 0; i + 1 < pieces.length; i += 1) {
     const [before, after] = [pieces[i] as Piece, pieces[i + 1] as Piece];
     const even = halfway({ ...before, to: after.to });
@@ -75,10 +76,12 @@ function findSuspect(pieces: readonly Piece[], count: number, size: number) {
       const second = displacement(after.from, node, after.to, node, size);
       const bend = 2 * displacement(even, node, before.to, node, size);
       const score = first + second > 0 ? (bend * bend) / (first + second) : 0;
-      if (score > suspect.score) suspect = { node, around: [before, after], score };
+      if (score <= suspect.score) continue;
+      suspect = { node, score };
+      around = [before, after];
     }
   }
-  return suspect;
+  return { node: suspect.node, around };
 }
 
 /** Walks all blends together through a pose, and closes in on what looks most like a jump. */
@@ -113,7 +116,7 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
   const { node, around } = findSuspect(pieces, rig.nodes.length, size);
   const bendOf = (piece: Piece): number =>
     displacement(halfway(piece), node, worldAt(piece.start + piece.width / 2), node, size);
-  const [before, after] = around as readonly [Piece, Piece];
+  const [before, after] = around;
   let last = bendOf(before) > bendOf(after) ? before : after;
   for (let halving = 0; ; halving += 1) {
     const half = last.width / 2;

@@ -6,7 +6,7 @@ import { useCallback, useMemo, useRef, useState } from 'react';
 import type { Draft } from '@/app/api/v1/_contracts/draft';
 import type { Recipe } from '@/app/api/v1/_contracts/recipe';
 import type { Version } from '@/app/api/v1/_contracts/version';
-import type { Fix, SourceText, Span } from '@/compiler';
+import type { Fix, SourceText, Span, TrialName } from '@/compiler';
 import { instantWords } from '@/components/frame/dates';
 import { TitleBlock } from '@/components/frame/TitleBlock';
 import { useCompiler } from '@/components/worker/useCompiler';
@@ -24,6 +24,7 @@ import { SaveVersionDialog } from './SaveVersionDialog';
 import { ScriptPane } from './ScriptPane';
 import { TextFoot } from './TextFoot';
 import { ThingsPane } from './ThingsPane';
+import { countTrials, TrialsPane } from './TrialsPane';
 import { useDraft } from './useDraft';
 import { useEditorKeys } from './useEditorKeys';
 import { useSelection } from './useSelection';
@@ -54,7 +55,14 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
   // The name under which the server compiles it too, so that findings name the same document.
   const sourceName = `${recipe.name}.recipe.yaml`;
   const compiler = useCompiler(text, sourceName, bases);
-  const { built, findings } = compiler;
+  const { built, findings, trials } = compiler;
+  const [posedTrial, setPosedTrial] = useState<TrialName | null>(null);
+  // A pose belongs to the text it failed in: once the trial passes, the picture is at rest again.
+  const posed = trials.find(({ trial, world }) => trial === posedTrial && world !== null) ?? null;
+  const pictured = useMemo(
+    () => (built && posed?.world ? { ...built, world: posed.world } : built),
+    [built, posed],
+  );
   const selection = useSelection(built);
   const keeper = useDraft({
     recipeId: recipe.id,
@@ -113,6 +121,7 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
       { words: 'Go to the next finding in the text', keys: 'Alt F8', run: () => code.current?.nextFinding() },
       { words: 'Go to the picture of the rig', keys: null, run: focus('[data-testid="viewport"]') },
       { words: 'Go to the findings', keys: null, run: focus('#tab-findings') },
+      { words: 'Go to the trials', keys: null, run: focus('#tab-trials') },
       { words: 'Go to the list of things', keys: null, run: focus('#tab-things') },
       { words: 'Go to the build script', keys: null, run: focus('#tab-script') },
       ...(version.errors === 0
@@ -131,8 +140,8 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
     ];
   }, [canSave, recipe.id, router, version]);
 
-  const picture = built ? (
-    <Viewport built={built} isOlder={compiler.isBuiltOlder} chosen={selection.chosen} onChoose={choose} />
+  const picture = pictured ? (
+    <Viewport built={pictured} isOlder={compiler.isBuiltOlder} chosen={selection.chosen} onChoose={choose} />
   ) : (
     <p className="p-4 text-ink-soft">
       {compiler.sequence === 0
@@ -197,6 +206,18 @@ export function RecipeEditor({ recipe, version: opened, draft, bases, isReadOnly
                 source={sourceName}
                 onGoTo={goTo}
                 onFix={applyFix}
+              />
+            ),
+          },
+          {
+            id: 'trials',
+            words: countTrials(trials),
+            content: (
+              <TrialsPane
+                trials={trials}
+                posed={posed?.trial ?? null}
+                onPose={setPosedTrial}
+                onChoose={choose}
               />
             ),
           },

@@ -1,4 +1,4 @@
-import type { Finding, Rig, SourceText } from '@/compiler';
+import type { Finding, Rig, SourceText, TrialResult } from '@/compiler';
 
 /** What the page asks of the compiler. Answers carry the same sequence, so that stale ones are dropped. */
 export interface CompileQuestion {
@@ -18,6 +18,12 @@ export interface PlacedNode {
   readonly end: number | null;
 }
 
+/** What a trial measured, with the pose that shows a failure. */
+export interface TrialShown extends TrialResult {
+  /** World matrices like those of the built rig at the trial's pose; null when it passed. */
+  readonly world: Float64Array | null;
+}
+
 /** The rig that the emitted script built, posed at rest. */
 export interface BuiltRig {
   readonly rig: Rig;
@@ -30,8 +36,10 @@ export interface BuiltRig {
 export interface CompileAnswer {
   readonly sequence: number;
   readonly findings: readonly Finding[];
-  /** Null while the text has errors. */
+  /** Null while the text has errors, but for trials that failed: what failed them can be looked at. */
   readonly built: BuiltRig | null;
+  /** Empty while there is no rig to try. */
+  readonly trials: readonly TrialShown[];
   /** Milliseconds from receiving the question to this answer. */
   readonly took: number;
 }
