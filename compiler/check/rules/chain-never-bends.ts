@@ -22,7 +22,8 @@ export const chainNeverBends: Rule = {
         for (const id of idsWritten(solver)) moved.add(id);
       },
       finish() {
-        if (!isWhole) return;
+        // Where nothing turns any joint, the recipe is a bare skeleton, and meant to be one.
+        if (!isWhole || moved.size === 0) return;
         for (const { id, jointIds, path } of resolved.chains) {
           if (jointIds.length < 3 || jointIds.some((joint) => moved.has(joint))) continue;
           report(path, { id }, { part: 'key' });

@@ -2,7 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { told } from '../ruleFindings';
 
 const CODE = 'chain-never-bends';
-const TAIL = 'chains:\n  tail: { points: [[0, 10, 0], [0, 10, -10], [0, 10, -20]] }\n';
+const TAIL =
+  '  ear: { kind: strand, points: [[0, 30, 0], [0, 40, 0]], joints: 3 }\nchains:\n  tail: { points: [[0, 10, 0], [0, 10, -10], [0, 10, -20]] }\n';
 const CONTROL = 'controls:\n  tail: { at: tail.02, attributes: { wag: { min: -1, max: 1 } } }\n';
 
 describe(CODE, () => {
@@ -19,6 +20,10 @@ describe(CODE, () => {
     expect(told(CODE, '  tail: { kind: strand, points: [[0, 10, 0], [0, 10, -20]], joints: 4 }\n')).toEqual(
       [],
     );
+  });
+
+  it('is silent for a bare skeleton, in which nothing turns anything', () => {
+    expect(told(CODE, TAIL.replace(/.*\n/, ''))).toEqual([]);
   });
 
   it('is silent for a single bone, which may be rigid', () => {

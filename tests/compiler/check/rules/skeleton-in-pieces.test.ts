@@ -6,8 +6,18 @@ const withHead = (rest: string, more = ''): string =>
   `chains:\n  body: { points: [[0, 10, 0], [0, 20, 0]] }\n  head: { points: [[0, 22, 0], [0, 30, 0]]${rest} }\n${more}`;
 
 describe(CODE, () => {
-  it('points at every loose chain but the first', () => {
-    expect(told(CODE, withHead(''))).toEqual([['head', '"head" hangs on nothing, apart from "body".']]);
+  it('points at the second piece', () => {
+    expect(told(CODE, withHead(''))).toEqual([
+      ['head', '"head" hangs on nothing, apart from "body": the skeleton is in 2 pieces.'],
+    ]);
+  });
+
+  it('tells any number of pieces in one finding', () => {
+    const more =
+      'tail: { points: [[0, 9, 0], [0, 9, -9]] }\n  fin: { points: [[0, 8, 0], [0, 8, -9]] }\n  head:';
+    expect(told(CODE, withHead('').replace('head:', more)).map(([, message]) => message)).toEqual([
+      '"tail" hangs on nothing, apart from "body": the skeleton is in 4 pieces.',
+    ]);
   });
 
   it('tells both sides of a mirrored chain in one finding', () => {
