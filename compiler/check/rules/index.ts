@@ -28,7 +28,11 @@ import { hingeAcrossBend } from './hinge-across-bend';
 import { hingeOpensBackward } from './hinge-opens-backward';
 import { jointsFewerThanPoints } from './joints-fewer-than-points';
 import { jointsInParkedContainer } from './joints-in-parked-container';
+import { landmarkLeftInMiddle } from './landmark-left-in-middle';
+import { landmarkOffMiddle } from './landmark-off-middle';
+import { landmarkOnOtherSide } from './landmark-on-other-side';
 import { landmarkUnused } from './landmark-unused';
+import { landmarksCoincide } from './landmarks-coincide';
 import { landmarksNearlyMirrored } from './landmarks-nearly-mirrored';
 import { limbBonesUnequal } from './limb-bones-unequal';
 import { limbNearlyStraight } from './limb-nearly-straight';
@@ -37,7 +41,12 @@ import { limitInverted } from './limit-inverted';
 import { limitOnLocked } from './limit-on-locked';
 import { limitZeroWidth } from './limit-zero-width';
 import { mirroredControlsDiffer } from './mirrored-controls-differ';
+import { nameContradictsSide } from './name-contradicts-side';
+import { namesNearlySame } from './names-nearly-same';
 import { nothingCarries } from './nothing-carries';
+import { parameterHalfBounded } from './parameter-half-bounded';
+import { parameterNeverVaries } from './parameter-never-varies';
+import { parameterUnitDiffers } from './parameter-unit-differs';
 import { parameterUnused } from './parameter-unused';
 import { parentCrossesSides } from './parent-crosses-sides';
 import { poleOffPlane } from './pole-off-plane';
@@ -118,6 +127,15 @@ export const RULES: readonly Rule[] = [
   guideLineRepeated,
   guideLineInPlace,
   poleWithoutGuideLine,
+  parameterHalfBounded,
+  parameterNeverVaries,
+  parameterUnitDiffers,
+  landmarksCoincide,
+  landmarkOnOtherSide,
+  landmarkLeftInMiddle,
+  landmarkOffMiddle,
+  namesNearlySame,
+  nameContradictsSide,
   parameterUnused,
   landmarkUnused,
 ];
