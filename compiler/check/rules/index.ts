@@ -6,12 +6,14 @@ import { chainCrossesMiddle } from './chain-crosses-middle';
 import { chainFoldsBack } from './chain-folds-back';
 import { chainNeverBends } from './chain-never-bends';
 import { channelSteersNothing } from './channel-steers-nothing';
+import { choiceRepeated } from './choice-repeated';
 import { constraintCrossesSides } from './constraint-crosses-sides';
 import { constraintFollowsParent } from './constraint-follows-parent';
 import { constraintJumpsAtRest } from './constraint-jumps-at-rest';
 import { constraintOverridesControl } from './constraint-overrides-control';
 import { constraintOverwritten } from './constraint-overwritten';
 import { constraintsCompete } from './constraints-compete';
+import { containerUnused } from './container-unused';
 import { controlAllLocked } from './control-all-locked';
 import { controlFarAway } from './control-far-away';
 import { controlHidden } from './control-hidden';
@@ -21,6 +23,8 @@ import { controlSteersNothing } from './control-steers-nothing';
 import { controlsCoincide } from './controls-coincide';
 import { driverFlat } from './driver-flat';
 import { driverMovesRest } from './driver-moves-rest';
+import { entryChangesNothing } from './entry-changes-nothing';
+import { expressionReadsNothing } from './expression-reads-nothing';
 import { guideLineInPlace } from './guide-line-in-place';
 import { guideLineRepeated } from './guide-line-repeated';
 import { guideLineWithoutLength } from './guide-line-without-length';
@@ -54,6 +58,7 @@ import { poleTooNear } from './pole-too-near';
 import { poleWithoutGuideLine } from './pole-without-guide-line';
 import { restOutsideLimits } from './rest-outside-limits';
 import { rigBelowFloor } from './rig-below-floor';
+import { roleUnused } from './role-unused';
 import { rotationOrderLocksUp } from './rotation-order-locks-up';
 import { scaleImplausible } from './scale-implausible';
 import { shareWithoutRange } from './share-without-range';
@@ -63,7 +68,9 @@ import { soleNotLevel } from './sole-not-level';
 import { solverCrossesSides } from './solver-crosses-sides';
 import { solversShareJoint } from './solvers-share-joint';
 import { sourceWithoutWeight } from './source-without-weight';
+import { spaceWithoutChoice } from './space-without-choice';
 import { splineRunsBackward } from './spline-runs-backward';
+import { textBlank } from './text-blank';
 import { towardAlongChain } from './toward-along-chain';
 import { twistJointOffBone } from './twist-joint-off-bone';
 import { worldOrientedLimb } from './world-oriented-limb';
@@ -136,6 +143,13 @@ export const RULES: readonly Rule[] = [
   landmarkOffMiddle,
   namesNearlySame,
   nameContradictsSide,
+  entryChangesNothing,
+  roleUnused,
+  containerUnused,
+  expressionReadsNothing,
+  spaceWithoutChoice,
+  choiceRepeated,
+  textBlank,
   parameterUnused,
   landmarkUnused,
 ];
