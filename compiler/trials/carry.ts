@@ -36,25 +36,33 @@ function valuesFor(
  * mixed motion there, of which no single answer can be told. What hangs on or follows such a node is mixed as well.
  */
 function mixedNodes({ rig, intent, indexOfName }: TrialBench): ReadonlySet<string> {
+  const isCarried = (id: string): boolean => intent.nodes.get(id)?.carried ?? false;
   // What a driver makes of the root's own channels is meant to go another way than the root.
   const mixed = new Set(intent.drivenByRoot);
-  const isCarried = (id: string): boolean => intent.nodes.get(id)?.carried ?? false;
-  const linksOf = new Map<string, string[]>();
-  for (const { targets, sources } of intent.links) {
-    for (const target of targets) linksOf.set(target, [...(linksOf.get(target) ?? []), ...sources]);
+  const dependents = new Map<string, string[]>();
+  const addDependent = (source: string, target: string): void => {
+    const own = dependents.get(source);
+    if (own) own.push(target);
+    else dependents.set(source, [target]);
+  };
+  for (const { id, parent } of rig.nodes) {
+    const above = parent === null ? undefined : rig.nodes[indexOfName.get(parent) ?? -1];
+    if (above) addDependent(above.id, id);
   }
-  const parentOf = (parent: string | null): string | undefined =>
-    parent === null ? undefined : rig.nodes[indexOfName.get(parent) ?? -1]?.id;
-  for (let before = -1; before < mixed.size; ) {
-    before = mixed.size;
-    for (const { id, parent } of rig.nodes) {
-      if (mixed.has(id)) continue;
-      const sources = linksOf.get(id) ?? [];
-      const above = parentOf(parent);
-      const isMixed =
-        (above !== undefined && mixed.has(above)) ||
-        sources.some((source) => mixed.has(source) || isCarried(source) !== isCarried(id));
-      if (isMixed) mixed.add(id);
+  for (const { targets, sources } of intent.links) {
+    for (const target of targets) {
+      for (const source of sources) {
+        addDependent(source, target);
+        if (isCarried(source) !== isCarried(target)) mixed.add(target);
+      }
+    }
+  }
+  const pending = [...mixed];
+  for (let next = pending.pop(); next !== undefined; next = pending.pop()) {
+    for (const dependent of dependents.get(next) ?? []) {
+      if (mixed.has(dependent)) continue;
+      mixed.add(dependent);
+      pending.push(dependent);
     }
   }
   return mixed;

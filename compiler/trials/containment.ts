@@ -4,6 +4,8 @@ import { Count } from './Tally';
 import type { TrialBench } from './TrialBench';
 import type { TrialResult } from './TrialResult';
 
+const NOTHING_AROUND: ReadonlySet<string> = new Set();
+
 /**
  * Everything lies inside the rig's root group and in the container of its role: what the rig says of a node's
  * container, and the groups that the node really hangs beneath.
@@ -17,8 +19,9 @@ export function tryContainment({ rig, intent, indexOfName, indexOfId }: TrialBen
     const above = parent === null ? undefined : indexOfName.get(parent);
     const aboveNode = above === undefined ? undefined : rig.nodes[above];
     const inherited = above === undefined ? undefined : around[above];
-    const groups = new Set(inherited ?? []);
-    if (aboveNode?.role === 'container') groups.add(aboveNode.id);
+    const before = inherited ?? NOTHING_AROUND;
+    // Most nodes hang on one in the same groups and share its set.
+    const groups = aboveNode?.role === 'container' ? new Set([...before, aboveNode.id]) : before;
     around[index] = groups;
     const intended = intent.nodes.get(id);
     if (id === groupId(RIG_CONTAINER)) {

@@ -73,9 +73,10 @@ export const trialFindings = declareFindings({
     help: 'This is a fault of the compiler, not of the recipe: please report it with the recipe.',
   },
   'trial-names': {
-    severity: 'error',
+    // Names of a standard for single figures leave the character out on purpose; within one rig clashes are errors.
+    severity: 'warning',
     summary: 'Characters of one cast would share names in one scene.',
     message: 'In a scene with ten characters {things} would share its name with something else: {measured}.',
-    help: 'Let the naming pattern of the house rules include character, side, path, index and role.',
+    help: 'Let the naming pattern of the house rules include the character, or keep this rig alone in its scene.',
   },
 });

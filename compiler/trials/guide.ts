@@ -20,7 +20,7 @@ interface GuideLine {
 
 function findGuideLines(bench: TrialBench): readonly GuideLine[] {
   const { rig, intent, indexOfId, indexOfName } = bench;
-  const influencesOf = findInfluences(bench);
+  const isMovedBy = findInfluences(bench);
   const nodeAt = (index: number | undefined): RigNode | undefined =>
     index === undefined ? undefined : rig.nodes[index];
   return [...intent.lines].map(([id, { from, to }]) => {
@@ -33,8 +33,8 @@ function findGuideLines(bench: TrialBench): readonly GuideLine[] {
       first !== undefined &&
       second !== undefined &&
       (first.kind === 'control' || second.kind === 'control') &&
-      !influencesOf(first.name).has(second.name) &&
-      !influencesOf(second.name).has(first.name);
+      !isMovedBy(second.name, new Set([first.name])) &&
+      !isMovedBy(first.name, new Set([second.name]));
     return { id, own, ends: meant.map((node, end) => ({ meant: node, drawn: drawn[end] })), isIdle };
   });
 }

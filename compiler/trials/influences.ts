@@ -42,19 +42,22 @@ function directInfluences(rig: Rig): ReadonlyMap<string, ReadonlySet<string>> {
   return direct;
 }
 
-/** Gives, for a node by name, the names of all nodes that can move it, near or far; itself among them. */
-export function findInfluences({ rig }: TrialBench): (name: string) => ReadonlySet<string> {
+/** Tells whether any of some nodes, by name, can move another one, near or far, or is that one. */
+export function findInfluences({
+  rig,
+}: Pick<TrialBench, 'rig'>): (name: string, sources: ReadonlySet<string>) => boolean {
   const direct = directInfluences(rig);
-  return (name) => {
-    const found = new Set([name]);
+  return (name, sources) => {
+    const seen = new Set([name]);
     const pending = [name];
     for (let next = pending.pop(); next !== undefined; next = pending.pop()) {
+      if (sources.has(next)) return true;
       for (const source of direct.get(next) ?? []) {
-        if (found.has(source)) continue;
-        found.add(source);
+        if (seen.has(source)) continue;
+        seen.add(source);
         pending.push(source);
       }
     }
-    return found;
+    return false;
   };
 }

@@ -182,13 +182,10 @@ function leaveOutLopsided(
 ): readonly Pair[] {
   const isLoner = ({ id, side, kind }: RigNode): boolean =>
     side !== 'centre' && (kind === 'joint' || kind === 'control') && !paired.has(id);
-  const loners = bench.rig.nodes.filter(isLoner).map(({ name }) => name);
-  if (loners.length === 0) return pairs;
-  const influencesOf = findInfluences(bench);
-  const isEven = (index: number): boolean => {
-    const influences = influencesOf(bench.rig.nodes[index]?.name ?? '');
-    return !loners.some((name) => influences.has(name));
-  };
+  const loners = new Set(bench.rig.nodes.filter(isLoner).map(({ name }) => name));
+  if (loners.size === 0) return pairs;
+  const isMovedBy = findInfluences(bench);
+  const isEven = (index: number): boolean => !isMovedBy(bench.rig.nodes[index]?.name ?? '', loners);
   return pairs.filter(({ leftIndex, rightIndex }) => isEven(leftIndex) && isEven(rightIndex));
 }
 

@@ -48,8 +48,22 @@ export function startOf(chain: ReachChain): number {
   return chain.joints[0] as number;
 }
 
+/** By name, what each node follows as a whole through a constraint: the first source of the first such one. */
+function followedNodes({ rig }: UnposedBench): ReadonlyMap<string, string> {
+  const follows = new Map<string, string>();
+  for (const { kind, target, sources } of rig.constraints) {
+    const [first] = sources;
+    if (kind === 'parent' && first !== undefined && !follows.has(target)) follows.set(target, first.node);
+  }
+  return follows;
+}
+
 /** The control that moves a node as a whole: itself, what it hangs on or what it follows; null when there is none. */
-function moverOf(index: number, bench: UnposedBench): ControlNode | null {
+function moverOf(
+  index: number,
+  bench: UnposedBench,
+  follows: ReadonlyMap<string, string>,
+): ControlNode | null {
   const { rig, intent, indexOfName } = bench;
   let node = rig.nodes[index];
   for (let hops = 0; node !== undefined && hops < rig.nodes.length; hops += 1) {
@@ -57,8 +71,7 @@ function moverOf(index: number, bench: UnposedBench): ControlNode | null {
     if (node.kind === 'control' && isFree(node, 'tx') && isFree(node, 'ty') && isFree(node, 'tz'))
       return node;
     const { name }: { readonly name: string } = node;
-    const follows = rig.constraints.find(({ kind, target }) => target === name && kind === 'parent');
-    const next: string | null = follows?.sources[0]?.node ?? node.parent;
+    const next: string | null = follows.get(name) ?? node.parent;
     node = rig.nodes[next === null ? -1 : (indexOfName.get(next) ?? -1)];
   }
   return null;
@@ -73,18 +86,18 @@ const SWING: Vec3 = [18, -24, 12];
  * where goals really are.
  */
 function reachPose(
-  chains: readonly ReachChain[],
+  movers: ReadonlyMap<ReachChain, ControlNode | null>,
   bench: UnposedBench,
   share: number,
   stretch: number,
 ): PoseValues {
   const draft: PoseDraft = {};
-  for (const chain of chains) {
+  for (const chain of movers.keys()) {
     const { solver } = chain;
     putAmount(draft, solver.blend, 1, bench);
     putAmount(draft, solver.stretch, stretch, bench);
     putAmount(draft, solver.swing, 0, bench);
-    const mover = moverOf(chain.goal, bench);
+    const mover = movers.get(chain) ?? null;
     if (mover === null) continue;
     const start = readPosition(bench.rest, startOf(chain));
     const end = readPosition(bench.rest, chain.joints[chain.joints.length - 1] as number);
@@ -111,12 +124,14 @@ const NUDGED = [
 /** Evaluates the poses in which chains are tried, for all trials of them together. */
 export function poseChains(chains: readonly ReachChain[], bench: UnposedBench): readonly ChainPose[] {
   if (chains.length === 0) return [];
+  const follows = followedNodes(bench);
+  const movers = new Map(chains.map((chain) => [chain, moverOf(chain.goal, bench, follows)]));
   const canStretch = chains.some(({ solver }) => attributeOf(solver.stretch, bench));
   const poses = [
-    ...SHARES.map((share) => reachPose(chains, bench, share, 0)),
-    ...(canStretch ? STRETCHED_SHARES : []).map((share) => reachPose(chains, bench, share, 1)),
+    ...SHARES.map((share) => reachPose(movers, bench, share, 0)),
+    ...(canStretch ? STRETCHED_SHARES : []).map((share) => reachPose(movers, bench, share, 1)),
     ...NUDGED.map(({ seed, share }) =>
-      joinPoses(nudgedPose(bench, seed), reachPose(chains, bench, share, 0)),
+      joinPoses(nudgedPose(bench, seed), reachPose(movers, bench, share, 0)),
     ),
   ];
   return poses.map((pose) => {
