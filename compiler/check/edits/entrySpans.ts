@@ -12,12 +12,9 @@ export interface EntrySpans {
   readonly valueEnd: number;
 }
 
-/** An anchor or alias; a multiplication has a space behind its star. */
-const ANCHOR = /(^|[\s,:{[])[&*][^\s,}\]]/;
-
 /**
  * Finds a map entry for editing; null when several documents wrote it, so that an edit of one would only uncover
- * another's, or when it shares anchors or aliases with other places.
+ * another's.
  */
 export function entrySpans(document: MergedDocument, path: Path): EntrySpans | null {
   const writers = document.layers.filter((layer) => layer.has(path));
@@ -27,7 +24,7 @@ export function entrySpans(document: MergedDocument, path: Path): EntrySpans | n
   const value = layer.spanAt(path);
   const { text } = layer.source;
   const isPlain = key.source === value.source && key.end < value.start && value.end <= text.length;
-  if (!isPlain || ANCHOR.test(text.slice(key.end, value.end))) return null;
+  if (!isPlain) return null;
   return {
     key,
     text,

@@ -6,16 +6,27 @@ import { spanNear } from './spanNear';
 
 type Edit = Fix['edits'][number];
 
+/** An anchor or alias, which other places may need; a multiplication has a space behind its star. */
+const ANCHOR = /(^|[\s,:{[])[&*][^\s,}\]]/;
+
+/** Where the blank stretch before an offset begins. Looked for backward: a pattern would search the whole text. */
+function blankStart(text: string, end: number): number {
+  let start = end;
+  while (start > 0 && ' \t\r\n'.includes(text[start - 1] ?? '')) start -= 1;
+  return start;
+}
+
 /** Removes an entry of a map in braces with the comma that sets it off. */
 function removeFromBraces({ text, key, keyStart, valueEnd }: EntrySpans): Edit | null {
-  const before = /[{,]\s*$/.exec(text.slice(0, keyStart));
+  const blank = blankStart(text, keyStart);
+  const before = text[blank - 1];
   const after = /^\s*(,[ \t]*|\})/.exec(text.slice(valueEnd));
-  if (!before || !after) return null;
+  if ((before !== '{' && before !== ',') || !after) return null;
   if (after[1] !== '}')
     return { span: spanNear(key, text, keyStart, valueEnd + after[0].length), newText: '' };
   // The last entry takes the comma before it away; the brace that opens the map stays.
-  const start = before[0].startsWith('{') ? before.index + 1 : before.index;
-  const end = before[0].startsWith('{') ? valueEnd + after[0].length - 1 : valueEnd;
+  const start = before === '{' ? blank : blank - 1;
+  const end = before === '{' ? valueEnd + after[0].length - 1 : valueEnd;
   return { span: spanNear(key, text, start, end), newText: '' };
 }
 
@@ -43,7 +54,7 @@ function emptyMap(parent: EntrySpans): Edit | null {
  */
 export function removeEntry(document: MergedDocument, path: Path): Edit | null {
   const entry = entrySpans(document, path);
-  if (!entry) return null;
+  if (!entry || ANCHOR.test(entry.text.slice(entry.keyEnd, entry.valueEnd))) return null;
   const parentPath = path.slice(0, -1);
   const layer = document.layers.find((each) => each.has(path));
   const siblings = valueIn(layer?.value, parentPath);
@@ -52,7 +63,13 @@ export function removeEntry(document: MergedDocument, path: Path): Edit | null {
   const parent = entrySpans(document, parentPath);
   if (!parent) return null;
   if (parent.text[parent.valueStart] === '{') return removeFromBraces(entry);
-  return Object.keys(siblings).length === 1 ? emptyMap(parent) : removeLines(entry);
+  return hasOneKey(siblings) ? emptyMap(parent) : removeLines(entry);
+}
+
+function hasOneKey(map: object): boolean {
+  let count = 0;
+  for (const _ in map) if (++count > 1) return false;
+  return count === 1;
 }
 
 function valueIn(value: unknown, path: Path): unknown {

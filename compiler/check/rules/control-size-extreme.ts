@@ -18,17 +18,19 @@ export const controlSizeExtreme: Rule = {
   create({ report, stage, resolved, solved }) {
     let size: number | null = null;
     return {
-      control({ id, path }) {
+      control({ id, path, size: factor }) {
         const written = [...path, 'size'];
         const radius = solved.sizes.get(id);
         if (radius === undefined || !isWritten(stage.document, written)) return;
         size ??= sizeOfRig(solved);
-        if (size === 0 || (radius <= size * LARGEST && radius >= size * SMALLEST)) return;
+        const whole = size;
+        const fits = (length: number): boolean => length <= whole * LARGEST && length >= whole * SMALLEST;
+        if (size === 0 || fits(radius)) return;
         const short = (length: number): number => Number(length.toPrecision(3));
         report(
           written,
           { id, radius: short(radius), size: short(size), unit: resolved.scene.unit },
-          rewrite(stage.document, 'Write 1', [{ path: written, newText: '1' }]),
+          fits(radius / factor) ? rewrite(stage.document, 'Write 1', [{ path: written, newText: '1' }]) : {},
         );
       },
     };

@@ -15,6 +15,8 @@ export const entryChangesNothing: Rule = {
     return {
       finish() {
         for (const collection of COLLECTIONS) {
+          // A mesh is whole with its id alone.
+          if (collection === 'geometry') continue;
           for (const [id, entry] of Object.entries(recipe[collection] ?? {})) {
             const path = [collection, id];
             if (stage.poisoned.has(path.join('/'))) continue;
