@@ -53,6 +53,7 @@ import { parameterNeverVaries } from './parameter-never-varies';
 import { parameterUnitDiffers } from './parameter-unit-differs';
 import { parameterUnused } from './parameter-unused';
 import { parentCrossesSides } from './parent-crosses-sides';
+import { partOnOneSide } from './part-on-one-side';
 import { poleOffPlane } from './pole-off-plane';
 import { poleTooNear } from './pole-too-near';
 import { poleWithoutGuideLine } from './pole-without-guide-line';
@@ -150,6 +151,7 @@ export const RULES: readonly Rule[] = [
   spaceWithoutChoice,
   choiceRepeated,
   textBlank,
+  partOnOneSide,
   parameterUnused,
   landmarkUnused,
 ];
