@@ -22,6 +22,12 @@ describe(CODE, () => {
     expect(told(CODE, eye('eye.ball', CONSTRAINT)).map(([text]) => text)).toEqual(['look']);
   });
 
+  it('counts a ten-thousandth of the rig as the same place', () => {
+    // From the root control to the eye the rig measures 50 cm.
+    expect(told(CODE, eye('[0, 50, 0.0049]', SOLVER))).toHaveLength(1);
+    expect(told(CODE, eye('[0, 50, 0.0051]', SOLVER))).toEqual([]);
+  });
+
   it('is silent as soon as there is a direction, and for what does not aim', () => {
     expect(told(CODE, eye('[0, 50, 1]', SOLVER))).toEqual([]);
     expect(told(CODE, eye('[0, 50, 1]', CONSTRAINT))).toEqual([]);

@@ -32,6 +32,7 @@ describe(CODE, () => {
     expect(told(CODE, arm('centre', '[-8, 50, 4]'))).toEqual([]);
     expect(told(CODE, arm('left', '[0, 50, 4]'))).toEqual([]);
     expect(told(CODE, arm('left', '[-0.1, 50, 4]'))).toEqual([]);
+    expect(told(CODE, arm('left', '[-0.4, 50, 4]'))).toHaveLength(1);
   });
 
   it('leaves a sided landmark on the wrong side to its own finding', () => {

@@ -33,6 +33,14 @@ describe(CODE, () => {
     expect(told(CODE, leg(`{ rx: ${STILL}, ry: { min: -90, max: 90 }, rz: ${STILL} }`, orient))).toEqual([]);
   });
 
+  it('allows 30 degrees between the hinge and the bend', () => {
+    const turned = (toward: string) =>
+      leg(`{ rx: ${STILL}, ry: ${STILL}, rz: { min: -90, max: 90 } }`, `\n    orient: { toward: ${toward} }`);
+    // The hinge is at right angles to the bone (0, −20, 4) and to toward: 25.4 and 34.9 degrees off the x axis.
+    expect(told(CODE, turned('[0.4226, 0, 0.9063]'))).toEqual([]);
+    expect(told(CODE, turned('[0.5641, 0, 0.8257]'))[0]?.[1]).toContain('35 degrees');
+  });
+
   it('is silent for a joint that is no hinge', () => {
     expect(told(CODE, leg('{ ry: { min: -9, max: 90 } }'))).toEqual([]);
     expect(told(CODE, leg(`{ rx: ${STILL}, ry: { min: -9, max: 90 } }`))).toEqual([]);
