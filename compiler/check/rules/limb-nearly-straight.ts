@@ -1,4 +1,5 @@
 import type { TwoBoneSpecification } from '../../expand/types';
+import { angleBetween } from '../../math/vec3';
 import { STRAIGHT_TOLERANCE } from '../../solve/tolerances';
 import { bendOf } from '../bendOf';
 import { chainsByJoint } from '../chainsByJoint';
@@ -8,6 +9,8 @@ import type { Rule } from '../Rule';
 
 /** Degrees; below it a digit in one landmark decides which way the limb folds. Common practice. */
 const SLIGHT = 2;
+/** Radians between the bend that was written and the one that the points show. */
+const AGREED = Math.PI / 3;
 
 /** A limb that is all but straight folds the way its rounding errors point. */
 export const limbNearlyStraight: Rule = {
@@ -24,12 +27,18 @@ export const limbNearlyStraight: Rule = {
         if (solver.kind === 'two_bone') limbs.push(solver);
       },
       finish() {
-        const chainOf = limbs.length > 0 ? chainsByJoint(resolved) : null;
-        for (const { id, joints } of limbs) {
+        if (limbs.length === 0) return;
+        const chainOf = chainsByJoint(resolved);
+        const controls = new Map(resolved.controls.map((control) => [control.id, control]));
+        for (const { id, joints, pole } of limbs) {
           const places = limbPositions(solved, joints);
-          const chain = chainOf?.get(joints[1]);
+          const chain = chainOf.get(joints[1]);
           if (!places || !chain) continue;
-          const { degrees } = bendOf(...places);
+          const { degrees, toward } = bendOf(...places);
+          const place = controls.get(pole)?.place;
+          const said = place?.kind === 'pole' ? place.bend : null;
+          // Points and words agree which way it folds; where they do not, the points win unnoticed.
+          if (said && angleBetween(said, toward) < AGREED) continue;
           // A straight limb says by its pole's bend which way it folds, or gets a finding of its own.
           if (degrees >= SLIGHT || (degrees * Math.PI) / 180 <= STRAIGHT_TOLERANCE * 10) continue;
           report(pointPath(chain, chain.jointIds.indexOf(joints[1])), {

@@ -33,6 +33,12 @@ landmarks:
     expect(told(CODE, limb(-0.35))).toEqual([]);
   });
 
+  it('is silent where the written bend says the same, and not where it says the contrary', () => {
+    expect(told(CODE, limb(-0.3, ', bend: [0, 0, -1]'))).toEqual([]);
+    expect(told(CODE, limb(-0.3, ', bend: [0, 0.5, -1]'))).toEqual([]);
+    expect(told(CODE, limb(-0.3, ', bend: [0, 0, 1]'))).toHaveLength(1);
+  });
+
   it('is silent for a straight limb that says which way it bends', () => {
     expect(told(CODE, limb(0, ', bend: [0, 0, -1]'))).toEqual([]);
   });
