@@ -1,5 +1,5 @@
 import type { NumberOrAttribute, PoseValues } from '../rig/Rig';
-import { displacement } from './displacement';
+import { bend, displacement } from './displacement';
 import { attributeOf, joinPoses, nudgedPose, type PoseDraft, put } from './poses';
 import { Tally } from './Tally';
 import type { TrialBench } from './TrialBench';
@@ -56,32 +56,31 @@ interface Piece {
   readonly to: Float64Array;
 }
 
-/** Halfway between two worlds, entry by entry: where a smooth motion is halfway, but for its curvature. */
-function halfway({ from, to }: Piece): Float64Array {
-  return from.map((entry, index) => entry + ((to[index] as number) - entry) / 2);
-}
-
 /**
  * The node and the two pieces that look most like a jump: where a node's motion in one piece differs from that in the
  * next by as much as it moves at all. A smooth motion, however wide, differs little from piece to piece.
  */
 function findSuspect(pieces: readonly Piece[], count: number, size: number) {
+  let most = { node: 0, score: 0 };
   let around: readonly [Piece, Piece] = [pieces[0] as Piece, pieces[1] as Piece];
-  let suspect = { node: 0, score: 0 };
-  for (let i = 0; i + 1 < pieces.length; i += 1) {
-    const [before, after] = [pieces[i] as Piece, pieces[i + 1] as Piece];
-    const even = halfway({ ...before, to: after.to });
-    for (let node = 0; node < count; node += 1) {
-      const first = displacement(before.from, node, before.to, node, size);
-      const second = displacement(after.from, node, after.to, node, size);
-      const bend = 2 * displacement(even, node, before.to, node, size);
-      const score = first + second > 0 ? (bend * bend) / (first + second) : 0;
-      if (score <= suspect.score) continue;
-      suspect = { node, score };
-      around = [before, after];
+  for (let node = 0; node < count; node += 1) {
+    let first = 0;
+    for (let i = 0; i < pieces.length; i += 1) {
+      const { from, to } = pieces[i] as Piece;
+      const second = displacement(from, node, to, node, size);
+      if (i > 0 && first + second > 0) {
+        const before = pieces[i - 1] as Piece;
+        const off = bend(before.from, from, to, node, size);
+        const score = (off * off) / (first + second);
+        if (score > most.score) {
+          most = { node, score };
+          around = [before, pieces[i] as Piece];
+        }
+      }
+      first = second;
     }
   }
-  return { node: suspect.node, around };
+  return { node: most.node, around };
 }
 
 /** Walks all blends together through a pose, and closes in on what looks most like a jump. */
@@ -114,17 +113,20 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
   compare(stops[PIECES] as Float64Array, worldAt(1 - END_STEP), 1 - END_STEP);
 
   const { node, around } = findSuspect(pieces, rig.nodes.length, size);
-  const bendOf = (piece: Piece): number =>
-    displacement(halfway(piece), node, worldAt(piece.start + piece.width / 2), node, size);
+  const bendOf = ({ start, width, from, to }: Piece): number =>
+    bend(from, worldAt(start + width / 2), to, node, size);
   const [before, after] = around;
   let last = bendOf(before) > bendOf(after) ? before : after;
   for (let halving = 0; ; halving += 1) {
     const half = last.width / 2;
     const middle = worldAt(last.start + half);
-    const even = halfway(last);
-    const isSuspect = displacement(even, node, middle, node, size) > POP_TOLERANCE * size;
+    const { from, to, start } = last;
+    const isSuspect = bend(from, middle, to, node, size) > POP_TOLERANCE * size;
     if (halving >= (isSuspect ? HALVINGS.most : HALVINGS.least)) {
-      compare(even, middle, last.start + half);
+      const pose = poseAt(start + half);
+      rig.nodes.forEach(({ id }, index) => {
+        tally.add(bend(from, middle, to, index, size), id, pose);
+      });
       return;
     }
     // A jump stays in one of the halves whole, while all that moves smoothly halves with them.

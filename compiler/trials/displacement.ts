@@ -15,9 +15,30 @@ export function displacement(
     const x = (a[i * 16 + column] as number) - (b[j * 16 + column] as number);
     const y = (a[i * 16 + column + 1] as number) - (b[j * 16 + column + 1] as number);
     const z = (a[i * 16 + column + 2] as number) - (b[j * 16 + column + 2] as number);
-    const apart = Math.sqrt(x * x + y * y + z * z) * (column === 12 ? 1 : reach);
+    const square = (x * x + y * y + z * z) * (column === 12 ? 1 : reach * reach);
     // Written so that NaN is kept.
-    if (!(apart <= most)) most = apart;
+    if (!(square <= most)) most = square;
   }
-  return most;
+  return Math.sqrt(most);
+}
+
+/** How far matrix `i` of `middle` lies from halfway between those of `a` and `b`, measured like a displacement. */
+export function bend(
+  a: Float64Array,
+  middle: Float64Array,
+  b: Float64Array,
+  i: number,
+  reach: number,
+): number {
+  let most = 0;
+  for (let entry = i * 16; entry < i * 16 + 16; entry += 4) {
+    let square = 0;
+    for (let row = entry; row < entry + 3; row += 1) {
+      const off = ((a[row] as number) + (b[row] as number)) / 2 - (middle[row] as number);
+      square += off * off;
+    }
+    if (entry < i * 16 + 12) square *= reach * reach;
+    if (!(square <= most)) most = square;
+  }
+  return Math.sqrt(most);
 }

@@ -21,6 +21,13 @@ function namedThings(
   ];
 }
 
+/** A name from the pieces around its character. */
+function compose(around: readonly string[], character: string): string {
+  const [before, after] = around;
+  // Nearly every pattern holds the character once, and thousands of names are composed.
+  return around.length === 2 ? `${before}${character}${after}` : around.join(character);
+}
+
 /**
  * Ten characters of one cast stand in one scene and no two things share a name: the rig's own names are those that the
  * naming pattern gives, each once, and none is a name of nine others made from the same recipe.
@@ -30,14 +37,15 @@ export function tryNames({ rig, intent }: TrialBench): TrialResult {
   const parts = intent.nameParts();
   const taken = new Set<string>();
   for (const { key, id, name } of namedThings(rig)) {
-    const meant = parts.get(key)?.join(rig.scene.character) ?? name;
+    const own = parts.get(key);
+    const meant = own === undefined ? name : compose(own, rig.scene.character);
     count.add(name === meant && !taken.has(name), id);
     taken.add(name);
   }
   for (let member = 2; member <= CAST; member += 1) {
     const character = `${rig.scene.character}_${member}`;
     for (const [key, around] of parts) {
-      const name = around.join(character);
+      const name = compose(around, character);
       count.add(!taken.has(name), key.slice(key.indexOf('/') + 1));
       taken.add(name);
     }

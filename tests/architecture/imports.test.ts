@@ -14,6 +14,7 @@ const COMPILER_PACKAGES = new Set([
   'canonicalize',
   'fastest-levenshtein',
   '@marcbachmann/cel-js',
+  '@gltf-transform/core',
   '@noble/hashes/sha2.js',
   '@noble/hashes/utils.js',
   // What generated validators and templates need to run.
@@ -36,6 +37,7 @@ const STAGES: readonly (readonly string[])[] = [
   ['assemble'],
   ['plan'],
   ['emit'],
+  ['trials'],
   ['build'],
 ];
 const rankOf = (path: string): number =>

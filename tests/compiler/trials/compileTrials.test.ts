@@ -27,11 +27,11 @@ guide_lines:
 `;
 
 describe('trials of a compile', () => {
-  it('run on every compile, and stand in the manifest with what they measured', () => {
+  it('run on every compile, and stand in the manifest with what they measured', async () => {
     const compilation = compileText(hare);
     expect(compilation.trials.map(({ trial }) => trial)).toEqual(TRIAL_NAMES);
     expect(compilation.failing).toBeNull();
-    const manifest = JSON.parse(buildFiles(compilation).at(-1)?.text ?? '') as {
+    const manifest = JSON.parse((await buildFiles(compilation)).at(-1)?.text ?? '') as {
       trials: { trial: string; passed: boolean; measured: number; tolerance: number; unit: string }[];
     };
     expect(manifest.trials.map(({ trial, passed }) => [trial, passed])).toEqual(
@@ -47,7 +47,7 @@ describe('trials of a compile', () => {
     expect(compileText('format: 1\nrecipe: hare\ntitel: x\n').trials).toEqual([]);
   });
 
-  it('keep what fails from being built, and show it where it was written', () => {
+  it('keep what fails from being built, and show it where it was written', async () => {
     const { findings, rig, script, failing, trials } = compileText(ASTRAY);
     const errors = findings.filter(({ severity }) => severity === 'error');
     expect(errors.map(({ code, span }) => [code, span.startLine, span.startColumn])).toEqual([
@@ -59,7 +59,7 @@ describe('trials of a compile', () => {
     expect(trials.filter(({ passed }) => !passed).map(({ trial, worst }) => [trial, worst])).toEqual([
       ['guide', ['line']],
     ]);
-    expect(buildFiles(compileText(ASTRAY)).map(({ mediaType }) => mediaType)).toEqual([
+    expect((await buildFiles(compileText(ASTRAY))).map(({ mediaType }) => mediaType)).toEqual([
       'application/sarif+json',
     ]);
   });
