@@ -76,4 +76,18 @@ describe('trials of a compile', () => {
     const control = failing?.rig.nodes.find(({ id }) => id === 'two')?.name ?? '';
     expect(limits).toMatchObject({ passed: false, worst: ['neck.c'], pose: { [control]: { ry: -70 } } });
   });
+
+  it.each([
+    ['nothing', 'format: 1\nrecipe: bare\n'],
+    ['a joint at the origin', 'format: 1\nrecipe: bare\nchains: { one: { points: [[0, 0, 0]] } }\n'],
+    [
+      'a chain that nothing carries',
+      'format: 1\nrecipe: bare\nchains: { one: { points: [[0, 1, 0], [0, 2, 0], [0, 3, 1]] } }\n',
+    ],
+  ])('pass for %s, and have nothing to carry', (_, text) => {
+    const { trials } = compileText(text);
+    expect(trials.filter(({ passed }) => !passed)).toEqual([]);
+    expect(trials.find(({ trial }) => trial === 'carry')).toMatchObject({ checked: 0 });
+    for (const { tolerance, unit } of trials) if (unit !== 'things') expect(tolerance).toBeGreaterThan(0);
+  });
 });
