@@ -1,5 +1,6 @@
 import { compile } from '@/compiler';
 import type { Finding } from '@/compiler/findings/Finding';
+import { applyFix } from './applyFix';
 
 const SOURCE = 'rule.recipe.yaml';
 
@@ -26,10 +27,5 @@ export function told(code: string, body: string): readonly (readonly [string, st
 export function fixed(code: string, body: string): string | null {
   const [finding] = findingsWith(code, body);
   if (!finding?.fix) return null;
-  const edits = [...finding.fix.edits].sort((a, b) => b.span.start - a.span.start);
-  const text = edits.reduce(
-    (before, { span, newText }) => before.slice(0, span.start) + newText + before.slice(span.end),
-    HEAD + body,
-  );
-  return text.slice(HEAD.length);
+  return applyFix(HEAD + body, finding.fix).slice(HEAD.length);
 }
