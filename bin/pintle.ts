@@ -7,7 +7,7 @@ import { WrongUse } from './commands/WrongUse';
 
 /** What each command is for and how it is written; also the help text. */
 const COMMANDS: Readonly<
-  Record<string, { readonly usage: string; run(parameters: readonly string[]): number }>
+  Record<string, { readonly usage: string; run(parameters: readonly string[]): number | Promise<number> }>
 > = {
   check: { usage: 'check FILE… [--house FILE] [--json]', run: check },
   compile: {
@@ -27,7 +27,7 @@ function printUsage(print: (line: string) => void): void {
   );
 }
 
-function main([name, ...parameters]: readonly string[]): number {
+async function main([name, ...parameters]: readonly string[]): Promise<number> {
   if (name === undefined || name === '--help' || name === 'help') {
     printUsage(console.log);
     return name === undefined ? 2 : 0;
@@ -35,7 +35,7 @@ function main([name, ...parameters]: readonly string[]): number {
   const command = Object.hasOwn(COMMANDS, name) ? COMMANDS[name] : undefined;
   try {
     if (!command) throw new WrongUse(`There is no command "${name}".`);
-    return command.run(parameters);
+    return await command.run(parameters);
   } catch (error) {
     if (!(error instanceof WrongUse)) throw error;
     console.error(error.message);
@@ -51,4 +51,4 @@ process.stdout.on('error', (error: NodeJS.ErrnoException) => {
   process.exit();
 });
 
-process.exitCode = main(process.argv.slice(2));
+process.exitCode = await main(process.argv.slice(2));

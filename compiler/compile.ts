@@ -1,6 +1,8 @@
 import { assembleRig } from './assemble/assembleRig';
 import { checkEvaluationRing } from './check/checkEvaluationRing';
 import { runRules } from './check/runRules';
+import { checkDeliveries } from './deliver/checkDeliveries';
+import type { DeliveryProfile } from './deliver/DeliveryProfile';
 import { characterNameOf } from './documents/characterName';
 import { readHouse } from './documents/readHouse';
 import { readRecipe } from './documents/readRecipe';
@@ -55,6 +57,8 @@ export interface Compilation {
   readonly trials: readonly TrialResult[];
   /** The rig and script that failed a trial, to be looked at and never built; null in every other case. */
   readonly failing: { readonly rig: Rig; readonly script: string } | null;
+  /** The profiles that files are made for. */
+  readonly deliveries: readonly DeliveryProfile[];
   /** Where a node of the rig was written, by its id; null for what no document wrote. */
   placeOf(nodeId: string): NodePlace | null;
 }
@@ -68,7 +72,7 @@ export interface NodePlace {
 /**
  * Turns a recipe into a rig and its build script: parse and merge the documents, check their shape, evaluate
  * expressions, write parts out in primitives, resolve ids, containers and names, solve the geometry, check the
- * rules, assemble the rig, plan its steps, emit them, and put the rig to its trials. Never throws for what a person
+ * rules, assemble the rig, hold it against its delivery profiles, plan its steps, emit them, and put it to its trials. Never throws for what a person
  * wrote: each stage adds its findings and goes on as far as it can, so that one compile shows them all.
  */
 export function compile(request: CompileRequest): Compilation {
@@ -85,6 +89,7 @@ export function compile(request: CompileRequest): Compilation {
       script: null,
       trials: [],
       failing: null,
+      deliveries: [],
       placeOf: () => null,
     };
   };
@@ -122,6 +127,7 @@ export function compile(request: CompileRequest): Compilation {
   };
   const rig = assembleRig(scene, resolved, solved);
   checkEvaluationRing(rig, resolved, context);
+  const deliveries = checkDeliveries(recipe.deliver ?? [], reference, house.rules, rig, context);
   if (findings.hasErrors) return { ...stop(), recipeHash };
   const script = emitScript(planSteps(rig));
   const placeOf = (nodeId: string): NodePlace | null => {
@@ -143,6 +149,7 @@ export function compile(request: CompileRequest): Compilation {
     script: failing ? null : script,
     trials,
     failing,
+    deliveries,
     placeOf,
   };
 }

@@ -84,7 +84,9 @@ export interface BuildFileRow {
   readonly position: number;
   readonly name: string;
   readonly media_type: string;
+  /** The file's text, or its bytes in base64. */
   readonly text: string;
+  readonly encoding: 'utf8' | 'base64';
   readonly bytes: number;
   readonly sha256: string;
 }

@@ -1,4 +1,4 @@
-import { type BuildFile, buildFiles, compile } from '../../compiler/index';
+import { type BuildFile, buildFiles, type Compilation, compile, type SourceText } from '../../compiler/index';
 import { countWords } from './countWords';
 import { hasErrors, printFindings } from './printFindings';
 import { startProgress } from './progress';
@@ -38,8 +38,15 @@ function checkNames(
   }
 }
 
+/** One recipe file with what its compile gave. */
+interface CompiledFile extends Pick<Compilation, 'findings' | 'rig' | 'trials'> {
+  readonly file: string;
+  readonly files: readonly BuildFile[];
+  readonly sources: readonly SourceText[];
+}
+
 /** `compile FILE… --out DIR`: writes script, rig, findings and manifest of each recipe. */
-export function compileFiles(parameters: readonly string[]): number {
+export async function compileFiles(parameters: readonly string[]): Promise<number> {
   const { values, positionals } = readParameters(parameters, {
     out: { type: 'string' },
     character: { type: 'string' },
@@ -58,7 +65,8 @@ export function compileFiles(parameters: readonly string[]): number {
   // All are read before any is compiled, so that a file that is not there is said at once.
   const requests = positionals.map((file) => ({ file, ...readRequest(file) }));
   const progress = startProgress(positionals.length, { isWanted: !values.json });
-  const results = requests.map(({ file, recipe, bases }, index) => {
+  const results: CompiledFile[] = [];
+  for (const [index, { file, recipe, bases }] of requests.entries()) {
     progress.show(index, file);
     const compilation = compile({
       recipe,
@@ -68,8 +76,8 @@ export function compileFiles(parameters: readonly string[]): number {
     });
     const sources = [recipe, ...Object.values(bases), ...Object.values(houses)];
     const { findings, rig, trials } = compilation;
-    return { file, findings, rig, trials, files: buildFiles(compilation), sources };
-  });
+    results.push({ file, findings, rig, trials, files: await buildFiles(compilation), sources });
+  }
   progress.clear();
   sayUnusedHouse(values.house, houses, results);
   checkNames(results);

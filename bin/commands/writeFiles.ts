@@ -16,8 +16,8 @@ function cannotWrite(folder: string, error: unknown): WrongUse {
  * moved before all are written, so that nothing half-written is ever seen under its name.
  */
 export function writeFiles(folder: string, files: readonly BuildFile[]): void {
-  const drafts = files.map(({ name, text }) => ({
-    text,
+  const drafts = files.map(({ name, text, encoding }) => ({
+    content: Buffer.from(text, encoding),
     place: join(folder, name),
     draft: join(folder, `.${name}.${process.pid}`),
   }));
@@ -27,7 +27,7 @@ export function writeFiles(folder: string, files: readonly BuildFile[]): void {
     throw cannotWrite(folder, error);
   }
   try {
-    for (const { draft, text } of drafts) writeFileSync(draft, text);
+    for (const { draft, content } of drafts) writeFileSync(draft, content);
     for (const { draft, place } of drafts) renameSync(draft, place);
   } catch (error) {
     for (const { draft } of drafts) rmSync(draft, { force: true });

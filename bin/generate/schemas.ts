@@ -55,7 +55,8 @@ export function bundleRecipeSchema(): Schema {
 /** The house-rules schema with the definitions it shares with recipes in it. */
 export function bundleHouseSchema(recipe: Schema): Schema {
   const house = withLocalReferences(readSchema('compiler/schema/house.schema.json')) as Schema;
-  const definitions = recipe.$defs as Schema;
+  const own = (house.$defs ?? {}) as Schema;
+  const definitions = { ...(recipe.$defs as Schema), ...own };
   const used = [...definitionsUsed(house, definitions)].sort();
   return { ...house, $defs: Object.fromEntries(used.map((name) => [name, definitions[name]])) };
 }

@@ -1,24 +1,62 @@
 import type { Compilation } from '../compile';
+import type { DeliveryProfile } from '../deliver/DeliveryProfile';
+import { toGlb } from '../deliver/toGlb';
+import { toUsda } from '../deliver/toUsda';
 import { canonicalJson } from '../hash/canonicalJson';
-import { sha256Hex } from '../hash/sha256Hex';
+import { sha256Hex, sha256HexOf } from '../hash/sha256Hex';
+import type { Rig } from '../rig/Rig';
 import { COMPILER_VERSION } from '../version';
 import { findingsToSarif } from './findingsToSarif';
+import { toBase64 } from './toBase64';
 
 /** One file of a build. */
 export interface BuildFile {
   readonly name: string;
   readonly mediaType: string;
+  /** What the file holds: its text, or its bytes in base64. */
   readonly text: string;
-  /** Of the text in UTF-8, in hexadecimal. */
+  readonly encoding: 'utf8' | 'base64';
+  /** Of the file's bytes, in hexadecimal. */
   readonly sha256: string;
+  readonly bytes: number;
 }
 
 function toFile(name: string, mediaType: string, text: string): BuildFile {
-  return { name, mediaType, text, sha256: sha256Hex(text) };
+  return { name, mediaType, text, encoding: 'utf8', sha256: sha256Hex(text), bytes: utf8Length(text) };
+}
+
+/** Turns bytes into base64 without anything of Node or the browser: as text of 8-bit characters. */
+function toBinaryFile(name: string, mediaType: string, content: Uint8Array): BuildFile {
+  const text = toBase64(content);
+  return { name, mediaType, text, encoding: 'base64', sha256: sha256HexOf(content), bytes: content.length };
+}
+
+/** The files of every delivery profile: glTF and OpenUSD. */
+async function deliveryFiles(
+  rig: Rig,
+  deliveries: readonly DeliveryProfile[],
+): Promise<readonly BuildFile[]> {
+  const files: BuildFile[] = [];
+  for (const profile of deliveries) {
+    const name = `${rig.scene.character}.${profile.id}`;
+    if (profile.formats.includes('gltf')) {
+      files.push(toBinaryFile(`${name}.glb`, 'model/gltf-binary', await toGlb(rig, profile)));
+    }
+    if (profile.formats.includes('usd')) {
+      files.push(toFile(`${name}.usda`, 'model/vnd.usda', toUsda(rig, profile)));
+    }
+  }
+  return files;
 }
 
 /** Every file but the manifest, which lists them. */
-function contentFiles({ character, findings, rig, script }: Compilation): readonly BuildFile[] {
+async function contentFiles({
+  character,
+  findings,
+  rig,
+  script,
+  deliveries,
+}: Compilation): Promise<readonly BuildFile[]> {
   const sarif = toFile(
     `${character}.findings.sarif`,
     'application/sarif+json',
@@ -28,6 +66,7 @@ function contentFiles({ character, findings, rig, script }: Compilation): readon
   return [
     toFile(`${character}.slip`, 'text/plain; charset=utf-8', script),
     toFile(`${character}.rig.json`, 'application/json', `${canonicalJson(rig)}\n`),
+    ...(await deliveryFiles(rig, deliveries)),
     sarif,
   ];
 }
@@ -36,8 +75,8 @@ function contentFiles({ character, findings, rig, script }: Compilation): readon
  * The files of a build, the manifest last. A recipe with errors gives its findings alone: no script, no rig, and
  * no manifest that could be taken for a build.
  */
-export function buildFiles(compilation: Compilation): readonly BuildFile[] {
-  const files = contentFiles(compilation);
+export async function buildFiles(compilation: Compilation): Promise<readonly BuildFile[]> {
+  const files = await contentFiles(compilation);
   const { rig, character } = compilation;
   if (!rig) return files;
   const manifest = {
@@ -68,12 +107,7 @@ export function buildFiles(compilation: Compilation): readonly BuildFile[] {
       unit,
       checked,
     })),
-    files: files.map(({ name, mediaType, text, sha256 }) => ({
-      name,
-      mediaType,
-      bytes: utf8Length(text),
-      sha256,
-    })),
+    files: files.map(({ name, mediaType, bytes, sha256 }) => ({ name, mediaType, bytes, sha256 })),
   };
   return [
     ...files,

@@ -1,5 +1,6 @@
 import { evaluationFindings } from '../check/checkEvaluationRing';
 import { RULES } from '../check/rules/index';
+import { deliverFindings } from '../deliver/findings';
 import { documentFindings } from '../documents/findings';
 import { expandFindings } from '../expand/findings';
 import { expressionFindings } from '../expressions/findings';
@@ -23,6 +24,7 @@ const DECLARATIONS: Readonly<Record<string, FindingDeclaration>> = {
   ...solveFindings,
   ...evaluationFindings,
   ...Object.fromEntries(RULES.map((rule) => [rule.code, rule])),
+  ...deliverFindings,
   ...trialFindings,
   ...slipwayFindings,
   ...poseFindings,

@@ -14,8 +14,10 @@ export interface StoredBuild {
   readonly files: readonly StoredBuildFile[];
 }
 
+/** A file with what it holds: its text, or its bytes in base64. */
 export interface StoredBuildFileText extends StoredBuildFile {
   readonly text: string;
+  readonly encoding: 'utf8' | 'base64';
 }
 
 /** Builds by the hash of everything that went in. */
@@ -37,14 +39,14 @@ export function buildsRepository(database: Knex) {
       return database('build_files')
         .where({ build_key: key })
         .orderBy('position')
-        .select('name', 'media_type as mediaType', 'bytes', 'sha256', 'text');
+        .select('name', 'media_type as mediaType', 'bytes', 'sha256', 'text', 'encoding');
     },
 
     /** One file of a build. */
     async readFile(key: string, name: string): Promise<StoredBuildFileText | undefined> {
       return database('build_files')
         .where({ build_key: key, name })
-        .first('name', 'media_type as mediaType', 'bytes', 'sha256', 'text');
+        .first('name', 'media_type as mediaType', 'bytes', 'sha256', 'text', 'encoding');
     },
 
     /** Keeps a build unless it is there already: the same key always stands for the same files. */
@@ -72,6 +74,7 @@ export function buildsRepository(database: Knex) {
             name: file.name,
             media_type: file.mediaType,
             text: file.text,
+            encoding: file.encoding,
             bytes: file.bytes,
             sha256: file.sha256,
           })),

@@ -40,7 +40,7 @@ const version = (number: number) => ({
 describe('a build', () => {
   it('holds exactly the files the compiler makes of that version', async () => {
     const compilation = compile({ recipe: { name: 'cart.recipe.yaml', text: SOUND_TEXT }, version: 1 });
-    const expected = buildFiles(compilation);
+    const expected = await buildFiles(compilation);
     const build = buildSchema.parse(await (await callApi(readBuildEndpoint, version(1))).json());
     expect(build.files.map(({ name, sha256 }) => [name, sha256])).toEqual(
       expected.map(({ name, sha256 }) => [name, sha256]),

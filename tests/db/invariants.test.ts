@@ -97,6 +97,7 @@ describe('the database itself', () => {
       name: 'a',
       media_type: 'text/plain',
       text: 'ä',
+      encoding: 'utf8' as const,
       bytes: 2,
       sha256: sha256Hex('ä'),
     };
@@ -106,6 +107,9 @@ describe('the database itself', () => {
     await expect(
       test.database('build_files').insert({ ...file, sha256: sha256Hex('a') }),
     ).rejects.toMatchObject({ code: '23514' });
+    // Of a binary file size and hash are those of its bytes, not of the base64 they are kept in.
+    const binary = { ...file, encoding: 'base64' as const, text: '//79', bytes: 4 };
+    await expect(test.database('build_files').insert(binary)).rejects.toMatchObject({ code: '23514' });
     await expect(test.database('build_files').insert({ ...file, name: '../a' })).rejects.toMatchObject({
       code: '23514',
     });

@@ -194,6 +194,30 @@ export const houseSchema = {
           "landmark-unused": "off"
         }
       ]
+    },
+    "profiles": {
+      "description": "Delivery profiles: what receiving systems want. A recipe names those it is delivered to.",
+      "type": "object",
+      "propertyNames": {
+        "type": "string",
+        "pattern": "^[a-z][a-z0-9_]*$",
+        "maxLength": 60
+      },
+      "additionalProperties": {
+        "$ref": "#/$defs/DeliveryProfile"
+      },
+      "default": {},
+      "examples": [
+        {
+          "realtime": {
+            "formats": [
+              "gltf"
+            ],
+            "skin_joints_only": true,
+            "joints_at_most": 120
+          }
+        }
+      ]
     }
   },
   "$defs": {
@@ -236,6 +260,239 @@ export const houseSchema = {
           ]
         }
       }
+    },
+    "DeliveryProfile": {
+      "title": "DeliveryProfile",
+      "description": "What one receiving system wants.",
+      "type": "object",
+      "required": [
+        "formats"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "title": {
+          "type": "string",
+          "maxLength": 200,
+          "description": "What people call it.",
+          "examples": [
+            "Realtime engine"
+          ]
+        },
+        "formats": {
+          "type": "array",
+          "items": {
+            "enum": [
+              "gltf",
+              "usd"
+            ]
+          },
+          "minItems": 1,
+          "uniqueItems": true,
+          "description": "Files that are made: glTF 2.0 (.glb), which is always Y up, Z forward, in metres; OpenUSD (.usda), in the axes and unit below.",
+          "examples": [
+            [
+              "gltf"
+            ]
+          ]
+        },
+        "up": {
+          "enum": [
+            "+y",
+            "+z"
+          ],
+          "default": "+y",
+          "description": "usd: axis that points up; +y or +z.",
+          "examples": [
+            "+z"
+          ]
+        },
+        "forward": {
+          "enum": [
+            "+x",
+            "-x",
+            "+y",
+            "-y",
+            "+z",
+            "-z"
+          ],
+          "default": "+z",
+          "description": "usd: axis the character faces along.",
+          "examples": [
+            "-y"
+          ]
+        },
+        "unit": {
+          "enum": [
+            "mm",
+            "cm",
+            "m"
+          ],
+          "default": "cm",
+          "description": "usd: unit of length.",
+          "examples": [
+            "m"
+          ]
+        },
+        "skin_joints_only": {
+          "type": "boolean",
+          "default": true,
+          "description": "Leaves out helper joints; what hangs on one then hangs on the joint above it.",
+          "examples": [
+            true
+          ]
+        },
+        "joints_at_most": {
+          "type": "integer",
+          "minimum": 1,
+          "maximum": 100000,
+          "description": "Most joints that are taken.",
+          "examples": [
+            120
+          ]
+        },
+        "depth_at_most": {
+          "type": "integer",
+          "minimum": 1,
+          "maximum": 100000,
+          "description": "Most joints that may hang below one another.",
+          "examples": [
+            32
+          ]
+        },
+        "influences_at_most": {
+          "type": "integer",
+          "minimum": 1,
+          "maximum": 16,
+          "description": "Most joints that one vertex may follow.",
+          "examples": [
+            4
+          ]
+        },
+        "names": {
+          "type": "object",
+          "additionalProperties": false,
+          "description": "What names of joints may be.",
+          "properties": {
+            "longest": {
+              "type": "integer",
+              "minimum": 4,
+              "maximum": 255,
+              "description": "Most characters of a name.",
+              "examples": [
+                63
+              ]
+            },
+            "letters": {
+              "enum": [
+                "any",
+                "lower",
+                "upper"
+              ],
+              "default": "any",
+              "description": "Letters allowed.",
+              "examples": [
+                "lower"
+              ]
+            },
+            "digits": {
+              "type": "boolean",
+              "default": true,
+              "description": "Whether digits are allowed.",
+              "examples": [
+                true
+              ]
+            }
+          },
+          "examples": [
+            {
+              "longest": 63
+            }
+          ]
+        },
+        "root_at_origin": {
+          "type": "boolean",
+          "default": false,
+          "description": "The topmost joint must stand at the origin.",
+          "examples": [
+            true
+          ]
+        },
+        "animation": {
+          "enum": [
+            "none",
+            "range_of_motion"
+          ],
+          "default": "range_of_motion",
+          "description": "Animation that is baked in: every control turned to both ends of its range, one after the other.",
+          "examples": [
+            "none"
+          ]
+        },
+        "bones": {
+          "type": "object",
+          "propertyNames": {
+            "type": "string",
+            "pattern": "^[A-Za-z][A-Za-z0-9_]*$",
+            "maxLength": 60
+          },
+          "additionalProperties": {
+            "$ref": "#/$defs/ProfileBone"
+          },
+          "default": {},
+          "description": "Bones the receiver knows by its own names, each with the joint of ours that it is.",
+          "examples": [
+            {
+              "hips": {
+                "joint": "spine.hips",
+                "required": true
+              }
+            }
+          ]
+        }
+      }
+    },
+    "ProfileBone": {
+      "title": "ProfileBone",
+      "description": "One bone a receiver knows by name.",
+      "type": "object",
+      "required": [
+        "joint"
+      ],
+      "additionalProperties": false,
+      "properties": {
+        "joint": {
+          "type": "string",
+          "pattern": "^[a-z][a-z0-9_]*(\\.[a-z0-9_]+)*$",
+          "maxLength": 120,
+          "description": "Id of the joint that it is.",
+          "examples": [
+            "arm.left.elbow"
+          ]
+        },
+        "required": {
+          "type": "boolean",
+          "default": false,
+          "description": "Whether the receiver refuses skeletons without it.",
+          "examples": [
+            true
+          ]
+        },
+        "parent": {
+          "type": "string",
+          "pattern": "^[A-Za-z][A-Za-z0-9_]*$",
+          "maxLength": 60,
+          "description": "Bone that it must hang on, with other joints between if need be; when that is not there, the next above it.",
+          "examples": [
+            "spine"
+          ]
+        }
+      },
+      "examples": [
+        {
+          "joint": "spine.hips",
+          "required": true
+        }
+      ]
     },
     "Role": {
       "title": "Role",

@@ -50,6 +50,12 @@ export interface HouseRules {
   severities?: {
     [k: string]: 'error' | 'warning' | 'info' | 'off';
   };
+  /**
+   * Delivery profiles: what receiving systems want. A recipe names those it is delivered to.
+   */
+  profiles?: {
+    [k: string]: DeliveryProfile;
+  };
 }
 /**
  * How names in the scene are made from ids.
@@ -128,4 +134,99 @@ export interface Container {
    */
   shown?: boolean;
   title?: Line;
+}
+/**
+ * What one receiving system wants.
+ *
+ * This interface was referenced by `HouseRules`'s JSON-Schema
+ * via the `definition` "DeliveryProfile".
+ */
+export interface DeliveryProfile {
+  /**
+   * What people call it.
+   */
+  title?: string;
+  /**
+   * Files that are made: glTF 2.0 (.glb), which is always Y up, Z forward, in metres; OpenUSD (.usda), in the axes and unit below.
+   */
+  formats: ('gltf' | 'usd')[];
+  /**
+   * usd: axis that points up; +y or +z.
+   */
+  up?: '+y' | '+z';
+  /**
+   * usd: axis the character faces along.
+   */
+  forward?: '+x' | '-x' | '+y' | '-y' | '+z' | '-z';
+  /**
+   * usd: unit of length.
+   */
+  unit?: 'mm' | 'cm' | 'm';
+  /**
+   * Leaves out helper joints; what hangs on one then hangs on the joint above it.
+   */
+  skin_joints_only?: boolean;
+  /**
+   * Most joints that are taken.
+   */
+  joints_at_most?: number;
+  /**
+   * Most joints that may hang below one another.
+   */
+  depth_at_most?: number;
+  /**
+   * Most joints that one vertex may follow.
+   */
+  influences_at_most?: number;
+  /**
+   * What names of joints may be.
+   */
+  names?: {
+    /**
+     * Most characters of a name.
+     */
+    longest?: number;
+    /**
+     * Letters allowed.
+     */
+    letters?: 'any' | 'lower' | 'upper';
+    /**
+     * Whether digits are allowed.
+     */
+    digits?: boolean;
+  };
+  /**
+   * The topmost joint must stand at the origin.
+   */
+  root_at_origin?: boolean;
+  /**
+   * Animation that is baked in: every control turned to both ends of its range, one after the other.
+   */
+  animation?: 'none' | 'range_of_motion';
+  /**
+   * Bones the receiver knows by its own names, each with the joint of ours that it is.
+   */
+  bones?: {
+    [k: string]: ProfileBone;
+  };
+}
+/**
+ * One bone a receiver knows by name.
+ *
+ * This interface was referenced by `HouseRules`'s JSON-Schema
+ * via the `definition` "ProfileBone".
+ */
+export interface ProfileBone {
+  /**
+   * Id of the joint that it is.
+   */
+  joint: string;
+  /**
+   * Whether the receiver refuses skeletons without it.
+   */
+  required?: boolean;
+  /**
+   * Bone that it must hang on, with other joints between if need be; when that is not there, the next above it.
+   */
+  parent?: string;
 }

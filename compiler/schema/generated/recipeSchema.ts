@@ -368,6 +368,22 @@ export const recipeSchema = {
           "sequence": "Marsh at dawn"
         }
       ]
+    },
+    "deliver": {
+      "type": "array",
+      "items": {
+        "$ref": "#/$defs/word"
+      },
+      "uniqueItems": true,
+      "maxItems": 20,
+      "default": [],
+      "description": "Delivery profiles of the house rules for which files are made.",
+      "examples": [
+        [
+          "film",
+          "realtime"
+        ]
+      ]
     }
   },
   "$defs": {

@@ -209,6 +209,10 @@ export interface Recipe {
   notes?: {
     [k: string]: string | number | boolean;
   };
+  /**
+   * Delivery profiles of the house rules for which files are made.
+   */
+  deliver?: Word[];
 }
 /**
  * A number that varies from character to character.

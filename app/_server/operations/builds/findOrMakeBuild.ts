@@ -1,5 +1,5 @@
 import type { Knex } from 'knex';
-import { buildFiles, COMPILER_VERSION, compile, sha256Hex, utf8Length } from '@/compiler/index';
+import { buildFiles, COMPILER_VERSION, compile, sha256Hex } from '@/compiler/index';
 import { auditLogRepository } from '@/db/repositories/auditLog';
 import { buildsRepository } from '@/db/repositories/builds';
 import { recipeVersionsRepository } from '@/db/repositories/recipeVersions';
@@ -18,7 +18,7 @@ export function buildKey({ recipe, bases, version }: CompileInputs): string {
 async function makeBuild(database: Knex, key: string, inputs: CompileInputs): Promise<void> {
   const compilation = compile(inputs);
   if (!compilation.rig) throw new Refusal({ code: 'recipe-has-errors', findings: compilation.findings });
-  const files = buildFiles(compilation).map((file) => ({ ...file, bytes: utf8Length(file.text) }));
+  const files = await buildFiles(compilation);
   const manifest = files.find(({ name }) => name.endsWith('.manifest.json'));
   if (!manifest) throw new Error('a build without errors has no manifest');
   await buildsRepository(database).insertIfAbsent({

@@ -1,4 +1,4 @@
-import { strToU8, type Zippable, zipSync } from 'fflate';
+import { type Zippable, zipSync } from 'fflate';
 import { buildsRepository } from '@/db/repositories/builds';
 import type { Caller } from '../../caller';
 import { findRecipe } from '../../findRecipe';
@@ -16,6 +16,8 @@ export async function readBuildArchive(
   const { recipe } = await findRecipe(caller, input.recipeId, 'build.read');
   const files = await buildsRepository(caller.database).readFiles(key);
   const entries: Zippable = {};
-  for (const { name, text } of files) entries[name] = [strToU8(text), { mtime: ENTRY_TIME, level: 6 }];
+  for (const { name, text, encoding } of files) {
+    entries[name] = [Buffer.from(text, encoding), { mtime: ENTRY_TIME, level: 6 }];
+  }
   return { name: `${recipe.name}@${input.number}.zip`, key, bytes: zipSync(entries) };
 }
