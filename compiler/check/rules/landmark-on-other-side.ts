@@ -14,8 +14,8 @@ export const landmarkOnOtherSide: Rule = {
   severity: 'warning',
   category: 'geometry',
   summary: 'A left landmark that lies on the right.',
-  message: 'The left landmark "{name}" lies {distance} {unit} on the right.',
-  help: 'Change the sign of the number across; the left lies toward {left} here.',
+  message: 'The left landmark "{name}" lies {distance} {unit} on the right; left is toward {left} here.',
+  help: 'Change the sign of the number across.',
   create({ report, stage, resolved, solved }) {
     const { left, unit } = resolved.scene;
     let size: number | null = null;

@@ -24,6 +24,24 @@ describe(CODE, () => {
     expect(fixed(CODE, bare)).toContain(`channels: { turn: ${LOCKED} }`);
   });
 
+  it.each([
+    ['two_bone', 'arm.a, arm.b, arm.c'],
+    ['reach', 'arm.a, arm.b, arm.c, arm.d'],
+  ])('knows that the pole of a %s is followed only where it moves, and its goal in all', (kind, joints) => {
+    const body = `chains:
+  arm: { points: [[0, 50, 0], [20, 50, -4], [40, 50, 0], [60, 49, 1]], names: [a, b, c, d] }
+controls:
+  hand: { at: arm.c }
+  pole: { pole_of: { joints: [arm.a, arm.b, arm.c] } }
+solvers:
+  bend: { kind: ${kind}, joints: [${joints}], goal: hand, pole: pole }
+`;
+    expect(told(CODE, body).map(([, message]) => message)).toEqual([
+      'Nothing follows "pole" when it is turned.',
+      'Nothing follows "pole" when it is scaled.',
+    ]);
+  });
+
   it('is silent where a child takes everything', () => {
     const body = headControl('shape: ring').replace(
       'constraints:',

@@ -11,14 +11,18 @@ chains:
 describe(CODE, () => {
   it('points at the place and moves it to the left', () => {
     const body = tip('at: [-8, 66, 0]');
-    expect(told(CODE, body)).toEqual([['[-8, 66, 0]', 'The left landmark "tip" lies 8 cm on the right.']]);
+    expect(told(CODE, body)).toEqual([
+      ['[-8, 66, 0]', 'The left landmark "tip" lies 8 cm on the right; left is toward +x here.'],
+    ]);
     expect(fixed(CODE, body)).toBe(tip('at: [8, 66, 0]'));
   });
 
   it("reads which way is left from the scene's axes", () => {
     const scene = 'scene: { up: +z, forward: +x }\n';
     const turned = scene + tip('at: [66, -8, 0]').replace('[10, 50, 0]', '[50, 10, 0]');
-    expect(told(CODE, turned).map(([text]) => text)).toEqual(['[66, -8, 0]']);
+    expect(told(CODE, turned)).toEqual([
+      ['[66, -8, 0]', 'The left landmark "tip" lies 8 cm on the right; left is toward +y here.'],
+    ]);
     expect(told(CODE, turned.replace('-8', '8'))).toEqual([]);
   });
 
