@@ -1,10 +1,13 @@
-import { SOLE_POINTS } from '../../expand/types';
+import type { SolePoint } from '../../expand/types';
 import { rotate } from '../../math/quat';
 import { add, distance, dot } from '../../math/vec3';
 import type { Rule } from '../Rule';
 
 /** Share of the foot's length by which points of a sole may differ in height: thick heels, worn shoes. */
 const UNEVEN = 0.25;
+
+/** Points that touch the floor; the ball is often the joint itself, which lies inside the foot. */
+const ON_FLOOR = ['heel', 'toe', 'inner', 'outer'] as const satisfies readonly SolePoint[];
 
 /** A foot rolls over points of its sole; one in the air lifts or sinks the foot as it rolls. */
 export const soleNotLevel: Rule = {
@@ -13,7 +16,7 @@ export const soleNotLevel: Rule = {
   category: 'geometry',
   summary: 'Points of a sole that lie at different heights.',
   message: 'The point {highest} of "{id}" lies {height} {unit} above {lowest}.',
-  help: 'Place all points of the sole where it touches the floor.',
+  help: 'Place heel, toe and both edges where the sole touches the floor.',
   create({ resolved, solved, report }) {
     return {
       solver(solver) {
@@ -22,7 +25,7 @@ export const soleNotLevel: Rule = {
         const foot = solved.places.get(solver.foot);
         if (!points || !foot) return;
         const { up, unit } = resolved.scene;
-        const byHeight = SOLE_POINTS.map((name) => ({
+        const byHeight = ON_FLOOR.map((name) => ({
           name,
           height: dot(add(foot.position, rotate(foot.turn, points[name])), up),
         })).sort((a, b) => a.height - b.height);

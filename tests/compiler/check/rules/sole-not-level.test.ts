@@ -36,6 +36,11 @@ describe(CODE, () => {
     expect(told(CODE, footWith('[0, 5.5, -5]', '[-4, 0, 10]'))).toEqual([]);
   });
 
+  it('is silent for a ball inside the foot, where its joint is', () => {
+    const body = footWith('[0, 0, -5]', '[-4, 0, 10]').replace('ball: [0, 0, 12]', 'ball: [0, 9, 12]');
+    expect(told(CODE, body)).toEqual([]);
+  });
+
   it('tells a heel in the air', () => {
     expect(told(CODE, footWith('[0, 9, -5]', '[-4, 0, 10]')).map(([text]) => text)).toEqual(['[0, 9, -5]']);
   });
