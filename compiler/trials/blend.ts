@@ -6,15 +6,15 @@ import type { TrialBench } from './TrialBench';
 import type { TrialResult } from './TrialResult';
 
 /** Even pieces that a blend's way is first cut in. */
-const PIECES = 8;
+const PIECES = 6;
 /** Halvings of the piece that looks most like a jump; the further ones only while it goes on looking like one. */
-const HALVINGS = { least: 7, most: 24 };
+const HALVINGS = { least: 6, most: 24 };
 /** Part of the way next to its ends over which the rig is watched. */
 const END_STEP = 1e-7;
 /**
  * Relative to the rig's size: the jump that is allowed. It is read off the second difference of positions over the
- * last, smallest piece, h = 1/2048 of the way or less, which a smooth blend makes h² times its curvature: half a turn
- * at the end of the rig has a curvature of some 20 sizes, so 5e-6 of a size. A kink shrinks with h and has vanished
+ * last, smallest piece, h = 1/768 of the way or less, which a smooth blend makes h² times its curvature: half a turn
+ * at the end of the rig has a curvature of some 20 sizes, so 3.4e-5 of a size. A kink shrinks with h and has vanished
  * after the further halvings; a jump stays. One is seen from about 1e-3 on, a millimetre on a metre.
  */
 const POP_TOLERANCE = 1e-4;
@@ -93,9 +93,10 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
     }
     return joinPoses(base, draft);
   };
+  /** The poser's own world, which the next evaluation overwrites. */
   const worldAt = (way: number): Float64Array => {
     poser.evaluate(poseAt(way));
-    return poser.world.slice();
+    return poser.world;
   };
   const compare = (a: Float64Array, b: Float64Array, way: number): void => {
     const pose = poseAt(way);
@@ -104,7 +105,7 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
     });
   };
   const width = 1 / PIECES;
-  const stops = Array.from({ length: PIECES + 1 }, (_, index) => worldAt(index * width));
+  const stops = Array.from({ length: PIECES + 1 }, (_, index) => worldAt(index * width).slice());
   const pieces = Array.from({ length: PIECES }, (_, index): Piece => {
     const [from, to] = [stops[index] as Float64Array, stops[index + 1] as Float64Array];
     return { start: index * width, width, from, to };
@@ -117,11 +118,15 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
     bend(from, worldAt(start + width / 2), to, node, size);
   const [before, after] = around;
   let last = bendOf(before) > bendOf(after) ? before : after;
+  const [unused] = stops.filter((stop) => stop !== last.from && stop !== last.to);
+  let free = unused as Float64Array;
   for (let halving = 0; ; halving += 1) {
     const half = last.width / 2;
     const middle = worldAt(last.start + half);
     const { from, to, start } = last;
     const isSuspect = bend(from, middle, to, node, size) > POP_TOLERANCE * size;
+    // Written over what is no longer looked at, so that closing in allocates nothing.
+    free.set(middle);
     if (halving >= (isSuspect ? HALVINGS.most : HALVINGS.least)) {
       const pose = poseAt(start + half);
       rig.nodes.forEach(({ id }, index) => {
@@ -132,9 +137,11 @@ function tryFading(mixes: readonly Mix[], base: PoseValues, bench: TrialBench, t
     // A jump stays in one of the halves whole, while all that moves smoothly halves with them.
     const isInFirst =
       displacement(last.from, node, middle, node, size) >= displacement(middle, node, last.to, node, size);
+    const kept = free;
+    free = isInFirst ? to : from;
     last = isInFirst
-      ? { ...last, width: half, to: middle }
-      : { ...last, start: last.start + half, width: half, from: middle };
+      ? { start, width: half, from, to: kept }
+      : { start: start + half, width: half, from: kept, to };
   }
 }
 

@@ -44,21 +44,23 @@ function findGuideLines(bench: TrialBench): readonly GuideLine[] {
  * line's own node lies parked and is never moved.
  */
 export function tryGuide(bench: TrialBench): TrialResult {
-  const { rig, poser, rest, size, tolerance } = bench;
+  const { rig, poser, rest, evaluatedRest, size, tolerance } = bench;
   const tally = new Tally('guide', rig.scene.unit, tolerance);
   const lines = findGuideLines(bench);
   if (lines.length === 0) return tally.result();
-  for (const pose of [{}, nudgedPose(bench, 6)]) {
-    poser.evaluate(pose);
+  const nudged = nudgedPose(bench, 6);
+  poser.evaluate(nudged);
+  for (const { pose, world } of [
+    { pose: {}, world: evaluatedRest },
+    { pose: nudged, world: poser.world },
+  ]) {
     for (const { id, own, ends } of lines) {
       for (const { meant, drawn } of ends) {
         const isThere = meant !== undefined && drawn !== undefined;
-        const gap = isThere
-          ? distance(readPosition(poser.world, meant), readPosition(poser.world, drawn))
-          : Number.NaN;
+        const gap = isThere ? distance(readPosition(world, meant), readPosition(world, drawn)) : Number.NaN;
         tally.add(gap, id, pose);
       }
-      if (own !== undefined) tally.add(displacement(poser.world, own, rest, own, size), id, pose);
+      if (own !== undefined) tally.add(displacement(world, own, rest, own, size), id, pose);
     }
   }
   for (const { id, isIdle, ends } of lines) {

@@ -4,7 +4,7 @@ import { CHANNELS } from '../pose/channelValues';
 import { readMatrix } from '../pose/worldMatrices';
 import type { Channel, JointNode, PoseValues, TurnChannel } from '../rig/Rig';
 import { displacement } from './displacement';
-import { type PoseDraft, put } from './poses';
+import type { PoseDraft } from './poses';
 import { Tally } from './Tally';
 import type { TrialBench } from './TrialBench';
 import type { TrialResult } from './TrialResult';
@@ -30,14 +30,18 @@ function posesAtLimits(
   for (const [id, channels] of intent.channels) {
     const name = rig.nodes[indexOfId.get(id) ?? -1]?.name;
     if (name === undefined) continue;
+    const limited: Record<string, number> = {};
+    const beyond: Record<string, number> = {};
     for (const channel of CHANNELS) {
       const rule = channels[channel];
       if (!rule) continue;
       const limit = rule.locked ? (channel.startsWith('s') ? 1 : 0) : rule[side];
       if (limit === null) continue;
-      put(at, name, { [channel]: limit });
-      put(past, name, { [channel]: limit + sign * pastOf(channel, size) });
+      limited[channel] = limit;
+      beyond[channel] = limit + sign * pastOf(channel, size);
     }
+    at[name] = limited;
+    past[name] = beyond;
   }
   return { at, past };
 }

@@ -19,6 +19,13 @@ import type { TrialBench } from './TrialBench';
 import type { Twins } from './TrialIntent';
 import type { TrialResult } from './TrialResult';
 
+/**
+ * Relative to the rig's size. Rest is rounded on each side in its own axes, by some 1e-12 of the size, and a chain near
+ * its full reach bends by the square root of what is left to it: at a hundredth of its length off straight it shows
+ * rounding a hundredfold, at less yet more.
+ */
+const MIRROR_TOLERANCE = 1e-7;
+
 /** A reflection of a right twin's axes against the mirrored left ones: columns of an orthogonal 3 × 3 matrix. */
 type Flip = readonly [Vec3, Vec3, Vec3];
 
@@ -195,9 +202,9 @@ function leaveOutLopsided(
  * attributes (but opposite swings); twins mirrored by behaviour take equal turns.
  */
 export function tryMirror(bench: TrialBench): TrialResult {
-  const { rig, intent, poser, rest, indexOfId, size, tolerance } = bench;
+  const { rig, intent, poser, rest, indexOfId, size } = bench;
   const { left } = intent;
-  const tally = new Tally('mirror', rig.scene.unit, tolerance);
+  const tally = new Tally('mirror', rig.scene.unit, MIRROR_TOLERANCE * size);
   const paired = new Set(intent.twins.flatMap((twins) => [twins.left, twins.right]));
   const pairs = intent.twins.flatMap((twins): Pair[] => {
     const leftIndex = indexOfId.get(twins.left);
@@ -207,17 +214,20 @@ export function tryMirror(bench: TrialBench): TrialResult {
   });
   const compared = leaveOutLopsided(pairs, paired, bench);
   if (compared.length === 0) return tally.result();
-  const compare = (pose: PoseValues): void => {
-    poser.evaluate(pose);
+  const compare = (pose: PoseValues, world: Float64Array): void => {
     for (const { leftIndex, rightIndex, flip, right } of compared) {
-      const expected = mirroredWorld(readMatrix(poser.world, leftIndex), flip, left);
-      tally.add(displacement(poser.world, rightIndex, expected, 0, size), right, pose);
+      const expected = mirroredWorld(readMatrix(world, leftIndex), flip, left);
+      tally.add(displacement(world, rightIndex, expected, 0, size), right, pose);
     }
   };
-  compare({});
+  const compareIn = (pose: PoseValues): void => {
+    poser.evaluate(pose);
+    compare(pose, poser.world);
+  };
+  compare({}, bench.evaluatedRest);
   const bySteps: PoseDraft = { ...mirroredPose(compared, bench, 5, 0.4) };
   for (const solver of rig.solvers) if ('blend' in solver) putAmount(bySteps, solver.blend, 0, bench);
-  compare(bySteps);
-  compare(mirroredPose(compared, bench, 11, 0.7));
+  compareIn(bySteps);
+  compareIn(mirroredPose(compared, bench, 11, 0.7));
   return tally.result();
 }
