@@ -25,7 +25,7 @@ export const mirroredControlsDiffer: Rule = {
   severity: 'warning',
   category: 'animator',
   summary: 'A left and a right control that differ.',
-  message: '"{id}" differs from "{other}" in {trait}: {right} against {left}.',
+  message: '"{id}" differs from "{other}" in {trait}: {own} against {wanted}.',
   help: 'Write the control once with side: both, or make the two alike.',
   create({ report, stage, resolved }) {
     const { document } = stage;
@@ -36,18 +36,23 @@ export const mirroredControlsDiffer: Rule = {
           const right = byId.get(mirrorId(left.id));
           // Both copies of one entry are alike by construction.
           if (!right || right === left || right.path.join() === left.path.join()) continue;
-          if (!isWrittenControl(right, document) && !isWrittenControl(left, document)) continue;
+          // Where a part made one of them, the other is what somebody changed.
+          const [control, other] = isWrittenControl(right, document) ? [right, left] : [left, right];
+          if (!isWrittenControl(control, document)) continue;
           for (const [trait, read] of Object.entries(TRAITS)) {
-            if (read(left) === read(right)) continue;
-            const path = [...right.path, trait];
-            const newText = read(left);
+            const [own, wanted] = [read(control), read(other)];
+            if (own === wanted) continue;
+            const path = [...control.path, trait];
+            const fix = WRITABLE.has(trait)
+              ? rewrite(document, `Write ${wanted}`, [{ path, newText: wanted }])
+              : {};
+            const related = [
+              { span: document.spanAt([...other.path, trait]), label: 'the one on the other side' },
+            ];
             report(
               path,
-              { id: right.id, other: left.id, trait, right: read(right) || 'none', left: newText || 'none' },
-              {
-                related: [{ span: document.spanAt([...left.path, trait]), label: 'the left control' }],
-                ...(WRITABLE.has(trait) ? rewrite(document, `Write ${newText}`, [{ path, newText }]) : {}),
-              },
+              { id: control.id, other: other.id, trait, own: own || 'none', wanted: wanted || 'none' },
+              { related, ...fix },
             );
           }
         }

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { compile } from '@/compiler';
 import { fixed, told } from '../ruleFindings';
 
 const CODE = 'mirrored-controls-differ';
@@ -25,6 +26,24 @@ describe(CODE, () => {
     expect(told(CODE, body).map(([, message]) => message)).toEqual([
       '"ear.right" differs from "ear.left" in channels: rx limited against rx locked.',
     ]);
+  });
+
+  it('points at the one that was changed where a part made both', () => {
+    const text = `format: 1
+recipe: demo
+parts:
+  root: { kind: root }
+  arm: { kind: limb, side: both, points: [shoulder, elbow, wrist], goal: hand }
+landmarks:
+  shoulder: { side: left, at: [10, 50, 0] }
+  elbow: { side: left, at: [25, 50, -3] }
+  wrist: { side: left, at: [40, 50, 0] }
+controls:
+  arm.left.hand: { shape: pin }
+`;
+    const { findings } = compile({ recipe: { name: 'rule.recipe.yaml', text } });
+    const found = findings.filter(({ code }) => code === CODE);
+    expect(found.map(({ span }) => text.slice(span.start, span.end))).toEqual(['pin']);
   });
 
   it('is silent about limits with other numbers, which mirroring may turn round, and about one entry for both', () => {
