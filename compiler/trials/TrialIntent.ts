@@ -1,4 +1,4 @@
-import type { Channel, ChannelRule, RigNode, Vec3 } from '../rig/Rig';
+import type { Channel, ChannelRule, Vec3 } from '../rig/Rig';
 
 /** How the axes of a right twin follow from those of the left, by the chain's mirror rule. */
 export type TwinAxes =
@@ -18,14 +18,10 @@ export interface Twins {
 
 /** What the recipe asks of one node. */
 export interface NodeIntent {
-  readonly kind: RigNode['kind'];
-  readonly role: string;
   /** Id of the container the role belongs in. */
   readonly container: string;
   readonly carried: boolean;
   readonly shown: boolean;
-  /** A container's own group or a seat: there for the structure, placed by it. */
-  readonly isStructure: boolean;
 }
 
 /** A declared link by which one node brings others along. */

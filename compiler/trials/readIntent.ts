@@ -24,7 +24,7 @@ const LINK_ROLES: Readonly<Record<LinkCollection, string>> = {
 };
 
 function intendNode(node: ResolvedNode, recipe: ResolvedRecipe, carrier: string | null): NodeIntent {
-  const { id, kind, role } = node;
+  const { id, role } = node;
   const { containers, roles } = recipe;
   const isContainer = role === CONTAINER_ROLE;
   const isStructure = isContainer || role === SEAT_ROLE;
@@ -34,13 +34,10 @@ function intendNode(node: ResolvedNode, recipe: ResolvedRecipe, carrier: string 
   const isAroundRoot = isContainer && inside === roles.get(CARRIER_ROLE)?.container;
   const isCarried = containers.get(inside)?.carried === true && !isAroundRoot;
   return {
-    kind,
-    role,
     container,
     // Carriers around the root stay; the root carries itself.
     carried: role === CARRIER_ROLE ? id === carrier : isCarried,
     shown: (roles.get(role)?.shown ?? true) && (containers.get(inside)?.shown ?? true),
-    isStructure,
   };
 }
 
