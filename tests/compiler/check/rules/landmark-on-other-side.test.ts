@@ -35,4 +35,9 @@ describe(CODE, () => {
     expect(told(CODE, tip('at: [8, 66, 0]'))).toEqual([]);
     expect(told(CODE, tip('at: [-0.1, 66, 0]'))).toEqual([]);
   });
+
+  it('is silent about centre points, which may stand anywhere', () => {
+    const body = tip('at: [-8, 66, 0]').replace('side: left, at', 'at').replace('side: both, ', '');
+    expect(told(CODE, body)).toEqual([]);
+  });
 });
