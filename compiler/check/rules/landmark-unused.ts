@@ -1,4 +1,6 @@
 import type { PlaceReference } from '../../expand/types';
+import { fixWith } from '../edits/fixWith';
+import { removeEntry } from '../edits/removeEntry';
 import type { Rule } from '../Rule';
 
 /** A landmark that nothing uses is measured for nothing, or stands for a misspelt name elsewhere. */
@@ -28,7 +30,14 @@ export const landmarkUnused: Rule = {
         const inExpressions = context.expressionNames().landmarks;
         for (const name of Object.keys(context.recipe.landmarks ?? {})) {
           if (!used.has(name) && !inExpressions.has(name))
-            context.report(['landmarks', name], { name }, { part: 'key' });
+            context.report(
+              ['landmarks', name],
+              { name },
+              {
+                part: 'key',
+                ...fixWith('Remove it', 'asks', [removeEntry(context.stage.document, ['landmarks', name])]),
+              },
+            );
         }
       },
     };

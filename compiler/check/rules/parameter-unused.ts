@@ -1,3 +1,5 @@
+import { fixWith } from '../edits/fixWith';
+import { removeEntry } from '../edits/removeEntry';
 import type { Rule } from '../Rule';
 
 /** A parameter that no expression reads changes nothing when a roster varies it. */
@@ -14,7 +16,15 @@ export const parameterUnused: Rule = {
         if (!context.isWhole) return;
         const read = context.expressionNames().params;
         for (const name of Object.keys(context.recipe.params ?? {})) {
-          if (!read.has(name)) context.report(['params', name], { name }, { part: 'key' });
+          if (!read.has(name))
+            context.report(
+              ['params', name],
+              { name },
+              {
+                part: 'key',
+                ...fixWith('Remove it', 'asks', [removeEntry(context.stage.document, ['params', name])]),
+              },
+            );
         }
       },
     };
