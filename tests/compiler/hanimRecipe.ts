@@ -19,7 +19,7 @@ function rowsOf(joints: readonly StandardJoint[]): readonly (readonly StandardJo
     const row: StandardJoint[] = [];
     let next: StandardJoint | undefined = first;
     while (next && !taken.has(next.name)) {
-      const { name } = next;
+      const name: string = next.name;
       taken.add(name);
       row.push(next);
       next = joints.find((joint) => joint.parent === name && sideOf(joint.name) === sideOf(first.name));
