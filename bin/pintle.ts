@@ -3,7 +3,9 @@ import { compileFiles } from './commands/compileFiles';
 import { explain } from './commands/explain';
 import { printSchema } from './commands/printSchema';
 import { runScriptFile } from './commands/runScriptFile';
+import { upgrade } from './commands/upgrade';
 import { WrongUse } from './commands/WrongUse';
+import { writeKit } from './commands/writeKit';
 
 /** What each command is for and how it is written; also the help text. */
 const COMMANDS: Readonly<
@@ -15,6 +17,8 @@ const COMMANDS: Readonly<
     run: compileFiles,
   },
   run: { usage: 'run SCRIPT [--pose FILE] [--json]', run: runScriptFile },
+  upgrade: { usage: 'upgrade A B [--out FILE] [--house FILE]', run: upgrade },
+  kit: { usage: 'kit --out DIR', run: writeKit },
   schema: { usage: 'schema [recipe|house]', run: printSchema },
   explain: { usage: 'explain CODE [--json]', run: explain },
 };

@@ -4,6 +4,7 @@ import { runRules } from './check/runRules';
 import { checkDeliveries } from './deliver/checkDeliveries';
 import type { DeliveryProfile } from './deliver/DeliveryProfile';
 import { characterNameOf } from './documents/characterName';
+import { houseSeverities } from './documents/houseSeverities';
 import { readHouse } from './documents/readHouse';
 import { readRecipe } from './documents/readRecipe';
 import { emitScript } from './emit/emitScript';
@@ -101,6 +102,7 @@ export function compile(request: CompileRequest): Compilation {
   const found = readHouse(shape.value.house, merged, request.houses ?? {}, findings);
   if (!found) return stop();
   const { house, reference, hash: houseHash } = found;
+  findings.overrule(houseSeverities(house.rules));
 
   const context = { document: merged, findings, poisoned: shape.poisoned, house };
   const recipe = evaluateRecipe(shape.value, request.character?.params ?? {}, context);

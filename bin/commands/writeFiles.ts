@@ -1,9 +1,15 @@
 import { renameSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import type { BuildFile } from '../../compiler/index';
 import { makeFolder } from './makeFolder';
 import { printable } from './printable';
 import { WrongUse } from './WrongUse';
+
+/** One file to be written. */
+export interface WrittenFile {
+  readonly name: string;
+  readonly text: string;
+  readonly encoding: 'utf8' | 'base64';
+}
 
 function cannotWrite(folder: string, error: unknown): WrongUse {
   const code = (error as NodeJS.ErrnoException).code;
@@ -15,7 +21,7 @@ function cannotWrite(folder: string, error: unknown): WrongUse {
  * Writes files into a folder, made if need be. Each is written beside its place and then moved there, and none is
  * moved before all are written, so that nothing half-written is ever seen under its name.
  */
-export function writeFiles(folder: string, files: readonly BuildFile[]): void {
+export function writeFiles(folder: string, files: readonly WrittenFile[]): void {
   const drafts = files.map(({ name, text, encoding }) => ({
     content: Buffer.from(text, encoding),
     place: join(folder, name),

@@ -1,6 +1,6 @@
 import type { Span } from '../source/SourceText';
 import type { FindingDeclaration, ParametersOf } from './catalogue';
-import type { Finding, Fix, RelatedPlace } from './Finding';
+import type { Finding, Fix, RelatedPlace, Severity } from './Finding';
 
 /** More findings than this help nobody; the count of those left out is said in one last finding. */
 export const MAXIMUM_FINDINGS = 500;
@@ -17,6 +17,7 @@ export function fillTemplate(
 export class FindingList {
   readonly #found: Finding[] = [];
   #errors = 0;
+  #severities: ReadonlyMap<string, Severity | 'off'> = new Map();
 
   /** True once anything was reported that stops the build. */
   get hasErrors(): boolean {
@@ -47,8 +48,15 @@ export class FindingList {
     });
   }
 
+  /** From now on findings of these codes have the given severity, or are left out. */
+  overrule(severities: ReadonlyMap<string, Severity | 'off'>): void {
+    this.#severities = severities;
+  }
+
   add(finding: Finding): void {
-    this.#found.push(finding);
-    if (finding.severity === 'error') this.#errors += 1;
+    const severity = this.#severities.get(finding.code) ?? finding.severity;
+    if (severity === 'off') return;
+    this.#found.push(severity === finding.severity ? finding : { ...finding, severity });
+    if (severity === 'error') this.#errors += 1;
   }
 }

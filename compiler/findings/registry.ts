@@ -11,6 +11,7 @@ import { slipwayFindings } from '../slipway/findings';
 import { solveFindings } from '../solve/findings';
 import { syntaxFindings } from '../syntax/findings';
 import { trialFindings } from '../trials/findings';
+import { upgradeFindings } from '../upgrade/findings';
 import type { FindingDeclaration } from './catalogue';
 
 /** Every code the compiler can give, stage by stage; the only list there is. */
@@ -27,6 +28,7 @@ const DECLARATIONS: Readonly<Record<string, FindingDeclaration>> = {
   ...deliverFindings,
   ...trialFindings,
   ...slipwayFindings,
+  ...upgradeFindings,
   ...poseFindings,
 };
 

@@ -7,7 +7,8 @@ import { type Line, spanInLine, spanOfLine, splitLines } from './lines';
 /** More than a hundred times the largest rig; what is longer is not a script, and is not read. */
 export const LONGEST_SCRIPT = 16_000_000;
 
-const FIRST_LINE = 'slipway 1';
+/** First line of a build script. */
+export const SCRIPT_HEAD = 'slipway 1';
 const LAST_LINE = /^end steps=(0|[1-9][0-9]{0,9}) sha256="([0-9a-f]{64})"$/;
 
 function report(
@@ -21,17 +22,21 @@ function report(
 
 /**
  * Checks the first and the last line of a script: the version, the count of lines before the last, and the SHA-256 of
- * all bytes before it. Gives the lines between them, or null with one finding; a refused script has no steps at all.
+ * all bytes before it. `head` is what the first line must be. Gives the lines between them, or null with one finding; a refused script has no steps at all.
  */
-export function checkSeal(source: SourceText, findings: FindingList): readonly Line[] | null {
+export function checkSeal(
+  source: SourceText,
+  findings: FindingList,
+  head: string = SCRIPT_HEAD,
+): readonly Line[] | null {
   const { text } = source;
-  const whole: Line = { source, number: 1, start: 0, end: Math.min(text.length, FIRST_LINE.length) };
+  const whole: Line = { source, number: 1, start: 0, end: Math.min(text.length, head.length) };
   if (text.length > LONGEST_SCRIPT) {
     const lengths = { length: text.length, longest: LONGEST_SCRIPT };
     findings.report(slipwayFindings, 'script-too-long', spanInLine(whole, 0, 0), lengths);
     return null;
   }
-  if (!`${text}\n`.startsWith(`${FIRST_LINE}\n`)) return report(findings, whole, 'script-version-unknown');
+  if (!`${text}\n`.startsWith(`${head}\n`)) return report(findings, whole, 'script-version-unknown');
   const lines = splitLines(source);
   const last = lines[lines.length - 1] ?? whole;
   const seal = LAST_LINE.exec(text.slice(last.start, last.end));

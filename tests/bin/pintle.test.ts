@@ -67,8 +67,34 @@ describe('pintle check', () => {
   });
 });
 
+describe('pintle upgrade and kit', () => {
+  it('makes the script that leads from one version to another', () => {
+    const first = write(
+      'walker_1.recipe.yaml',
+      'format: 1\nrecipe: walker\nparts:\n  root: { kind: root }\n',
+    );
+    const second = write(
+      'walker_2.recipe.yaml',
+      'format: 1\nrecipe: walker\nparts:\n  root: { kind: root, joint: true }\n',
+    );
+    const { stdout, status } = pintle('upgrade', first, second);
+    expect(status).toBe(0);
+    expect(stdout).toMatch(/^slipway-upgrade 1\nupgrade "versions" from="[0-9a-f]{64}" to="[0-9a-f]{64}"\n/);
+    expect(stdout).toMatch(/^joint "walker_c_root_joint_skin" /m);
+    expect(pintle('upgrade', first).status).toBe(2);
+    expect(pintle('upgrade', first, write('wrong.recipe.yaml', 'format: 1\n')).status).toBe(1);
+  });
+
+  it('writes the conformance kit', () => {
+    expect(pintle('kit', '--out', 'adapter_kit').status).toBe(0);
+    expect(readdirSync(join(folder, 'adapter_kit')).sort()).toEqual(['README.md', 'adapter.mjs', 'features']);
+    expect(readdirSync(join(folder, 'adapter_kit/features'))).toContain('two_bone.slip');
+    expect(pintle('kit').status).toBe(2);
+  });
+});
+
 describe('pintle compile and run', () => {
-  it('writes the four files, and the script runs to the rig that was asked for', () => {
+  it('writes every file, and the script runs to the rig that was asked for', () => {
     const compiled = pintle(
       'compile',
       hare(),
@@ -84,8 +110,10 @@ describe('pintle compile and run', () => {
     expect(compiled.stderr).toBe('');
     expect(compiled.status).toBe(0);
     expect(readdirSync(join(folder, 'build')).sort()).toEqual([
+      'quill.film.usda',
       'quill.findings.sarif',
       'quill.manifest.json',
+      'quill.realtime.glb',
       'quill.rig.json',
       'quill.slip',
     ]);
@@ -145,7 +173,7 @@ describe('pintle compile and run', () => {
 
   it('makes the folders it writes into', () => {
     expect(pintle('compile', hare(), '--out', 'show/reel/hare').status).toBe(0);
-    expect(readdirSync(join(folder, 'show/reel/hare'))).toHaveLength(4);
+    expect(readdirSync(join(folder, 'show/reel/hare'))).toHaveLength(6);
   });
 
   it('says when a recipe follows other house rules than those of the file', () => {

@@ -3,7 +3,12 @@ import { deleteDraftEndpoint, putDraftEndpoint, readDraftEndpoint } from './draf
 import type { Endpoint } from './Endpoint';
 import { readMeEndpoint } from './people';
 import { createRecipeEndpoint, listRecipesEndpoint, readRecipeEndpoint } from './recipes';
-import { readHealthEndpoint, readOpenApiEndpoint, readReadinessEndpoint } from './service';
+import {
+  readConformanceKitEndpoint,
+  readHealthEndpoint,
+  readOpenApiEndpoint,
+  readReadinessEndpoint,
+} from './service';
 import { listShowsEndpoint } from './shows';
 import { createVersionEndpoint, listVersionsEndpoint, readVersionEndpoint } from './versions';
 
@@ -12,6 +17,7 @@ export const endpoints: readonly Endpoint[] = [
   readHealthEndpoint,
   readReadinessEndpoint,
   readOpenApiEndpoint,
+  readConformanceKitEndpoint,
   readMeEndpoint,
   listShowsEndpoint,
   listRecipesEndpoint,

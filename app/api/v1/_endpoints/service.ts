@@ -34,3 +34,21 @@ export const readOpenApiEndpoint = defineEndpoint({
   answers: { 200: { description: 'The description.', schema: z.looseObject({ openapi: z.string() }) } },
   problems: [],
 });
+
+export const readConformanceKitEndpoint = defineEndpoint({
+  method: 'get',
+  path: '/conformance-kit',
+  operationId: 'readConformanceKit',
+  summary:
+    'The conformance kit for people who write adapters, as a ZIP archive; it holds nothing of any show',
+  tag: 'service',
+  access: 'public',
+  answers: {
+    200: {
+      description: 'The archive, as a download.',
+      mediaType: 'application/zip',
+      headers: { ETag: 'SHA-256 of what is in it.', 'Content-Disposition': 'Name of the archive.' },
+    },
+  },
+  problems: [],
+});
