@@ -10,9 +10,17 @@ const LEVELS: Readonly<Record<Severity, 'error' | 'warning' | 'note'>> = {
   info: 'note',
 };
 
+/** Half of a surrogate pair without the other: no character, and no URI can hold it. */
+const LONE_SURROGATE = /[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/g;
+
+/** A file's name as a relative URI. */
+function uriOf(name: string): string {
+  return encodeURIComponent(name.replace(LONE_SURROGATE, '\ufffd'));
+}
+
 function physicalLocation(span: Span) {
   return {
-    artifactLocation: { uri: encodeURIComponent(span.source) },
+    artifactLocation: { uri: uriOf(span.source) },
     region: {
       startLine: span.startLine,
       startColumn: span.startColumn,
@@ -42,7 +50,7 @@ function toResult(finding: Finding, ruleIndex: number): Result {
             {
               description: { text: finding.fix.title },
               artifactChanges: finding.fix.edits.map(({ span, newText }) => ({
-                artifactLocation: { uri: encodeURIComponent(span.source) },
+                artifactLocation: { uri: uriOf(span.source) },
                 replacements: [
                   { deletedRegion: physicalLocation(span).region, insertedContent: { text: newText } },
                 ],

@@ -14,6 +14,9 @@ import type { TwistSolver } from '../rig/Rig';
 import { type RigMemory, restOf, type Step } from './RigMemory';
 import { rotationInto, turnAxes } from './worldMatrices';
 
+/** Square of the part of a unit quaternion below which the twist is rounding noise: half a turn of swing to 1e-12. */
+const TWIST_NOISE = 1e-24;
+
 /**
  * Prepares a twist solver. The rotation of `driver` against `base`, from rest, is split into a twist about the bone,
  * done first, and the swing that is left; each joint turns about the bone by its share of the twist, −180 to 180
@@ -49,7 +52,8 @@ export function prepareTwist(solver: TwistSolver, memory: RigMemory): Step {
       (turn[1] as number) * (axisInBase[1] as number) +
       (turn[2] as number) * (axisInBase[2] as number);
     const w = turn[3] as number;
-    let half = Math.atan2(along, w);
+    // A swing of half a turn leaves no twist; what rounding leaves there is no angle.
+    let half = along * along + w * w > TWIST_NOISE ? Math.atan2(along, w) : 0;
     // Both signs of the quaternion are one rotation: the half angle is brought within a quarter turn.
     if (half > Math.PI / 2) half -= Math.PI;
     else if (half <= -Math.PI / 2) half += Math.PI;

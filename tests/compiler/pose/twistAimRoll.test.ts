@@ -1,9 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { eulerToQuat } from '@/compiler/math/euler';
+import { eulerToQuat, quatToEuler } from '@/compiler/math/euler';
 import { rotationOf } from '@/compiler/math/mat4';
 import { multiplyQuat, quatFromAxisAngle, rotate } from '@/compiler/math/quat';
-import { distance, dot, normalise, sub } from '@/compiler/math/vec3';
+import { distance, dot, normalise, rejectFrom, scale, sub } from '@/compiler/math/vec3';
 import type { Rig, Vec3 } from '@/compiler/rig/Rig';
 import { degrees, direction, point } from '../math/arbitraries';
 import { expectNear, expectSameRotation } from '../math/expectNear';
@@ -93,6 +93,51 @@ describe('twist joints', () => {
         expectSameRotation(rotationOf(matrixIn(world, 'one')), expected, 1e-6);
       }),
     );
+  });
+});
+
+describe('a swing of half a turn', () => {
+  it('leaves no twist, however the bone lies', () => {
+    const bone: Vec3 = normalise([0.3, 0.7, -0.2]);
+    const foreTurn = quatFromAxisAngle([1, 2, 3], 0.7);
+    for (let step = 0; step < 8; step += 1) {
+      const across = normalise(rejectFrom([Math.cos(step), Math.sin(step), 0.4], bone));
+      const half = quatFromAxisAngle(rotate(foreTurn, across), Math.PI);
+      const rig = rigOf(
+        [
+          control('turn'),
+          joint('fore', { turn: foreTurn }),
+          joint('one', { parent: 'fore', at: scale(bone, 5) }),
+          joint('hand', { parent: 'fore', at: scale(bone, 10) }),
+        ],
+        {
+          constraints: [
+            {
+              id: 'c',
+              name: 'c',
+              kind: 'orient',
+              target: 'hand',
+              sources: [{ node: 'turn', weight: 1 }],
+              blend: null,
+              keepOffset: true,
+            },
+          ],
+          solvers: [
+            solver.twist({
+              joints: ['one'],
+              shares: [0.5],
+              bone: 'fore',
+              tip: 'hand',
+              base: 'fore',
+              driver: 'hand',
+            }),
+          ],
+        },
+      );
+      const [rx, ry, rz] = quatToEuler(half, 'xyz');
+      const world = worldOf(rig, { turn: { rx, ry, rz } });
+      expectSameRotation(rotationOf(matrixIn(world, 'one')), foreTurn, 1e-9);
+    }
   });
 });
 
