@@ -1,6 +1,7 @@
 /** The compiler's only door: everything outside `compiler/` imports from here. */
 export { type BuildFile, buildFiles, utf8Length } from './build/buildFiles';
 export { findingsToSarif } from './build/findingsToSarif';
+export { frontPicture } from './chart/frontPicture';
 export { type Compilation, type CompileRequest, compile, type NodePlace } from './compile';
 export { type KitFile, makeConformanceKit } from './conformance/makeConformanceKit';
 export { type BaseReference, findBaseReference } from './documents/findBaseReference';

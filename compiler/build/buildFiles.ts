@@ -1,3 +1,6 @@
+import { chartCsv } from '../chart/chartCsv';
+import { chartHtml } from '../chart/chartHtml';
+import { controlChart } from '../chart/controlChart';
 import type { Compilation } from '../compile';
 import type { DeliveryProfile } from '../deliver/DeliveryProfile';
 import { toGlb } from '../deliver/toGlb';
@@ -67,6 +70,8 @@ async function contentFiles({
     toFile(`${character}.slip`, 'text/plain; charset=utf-8', script),
     toFile(`${character}.rig.json`, 'application/json', `${canonicalJson(rig)}\n`),
     ...(await deliveryFiles(rig, deliveries)),
+    toFile(`${character}.chart.html`, 'text/html; charset=utf-8', chartHtml(rig)),
+    toFile(`${character}.chart.csv`, 'text/csv; charset=utf-8', chartCsv(controlChart(rig))),
     sarif,
   ];
 }

@@ -110,6 +110,8 @@ describe('pintle compile and run', () => {
     expect(compiled.stderr).toBe('');
     expect(compiled.status).toBe(0);
     expect(readdirSync(join(folder, 'build')).sort()).toEqual([
+      'quill.chart.csv',
+      'quill.chart.html',
       'quill.film.usda',
       'quill.findings.sarif',
       'quill.manifest.json',
@@ -173,7 +175,7 @@ describe('pintle compile and run', () => {
 
   it('makes the folders it writes into', () => {
     expect(pintle('compile', hare(), '--out', 'show/reel/hare').status).toBe(0);
-    expect(readdirSync(join(folder, 'show/reel/hare'))).toHaveLength(6);
+    expect(readdirSync(join(folder, 'show/reel/hare'))).toHaveLength(8);
   });
 
   it('says when a recipe follows other house rules than those of the file', () => {

@@ -26,6 +26,8 @@ describe('files of a build', () => {
       ['postmaster.rig.json', 'application/json'],
       ['postmaster.film.usda', 'model/vnd.usda'],
       ['postmaster.realtime.glb', 'model/gltf-binary'],
+      ['postmaster.chart.html', 'text/html; charset=utf-8'],
+      ['postmaster.chart.csv', 'text/csv; charset=utf-8'],
       ['postmaster.findings.sarif', 'application/sarif+json'],
       ['postmaster.manifest.json', 'application/json'],
     ]);

@@ -1,0 +1,7 @@
+declare module 'jsdom' {
+  /** Only what the tests use: a document from text. */
+  export class JSDOM {
+    constructor(html: string);
+    readonly window: { readonly document: Document };
+  }
+}
