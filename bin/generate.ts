@@ -42,6 +42,14 @@ async function generatedFiles(): Promise<ReadonlyMap<string, string>> {
       'compiler/conformance/generated/kitGuide.ts',
       textModule('KIT_GUIDE', 'compiler/conformance', '.guide.md'),
     ],
+    [
+      'compiler/parts/generated/partExamples.ts',
+      textModule('PART_EXAMPLES', 'compiler/parts', '.example.yaml'),
+    ],
+    [
+      'compiler/slipway/generated/referenceText.ts',
+      textModule('REFERENCE_TEXT', 'compiler/slipway', 'reference.md'),
+    ],
     ['compiler/findings/generated/pages.ts', textModule('PAGES', 'compiler', '.page.md')],
   ]);
 }

@@ -10,6 +10,16 @@ export { DEFAULT_HOUSE } from './documents/readHouse';
 export { type Explanation, explainFinding } from './findings/explainFinding';
 export type { Finding, Fix, RelatedPlace, Severity } from './findings/Finding';
 export { listFindingCodes } from './findings/registry';
+export {
+  type FindingEntry,
+  type KeyEntry,
+  type LanguageEntry,
+  listFindings,
+  listLanguage,
+  listParts,
+  type PartEntry,
+  slipwayReference,
+} from './handbook';
 export { sha256Hex } from './hash/sha256Hex';
 export { type ChainSwitch, findSwitches } from './match/findSwitches';
 export { matchToReaching, matchToTurning } from './match/matchChain';

@@ -15,6 +15,8 @@ const MARGIN = 40;
 export interface PictureOptions {
   /** Numbers to write at controls, by name; controls that have none are not drawn. */
   readonly numbers?: ReadonlyMap<string, number>;
+  /** Joints to draw; all when left out. */
+  readonly shows?: (id: string) => boolean;
 }
 
 function round(value: number): number {
@@ -25,12 +27,16 @@ function round(value: number): number {
  * A rig at rest seen from the front as an SVG image: bones as lines, controls as rings with their numbers. Colours and
  * dashes tell the sides; the character's left is on the right of the picture. Holds no text that a person wrote.
  */
-export function frontPicture(rig: Rig, { numbers = new Map() }: PictureOptions = {}): string {
+export function frontPicture(
+  rig: Rig,
+  { numbers = new Map(), shows = () => true }: PictureOptions = {},
+): string {
   const left = leftDirection(rig.scene);
   const up = axisDirection(rig.scene.up);
   const world = restWorldMatrices(rig);
   const flat = world.map((matrix) => [dot(positionOf(matrix), left), -dot(positionOf(matrix), up)] as const);
-  const isDrawn = ({ kind, name }: RigNode): boolean => kind === 'joint' || numbers.has(name);
+  const isDrawn = ({ kind, name, id }: RigNode): boolean =>
+    kind === 'joint' ? shows(id) : numbers.has(name);
   const drawn = flat.filter((_, index) => isDrawn(rig.nodes[index] as RigNode));
   const [lowX, highX] = [Math.min(0, ...drawn.map(([x]) => x)), Math.max(0, ...drawn.map(([x]) => x))];
   const [lowY, highY] = [Math.min(0, ...drawn.map(([, y]) => y)), Math.max(0, ...drawn.map(([, y]) => y))];
@@ -50,10 +56,11 @@ export function frontPicture(rig: Rig, { numbers = new Map() }: PictureOptions =
     const [x, y] = at(index);
     const colour = COLOURS[node.side];
     const dash = DASHES[node.side] === '' ? '' : ` stroke-dasharray="${DASHES[node.side]}"`;
-    if (node.kind === 'joint') {
+    if (node.kind === 'joint' && shows(node.id)) {
       joints.push(`<circle cx="${x}" cy="${y}" r="2.5" fill="${colour}"/>`);
       const parent = node.parent === null ? undefined : indexOf.get(node.parent);
-      if (parent !== undefined && rig.nodes[parent]?.kind === 'joint') {
+      const above = parent === undefined ? undefined : rig.nodes[parent];
+      if (parent !== undefined && above?.kind === 'joint' && shows(above.id)) {
         const [px, py] = at(parent);
         bones.push(`<path d="M${px} ${py}L${x} ${y}" stroke="${colour}"${dash}/>`);
       }

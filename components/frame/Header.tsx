@@ -15,6 +15,9 @@ export function Header({ name, scheme }: { readonly name: string; readonly schem
       <nav aria-label="Main">
         <Link href="/shows" className="plain-action">
           Shows
+        </Link>{' '}
+        <Link href="/handbook" className="plain-action">
+          Handbook
         </Link>
       </nav>
       <div className="ml-auto flex flex-wrap items-baseline gap-x-5 gap-y-1">

@@ -23,6 +23,13 @@ async function demoPages(page: Page): Promise<readonly string[]> {
     `/recipes/${hare}?version=1`,
     `/recipes/${hare}/versions`,
     `/recipes/${hare}/compare?from=1&to=2`,
+    '/handbook',
+    '/handbook/language',
+    '/handbook/parts',
+    '/handbook/findings',
+    '/handbook/findings/pole-undecided',
+    '/handbook/trials',
+    '/handbook/slipway',
   ];
 }
 

@@ -4,8 +4,8 @@ import { compile, samples } from '@/compiler';
 import type { CompileRequest } from '@/compiler/compile';
 
 const everyPart = {
-  name: 'every_part.recipe.yaml',
-  text: readFileSync(new URL('../../data/recipes/every_part.recipe.yaml', import.meta.url), 'utf8'),
+  name: 'every_part.example.yaml',
+  text: readFileSync(new URL('../../../compiler/parts/every_part.example.yaml', import.meta.url), 'utf8'),
 };
 
 const told = (request: CompileRequest): readonly string[] =>

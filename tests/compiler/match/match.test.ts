@@ -10,8 +10,11 @@ import { positionOf, rotationOf } from '@/compiler/math/mat4';
 import type { Rig } from '@/compiler/rig/Rig';
 import { expectNear, expectSameRotation } from '../math/expectNear';
 
-const text = readFileSync(new URL('../../data/recipes/every_part.recipe.yaml', import.meta.url), 'utf8');
-const rig = compile({ recipe: { name: 'every_part.recipe.yaml', text } }).rig as Rig;
+const text = readFileSync(
+  new URL('../../../compiler/parts/every_part.example.yaml', import.meta.url),
+  'utf8',
+);
+const rig = compile({ recipe: { name: 'every_part.example.yaml', text } }).rig as Rig;
 const reader = makeRigReader(rig);
 const nameOf = (id: string): string => rig.nodes.find((node) => node.id === id)?.name ?? id;
 const switches = findSwitches(rig);

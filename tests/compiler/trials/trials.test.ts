@@ -8,7 +8,7 @@ import { runTrials } from '@/compiler/trials/runTrials';
 import type { TrialIntent } from '@/compiler/trials/TrialIntent';
 import { trialSubject } from './trialSubject';
 
-const everyPart = readFileSync('tests/data/recipes/every_part.recipe.yaml', 'utf8');
+const everyPart = readFileSync('compiler/parts/every_part.example.yaml', 'utf8');
 
 const failedTrials = (rig: Rig, intent: TrialIntent): readonly TrialName[] =>
   runTrials(rig, intent)
