@@ -43,7 +43,7 @@ async function generatedFiles(): Promise<ReadonlyMap<string, string>> {
       textModule('KIT_GUIDE', 'compiler/conformance', '.guide.md'),
     ],
     [
-      'compiler/parts/generated/partExamples.ts',
+      'compiler/handbook/generated/partExamples.ts',
       textModule('PART_EXAMPLES', 'compiler/parts', '.example.yaml'),
     ],
     [

@@ -10,16 +10,10 @@ export { DEFAULT_HOUSE } from './documents/readHouse';
 export { type Explanation, explainFinding } from './findings/explainFinding';
 export type { Finding, Fix, RelatedPlace, Severity } from './findings/Finding';
 export { listFindingCodes } from './findings/registry';
-export {
-  type FindingEntry,
-  type KeyEntry,
-  type LanguageEntry,
-  listFindings,
-  listLanguage,
-  listParts,
-  type PartEntry,
-  slipwayReference,
-} from './handbook';
+export { type FindingEntry, listFindings } from './handbook/listFindings';
+export { type KeyEntry, type LanguageEntry, listLanguage } from './handbook/listLanguage';
+export { listParts, type PartEntry } from './handbook/listParts';
+export { slipwayReference } from './handbook/slipwayReference';
 export { sha256Hex } from './hash/sha256Hex';
 export { type ChainSwitch, findSwitches } from './match/findSwitches';
 export { matchToReaching, matchToTurning } from './match/matchChain';

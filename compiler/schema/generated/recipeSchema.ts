@@ -3329,9 +3329,6 @@ export const recipeSchema = {
           "const": "root",
           "description": "The carrier of the rig."
         },
-        "side": {
-          "$ref": "#/$defs/SideOption"
-        },
         "at": {
           "$ref": "#/$defs/Place",
           "description": "Where it stands.",

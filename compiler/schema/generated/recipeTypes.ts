@@ -723,7 +723,6 @@ export interface RootPart {
    * The carrier of the rig.
    */
   kind: 'root';
-  side?: SideOption;
   at?: Place;
   /**
    * Shape of the control.

@@ -33,7 +33,7 @@ const ROWS: readonly Row[] = [
     'unknown-key',
     'wombat',
     'There is no key "wombat" here.',
-    'Keys here are "format", "recipe", "title", "house", "extends", "params", "scene", "landmarks", "roles", "containers", "parts", "chains" and 9 more.',
+    'Keys here are "format", "recipe", "title", "house", "extends", "params", "scene", "landmarks", "roles", "containers", "parts", "chains" and 10 more.',
     ['wombat'],
   ),
   row(
@@ -51,7 +51,7 @@ const ROWS: readonly Row[] = [
     'unknown-key',
     'flavour',
     'There is no key "flavour" here.',
-    'Keys here are "kind", "at", "shape", "size".',
+    'Keys here are "kind", "at", "shape", "size", "joint".',
     [],
   ),
   row(
@@ -92,11 +92,11 @@ const ROWS: readonly Row[] = [
   ),
   row(
     'part of an unknown kind',
-    'parts: { arm: { kind: wings, points: [a, b, c] } }',
+    'parts: { arm: { kind: zeppelin, points: [a, b, c] } }',
     'not-one-of',
-    'wings',
-    '"wings" is not allowed for "kind" of "arm".',
-    'Write one of "limb", "root", "strand".',
+    'zeppelin',
+    '"zeppelin" is not allowed for "kind" of "arm".',
+    'Write one of "axle", "clavicle", "eye", "foot", "hand", "jaw", "leg_three", "limb", "neck_head", "root", "spine", "strand" and 1 more.',
     ['parts/arm'],
   ),
   row('number as text', 'title: 3', 'wrong-type', '3', '"title" is a number, not text.', 'Write text.', [

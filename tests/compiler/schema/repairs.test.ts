@@ -26,7 +26,7 @@ describe('repairs', () => {
       'strnd',
       'strand',
       false,
-      'Did you mean "strand"? Allowed are "limb", "root", "strand".',
+      'Did you mean "strand"? Allowed are "axle", "clavicle", "eye", "foot", "hand", "jaw", "leg_three", "limb", "neck_head", "root", "spine", "strand" and 1 more.',
     ],
     [
       'a channel',
