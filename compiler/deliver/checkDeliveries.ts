@@ -1,4 +1,4 @@
-import { positionOf } from '../math/mat4';
+import { IDENTITY_MAT4, positionOf } from '../math/mat4';
 import { length } from '../math/vec3';
 import { restWorldMatrices } from '../pose/worldMatrices';
 import type { ResolveContext } from '../resolve/Reporter';
@@ -12,7 +12,7 @@ import { type DeliveredJoint, deliveredJoints } from './skeleton';
 
 /** Offenders that one finding names at most. */
 const MOST_NAMED = 5;
-/** Relative to the rig's height: nearer than this counts as at the origin. */
+/** Relative to the rig's size: nearer than this counts as at the origin. */
 const AT_ORIGIN = 1e-6;
 
 function quoted(names: readonly string[]): string {
@@ -124,7 +124,7 @@ function checkOrigin(
 ): void {
   if (!profile.rootAtOrigin) return;
   const rest = restWorldMatrices(rig);
-  const size = Math.max(...joints.map(({ index }) => Math.abs(rest[index]?.[13] ?? 0)), 1);
+  const size = Math.max(...joints.map(({ index }) => length(positionOf(rest[index] ?? IDENTITY_MAT4))), 1e-9);
   for (const { node, index, parent } of joints) {
     const matrix = rest[index];
     if (parent !== null || matrix === undefined) continue;
@@ -178,6 +178,11 @@ export function checkDeliveries(
       return;
     }
     const profile = toProfile(id, entry);
+    if (profile.up[1] === profile.forward[1]) {
+      const axes = { profile: id, up: profile.up, forward: profile.forward };
+      context.findings.report(deliverFindings, 'profile-axes-parallel', span, axes);
+      return;
+    }
     profiles.push(profile);
     const report: Report = (code, parameters) => {
       context.findings.report(deliverFindings, code, span, parameters as never);

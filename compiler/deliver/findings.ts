@@ -8,6 +8,12 @@ export const deliverFindings = declareFindings({
     message: 'The house rules "{house}" have no delivery profile "{profile}".',
     help: 'Profiles are: {profiles}.',
   },
+  'profile-axes-parallel': {
+    severity: 'error',
+    summary: 'A delivery profile gives the same line for up and forward.',
+    message: 'The delivery profile "{profile}" has "{up}" up and "{forward}" forward, which lie on one line.',
+    help: 'Give the profile a forward axis of another letter.',
+  },
   'delivery-too-many-joints': {
     severity: 'error',
     summary: 'A skeleton has more joints than its receiver takes.',

@@ -1,16 +1,15 @@
 import validator from 'gltf-validator';
-import { Bone, type Object3D, type SkinnedMesh } from 'three';
+import { type AnimationClip, AnimationMixer, Bone, type Object3D, type SkinnedMesh } from 'three';
 import { GLTFLoader } from 'three/examples/jsm/loaders/GLTFLoader.js';
 import { describe, expect, it } from 'vitest';
-import { compile, createPoser, type Rig, samples } from '@/compiler';
-import { GLTF_SPACE, spaceChange } from '@/compiler/deliver/axes';
+import { compile, createPoser, type PoseValues, type Rig, samples } from '@/compiler';
+import { GLTF_SPACE } from '@/compiler/deliver/axes';
 import { type DeliveryProfile, toProfile } from '@/compiler/deliver/DeliveryProfile';
-import { jointTransforms } from '@/compiler/deliver/jointTransforms';
 import { POSE_SECONDS, rangeOfMotion } from '@/compiler/deliver/rangeOfMotion';
 import { deliveredJoints } from '@/compiler/deliver/skeleton';
 import { toGlb } from '@/compiler/deliver/toGlb';
 import { toUsda } from '@/compiler/deliver/toUsda';
-import { composeMat4, type Mat4, multiplyMat4 } from '@/compiler/math/mat4';
+import { type Mat4, multiplyMat4 } from '@/compiler/math/mat4';
 import { readUsda } from './readUsda';
 
 const rigs = samples.map(
@@ -26,21 +25,75 @@ const profiles = [
 ] as const;
 const cases = rigs.flatMap(([id, rig]) => profiles.map(([what, wanted]) => [id, what, rig, wanted] as const));
 
-/** World matrices of delivered joints in the space of a file, worked out beside the writers. */
+type Vec = readonly [number, number, number];
+const DIRECTIONS: Readonly<Record<string, Vec>> = {
+  '+x': [1, 0, 0],
+  '-x': [-1, 0, 0],
+  '+y': [0, 1, 0],
+  '-y': [0, -1, 0],
+  '+z': [0, 0, 1],
+  '-z': [0, 0, -1],
+};
+const METRES: Readonly<Record<string, number>> = { mm: 0.001, cm: 0.01, m: 1 };
+
+/** Left, up and forward of a space, written out: left is up × forward. */
+function frameOf({ up, forward }: { readonly up: string; readonly forward: string }): readonly Vec[] {
+  const u = DIRECTIONS[up] as Vec;
+  const f = DIRECTIONS[forward] as Vec;
+  const l: Vec = [u[1] * f[2] - u[2] * f[1], u[2] * f[0] - u[0] * f[2], u[0] * f[1] - u[1] * f[0]];
+  return [l, u, f];
+}
+
+/**
+ * World matrices of delivered joints straight from the poser, carried into the space of a file by hand: the part of a
+ * vector along left, up and forward of the scene is its part along those of the file. Nothing of the writers is used.
+ */
 function worldIn(
   rig: Rig,
   wanted: DeliveryProfile,
-  space: Parameters<typeof spaceChange>[1],
+  space: { readonly up: string; readonly forward: string; readonly unit: string },
+  pose: PoseValues = {},
 ): readonly Mat4[] {
-  const joints = deliveredJoints(rig, wanted);
-  const local = jointTransforms(joints, createPoser(rig), spaceChange(rig.scene, space));
-  const world: Mat4[] = [];
-  joints.forEach(({ parent }, place) => {
-    const { at, turn, size } = local[place] as (typeof local)[number];
-    const own = composeMat4(at, turn, size);
-    world.push(parent === null ? own : multiplyMat4(world[parent] as Mat4, own));
+  const poser = createPoser(rig);
+  poser.evaluate(pose);
+  const from = frameOf(rig.scene);
+  const to = frameOf(space);
+  const factor = (METRES[rig.scene.unit] as number) / (METRES[space.unit] as number);
+  const carry = (v: Vec): Vec =>
+    [0, 1, 2].map((axis) =>
+      from.reduce(
+        (sum, direction, index) =>
+          sum +
+          (direction[0] * v[0] + direction[1] * v[1] + direction[2] * v[2]) *
+            ((to[index] as Vec)[axis] as number),
+        0,
+      ),
+    ) as unknown as Vec;
+  /** The scene's axis that becomes the file's axis number `index`, to carry columns as well. */
+  const uncarry = (index: number): Vec => {
+    const unit: Vec = [index === 0 ? 1 : 0, index === 1 ? 1 : 0, index === 2 ? 1 : 0];
+    return [0, 1, 2].map((axis) =>
+      to.reduce(
+        (sum, direction, place) =>
+          sum +
+          (direction[0] * unit[0] + direction[1] * unit[1] + direction[2] * unit[2]) *
+            ((from[place] as Vec)[axis] as number),
+        0,
+      ),
+    ) as unknown as Vec;
+  };
+  return deliveredJoints(rig, wanted).map(({ index: node }) => {
+    const m = poser.world.subarray(node * 16, node * 16 + 16);
+    const columns = [0, 1, 2].map((index) => {
+      const v = uncarry(index);
+      const turned = [0, 1, 2].map(
+        (row) => (m[row] as number) * v[0] + (m[row + 4] as number) * v[1] + (m[row + 8] as number) * v[2],
+      ) as unknown as Vec;
+      return [...carry(turned), 0];
+    });
+    const at = carry([m[12] as number, m[13] as number, m[14] as number]).map((value) => value * factor);
+    return [...columns.flat(), ...at, 1] as unknown as Mat4;
   });
-  return world;
 }
 
 function expectMatrix(actual: ArrayLike<number>, expected: ArrayLike<number>, tolerance: number): void {
@@ -101,8 +154,23 @@ describe.each(cases)('%s, %s', (_, __, rig, wanted) => {
       expectMatrix(product.elements, [1, 0, 0, 0, 0, 1, 0, 0, 0, 0, 1, 0, 0, 0, 0, 1], 1e-5);
     });
     const poses = rangeOfMotion(rig);
-    const [clip] = loaded.animations;
-    expect(clip?.duration).toBeCloseTo((poses.length - 1) * POSE_SECONDS, 4);
+    const clip = loaded.animations[0] as AnimationClip;
+    expect(clip.duration).toBeCloseTo((poses.length - 1) * POSE_SECONDS, 4);
+    const mixer = new AnimationMixer(loaded.scene);
+    mixer.clipAction(clip).play();
+    for (const index of [1, Math.floor(poses.length / 3), Math.floor(poses.length / 2), poses.length - 2]) {
+      mixer.setTime(index * POSE_SECONDS);
+      loaded.scene.updateMatrixWorld(true);
+      worldIn(rig, wanted, GLTF_SPACE, poses[index]).forEach((matrix, place) => {
+        const bone = bones.get(joints[place]?.node.name ?? '');
+        const at = bone?.matrixWorld.elements.slice(12, 15) ?? [];
+        for (const axis of [0, 1, 2]) {
+          expect(Math.abs((at[axis] as number) - (matrix[12 + axis] as number))).toBeLessThan(
+            1e-4 * Math.max(1, heightOf(world)),
+          );
+        }
+      });
+    }
   });
 
   it('gives the same world matrices as OpenUSD text', () => {
