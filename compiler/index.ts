@@ -25,6 +25,7 @@ export { describePose, type PosedNode } from './pose/describePose';
 export type { Poser } from './pose/Poser';
 export { readPoseText } from './pose/readPoseText';
 export type * from './rig/Rig';
+export { samplePicture } from './samples/samplePicture';
 export { type Sample, samples } from './samples/samples';
 export { houseSchema } from './schema/generated/houseSchema';
 export { recipeSchema } from './schema/generated/recipeSchema';

@@ -81,6 +81,10 @@ export function NewRecipe({ slug, samples }: NewRecipeProps) {
               {choices.map(({ id, title, summary }) => (
                 <label key={id} className="choice-row">
                   <input type="radio" value={id} {...form.register('sample')} />
+                  {id === '' ? null : (
+                    // biome-ignore lint/performance/noImgElement: a drawing of a few kilobytes, nothing to optimise.
+                    <img className="sample-picture" alt="" loading="lazy" src={`/pictures/samples/${id}`} />
+                  )}
                   <span>
                     <span className="font-bold">{title}</span>
                     <span className="block text-ink-soft text-sm">{summary}</span>
