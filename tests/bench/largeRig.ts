@@ -9,9 +9,9 @@ import type {
   Vec3,
 } from '@/compiler/rig/Rig';
 
-const LIMBS = 8;
-const STRAND_JOINTS = 21;
-const STRANDS = 6;
+const LIMBS = 12;
+const STRAND_JOINTS = 22;
+const STRANDS = 12;
 
 function base(name: string, parent: string | null, at: Vec3) {
   const place = { id: name, name, parent, container: 'rig', role: 'part', at } as const;
@@ -48,7 +48,7 @@ function follow(target: string, node: string): RigConstraint {
 }
 
 /**
- * A rig of 150 joints as a character has them: six strands whose every joint follows a control of its own, and eight
+ * A rig of 300 joints as a character has them: twelve strands whose every joint follows a control of its own, and twelve
  * limbs solved by two-bone inverse kinematics; with a pose that moves every control.
  */
 export function makeLargeRig(): { readonly rig: Rig; readonly pose: PoseValues } {

@@ -1,8 +1,10 @@
 import { writeFileSync } from 'node:fs';
 import { cpus } from 'node:os';
 import { parseArgs } from 'node:util';
+import { measureAgainstThree } from './againstThree';
 import type { BenchRow } from './BenchRow';
 import { measure as measureCompile } from './compileRecipe';
+import { measureLongRecipes } from './longRecipes';
 import { measure as measureScriptAndPose } from './scriptAndPose';
 
 /**
@@ -23,7 +25,12 @@ function toTable(rows: readonly BenchRow[]): string {
   return ['| what | measured | aim | |', '| --- | --- | --- | --- |', ...lines].join('\n');
 }
 
-const rows = [...(await measureCompile()), ...(await measureScriptAndPose())];
+const rows = [
+  ...(await measureCompile()),
+  ...measureLongRecipes(),
+  ...(await measureScriptAndPose()),
+  ...measureAgainstThree(),
+];
 const table = toTable(rows);
 console.log(table);
 if (values.json !== undefined) {

@@ -19,7 +19,7 @@ function medianMilliseconds(calls: number, task: () => void): number {
   return median(times);
 }
 
-/** Times of a rig of 150 joints: posing it, emitting its script, running the script. */
+/** Times of a rig of 300 joints: posing it, emitting its script, running the script. */
 export async function measure(): Promise<readonly BenchRow[]> {
   const { rig, pose } = makeLargeRig();
   const poser = createPoser(rig);
@@ -27,18 +27,18 @@ export async function measure(): Promise<readonly BenchRow[]> {
   const row = (name: string, goal: number, value: number): BenchRow => ({ name, value, goal, unit: 'ms' });
   return [
     row(
-      'evaluate a pose, 150 joints',
-      0.3,
+      'evaluate a pose, 300 joints',
+      0.6,
       medianMilliseconds(100, () => poser.evaluate(pose)),
     ),
     row(
-      'plan and emit, 150 joints',
-      3,
+      'plan and emit, 300 joints',
+      6,
       medianMilliseconds(5, () => void emitScript(planSteps(rig))),
     ),
     row(
-      'run the script, 150 joints',
-      15,
+      'run the script, 300 joints',
+      30,
       medianMilliseconds(3, () => void runScript({ name: 'bench.slip', text })),
     ),
   ];
