@@ -65,7 +65,13 @@ export function Panes({ text, picture, tabs }: PanesProps) {
                   ))}
                 </Tabs.List>
                 {tabs.map(({ id, content }) => (
-                  <Tabs.Content key={id} value={id} className="tab-content" tabIndex={-1}>
+                  <Tabs.Content
+                    key={id}
+                    value={id}
+                    className="tab-content"
+                    // What scrolls and holds nothing to stop at must be reached itself by keyboard.
+                    tabIndex={id === 'trials' ? 0 : -1}
+                  >
                     {content}
                   </Tabs.Content>
                 ))}

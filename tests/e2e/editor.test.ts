@@ -66,7 +66,7 @@ describe('a build', () => {
     await page.getByRole('button', { name: 'Its files' }).click();
     const items = page.getByRole('dialog').getByRole('listitem');
     await items.first().waitFor();
-    expect(await items.count()).toBe(4);
+    expect(await items.count()).toBe(8);
     for (const item of await items.all()) {
       const [download] = await Promise.all([page.waitForEvent('download'), item.getByRole('link').click()]);
       const sum = createHash('sha256')

@@ -54,8 +54,12 @@ describe('journey 1: a new rigger, ten minutes', () => {
     ]);
     const files = unzipSync(new Uint8Array(readFileSync(await download.path())));
     expect(Object.keys(files).sort()).toEqual([
+      'quill.chart.csv',
+      'quill.chart.html',
+      'quill.film.usda',
       'quill.findings.sarif',
       'quill.manifest.json',
+      'quill.realtime.glb',
       'quill.rig.json',
       'quill.slip',
     ]);
